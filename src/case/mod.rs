@@ -1,0 +1,1 @@
+//! The case file, the report and the run.

@@ -1,0 +1,1 @@
+//! K at a temperature, and its forms.

@@ -1,0 +1,1 @@
+//! Q, affinities and rest.

@@ -1,0 +1,1 @@
+//! Readings to amounts and activities.

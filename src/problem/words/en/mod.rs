@@ -1,0 +1,24 @@
+//! English: for each code, what was found and allowed, and one thing to try.
+
+mod case;
+mod constant;
+mod equilibrium;
+mod library;
+mod mixture;
+mod quantity;
+mod reaction;
+
+use super::super::Code;
+
+/// The message and the hint of a code, with `{name}` where an argument goes.
+pub(super) fn template(code: Code) -> (&'static str, &'static str) {
+    match code {
+        Code::Quantity(code) => quantity::template(code),
+        Code::Reaction(code) => reaction::template(code),
+        Code::Library(code) => library::template(code),
+        Code::Constant(code) => constant::template(code),
+        Code::Mixture(code) => mixture::template(code),
+        Code::Equilibrium(code) => equilibrium::template(code),
+        Code::Case(code) => case::template(code),
+    }
+}

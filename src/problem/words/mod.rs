@@ -1,0 +1,54 @@
+//! The sentences: one catalogue for each language, filled in from a problem's arguments.
+
+mod en;
+
+use super::Problem;
+
+/// The two sentences of a problem: what was found and what is allowed, and one thing to try.
+#[derive(Debug, Clone, PartialEq, Eq)]
+pub struct Sentence {
+    /// What was found and what is allowed.
+    pub message: String,
+    /// One thing to try.
+    pub hint: String,
+}
+
+/// A catalogue of sentences.
+#[derive(Debug, Clone, Copy, PartialEq, Eq, Default)]
+pub enum Language {
+    /// English.
+    #[default]
+    En,
+}
+
+/// Says a problem in words: the catalogue's sentences with `{name}` replaced by the arguments.
+///
+/// ```
+/// use shiftgauge::problem::{Problem, QuantityCode, words};
+/// let sentence = words::say(&Problem::new(QuantityCode::Empty), words::Language::En);
+/// assert!(!sentence.message.contains('{') && sentence.hint.ends_with('.'));
+/// ```
+#[must_use]
+pub fn say(problem: &Problem, language: Language) -> Sentence {
+    let (message, hint) = match language {
+        Language::En => en::template(problem.code),
+    };
+    Sentence { message: fill(message, problem), hint: fill(hint, problem) }
+}
+
+fn fill(template: &str, problem: &Problem) -> String {
+    let mut text = String::with_capacity(template.len() + 32);
+    let mut rest = template;
+    while let Some(open) = rest.find('{') {
+        let Some(length) = rest[open..].find('}') else { break };
+        let name = &rest[open + 1..open + length];
+        text.push_str(&rest[..open]);
+        match problem.arguments.iter().find(|(key, _)| *key == name) {
+            Some((_, value)) => text.push_str(value),
+            None => text.push_str(&rest[open..=open + length]),
+        }
+        rest = &rest[open + length + 1..];
+    }
+    text.push_str(rest);
+    text
+}

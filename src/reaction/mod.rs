@@ -1,0 +1,1 @@
+//! Elements, formulas, species, equations, balancing.

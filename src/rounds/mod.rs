@@ -1,0 +1,1 @@
+//! Many readings judged by one case.

@@ -1,0 +1,9 @@
+//! All native tests in one binary; one file an idea.
+#![allow(
+    clippy::unwrap_used,
+    clippy::expect_used,
+    clippy::panic,
+    reason = "a test fails by panicking"
+)]
+
+mod rooms;
