@@ -1,1 +1,5 @@
 //! Elements, formulas, species, equations, balancing.
+
+mod phase;
+
+pub use phase::Phase;
