@@ -1,6 +1,13 @@
 //! The border to the browser: plain data in, plain data out, stateless.
+//!
+//! A user's mistake is an answer (`{ ok: false, problems }`), never an exception. Absent values
+//! cross as `null`, maps as plain objects.
 
-use wasm_bindgen::prelude::wasm_bindgen;
+use serde::Serialize;
+use serde_wasm_bindgen::Serializer;
+use wasm_bindgen::prelude::{JsValue, wasm_bindgen};
+
+use crate::case::{self, Value};
 
 /// Runs once when the module is loaded: a panic becomes a readable message in the console.
 #[wasm_bindgen(start)]
@@ -8,9 +15,47 @@ pub fn start() {
     console_error_panic_hook::set_once();
 }
 
-/// Gives the version of the program.
-#[wasm_bindgen]
-#[must_use]
-pub fn version() -> String {
-    env!("CARGO_PKG_VERSION").to_owned()
+/// Judges a case and gives its report.
+#[wasm_bindgen(unchecked_return_type = "CheckAnswer")]
+pub fn check(
+    #[wasm_bindgen(unchecked_param_type = "Case")] question: JsValue,
+    #[wasm_bindgen(unchecked_param_type = "Options")] _options: JsValue,
+) -> JsValue {
+    give(&case::check(&tree(question)))
+}
+
+/// Balances an equation.
+#[wasm_bindgen(unchecked_return_type = "BalanceAnswer")]
+pub fn balance(equation: &str) -> JsValue {
+    give(&case::balance(equation))
+}
+
+/// Gives K and all its forms at one temperature.
+#[wasm_bindgen(unchecked_return_type = "ConstantAnswer")]
+pub fn constant(reaction: &str, temperature: &str) -> JsValue {
+    give(&case::constant(reaction, temperature))
+}
+
+/// Finds species of the library.
+#[wasm_bindgen(unchecked_return_type = "SpeciesAnswer")]
+pub fn species(text: &str) -> JsValue {
+    give(&case::species(text))
+}
+
+/// Gives the versions of the program and its tables.
+#[wasm_bindgen(unchecked_return_type = "Version")]
+pub fn version() -> JsValue {
+    give(&case::version())
+}
+
+/// Plain data as a tree; what is not plain data (a function, a symbol) reads as nothing.
+fn tree(data: JsValue) -> Value {
+    serde_wasm_bindgen::from_value(data).unwrap_or(Value::Null)
+}
+
+fn give(answer: &impl Serialize) -> JsValue {
+    let serializer =
+        Serializer::new().serialize_missing_as_null(true).serialize_maps_as_objects(true);
+    // Serialising plain structs of finite numbers cannot fail; null would say so if it did.
+    answer.serialize(&serializer).unwrap_or(JsValue::NULL)
 }

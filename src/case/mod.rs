@@ -1,1 +1,33 @@
-//! The case file, the report and the run.
+//! The case file, the report, and the run from one to the other.
+//!
+//! A case is walked by hand ([`Value`] to a question, every problem at once), run through the rooms
+//! above, and answered with a [`Report`]: plain data, SI, every number finite.
+
+mod answer;
+mod calls;
+mod constant_of;
+mod node;
+mod notes;
+mod participants;
+mod question;
+mod read;
+mod read_reading;
+mod refusal;
+mod report;
+mod run;
+mod setting;
+mod shown;
+mod steps;
+mod value;
+
+pub use calls::{
+    Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
+    Version, balance, check, constant, species, version,
+};
+pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
+pub use report::{
+    BudgetRow, Conversion, CurveReport, FormReport, Limit, NoteReport, ReactionReport,
+    RecordReport, Report, RestReport, SourceReport, SpeciesReport, StepReport, TermReport,
+    ValleyReport,
+};
+pub use value::Value;

@@ -19,6 +19,10 @@ macro_rules! codes {
             }
         }
 
+        codes!(@wrap $group $variant);
+    };
+    (@wrap $group:ident Beside) => {};
+    (@wrap $group:ident $variant:ident) => {
         impl From<$group> for Code {
             fn from(code: $group) -> Code { Code::$variant(code) }
         }
@@ -57,6 +61,26 @@ codes! {
     /// Mistakes in a reading that only show when its entries are put together.
     MixtureCode in Mixture {
         Empty = "reading-empty",
+        PresenceInGas = "presence-in-gas",
+        MassFractionInGas = "mass-fraction-in-gas",
+        NoMolarMass = "no-molar-mass",
+        GaugePartialPressure = "gauge-partial-pressure",
+        PartialPressureInDry = "partial-pressure-in-dry",
+        PartialPressureNeedsTotal = "partial-pressure-needs-total",
+        SpeciesTwice = "species-twice",
+        WaterInDry = "water-in-dry",
+        SecondRemainder = "second-remainder",
+        RemainderOfAmounts = "remainder-of-amounts",
+        RemainderNegative = "remainder-negative",
+        FractionsDoNotAddUp = "fractions-do-not-add-up",
+        MixedForms = "mixed-forms",
+        DewPointRange = "dew-point-range",
+        DewPointNeedsPressure = "dew-point-needs-pressure",
+        WaterFraction = "water-fraction",
+        RemainderOfPurePhase = "remainder-of-pure-phase",
+        FractionOfPurePhase = "fraction-of-pure-phase",
+        NoCommonMeasure = "no-common-measure",
+        VacuumTooDeep = "vacuum-too-deep",
     }
 }
 
@@ -71,6 +95,71 @@ codes! {
     /// Mistakes in the shape of a case: a missing field, a wrong kind, a word that is not known.
     CaseCode in Case {
         Format = "case-format",
+        Missing = "field-missing",
+        NotAText = "not-a-text",
+        NotAList = "not-a-list",
+        NotAnObject = "not-an-object",
+        UnknownField = "unknown-field",
+        UnknownWord = "unknown-word",
+        NotYet = "not-in-this-version",
+        GaugeAtmosphere = "gauge-atmosphere",
+        WaterBesideWet = "water-beside-wet",
+        WaterNotOneWay = "water-not-one-way",
+        PhaseOfAnotherBlock = "phase-of-another-block",
+        KNotPositive = "k-not-positive",
+        KpNeedsUnit = "kp-needs-unit",
+        HeatCapacityAlone = "heat-capacity-alone",
+        PhaseUnclear = "phase-unclear",
+        ForIsAnotherReaction = "for-is-another-reaction",
+        PressureNeeded = "pressure-needed",
+        VolumeAndPressure = "volume-and-pressure",
+        VolumeNeedsGas = "volume-needs-gas",
+        FlowsInVolume = "flows-in-volume",
+        ApproachTooLarge = "approach-too-large",
+    }
+}
+
+codes! {
+    /// What is worth knowing beside a result.
+    NoteCode in Beside {
+        PhaseAssumed = "phase-assumed",
+        FormAssumed = "form-assumed",
+        NotInAnalysis = "not-in-analysis",
+        PhaseTakenAsPresent = "phase-taken-as-present",
+        ClosedByRemainder = "closed-by-remainder",
+        ClosedByLargest = "closed-by-largest",
+        DryTakenAsFree = "dry-taken-as-free",
+        WaterAdded = "water-added",
+        TakenAtBound = "taken-at-bound",
+        GaugeToAbsolute = "gauge-to-absolute",
+        StandardAtmosphere = "standard-atmosphere",
+        Balanced = "balanced",
+        Extrapolated = "extrapolated",
+        KNotCarried = "k-not-carried",
+        ApproachTaken = "approach-taken",
+        TolerancesNotCarried = "tolerances-not-carried",
+        IdealGas = "ideal-gas",
+        NoReading = "no-reading",
+        Equilibrium = "equilibrium-is-not-rate",
+    }
+}
+
+codes! {
+    /// A line of the working.
+    StepCode in Beside {
+        SpeciesGibbs = "species-gibbs",
+        ReactionGibbs = "reaction-gibbs",
+        StatedK = "stated-k",
+        K = "k",
+        Absolute = "absolute",
+        WetGas = "wet-gas",
+        Activity = "activity",
+        Quotient = "quotient",
+        OpenQuotient = "open-quotient",
+        Gibbs = "gibbs",
+        TStar = "t-star",
+        Rest = "rest",
+        RestCheck = "rest-check",
     }
 }
 

@@ -5,13 +5,15 @@
 //! which field the text came from; the caller that knows adds it with [`Problem::at`].
 
 mod code;
+mod remark;
 mod span;
 pub mod words;
 
 pub use code::{
-    CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, QuantityCode,
-    ReactionCode,
+    CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, NoteCode,
+    QuantityCode, ReactionCode, StepCode,
 };
+pub use remark::{Level, Remark, Step};
 pub use span::Span;
 
 /// One mistake in what the user gave: a code, its arguments, the field and the span in its text.

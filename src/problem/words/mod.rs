@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::Problem;
+use super::{Level, Problem, Remark, Step};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -33,17 +33,36 @@ pub fn say(problem: &Problem, language: Language) -> Sentence {
     let (message, hint) = match language {
         Language::En => en::template(problem.code),
     };
-    Sentence { message: fill(message, problem), hint: fill(hint, problem) }
+    let arguments = &problem.arguments;
+    Sentence { message: fill(message, arguments), hint: fill(hint, arguments) }
 }
 
-fn fill(template: &str, problem: &Problem) -> String {
+/// Says a note: how much it matters, and its sentence.
+#[must_use]
+pub fn note(remark: &Remark, language: Language) -> (Level, String) {
+    let (level, template) = match language {
+        Language::En => en::note(remark.code),
+    };
+    (level, fill(template, &remark.arguments))
+}
+
+/// Says a line of the working.
+#[must_use]
+pub fn step(step: &Step, language: Language) -> String {
+    let template = match language {
+        Language::En => en::step(step.code),
+    };
+    fill(template, &step.arguments)
+}
+
+fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {
     let mut text = String::with_capacity(template.len() + 32);
     let mut rest = template;
     while let Some(open) = rest.find('{') {
         let Some(length) = rest[open..].find('}') else { break };
         let name = &rest[open + 1..open + length];
         text.push_str(&rest[..open]);
-        match problem.arguments.iter().find(|(key, _)| *key == name) {
+        match arguments.iter().find(|(key, _)| *key == name) {
             Some((_, value)) => text.push_str(value),
             None => text.push_str(&rest[open..=open + length]),
         }

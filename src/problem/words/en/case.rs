@@ -6,7 +6,83 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
     match code {
         C::Format => (
             "The file says it is {found}; this version reads shiftgauge 1.",
-            "Save the case again.",
+            "Open a case that this program saved, or set format to shiftgauge 1.",
+        ),
+        C::Missing => ("Something is needed here.", "Fill this field in."),
+        C::NotAText => (
+            "A text is needed here, not {found}.",
+            "Put the value with its unit in quotes, such as 215 °C.",
+        ),
+        C::NotAList => ("A list is needed here, not {found}.", "Put the items in square brackets."),
+        C::NotAnObject => (
+            "An object with named fields is needed here, not {found}.",
+            "Put the fields in braces.",
+        ),
+        C::UnknownField => (
+            "There is no field {found} here; known: {allowed}.",
+            "Correct the name, or take the field out.",
+        ),
+        C::UnknownWord => {
+            ("{found} is not known here; allowed: {allowed}.", "Choose one of these words.")
+        }
+        C::NotYet => (
+            "This version does not do {what} yet, and does not leave it out in silence.",
+            "Take it out of the case to get an answer without it.",
+        ),
+        C::GaugeAtmosphere => {
+            ("The atmosphere is an absolute pressure.", "Write it without (g), such as 1.013 bar.")
+        }
+        C::WaterBesideWet => (
+            "The water of a wet analysis is one of its lines, so it cannot be stated apart as well.",
+            "Set the basis to dry, or take the water out here.",
+        ),
+        C::WaterNotOneWay => (
+            "The water is stated in exactly one way: fraction, per_dry or dew_point.",
+            "Keep one of them.",
+        ),
+        C::PhaseOfAnotherBlock => (
+            "A species with ({found}) stands in the block of ({allowed}).",
+            "Move the line to its block, or leave the phase out.",
+        ),
+        C::KNotPositive => (
+            "K is a positive number; {found} is not.",
+            "Check the sign, or choose log10 K or ln K.",
+        ),
+        C::KpNeedsUnit => (
+            "A Kp means something only with the pressure unit that it was made with.",
+            "Choose the unit, such as atm or bar.",
+        ),
+        C::HeatCapacityAlone => (
+            "A change of heat capacity is of use only together with the enthalpy of reaction.",
+            "Enter the enthalpy, or take the heat capacity out.",
+        ),
+        C::PhaseUnclear => (
+            "{species} could be {allowed} here.",
+            "Write the phase after the formula, such as {example}.",
+        ),
+        C::ForIsAnotherReaction => (
+            "The equation of this number is not a multiple of the reaction.",
+            "Write the reaction itself, a multiple of it or its reverse.",
+        ),
+        C::PressureNeeded => (
+            "A reaction with gases needs the pressure.",
+            "Enter it as gauge or absolute, such as 27.4 bar(g).",
+        ),
+        C::VolumeAndPressure => (
+            "The amounts in this volume make {found} bar, but the pressure is given as {allowed} bar.",
+            "Take out the volume or the pressure, or correct one of them.",
+        ),
+        C::VolumeNeedsGas => (
+            "A volume is for a gas, and there is no gas in the reading.",
+            "Enter the gas, or take the volume out.",
+        ),
+        C::FlowsInVolume => (
+            "Flows pass through; a fixed volume holds amounts.",
+            "Write amounts instead of flows, or hold the pressure.",
+        ),
+        C::ApproachTooLarge => (
+            "With this approach K would be taken at {found} K, which is no temperature.",
+            "Check the approach.",
         ),
     }
 }

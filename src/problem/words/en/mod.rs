@@ -5,8 +5,13 @@ mod constant;
 mod equilibrium;
 mod library;
 mod mixture;
+mod note;
 mod quantity;
 mod reaction;
+mod step;
+
+pub(super) use note::template as note;
+pub(super) use step::template as step;
 
 use super::super::Code;
 

@@ -1,0 +1,102 @@
+//! The temperature at which this analysis would be at equilibrium.
+
+use crate::constant::Constant;
+use crate::library::Temperature;
+use crate::numeric::{RootOutcome, root_between};
+
+/// T* and the approach.
+#[derive(Debug, Clone, Copy, PartialEq)]
+pub struct Approach {
+    /// T*, where K(T*) = Q.
+    pub t_star_k: f64,
+    /// T − T*.
+    pub approach_k: f64,
+    /// sign(ΔH°)·(T − T*): positive when the bed falls short.
+    pub shortfall_k: f64,
+    /// How many other temperatures in the range have K = Q as well; this one is the nearest.
+    pub others: usize,
+}
+
+/// Why there is no T*.
+#[derive(Debug, Clone, Copy, PartialEq)]
+pub enum NoApproach {
+    /// Q is zero, infinite or undetermined.
+    QuotientOpen,
+    /// Nothing says how K changes with temperature.
+    TemperatureUnknown,
+    /// K does not reach Q between these temperatures.
+    OutOfReach {
+        /// The lower end of the search.
+        from_k: f64,
+        /// The upper end of the search.
+        to_k: f64,
+    },
+}
+
+/// Where nothing bounds the data of a stated K, T* is looked for between these temperatures: the
+/// span of industrial reactors with room on both sides. Common practice, no source.
+const SEARCH_K: (f64, f64) = (150.0, 3000.0);
+
+/// Finds T*, where K(T*) = Q at the measured composition and pressure, nearest to the temperature.
+///
+/// ln K is sampled at 96 points evenly spaced in 1/T over the range of the data, and each change of
+/// sign is closed in on to 1e-9 K; ln K(T) of a reaction has at most a few turning points, so that
+/// two roots between neighbouring samples would lie within a per cent of each other's temperature.
+///
+/// # Errors
+/// The reason why there is none.
+pub fn approach(
+    constant: &Constant,
+    ln_q: Option<f64>,
+    temperature_k: f64,
+) -> Result<Approach, NoApproach> {
+    let ln_q = ln_q.ok_or(NoApproach::QuotientOpen)?;
+    if !constant.knows_temperature() {
+        return Err(NoApproach::TemperatureUnknown);
+    }
+    let (low, high) = constant.range_k().unwrap_or(SEARCH_K);
+    let (from_k, to_k) = (low.min(temperature_k), high.max(temperature_k));
+    // Outside the limits of a temperature there is no K and so no change of sign.
+    let distance = |t: f64| Temperature::new(t).map_or(f64::NAN, |t| constant.ln_k(t) - ln_q);
+    let mut found = roots(distance, from_k, to_k);
+    found.sort_by(|a, b| (a - temperature_k).abs().total_cmp(&(b - temperature_k).abs()));
+    let Some(&t_star_k) = found.first() else {
+        return Err(NoApproach::OutOfReach { from_k, to_k });
+    };
+    let approach_k = temperature_k - t_star_k;
+    // The sign of ΔH° between T and T* is that of the change of ln K; where ΔH° itself changes sign
+    // in between, this is the one that carries K to Q.
+    let between = Temperature::new(0.5 * (temperature_k + t_star_k)).ok();
+    let enthalpy = between.and_then(|between| constant.at(between).enthalpy_j_per_mol);
+    let exothermic = enthalpy.is_some_and(|enthalpy| enthalpy < 0.0);
+    let shortfall_k = if exothermic { -approach_k } else { approach_k };
+    Ok(Approach { t_star_k, approach_k, shortfall_k, others: found.len() - 1 })
+}
+
+fn roots(distance: impl Fn(f64) -> f64, from_k: f64, to_k: f64) -> Vec<f64> {
+    const SAMPLES: u32 = 96;
+    let (first, last) = (1.0 / from_k, 1.0 / to_k);
+    let point = |i: u32| match i {
+        0 => from_k,
+        SAMPLES => to_k,
+        _ => 1.0 / (first + (last - first) * f64::from(i) / f64::from(SAMPLES)),
+    };
+    let mut found = Vec::new();
+    let mut left = (point(0), distance(point(0)));
+    if left.1 == 0.0 {
+        found.push(left.0);
+    }
+    for i in 1..=SAMPLES {
+        let right = (point(i), distance(point(i)));
+        if right.1 == 0.0 {
+            found.push(right.0);
+        } else if left.1 != 0.0 && (left.1 > 0.0) != (right.1 > 0.0) {
+            let root = root_between(&distance, left.0, right.0, 1e-9);
+            if root.outcome == RootOutcome::Found {
+                found.push(root.x);
+            }
+        }
+        left = right;
+    }
+    found
+}

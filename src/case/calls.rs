@@ -1,0 +1,244 @@
+//! The calls of the engine: stateless, plain data in and out.
+
+use serde::Serialize;
+
+use super::constant_of::form_reports;
+use super::participants::participants;
+use super::refusal::Answer;
+use super::report::{FormReport, Report, TermReport};
+use super::run::{self, at_field, delta_nu_gas};
+use super::value::Value;
+use crate::constant::Constant;
+use crate::library::{self, Combination, Record, Temperature};
+use crate::problem::Outcome;
+use crate::quantity::{self, Measure};
+use crate::reaction::{self, parse_equation};
+
+/// The answer of `check`.
+#[derive(Debug, Clone, Serialize)]
+pub struct Checked {
+    ok: bool,
+    /// The report.
+    pub report: Report,
+}
+
+/// Judges a case; see [`super::check`].
+#[must_use]
+pub fn check(case: &Value) -> Answer<Checked> {
+    run::check(case).map(|report| Checked { ok: true, report }).into()
+}
+
+/// The answer of `balance`.
+#[derive(Debug, Clone, Serialize)]
+pub struct Balanced {
+    ok: bool,
+    /// The balanced equation.
+    pub equation: String,
+    /// Its species with their stoichiometric numbers.
+    pub terms: Vec<BalancedTerm>,
+    /// Whether the text was already balanced.
+    pub already_balanced: bool,
+}
+
+/// A species of a balanced equation.
+#[derive(Debug, Clone, Serialize)]
+pub struct BalancedTerm {
+    /// The species as written.
+    pub species: String,
+    /// Its phase, if it was written.
+    pub phase: Option<&'static str>,
+    /// Its stoichiometric number, negative on the left.
+    pub nu: f64,
+}
+
+/// Balances an equation with the smallest whole numbers.
+#[must_use]
+pub fn balance(equation: &str) -> Answer<Balanced> {
+    let balanced = reaction::balance(equation).map_err(|found| at_field(found, "equation"));
+    balanced
+        .map(|balanced| Balanced {
+            ok: true,
+            equation: balanced.text,
+            terms: balanced
+                .terms
+                .iter()
+                .map(|term| BalancedTerm {
+                    species: term.species.text(),
+                    phase: term.species.phase.map(reaction::Phase::symbol),
+                    nu: term.nu.to_f64(),
+                })
+                .collect(),
+            already_balanced: balanced.already_balanced,
+        })
+        .into()
+}
+
+/// The answer of `constant`.
+#[derive(Debug, Clone, Serialize)]
+pub struct ConstantAnswer {
+    ok: bool,
+    /// K and all its forms.
+    pub constant: ConstantReport,
+}
+
+/// K of a reaction at one temperature, from the library.
+#[derive(Debug, Clone, Serialize)]
+pub struct ConstantReport {
+    /// The equation as understood, phases written out.
+    pub equation: String,
+    /// Its species with their stoichiometric numbers.
+    pub terms: Vec<TermReport>,
+    /// The temperature.
+    pub temperature_k: f64,
+    /// ln K, p° = 1 bar.
+    pub ln_k: f64,
+    /// log10 K.
+    pub log10_k: f64,
+    /// Standard uncertainty of ln K.
+    pub u_ln_k: Option<f64>,
+    /// K, Kp in several units, Kc.
+    pub forms: Vec<FormReport>,
+    /// ΔG°.
+    pub gibbs_standard_j_per_mol: f64,
+    /// ΔH°.
+    pub enthalpy_standard_j_per_mol: Option<f64>,
+    /// ΔS°.
+    pub entropy_standard_j_per_mol_k: Option<f64>,
+    /// ΔCp°.
+    pub heat_capacity_j_per_mol_k: Option<f64>,
+    /// The range of temperature that all records cover.
+    pub range_k: Option<[f64; 2]>,
+    /// How far outside it the temperature lies, if it does.
+    pub extrapolated_by_k: Option<f64>,
+}
+
+/// Gives K of a reaction at a temperature, both as text.
+#[must_use]
+pub fn constant(equation: &str, temperature: &str) -> Answer<ConstantAnswer> {
+    constant_report(equation, temperature)
+        .map(|constant| ConstantAnswer { ok: true, constant })
+        .into()
+}
+
+fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport> {
+    let at_equation = |found| at_field(found, "reaction");
+    let parsed = parse_equation(equation).map_err(at_equation);
+    let kelvin = quantity::parse(temperature, &[Measure::Temperature])
+        .and_then(|quantity| Temperature::new(quantity.value_si))
+        .map_err(|found| at_field(found, "temperature"));
+    let (parsed, at_temperature) = match (parsed, kelvin) {
+        (Ok(parsed), Ok(kelvin)) => (parsed, kelvin),
+        (parsed, kelvin) => {
+            let mut problems = parsed.err().unwrap_or_default();
+            problems.extend(kelvin.err().unwrap_or_default());
+            return Err(problems);
+        }
+    };
+    let found = participants(&parsed, &[], true).map_err(at_equation)?;
+    let rows = found.list.iter().filter_map(|one| one.record.map(|record| (record, one.nu)));
+    let rows: Vec<(&Record, f64)> = rows.collect();
+    let constant = Constant::Library(Combination::new(&rows).map_err(at_equation)?);
+    let at = constant.at(at_temperature);
+    let species: Vec<_> = found.list.iter().map(|one| one.species.clone()).collect();
+    Ok(ConstantReport {
+        equation: parsed.text_with(&species),
+        terms: TermReport::list(&found.list),
+        temperature_k: at_temperature.kelvin(),
+        ln_k: at.ln_k,
+        log10_k: at.ln_k / std::f64::consts::LN_10,
+        u_ln_k: at.u_ln_k,
+        forms: form_reports(at.ln_k, delta_nu_gas(&found.list), at_temperature.kelvin(), None),
+        gibbs_standard_j_per_mol: at.gibbs_j_per_mol,
+        enthalpy_standard_j_per_mol: at.enthalpy_j_per_mol,
+        entropy_standard_j_per_mol_k: at.entropy_j_per_mol_k,
+        heat_capacity_j_per_mol_k: at.heat_capacity_j_per_mol_k,
+        range_k: constant.range_k().map(Into::into),
+        extrapolated_by_k: at.extrapolated_by_k,
+    })
+}
+
+/// The answer of `species`.
+#[derive(Debug, Clone, Serialize)]
+pub struct SpeciesAnswer {
+    ok: bool,
+    /// The matching species; empty where there is none.
+    pub species: Vec<SpeciesMatch>,
+    /// A formula of the library that is near what was asked for, where nothing matches.
+    pub near: Option<String>,
+}
+
+/// A species of the library.
+#[derive(Debug, Clone, Serialize)]
+pub struct SpeciesMatch {
+    /// The species with its phase, as an equation may name it.
+    pub species: String,
+    /// Its formula.
+    pub formula: &'static str,
+    /// `g`, `l`, `s` or `aq`.
+    pub phase: &'static str,
+    /// Its polymorph or isomer, where the formula and the phase do not tell.
+    pub form: Option<&'static str>,
+    /// Its names.
+    pub names: Vec<&'static str>,
+    /// Its CAS number; empty where it has none.
+    pub cas: &'static str,
+    /// The range of temperature.
+    pub range_k: [f64; 2],
+    /// The published sources.
+    pub sources: Vec<&'static str>,
+    /// ΔfH° at 298.15 K.
+    pub enthalpy_of_formation_j_per_mol: f64,
+    /// S° at 298.15 K.
+    pub entropy_j_per_mol_k: f64,
+    /// Standard uncertainty of ΔfG° at 298.15 K.
+    pub u_gibbs_j_per_mol: f64,
+}
+
+/// Finds the species of the library that a formula, a name or a CAS number stands for.
+#[must_use]
+pub fn species(text: &str) -> SpeciesAnswer {
+    let records = library::matching(text);
+    let near = if records.is_empty() { reaction::nearest(text, library::formulas()) } else { None };
+    let species = records.into_iter().map(species_match).collect();
+    SpeciesAnswer { ok: true, species, near }
+}
+
+fn species_match(record: &'static Record) -> SpeciesMatch {
+    let standard = record.properties(Temperature::standard());
+    SpeciesMatch {
+        species: record.label(),
+        formula: record.formula,
+        phase: record.phase.symbol(),
+        form: record.form,
+        names: record.names.clone(),
+        cas: record.cas,
+        range_k: record.range_k.into(),
+        sources: record.citations().collect(),
+        enthalpy_of_formation_j_per_mol: standard.enthalpy_j_per_mol,
+        entropy_j_per_mol_k: standard.entropy_j_per_mol_k,
+        u_gibbs_j_per_mol: record.u_gibbs_j_per_mol,
+    }
+}
+
+/// The answer of `version`.
+#[derive(Debug, Clone, Serialize)]
+pub struct Version {
+    ok: bool,
+    /// The program's version.
+    pub program: &'static str,
+    /// The case format that it writes.
+    pub format: &'static str,
+    /// How many species the library knows.
+    pub species: usize,
+}
+
+/// Gives the versions of the program and its tables.
+#[must_use]
+pub fn version() -> Version {
+    Version {
+        ok: true,
+        program: env!("CARGO_PKG_VERSION"),
+        format: super::read::FORMAT,
+        species: library::all().count(),
+    }
+}

@@ -1,0 +1,127 @@
+//! Where K comes from, as the case asks for it.
+
+use super::participants::Participant;
+use super::question::{KSource, KindOfK, Question, StatedK};
+use super::report::FormReport;
+use super::run::{EQUATION, at_field};
+use crate::constant::{Constant, Form, PRESSURE_UNITS, StatedConstant, all_forms, multiple_of};
+use crate::library::{Combination, Record, Temperature};
+use crate::problem::{CaseCode, Outcome, Problem};
+use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
+use std::f64::consts::LN_10;
+
+/// The constant of the reaction as written.
+///
+/// # Errors
+/// A number that belongs to another reaction; a Kx without a pressure.
+pub(super) fn constant_of(
+    question: &Question,
+    participants: &[Participant],
+    delta_nu_gas: f64,
+) -> Outcome<Constant> {
+    let factor = match &question.reaction.constant_for {
+        None => 1.0,
+        Some(other) => match multiple_of(&question.reaction.equation, other) {
+            Some(factor) => factor.to_f64(),
+            None => {
+                let problem = Problem::new(CaseCode::ForIsAnotherReaction);
+                return Err(problem.at("reactions[0].constant.for").into());
+            }
+        },
+    };
+    match &question.reaction.source {
+        KSource::Library => {
+            let rows = participants.iter().filter_map(|participant| {
+                participant.record.map(|record| (record, participant.nu))
+            });
+            let rows: Vec<(&Record, f64)> = rows.collect();
+            let combination = Combination::new(&rows);
+            Ok(Constant::Library(combination.map_err(|found| at_field(found, EQUATION))?))
+        }
+        KSource::Value(stated) => {
+            // The number belongs to the other equation, whose Δν is ours over the factor.
+            let stated = stated_constant(question, stated, delta_nu_gas / factor)?;
+            Ok(Constant::Stated(StatedConstant {
+                ln_k: stated.ln_k * factor,
+                u_ln_k: stated.u_ln_k.map(|u| u * factor.abs()),
+                at_k: stated.at_k,
+                enthalpy_j_per_mol: stated.enthalpy_j_per_mol.map(|h| h * factor),
+                heat_capacity_j_per_mol_k: stated.heat_capacity_j_per_mol_k.map(|c| c * factor),
+            }))
+        }
+    }
+}
+
+fn stated_constant(
+    question: &Question,
+    stated: &StatedK,
+    delta_nu_gas: f64,
+) -> Outcome<StatedConstant> {
+    let at_k = stated.at.as_ref().map(|at| at.value_si);
+    let temperature_k = at_k.unwrap_or(question.temperature.value_si);
+    let value = stated.value.value_si;
+    let u = stated.value.standard_uncertainty_si;
+    let form = match stated.kind {
+        KindOfK::Kp => {
+            let symbol = stated.pressure_unit.unwrap_or("bar");
+            let unit = PRESSURE_UNITS.into_iter().find(|unit| unit.symbol == symbol);
+            unit.map_or(Form::K, Form::Kp)
+        }
+        KindOfK::Kc => Form::Kc,
+        KindOfK::Kx => match question.pressure_pa {
+            Some(pressure_pa) => Form::Kx { pressure_pa },
+            None => return Err(Problem::new(CaseCode::PressureNeeded).at("pressure").into()),
+        },
+        _ => Form::K,
+    };
+    let rt = GAS_CONSTANT_J_PER_MOL_K * temperature_k;
+    let (ln, u_ln) = match stated.kind {
+        KindOfK::K | KindOfK::Kp | KindOfK::Kc | KindOfK::Kx => {
+            (libm::log(value), u.map(|u| u / value))
+        }
+        KindOfK::Log10K => (value * LN_10, u.map(|u| u * LN_10)),
+        KindOfK::PK => (-value * LN_10, u.map(|u| u * LN_10)),
+        KindOfK::LnK => (value, u),
+        KindOfK::Gibbs => (-value / rt, u.map(|u| u / rt)),
+    };
+    Ok(StatedConstant {
+        ln_k: ln - form.ln_factor(delta_nu_gas, temperature_k),
+        u_ln_k: u_ln,
+        at_k,
+        enthalpy_j_per_mol: stated.enthalpy.as_ref().map(|enthalpy| enthalpy.value_si),
+        heat_capacity_j_per_mol_k: stated.heat_capacity.as_ref().map(|heat| heat.value_si),
+    })
+}
+
+/// The temperature at which K is taken: T* = T − approach.
+///
+/// # Errors
+/// A temperature outside the limits, before or after the approach.
+pub(super) fn k_temperature(question: &Question) -> Outcome<Temperature> {
+    let temperature_k = question.temperature.value_si;
+    let stated = Temperature::new(temperature_k).map_err(|found| at_field(found, "temperature"))?;
+    let Some(approach_k) = question.reaction.approach_k else { return Ok(stated) };
+    Temperature::new(temperature_k - approach_k).map_err(|_| {
+        let found = format!("{:.2}", temperature_k - approach_k);
+        let problem = Problem::new(CaseCode::ApproachTooLarge).with("found", found);
+        problem.at("reactions[0].constant.approach").into()
+    })
+}
+
+/// All forms of K as the border carries them.
+pub(super) fn form_reports(
+    ln_k: f64,
+    delta_nu_gas: f64,
+    temperature_k: f64,
+    pressure_pa: Option<f64>,
+) -> Vec<FormReport> {
+    let forms = all_forms(ln_k, delta_nu_gas, temperature_k, pressure_pa).into_iter();
+    forms
+        .map(|form| FormReport {
+            name: form.name,
+            unit: form.unit,
+            log10: form.log10,
+            value: form.value,
+        })
+        .collect()
+}

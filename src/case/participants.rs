@@ -1,0 +1,151 @@
+//! Who takes part: the species of the reaction with their phases, then the inerts of the reading.
+
+use super::question::Question;
+use crate::library::{self, Record};
+use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
+use crate::reaction::{Equation, Phase, Species, Term, nearest};
+
+/// One species that takes part.
+#[derive(Debug, Clone)]
+pub(super) struct Participant {
+    pub species: Species,
+    pub phase: Phase,
+    /// Its stoichiometric number; zero for an inert.
+    pub nu: f64,
+    /// What the library knows of it, where K comes from there.
+    pub record: Option<&'static Record>,
+}
+
+/// The participants of a reaction, and what had to be assumed.
+#[derive(Debug, Clone)]
+pub(super) struct Participants {
+    pub list: Vec<Participant>,
+    pub remarks: Vec<Remark>,
+}
+
+/// Which species a reading names in which phase; empty where there is no reading.
+pub(super) fn named_in(question: &Question) -> Vec<Species> {
+    let gas = question.gas.iter().flat_map(|gas| &gas.entries).map(|entry| &entry.species);
+    let pure = question.pure.iter().map(|pure| &pure.entry.species);
+    gas.chain(pure).cloned().collect()
+}
+
+/// Gives every species of the equation its phase and, if `from_library`, its record.
+///
+/// A phase that is not written is the one under which the reading names the species, else the only
+/// one that the library has; where several are left, gas if all other species can be gases too.
+///
+/// # Errors
+/// Every species that the library does not have, and every phase that stays unclear, each with its
+/// place in the equation.
+pub(super) fn participants(
+    equation: &Equation,
+    reading: &[Species],
+    from_library: bool,
+) -> Outcome<Participants> {
+    let mut list = Vec::with_capacity(equation.terms.len());
+    let (mut remarks, mut problems) = (Vec::new(), Vec::new());
+    let all_can_be_gas = equation.terms.iter().all(|term| can_be_gas(term, reading));
+    for term in &equation.terms {
+        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas) {
+            Ok(found) => found,
+            Err(problem) => {
+                problems.push(problem.span(term.span));
+                continue;
+            }
+        };
+        let species = term.species.in_phase(phase);
+        if assumed {
+            remarks.push(Remark::new(NoteCode::PhaseAssumed).with("species", species.text()));
+        }
+        let record = match record_of(&species, from_library, &mut remarks) {
+            Ok(record) => record,
+            Err(problem) => {
+                problems.push(problem.span(term.span));
+                continue;
+            }
+        };
+        list.push(Participant { species, phase, nu: term.nu.to_f64(), record });
+    }
+    if problems.is_empty() { Ok(Participants { list, remarks }) } else { Err(problems) }
+}
+
+/// The phases in which the library has this substance, or the reading names it.
+fn phases_known(term: &Term, reading: &[Species]) -> Vec<Phase> {
+    let named = reading.iter().filter(|species| species.same_substance(&term.species));
+    let mut phases: Vec<Phase> = named.filter_map(|species| species.phase).collect();
+    if phases.is_empty() {
+        let records = library::find(&term.species.formula_text(), None, term.species.form());
+        phases.extend(records.iter().map(|record| record.phase));
+    }
+    phases.sort_unstable();
+    phases.dedup();
+    phases
+}
+
+fn can_be_gas(term: &Term, reading: &[Species]) -> bool {
+    match term.species.phase {
+        Some(phase) => phase == Phase::Gas,
+        None => phases_known(term, reading).contains(&Phase::Gas),
+    }
+}
+
+/// The phase of a term, and whether it had to be assumed.
+fn phase_of(term: &Term, reading: &[Species], all_gas: bool) -> Result<(Phase, bool), Problem> {
+    if let Some(phase) = term.species.phase {
+        return Ok((phase, false));
+    }
+    match phases_known(term, reading)[..] {
+        // A species that nobody knows: a gas if it is one of the others' kind; where K comes from
+        // the library, its absence there is reported next.
+        [] => Ok((Phase::Gas, true)),
+        [only] => Ok((only, false)),
+        ref several if all_gas && several.contains(&Phase::Gas) => Ok((Phase::Gas, true)),
+        ref several => {
+            let written = |phase: &Phase| term.species.in_phase(*phase).text();
+            let allowed: Vec<String> = several.iter().map(written).collect();
+            let example = allowed[0].clone();
+            Err(Problem::new(CaseCode::PhaseUnclear)
+                .with("species", term.species.formula_text())
+                .with("allowed", allowed.join(" or "))
+                .with("example", example))
+        }
+    }
+}
+
+fn record_of(
+    species: &Species,
+    from_library: bool,
+    remarks: &mut Vec<Remark>,
+) -> Result<Option<&'static Record>, Problem> {
+    if !from_library {
+        return Ok(None);
+    }
+    let records = library::find(&species.formula_text(), species.phase, species.form());
+    match records[..] {
+        [] => Err(unknown(species)),
+        [only] => Ok(Some(only)),
+        [first, ..] => {
+            let remark = Remark::new(NoteCode::FormAssumed)
+                .with("species", species.text())
+                .with("form", first.form.unwrap_or(first.names[0]));
+            remarks.push(remark);
+            Ok(Some(first))
+        }
+    }
+}
+
+/// The problem of a species that the library does not have, with what it has instead.
+fn unknown(species: &Species) -> Problem {
+    let formula = species.formula_text();
+    let other_phases = library::find(&formula, None, None);
+    let try_this = if let Some(other) = other_phases.first() {
+        format!("{}({})", other.formula, other.phase.symbol())
+    } else {
+        match nearest(&formula, library::formulas()) {
+            Some(near) => near,
+            None => "a species of the library".to_owned(),
+        }
+    };
+    Problem::new(LibraryCode::Unknown).with("found", species.text()).with("near", try_this)
+}

@@ -1,0 +1,267 @@
+//! The case, walked by hand: every mistake in it is found in one go.
+
+use super::node::{Node, Reader};
+use super::question::{Held, KSource, KindOfK, PureEntry, Question, ReactionQuestion, StatedK};
+use super::read_reading::{read_gas, read_pure};
+use super::value::Value;
+use crate::mixture::absolute_pressure_pa;
+use crate::problem::{CaseCode, Outcome, Problem};
+use crate::quantity::{Measure, PressureReference, Quantity};
+use crate::reaction::{Equation, Phase, parse_equation};
+
+/// The first words of every case of this format.
+const FORMAT: &str = "shiftgauge 1";
+
+/// The standard atmosphere, the default for gauge readings, in pascal (exact).
+pub(super) const STANDARD_ATMOSPHERE_PA: f64 = 101_325.0;
+
+const CASE_FIELDS: [&str; 14] = [
+    "format",
+    "title",
+    "note",
+    "reactions",
+    "temperature",
+    "pressure",
+    "atmosphere",
+    "hold",
+    "heat",
+    "volume",
+    "band",
+    "reading",
+    "feed",
+    "models",
+];
+
+/// Reads a case.
+///
+/// # Errors
+/// Every problem of its shape, words, numbers, units and formulas at once.
+pub(super) fn read(case: &Value) -> Outcome<Question> {
+    let root = Node::root(case);
+    let mut reader = Reader::default();
+    if !reader.object(&root, &CASE_FIELDS) {
+        return Err(root.problem(CaseCode::NotAnObject).into());
+    }
+    read_format(&mut reader, &root.field("format"));
+    for name in ["title", "note"] {
+        reader.text(&root.field(name));
+    }
+    refuse_what_is_not_done(&mut reader, &root);
+    let reaction = read_reaction(&mut reader, &root.field("reactions"));
+    let temperature = reader.needed_quantity(&root.field("temperature"), &[Measure::Temperature]);
+    let atmosphere = read_atmosphere(&mut reader, &root.field("atmosphere"));
+    let atmosphere_pa = atmosphere.unwrap_or(STANDARD_ATMOSPHERE_PA);
+    let pressure_node = root.field("pressure");
+    let pressure = reader.quantity(&pressure_node, &[Measure::Pressure]);
+    let pressure_pa = pressure.as_ref().and_then(|pressure| {
+        let absolute = absolute_pressure_pa(pressure, atmosphere_pa);
+        reader.keep(&pressure_node, absolute.map_err(Vec::from))
+    });
+    let words = [("pressure", Held::Pressure), ("volume", Held::Volume)];
+    let hold = reader.choice(&root.field("hold"), &words);
+    let volume = reader.quantity(&root.field("volume"), &[Measure::Volume]);
+    let reading = root.field("reading");
+    let (gas, pure) = read_blocks(&mut reader, &reading, atmosphere_pa);
+    let (Some(reaction), Some(temperature), Some(hold)) = (reaction, temperature, hold) else {
+        return Err(reader.problems);
+    };
+    if !reader.problems.is_empty() {
+        return Err(reader.problems);
+    }
+    let volume_m3 = volume.map(|volume| volume.value_si);
+    let tolerances = text_anywhere(case, "±") || text_anywhere(case, "+/-");
+    let atmosphere_stated = atmosphere.is_some();
+    Ok(Question {
+        reaction,
+        temperature,
+        pressure,
+        pressure_pa,
+        atmosphere_pa,
+        atmosphere_stated,
+        hold,
+        volume_m3,
+        gas,
+        pure,
+        tolerances,
+    })
+}
+
+fn text_anywhere(value: &Value, piece: &str) -> bool {
+    match value {
+        Value::Text(text) => text.contains(piece),
+        Value::List(items) => items.iter().any(|item| text_anywhere(item, piece)),
+        Value::Object(fields) => fields
+            .iter()
+            .any(|(name, value)| name != "title" && name != "note" && text_anywhere(value, piece)),
+        _ => false,
+    }
+}
+
+fn read_format(reader: &mut Reader, node: &Node) {
+    match reader.needed_text(node) {
+        Some(FORMAT) | None => {}
+        Some(other) => {
+            let problem = Problem::new(CaseCode::Format).with("found", other);
+            reader.problems.push(problem.at(&node.path));
+        }
+    }
+}
+
+/// What the format has and this version does not do yet: each is refused, none is ignored.
+fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
+    let heat = root.field("heat");
+    let words = [("isothermal", false), ("adiabatic", true)];
+    if reader.choice(&heat, &words) == Some(true) {
+        reader.not_yet(&heat, "an adiabatic rest");
+    }
+    let feed = root.field("feed");
+    if !feed.is_null() {
+        reader.not_yet(&feed, "a feed reading");
+    }
+    reader.quantity(&root.field("band"), &[Measure::TemperatureDifference]);
+    let models = root.field("models");
+    if reader.object(&models, &["gas", "liquid", "solution"]) {
+        let gas = models.field("gas");
+        let words = [("ideal", false), ("SRK", true), ("PR", true)];
+        if reader.choice(&gas, &words) == Some(true) {
+            reader.not_yet(&gas, "a real gas");
+        }
+        reader.choice(&models.field("liquid"), &[("ideal", ())]);
+        let solution = models.field("solution");
+        let words = [("ideal", false), ("Davies", true), ("Debye-Hückel", true)];
+        if reader.choice(&solution, &words) == Some(true) {
+            reader.not_yet(&solution, "activity coefficients in solution");
+        }
+    }
+}
+
+fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<f64> {
+    let atmosphere: Quantity = reader.quantity(node, &[Measure::Pressure])?;
+    if atmosphere.pressure_reference == PressureReference::Gauge {
+        reader.problems.push(node.problem(CaseCode::GaugeAtmosphere));
+        return None;
+    }
+    Some(atmosphere.value_si)
+}
+
+type Blocks = (Option<crate::mixture::GasReading>, Vec<PureEntry>);
+
+fn read_blocks(reader: &mut Reader, reading: &Node, atmosphere_pa: f64) -> Blocks {
+    if !reader.object(reading, &["gas", "liquid", "solution", "solids"]) {
+        return (None, Vec::new());
+    }
+    let gas = read_gas(reader, &reading.field("gas"), atmosphere_pa);
+    let mut pure = read_pure(reader, &reading.field("solids"), Phase::Solid);
+    let liquid = reading.field("liquid");
+    let liquids = read_pure(reader, &liquid, Phase::Liquid);
+    if liquids.len() > 1 {
+        reader.not_yet(&liquid, "a liquid mixture");
+    }
+    pure.extend(liquids);
+    let solution = reading.field("solution");
+    if !solution.is_null() {
+        reader.not_yet(&solution, "a reading of a solution");
+    }
+    (gas, pure)
+}
+
+fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
+    if list.is_null() {
+        reader.problems.push(list.problem(CaseCode::Missing));
+        return None;
+    }
+    let items = reader.items(list);
+    let Some(first) = items.first() else {
+        if matches!(list.value, Value::List(_)) {
+            reader.problems.push(list.problem(CaseCode::Missing));
+        }
+        return None;
+    };
+    if let Some(second) = items.get(1) {
+        reader.not_yet(second, "more than one reaction");
+    }
+    if !reader.object(first, &["equation", "constant"]) {
+        if first.is_null() {
+            reader.problems.push(first.problem(CaseCode::Missing));
+        }
+        return None;
+    }
+    let equation = read_equation(reader, &first.field("equation"), true);
+    let constant = first.field("constant");
+    reader.object(&constant, &CONSTANT_FIELDS);
+    let from = constant.field("from");
+    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3)];
+    let source = match reader.choice(&from, &words)? {
+        0 => Some(KSource::Library),
+        1 => read_stated(reader, &constant).map(KSource::Value),
+        2 => {
+            reader.not_yet(&from, "K from points");
+            None
+        }
+        _ => {
+            reader.not_yet(&from, "K from a formula");
+            None
+        }
+    };
+    let constant_for = read_equation(reader, &constant.field("for"), false);
+    let approach = constant.field("approach");
+    let approach = reader.quantity(&approach, &[Measure::TemperatureDifference]);
+    let approach_k = approach.map(|approach| approach.value_si);
+    Some(ReactionQuestion { equation: equation?, source: source?, constant_for, approach_k })
+}
+
+const CONSTANT_FIELDS: [&str; 11] = [
+    "from",
+    "value",
+    "kind",
+    "pressure_unit",
+    "at",
+    "enthalpy",
+    "heat_capacity",
+    "for",
+    "approach",
+    "points",
+    "terms",
+];
+
+fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Equation> {
+    let text = if needed { reader.needed_text(node) } else { reader.text(node) }?;
+    reader.keep(node, parse_equation(text))
+}
+
+fn read_stated(reader: &mut Reader, node: &Node) -> Option<StatedK> {
+    let words = [
+        ("K", KindOfK::K),
+        ("Kp", KindOfK::Kp),
+        ("Kc", KindOfK::Kc),
+        ("Kx", KindOfK::Kx),
+        ("log10 K", KindOfK::Log10K),
+        ("ln K", KindOfK::LnK),
+        ("pK", KindOfK::PK),
+        ("gibbs", KindOfK::Gibbs),
+    ];
+    let kind = reader.choice(&node.field("kind"), &words);
+    let measure = if kind == Some(KindOfK::Gibbs) { Measure::MolarEnergy } else { Measure::Number };
+    let value_node = node.field("value");
+    let value = reader.needed_quantity(&value_node, &[measure]);
+    let is_k = matches!(kind, Some(KindOfK::K | KindOfK::Kp | KindOfK::Kc | KindOfK::Kx));
+    if let Some(value) = value.as_ref().filter(|value| is_k && value.value_si <= 0.0) {
+        let problem = Problem::new(CaseCode::KNotPositive);
+        let found = format!("{}", value.value_si);
+        reader.problems.push(problem.with("found", found).at(&value_node.path));
+    }
+    let unit_node = node.field("pressure_unit");
+    let units = crate::constant::PRESSURE_UNITS.map(|unit| (unit.symbol, unit.symbol));
+    let pressure_unit = if unit_node.is_null() { None } else { reader.choice(&unit_node, &units) };
+    if kind == Some(KindOfK::Kp) && unit_node.is_null() {
+        reader.problems.push(unit_node.problem(CaseCode::KpNeedsUnit));
+    }
+    let at = reader.quantity(&node.field("at"), &[Measure::Temperature]);
+    let enthalpy = reader.quantity(&node.field("enthalpy"), &[Measure::MolarEnergy]);
+    let heat_node = node.field("heat_capacity");
+    let heat_capacity = reader.quantity(&heat_node, &[Measure::MolarHeatCapacity]);
+    if enthalpy.is_none() && heat_capacity.is_some() {
+        reader.problems.push(heat_node.problem(CaseCode::HeatCapacityAlone));
+    }
+    Some(StatedK { value: value?, kind: kind?, pressure_unit, at, enthalpy, heat_capacity })
+}

@@ -1,0 +1,153 @@
+//! The blocks of a reading, read into entries.
+
+use super::node::{Node, Reader};
+use super::question::PureEntry;
+use crate::mixture::{Basis, Entry, GasReading, Stated, Water, absolute_pressure_pa};
+use crate::problem::{CaseCode, Problem};
+use crate::quantity::{self, Measure};
+use crate::reaction::{Phase, Species, parse_species};
+
+const GAS_MEASURES: [Measure; 6] = [
+    Measure::Fraction,
+    Measure::Number,
+    Measure::Pressure,
+    Measure::Amount,
+    Measure::AmountRate,
+    Measure::MassPerAmount,
+];
+
+const PURE_MEASURES: [Measure; 4] =
+    [Measure::Amount, Measure::AmountRate, Measure::Mass, Measure::MassRate];
+
+/// Reads the gas block; nothing if it is null or has a problem (which is then filed).
+pub(super) fn read_gas(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> Option<GasReading> {
+    if !reader.object(node, &["basis", "water", "entries"]) {
+        return None;
+    }
+    let water_node = node.field("water");
+    let dry = reader.choice(&node.field("basis"), &[("wet", false), ("dry", true)]);
+    let water = read_water(reader, &water_node, atmosphere_pa);
+    if dry == Some(false) && !water_node.is_null() {
+        reader.problems.push(water_node.problem(CaseCode::WaterBesideWet));
+    }
+    let mut entries = Vec::new();
+    for item in reader.items(&node.field("entries")) {
+        let entry =
+            read_entry(reader, &item, Phase::Gas, |reader, value| read_gas_value(reader, value));
+        entries.extend(entry);
+    }
+    let basis = if dry? { Basis::Dry(water?) } else { Basis::Wet };
+    Some(GasReading { basis, entries })
+}
+
+fn read_water(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> Option<Water> {
+    if node.is_null() {
+        return Some(Water::None);
+    }
+    if let super::value::Value::Text(text) = node.value {
+        if text == "from_feed" {
+            reader.not_yet(node, "water from the feed");
+        } else {
+            let allowed = "fraction, per_dry, dew_point (an object) or from_feed";
+            let problem = Problem::new(CaseCode::UnknownWord).with("found", text.as_str());
+            reader.problems.push(problem.with("allowed", allowed).at(&node.path));
+        }
+        return None;
+    }
+    if !reader.object(node, &["fraction", "per_dry", "dew_point", "pressure"]) {
+        return None;
+    }
+    let (fraction, per_dry) = (node.field("fraction"), node.field("per_dry"));
+    let dew_point = node.field("dew_point");
+    let stated = [&fraction, &per_dry, &dew_point];
+    if stated.iter().filter(|node| !node.is_null()).count() != 1 {
+        reader.problems.push(node.problem(CaseCode::WaterNotOneWay));
+        return None;
+    }
+    let numbers = [Measure::Fraction, Measure::Number];
+    if !fraction.is_null() {
+        return reader.quantity(&fraction, &numbers[..1]).map(Water::Fraction);
+    }
+    if !per_dry.is_null() {
+        return reader.quantity(&per_dry, &numbers[1..]).map(Water::PerDry);
+    }
+    let temperature = reader.quantity(&dew_point, &[Measure::Temperature]);
+    let own = node.field("pressure");
+    let stated = reader.quantity(&own, &[Measure::Pressure]);
+    let pressure_pa = match &stated {
+        Some(stated) => {
+            let absolute = absolute_pressure_pa(stated, atmosphere_pa).map_err(Vec::from);
+            Some(reader.keep(&own, absolute)?)
+        }
+        None => None,
+    };
+    Some(Water::DewPoint { temperature: temperature?, pressure_pa })
+}
+
+fn read_gas_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
+    match reader.needed_text(node)? {
+        "remainder" => Some(Stated::Remainder),
+        "missing" => {
+            reader.not_yet(node, "an entry found from K");
+            None
+        }
+        text => reader.keep(node, quantity::parse(text, &GAS_MEASURES)).map(Stated::Quantity),
+    }
+}
+
+/// Reads the solids or the liquid: an object with `entries`.
+pub(super) fn read_pure(reader: &mut Reader, node: &Node, phase: Phase) -> Vec<PureEntry> {
+    if !reader.object(node, &["entries"]) {
+        return Vec::new();
+    }
+    let mut entries = Vec::new();
+    for item in reader.items(&node.field("entries")) {
+        let entry = read_entry(reader, &item, phase, read_pure_value);
+        entries.extend(entry.map(|entry| PureEntry { phase, entry }));
+    }
+    entries
+}
+
+fn read_pure_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
+    match reader.needed_text(node)? {
+        "present" => Some(Stated::Present),
+        "absent" => Some(Stated::Absent),
+        "remainder" => Some(Stated::Remainder),
+        text => reader.keep(node, quantity::parse(text, &PURE_MEASURES)).map(Stated::Quantity),
+    }
+}
+
+fn read_entry(
+    reader: &mut Reader,
+    item: &Node,
+    phase: Phase,
+    read_value: impl Fn(&mut Reader, &Node) -> Option<Stated>,
+) -> Option<Entry> {
+    if !reader.object(item, &["species", "value"]) {
+        if item.is_null() {
+            reader.problems.push(item.problem(CaseCode::Missing));
+        }
+        return None;
+    }
+    let name = item.field("species");
+    let species = reader.needed_text(&name);
+    let species = species.and_then(|text| reader.keep(&name, parse_species(text)));
+    let species = species.and_then(|species| in_block(reader, &name, species, phase));
+    let value = item.field("value");
+    let stated = read_value(reader, &value);
+    Some(Entry { species: species?, stated: stated?, field: value.path })
+}
+
+/// A species of a block carries the block's phase; another phase written on it is a mistake.
+fn in_block(reader: &mut Reader, node: &Node, species: Species, phase: Phase) -> Option<Species> {
+    match species.phase {
+        Some(written) if written != phase => {
+            let problem = Problem::new(CaseCode::PhaseOfAnotherBlock)
+                .with("found", written.symbol())
+                .with("allowed", phase.symbol());
+            reader.problems.push(problem.at(&node.path));
+            None
+        }
+        _ => Some(species.in_phase(phase)),
+    }
+}

@@ -1,0 +1,203 @@
+//! The working: formula, numbers put in, result, line by line.
+
+use super::answer::{basis_name, ln_q, quotient_word, reacting};
+use super::report::StepReport;
+use super::run::{Findings, ReadingFindings};
+use super::shown;
+use crate::constant::Constant;
+use crate::equilibrium::{Hold, Quotient};
+use crate::problem::words::{Language, step};
+use crate::problem::{Step, StepCode};
+use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference, STANDARD_PRESSURE_PA};
+use crate::quantity::{show_like, show_number};
+use crate::reaction::Phase;
+
+/// All lines, in the order in which one would work it out by hand.
+pub(super) fn steps(found: &Findings) -> Vec<StepReport> {
+    let mut lines = constant_lines(found);
+    if let Some(reading) = &found.reading {
+        lines.extend(reading_lines(found, reading));
+        lines.extend(quotient_lines(found, reading));
+        lines.extend(rest_lines(found, reading));
+    }
+    let say =
+        |(about, line): &(&'static str, Step)| StepReport { text: step(line, Language::En), about };
+    lines.iter().map(say).collect()
+}
+
+type Line = (&'static str, Step);
+
+fn kelvin(found: &Findings) -> String {
+    show_number(found.k_temperature.kelvin(), 7)
+}
+
+fn constant_lines(found: &Findings) -> Vec<Line> {
+    let at = &found.at;
+    let mut lines = Vec::new();
+    match &found.constant {
+        Constant::Library(combination) => {
+            for (record, _) in combination.terms() {
+                let of = record.properties(found.k_temperature);
+                lines.push((
+                    "k",
+                    Step::new(StepCode::SpeciesGibbs)
+                        .with("species", record.label())
+                        .with("enthalpy", shown::kilojoule(of.enthalpy_j_per_mol))
+                        .with("entropy", shown::number(of.entropy_j_per_mol_k))
+                        .with("gibbs", shown::kilojoule(of.gibbs_j_per_mol))
+                        .with("temperature_k", kelvin(found)),
+                ));
+            }
+            let optional = |value: Option<f64>| value.unwrap_or(0.0);
+            lines.push((
+                "k",
+                Step::new(StepCode::ReactionGibbs)
+                    .with("gibbs", shown::kilojoule(at.gibbs_j_per_mol))
+                    .with("enthalpy", shown::kilojoule(optional(at.enthalpy_j_per_mol)))
+                    .with("entropy", shown::number(optional(at.entropy_j_per_mol_k)))
+                    .with("temperature_k", kelvin(found)),
+            ));
+        }
+        Constant::Stated(_) => {
+            let stated = match &found.question.reaction.source {
+                super::question::KSource::Value(stated) => show_like(&stated.value),
+                super::question::KSource::Library => String::new(),
+            };
+            lines.push((
+                "k",
+                Step::new(StepCode::StatedK)
+                    .with("stated", stated)
+                    .with("ln_k", shown::number(at.ln_k))
+                    .with("temperature_k", kelvin(found)),
+            ));
+        }
+    }
+    lines.push((
+        "k",
+        Step::new(StepCode::K)
+            .with("ln_k", shown::number(at.ln_k))
+            .with("k", shown::exponential(at.ln_k))
+            .with("temperature_k", kelvin(found)),
+    ));
+    lines
+}
+
+fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
+    let mut lines = Vec::new();
+    let question = &found.question;
+    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa) {
+        if typed.pressure_reference == PressureReference::Gauge {
+            let line = Step::new(StepCode::Absolute)
+                .with("gauge", show_like(typed))
+                .with("atmosphere", shown::pressure(question.atmosphere_pa))
+                .with("absolute", shown::pressure(absolute_pa));
+            lines.push(("q", line));
+        }
+    }
+    if let Some(water) = reading.setting.added_water_fraction {
+        lines.push(("q", Step::new(StepCode::WetGas).with("water", show_number(water, 5))));
+    }
+    let Some(pressure_pa) = reading.setting.pressure_pa else { return lines };
+    let rows = found.participants.iter().zip(&reading.amounts_mol);
+    for (participant, amount) in rows {
+        if participant.nu == 0.0 || participant.phase != Phase::Gas || *amount <= 0.0 {
+            continue;
+        }
+        let fraction = amount / reading.setting.gas_mol;
+        let line = Step::new(StepCode::Activity)
+            .with("species", participant.species.text())
+            .with("fraction", show_number(fraction, 5))
+            .with("pressure_bar", show_number(pressure_pa / 1e5, 6))
+            .with("activity", show_number(fraction * pressure_pa / STANDARD_PRESSURE_PA, 5));
+        lines.push(("q", line));
+    }
+    lines
+}
+
+/// Q as a product: `a(CO2) a(H2) / (a(CO) a(H2O))`; pure phases are left out, their a is 1.
+fn quotient_formula(found: &Findings) -> String {
+    let side = |sign: f64| -> Vec<String> {
+        reacting(found)
+            .filter(|participant| participant.nu * sign > 0.0)
+            .filter(|participant| matches!(participant.phase, Phase::Gas | Phase::Aqueous))
+            .map(|participant| {
+                let power = participant.nu.abs();
+                let species = participant.species.formula_text();
+                if power == 1.0 { format!("a({species})") } else { format!("a({species})^{power}") }
+            })
+            .collect()
+    };
+    let (above, below) = (side(1.0), side(-1.0));
+    let product = |factors: &[String]| {
+        if factors.is_empty() { "1".to_owned() } else { factors.join(" × ") }
+    };
+    match below.len() {
+        0 => product(&above),
+        1 => format!("{} / {}", product(&above), product(&below)),
+        _ => format!("{} / ({})", product(&above), product(&below)),
+    }
+}
+
+fn quotient_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
+    let formula = quotient_formula(found);
+    let Quotient::Finite(ln_q) = reading.quotient else {
+        let line = Step::new(StepCode::OpenQuotient)
+            .with("formula", formula)
+            .with("q", quotient_word(reading.quotient));
+        return vec![("q", line)];
+    };
+    let rt = GAS_CONSTANT_J_PER_MOL_K * found.question.temperature.value_si;
+    let ln_k = found.at.ln_k;
+    let mut lines = vec![
+        (
+            "q",
+            Step::new(StepCode::Quotient)
+                .with("formula", formula)
+                .with("q", shown::exponential(ln_q))
+                .with("ln_q", shown::number(ln_q)),
+        ),
+        (
+            "gibbs",
+            Step::new(StepCode::Gibbs)
+                .with("rt", shown::kilojoule(rt))
+                .with("ln_q", shown::number(ln_q))
+                .with("ln_k", shown::number(ln_k))
+                .with("gibbs", shown::kilojoule(rt * (ln_q - ln_k))),
+        ),
+    ];
+    if let Ok(approach) = reading.approach {
+        lines.push((
+            "t_star",
+            Step::new(StepCode::TStar)
+                .with("t_star", shown::temperature(approach.t_star_k))
+                .with("approach", shown::kelvins(approach.approach_k)),
+        ));
+    }
+    lines
+}
+
+fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
+    let rest = &reading.rest;
+    let held = match reading.setting.hold {
+        Hold::Pressure { .. } => "temperature and pressure",
+        Hold::Volume { .. } => "temperature and volume",
+    };
+    let mut lines = vec![(
+        "rest",
+        Step::new(StepCode::Rest)
+            .with("held", held)
+            .with("extent", shown::number(rest.extent_mol))
+            .with("basis", basis_name(reading.setting.basis))
+            .with("outcome", rest.outcome.as_str())
+            .with("iterations", rest.iterations.to_string()),
+    )];
+    let state = reading.state(found.question.temperature.value_si, &rest.amounts_mol);
+    let at_rest = crate::equilibrium::quotient(&reading.system, &state);
+    if let Some(ln_q) = at_rest.ok().and_then(ln_q) {
+        let line = Step::new(StepCode::RestCheck)
+            .with("ln_q", show_number(ln_q, 10))
+            .with("ln_k", show_number(found.at.ln_k, 10));
+        lines.push(("rest", line));
+    }
+    lines
+}

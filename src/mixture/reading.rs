@@ -1,0 +1,64 @@
+//! What a reading states, one block a phase, still as the instruments give it.
+
+use crate::quantity::Quantity;
+use crate::reaction::Species;
+
+/// One line of a block: a species and what is stated of it.
+#[derive(Debug, Clone)]
+pub struct Entry {
+    /// The species, its phase left out or that of the block.
+    pub species: Species,
+    /// What is stated.
+    pub stated: Stated,
+    /// The path of the entry's value, for problems.
+    pub field: String,
+}
+
+/// What is stated of a species.
+#[derive(Debug, Clone)]
+pub enum Stated {
+    /// A number with its unit.
+    Quantity(Quantity),
+    /// What is missing from one.
+    Remainder,
+    /// A pure phase that is there, in ample amount.
+    Present,
+    /// A pure phase that is not there.
+    Absent,
+}
+
+/// How the water of a dry analysis is known.
+#[derive(Debug, Clone)]
+pub enum Water {
+    /// Nothing is stated: the gas is taken as free of water.
+    None,
+    /// The fraction of water in the wet gas.
+    Fraction(Quantity),
+    /// Water for each unit of dry gas, by amount.
+    PerDry(Quantity),
+    /// The dew point, at a pressure of its own or at that of the case.
+    DewPoint {
+        /// The dew point.
+        temperature: Quantity,
+        /// The absolute pressure where the dew point was read, if not the case's.
+        pressure_pa: Option<f64>,
+    },
+}
+
+/// What a gas analysis refers to.
+#[derive(Debug, Clone)]
+pub enum Basis {
+    /// The gas as it is in the bed.
+    Wet,
+    /// The gas without its water, which is stated apart.
+    Dry(Water),
+}
+
+/// The gas block.
+#[derive(Debug, Clone)]
+pub struct GasReading {
+    /// What the analysis refers to.
+    pub basis: Basis,
+    /// Its lines.
+    pub entries: Vec<Entry>,
+}

@@ -1,0 +1,44 @@
+//! The water of a dry analysis.
+
+use std::sync::LazyLock;
+
+use super::reading::Water;
+use super::saturation::water_saturation_pressure_pa;
+use crate::problem::{MixtureCode, Problem};
+use crate::reaction::Species;
+
+/// Water, the species that a dry analysis leaves out.
+pub(super) static WATER: LazyLock<Species> = LazyLock::new(Species::water_gas);
+
+/// The fraction of water in the wet gas, from any of the ways it is stated.
+///
+/// From r per dry gas: y = r/(1 + r). From a dew point: y = p_sat(T_dew)/P.
+pub(super) fn water_fraction(
+    water: &Water,
+    pressure_pa: Option<f64>,
+) -> Result<Option<f64>, Problem> {
+    let (fraction, field) = match water {
+        Water::None => return Ok(None),
+        Water::Fraction(quantity) => (quantity.value_si, "water.fraction"),
+        Water::PerDry(quantity) => {
+            let ratio = quantity.value_si;
+            (ratio / (1.0 + ratio), "water.per_dry")
+        }
+        Water::DewPoint { temperature, pressure_pa: own } => {
+            let field = "water.dew_point";
+            let Some(saturation_pa) = water_saturation_pressure_pa(temperature.value_si) else {
+                return Err(Problem::new(MixtureCode::DewPointRange).at(field));
+            };
+            let Some(total_pa) = own.or(pressure_pa) else {
+                return Err(Problem::new(MixtureCode::DewPointNeedsPressure).at(field));
+            };
+            (saturation_pa / total_pa, field)
+        }
+    };
+    if (0.0..1.0).contains(&fraction) {
+        Ok(Some(fraction))
+    } else {
+        let found = format!("{:.4}", fraction * 100.0);
+        Err(Problem::new(MixtureCode::WaterFraction).with("found", found).at(field))
+    }
+}

@@ -1,0 +1,67 @@
+//! Sentences: what is worth knowing beside a result.
+
+use crate::problem::Level::{self, Assumption, Caution, Conversion, Warning};
+use crate::problem::NoteCode as C;
+
+pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
+    match code {
+        C::PhaseAssumed => (Assumption, "{species} is taken in this phase, which was not written."),
+        C::FormAssumed => (Assumption, "{species} is taken as {form}."),
+        C::NotInAnalysis => (Assumption, "{species} is not in the reading and is taken as absent."),
+        C::PhaseTakenAsPresent => {
+            (Assumption, "{species} is not in the reading and is taken as present in ample amount.")
+        }
+        C::ClosedByRemainder => {
+            (Conversion, "{species} is the remainder: {per_cent} % of the gas as analysed.")
+        }
+        C::ClosedByLargest => (
+            Conversion,
+            "The fractions do not quite add up; {species}, the largest, is changed by {per_cent} % to close them.",
+        ),
+        C::DryTakenAsFree => (
+            Assumption,
+            "No water is stated beside the dry analysis: the gas is taken as free of water.",
+        ),
+        C::WaterAdded => (
+            Conversion,
+            "The wet gas is {per_cent} % water; the dry fractions are reduced accordingly.",
+        ),
+        C::TakenAtBound => (
+            Warning,
+            "{field} is a bound and is taken at the bound; values below it are not tried.",
+        ),
+        C::GaugeToAbsolute => {
+            (Conversion, "{gauge} gauge and {atmosphere} of atmosphere make {absolute} absolute.")
+        }
+        C::StandardAtmosphere => (Assumption, "The atmosphere is taken as 101.325 kPa."),
+        C::Balanced => (
+            Conversion,
+            "The equation was written without coefficients and was balanced: {equation}.",
+        ),
+        C::Extrapolated => (
+            Warning,
+            "The temperature is {by_k} K outside the range of the data; constant heat capacities carry them on.",
+        ),
+        C::KNotCarried => (
+            Warning,
+            "K is stated {by_k} K away from this temperature and no enthalpy is given, so it is used unchanged.",
+        ),
+        C::ApproachTaken => (Conversion, "With the stated approach K is taken at {temperature}."),
+        C::TolerancesNotCarried => (
+            Warning,
+            "The tolerances are not yet carried through to the verdict; it rests on the values alone.",
+        ),
+        C::IdealGas => (
+            Warning,
+            "The gas is taken as ideal; at {pressure} that can matter. No real-gas correction is made.",
+        ),
+        C::NoReading => (
+            Assumption,
+            "No reading is given, so there is K but no Q, no verdict and no state at rest.",
+        ),
+        C::Equilibrium => (
+            Caution,
+            "Equilibrium says where the reaction stops, not how fast. Advice for a qualified person; not an interlock, relief or safety calculation. Site procedures, local codes and licensed practice come first.",
+        ),
+    }
+}

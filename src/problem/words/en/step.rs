@@ -1,0 +1,34 @@
+//! Sentences: the lines of the working.
+
+use crate::problem::StepCode as C;
+
+pub(in crate::problem::words) fn template(code: C) -> &'static str {
+    match code {
+        C::SpeciesGibbs => {
+            "{species}: H° = {enthalpy} kJ/mol, S° = {entropy} J/(mol K), G° = H° − T S° = {gibbs} kJ/mol at {temperature_k} K"
+        }
+        C::ReactionGibbs => {
+            "ΔG° = Σ ν G° = {gibbs} kJ/mol; ΔH° = {enthalpy} kJ/mol, ΔS° = {entropy} J/(mol K) at {temperature_k} K"
+        }
+        C::StatedK => {
+            "As stated: {stated}; for the reaction as written and p° = 1 bar, ln K = {ln_k} at {temperature_k} K"
+        }
+        C::K => {
+            "K = exp(−ΔG°/RT) = exp({ln_k}) = {k}, with R = 8.314462618 J/(mol K), T = {temperature_k} K, p° = 1 bar"
+        }
+        C::Absolute => "P = {gauge} + {atmosphere} = {absolute} absolute",
+        C::WetGas => "y = y(dry) × (1 − y(H2O)) with y(H2O) = {water}",
+        C::Activity => {
+            "a({species}) = y P/p° = {fraction} × {pressure_bar} bar / 1 bar = {activity}"
+        }
+        C::Quotient => "Q = {formula} = {q}, ln Q = {ln_q}",
+        C::OpenQuotient => "Q = {formula} is {q}",
+        C::Gibbs => "ΔG = RT ln(Q/K) = {rt} kJ/mol × ({ln_q} − {ln_k}) = {gibbs} kJ/mol",
+        C::TStar => "K(T*) = Q at T* = {t_star}; T − T* = {approach} K",
+
+        C::Rest => {
+            "At rest, holding {held}: ξ = {extent} mol on {basis} ({outcome}, {iterations} steps)"
+        }
+        C::RestCheck => "Check: ln Q at rest = {ln_q}, ln K = {ln_k}",
+    }
+}
