@@ -33,6 +33,32 @@ codes! {
     /// Mistakes in a number, a unit or a tolerance.
     QuantityCode in Quantity {
         Empty = "quantity-empty",
+        NotANumber = "number-not-read",
+        NumberShape = "number-shape",
+        NumberAmbiguous = "number-ambiguous",
+        NumberPower = "number-power",
+        NumberTail = "number-tail",
+        NumberTooLarge = "number-too-large",
+        NumberTooSmall = "number-too-small",
+        UnitMissing = "unit-missing",
+        UnitUnknown = "unit-unknown",
+        UnitNear = "unit-near",
+        UnitMismatch = "unit-mismatch",
+        UnitTwice = "unit-twice",
+        OutOfRange = "quantity-out-of-range",
+        FractionOverOne = "fraction-over-one",
+        FractionPercent = "fraction-percent",
+        PressureBelowVacuum = "pressure-below-vacuum",
+        ToleranceMissing = "tolerance-missing",
+        ToleranceNegative = "tolerance-negative",
+        ToleranceUnit = "tolerance-unit",
+        TolerancePercent = "tolerance-percent",
+        ToleranceTwice = "tolerance-twice",
+        BoundAbove = "bound-above",
+        BoundTolerance = "bound-tolerance",
+        BoundNotHere = "bound-not-here",
+        Parenthesis = "parenthesis-open",
+        PresetUnknown = "preset-unknown",
     }
 }
 
