@@ -1,1 +1,113 @@
-//! What is known of each species.
+//! What is known of each species: Δ_fH°, S°, C°p(T), where it holds, how well, and from where.
+//!
+//! The tables lie beside this file as tab-separated text: `species.tsv` (one line a species),
+//! `heat.tsv` (one line a range of temperature) and `sources.tsv`. Nothing is parsed before it is
+//! asked for. `tests/reference/library.py` made them from published data and checks them.
+//!
+//! Conventions: p° = 1 bar; H° of the elements in their reference states is zero at 298.15 K; the
+//! reference state is one for all temperatures (rhombic sulfur, graphite, iron), so tables that
+//! change it, as some do for sulfur above 882 K, agree for balanced reactions only.
+//!
+//! NASA TM-4513 was made with R = 8.314510 J/(mol K). C°p/R and S°/R follow from spectra and do
+//! not depend on R, so they are kept; H° is known in J/mol, so its constant is set anew for the
+//! exact R. The rest differs by 6e−6 relative.
+//!
+//! ```
+//! use shiftgauge::library;
+//! use shiftgauge::reaction::Phase;
+//! assert_eq!(library::find("S", Some(Phase::Solid), None).len(), 2); // rhombic and monoclinic
+//! assert_eq!(library::named("quicklime")[0].formula, "CaO");
+//! ```
+
+mod combination;
+mod polynomial;
+mod record;
+mod table;
+mod temperature;
+
+pub use combination::Change;
+pub use combination::Combination;
+pub use combination::STOICHIOMETRIC_LIMIT;
+pub use record::Properties;
+pub use record::Reach;
+pub use record::Record;
+pub use record::UncertaintyKind;
+pub use table::citation;
+pub use temperature::TEMPERATURE_LIMITS_K;
+pub use temperature::Temperature;
+
+use crate::problem::LibraryCode;
+use crate::problem::Outcome;
+use crate::problem::Problem;
+use crate::reaction::Phase;
+
+/// The gas constant R in J/(mol K), exact: k·N_A = 1.380649e−23 × 6.02214076e23 in the SI
+/// (CODATA 2018 and later).
+pub const GAS_CONSTANT_J_PER_MOL_K: f64 = 8.314_462_618_153_24;
+
+/// Every record whose formula is spelled so, in the phase and the form if they are given.
+///
+/// The order is that of the table (by id). An unknown formula gives an empty list.
+#[must_use]
+pub fn find(formula: &str, phase: Option<Phase>, form: Option<&str>) -> Vec<&'static Record> {
+    table::entries_of(formula)
+        .filter_map(table::Entry::record)
+        .filter(|record| phase.is_none_or(|wanted| record.phase == wanted))
+        .filter(|record| form.is_none() || record.form == form)
+        .collect()
+}
+
+/// Every record with this name or CAS number; capital letters and space around it do not matter.
+#[must_use]
+pub fn named(text: &str) -> Vec<&'static Record> {
+    let wanted = text.trim().to_lowercase();
+    let is_named = |entry: &&'static table::Entry| {
+        let mut cells = entry.line.split('\t').skip(4);
+        let names = cells.next().unwrap_or_default();
+        cells.next() == Some(wanted.as_str())
+            || names.split(';').any(|name| name.to_lowercase() == wanted)
+    };
+    if wanted.is_empty() {
+        return Vec::new();
+    }
+    table::entries().iter().filter(is_named).filter_map(table::Entry::record).collect()
+}
+
+/// Every record, in the order of the table.
+pub fn all() -> impl Iterator<Item = &'static Record> {
+    table::entries().iter().filter_map(table::Entry::record)
+}
+
+/// Every formula, once each, without reading any record: candidates for a near miss.
+pub fn formulas() -> impl Iterator<Item = &'static str> {
+    let mut last = "";
+    table::entries().iter().map(|entry| entry.formula).filter(move |formula| {
+        let new = *formula != last;
+        last = formula;
+        new
+    })
+}
+
+/// The one record that a formula, a phase and a form name.
+///
+/// # Errors
+/// `species-unknown` if no record has the formula, `species-phase-unknown` if none has it in that
+/// phase and form, `species-several` if more than one fits.
+pub fn one(formula: &str, phase: Option<Phase>, form: Option<&str>) -> Outcome<&'static Record> {
+    let found = find(formula, phase, form);
+    if let [record] = found[..] {
+        return Ok(record);
+    }
+    let labels = |records: &[&'static Record]| {
+        records.iter().map(|record| record.label()).collect::<Vec<_>>().join(", ")
+    };
+    let phase_text = phase.map_or(String::new(), |phase| format!("({})", phase.symbol()));
+    let form_text = form.map_or(String::new(), |form| format!(" {form}"));
+    let wanted = format!("{formula}{phase_text}{form_text}");
+    let problem = match (found.is_empty(), find(formula, None, None)) {
+        (false, _) => Problem::new(LibraryCode::Several).with("known", labels(&found)),
+        (true, known) if known.is_empty() => Problem::new(LibraryCode::Unknown),
+        (true, known) => Problem::new(LibraryCode::PhaseUnknown).with("known", labels(&known)),
+    };
+    Err(problem.with("found", wanted).into())
+}

@@ -73,6 +73,10 @@ codes! {
     /// A species that the library does not hold, or holds in several ways.
     LibraryCode in Library {
         Unknown = "species-unknown",
+        PhaseUnknown = "species-phase-unknown",
+        Several = "species-several",
+        Temperature = "species-temperature",
+        Coefficient = "species-coefficient",
     }
 }
 

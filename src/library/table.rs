@@ -1,0 +1,97 @@
+//! The tables as text: found by bisection, read only when a species is asked for.
+
+use std::sync::OnceLock;
+
+use super::record::Record;
+
+const SPECIES: &str = include_str!("tables/species.tsv");
+const HEAT: &str = include_str!("tables/heat.tsv");
+const SOURCES: &str = include_str!("tables/sources.tsv");
+
+/// A line of the species table, with its id and formula cut out and the record once it is read.
+pub(super) struct Entry {
+    pub(super) id: &'static str,
+    pub(super) formula: &'static str,
+    pub(super) line: &'static str,
+    record: OnceLock<Option<Record>>,
+}
+
+impl Entry {
+    /// The record, read from the tables at the first call.
+    pub(super) fn record(&'static self) -> Option<&'static Record> {
+        self.record.get_or_init(|| Record::read(self.line, rows(HEAT, self.id))).as_ref()
+    }
+}
+
+/// Every line of the species table, sorted by id; made at the first call, with nothing parsed.
+pub(super) fn entries() -> &'static [Entry] {
+    static ENTRIES: OnceLock<Vec<Entry>> = OnceLock::new();
+    ENTRIES.get_or_init(|| {
+        let lines = SPECIES.lines().skip(1);
+        lines
+            .filter_map(|line| {
+                let mut cells = line.split('\t');
+                let (id, formula) = (cells.next()?, cells.next()?);
+                Some(Entry { id, formula, line, record: OnceLock::new() })
+            })
+            .collect()
+    })
+}
+
+/// The entries of a formula: those whose id starts with it and a dot.
+pub(super) fn entries_of(formula: &str) -> impl Iterator<Item = &'static Entry> {
+    let start = entries().partition_point(|entry| entry.id < formula);
+    // Ids of longer formulas with a bracket or a sign may stand between "X" and "X.".
+    let owned = formula.to_owned();
+    entries()[start..]
+        .iter()
+        .take_while({
+            let stem = owned.clone();
+            move |entry| entry.id.starts_with(&stem)
+        })
+        .filter(move |entry| entry.formula == owned)
+}
+
+/// The citation of a source id.
+///
+/// ```
+/// assert!(shiftgauge::library::citation("janaf").unwrap().contains("Monograph 9"));
+/// assert_eq!(shiftgauge::library::citation("no such source"), None);
+/// ```
+#[must_use]
+pub fn citation(source: &str) -> Option<&'static str> {
+    let line = rows(SOURCES, source).next()?;
+    line.split_once('\t').map(|(_, text)| text)
+}
+
+/// The lines of a table, sorted by its first cell, whose first cell is `id`.
+fn rows(table: &'static str, id: &str) -> impl Iterator<Item = &'static str> {
+    let first = first_not_before(table, id);
+    let id = id.to_owned();
+    table[first..].lines().take_while(move |line| first_cell(line) == id)
+}
+
+/// Where the first line starts whose first cell is not before `id`; the head is passed over.
+fn first_not_before(table: &str, id: &str) -> usize {
+    let bytes = table.as_bytes();
+    let line_end = |from: usize| {
+        bytes[from..].iter().position(|b| *b == b'\n').map_or(bytes.len(), |length| from + length)
+    };
+    let (mut low, mut high) = ((line_end(0) + 1).min(bytes.len()), bytes.len());
+    while low < high {
+        let middle = low + (high - low) / 2;
+        let back = bytes[low..middle].iter().rposition(|b| *b == b'\n');
+        let start = back.map_or(low, |length| low + length + 1);
+        let end = line_end(start);
+        if first_cell(&table[start..end]) < id {
+            low = (end + 1).min(bytes.len());
+        } else {
+            high = start;
+        }
+    }
+    low
+}
+
+fn first_cell(line: &str) -> &str {
+    line.split_once('\t').map_or(line, |(cell, _)| cell)
+}

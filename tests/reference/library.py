@@ -1,0 +1,235 @@
+"""Checks the library's tables against the published figures, or writes them (--write).
+
+python3 tests/reference/library.py            fails if a committed value differs
+python3 tests/reference/library.py --write    makes src/library/tables/*.tsv anew
+"""
+
+import sys
+from math import log, sqrt
+from pathlib import Path
+
+import library_sources as published
+from library_pieces import POWERS, Piece, fit, join
+from library_sources import R_EXACT, T0
+from library_species import ATCT_LIMIT, CODATA, SECOND_LIMITS, SOURCES, SPECIES
+
+ROOT = Path(__file__).resolve().parents[2]
+TABLES = ROOT / "src" / "library" / "tables"
+LOG_KF = ROOT / "tests" / "published" / "janaf_log_kf.tsv"
+HEADS = {
+    "species": "id formula phase form names cas enthalpy_kj_per_mol entropy_j_per_mol_k "
+    "u_gibbs_kj_per_mol u_class sources",
+    "heat": "id low_k high_k a_minus2 a_minus1 a0 a1 a2 a3 a4 b_enthalpy b_entropy source",
+    "sources": "id citation",
+}
+
+
+def build(species):
+    """The figures of one species: ΔfH°298, S°298, pieces, source ids, worst errors of a fit."""
+    how, cas, phase = species.how, species.cas, species.phase
+    sources, worst, transitions = [], [], ()
+    if how[0] == "tm4513":
+        limits, coefficients, h, _ = published.tm4513(how[1])
+        h = round(h, 3)
+        low = T0 if 298.15 < limits[0] <= 300 else limits[0]
+        bounds = [low, *limits[1:]]
+        pieces = []
+        for a, b, c in zip(bounds, bounds[1:], coefficients):
+            piece = Piece(a, b, [0, 0, *c[:5]], "tm4513")
+            piece.b_s = c[6]
+            pieces.append(piece)
+        s = pieces[0].s(T0)
+        sources.append("tm4513")
+    elif how[0] == "janaf":
+        row = next(row for row in published.janaf(how[1]) if row[0] == T0)
+        h, s = row[4], row[2]
+        pieces, transitions, worst = fit(how[1], how[2], "janaf", species.blunt)
+        pieces[0].low = species.low or pieces[0].low
+        sources.append("janaf")
+    elif how[0] == "poling":
+        h, s = published.crc(cas, phase)
+        powers, low, high = published.poling_gas(cas)
+        pieces = [Piece(low, high, [0, 0, *powers], "poling")]
+        sources += ["crc", "poling"]
+    elif how[0] == "perry":
+        h, s = published.crc(cas, phase)
+        (const, linear, inverse), _, high = published.perry(cas)
+        a = [inverse / R_EXACT, 0, const / R_EXACT, linear / R_EXACT, 0, 0, 0]
+        pieces = [Piece(how[1], high, [float(f"{v:.10g}") for v in a], "perry")]
+        sources += ["crc", "perry"]
+    elif how[0] == "calcite":
+        h, s = published.crc(cas, phase)
+        a = [-2.1576e6 / R_EXACT, 0, 99.715 / R_EXACT, 0.02692 / R_EXACT, 0, 0, 0]
+        pieces = [Piece(T0, 1200, [float(f"{v:.10g}") for v in a], "jacobs")]
+        sources += ["crc", "jacobs"]
+    elif how[0] == "methanol":
+        # The liquid is tied to the vapour by its vapour pressure, the vapour taken as ideal.
+        vapour = build(next(s for s in SPECIES if s.id == "CH3OH.g"))
+        _, s = published.crc(cas, phase)
+        g = -R_EXACT * T0 * log(published.antoine_pa(cas, T0) / 1e5) / 1000
+        h = round(vapour["h"] - g - T0 * (vapour["s"] - s) / 1000, 2)
+        pieces = [Piece(low, high, [0, 0, *(float(f"{v:.10g}") for v in powers), 0], "zabransky")
+                  for low, high, powers in published.zabransky(cas)]
+        sources += ["crc", "poling", "zabransky"]
+    if species.element:
+        h = 0.0
+    better = published.atct(cas, phase)
+    if better and not species.element and abs(better[0] - h) > ATCT_LIMIT and how[0] != "methanol":
+        h = round(better[0], 3)
+        sources.append("atct")
+    join(pieces, h, s, transitions)
+    return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": worst}
+
+
+def second_figures(species):
+    """(name, ΔfH°, S°) of every other source that knows the species."""
+    found = []
+    if species.janaf and species.how[0] != "janaf":
+        row = next(row for row in published.janaf(species.janaf) if row[0] == T0)
+        found.append(("JANAF", row[4], row[2]))
+    h, s = published.crc(species.cas, species.phase)
+    if species.form == "monoclinic":
+        h = s = None
+    if h is not None or s is not None:
+        found.append(("CRC", h, s))
+    return found
+
+
+def uncertainty(species, made):
+    """u of ΔfG°298 in kJ/mol and how it was got."""
+    if species.element:
+        return 0.0, "element"
+    h, s = made["h"], made["s"]
+    better = published.atct(species.cas, species.phase)
+    half_s = max([abs(s - s2) / 2 for _, _, s2 in second_figures(species) if s2] + [0.0])
+    of_entropy = T0 * half_s / 1000
+    if "atct" in made["sources"]:
+        return sqrt((better[1] / 2) ** 2 + of_entropy**2), "atct"
+    if better:
+        of_h = max(better[1] / 2, abs(h - better[0]) / 2)
+        kind = "atct" if better[1] >= abs(h - better[0]) else "sources"
+        return sqrt(of_h**2 + of_entropy**2), kind
+    apart = [0.0]
+    for _, h2, s2 in second_figures(species):
+        difference = (h - h2 if h2 is not None else 0) - T0 * (s - s2 if s2 else 0) / 1000
+        apart.append(abs(difference) / 2)
+    if species.id in CODATA and CODATA[species.id] / 2 >= max(apart):
+        return CODATA[species.id] / 2, "codata"
+    if max(apart) >= species.floor:
+        return max(apart), "sources"
+    return species.floor, "class"
+
+
+def figure(value):
+    return "0" if value == 0 else repr(float(value)).removesuffix(".0")
+
+
+def make():
+    """Every table as lists of rows, sorted by id, and the report of fits and second sources."""
+    rows, report = {"species": [], "heat": [], "sources": []}, []
+    used = set()
+    for species in sorted(SPECIES, key=lambda one: one.id.encode()):
+        made = build(species)
+        u, kind = uncertainty(species, made)
+        ids = list(made["sources"]) + [kind] * (kind in ("atct", "codata"))
+        ids = list(dict.fromkeys(ids))
+        used.update(ids, (piece.source for piece in made["pieces"]))
+        rows["species"].append([
+            species.id, species.formula, species.phase, species.form, species.names, species.cas,
+            f"{made['h']:.3f}".replace("-0.000", "0.000"), f"{made['s']:.3f}", f"{u:.2g}", kind,
+            ";".join(ids)])
+        for piece in made["pieces"]:
+            rows["heat"].append([species.id, *(figure(v) for v in (
+                piece.low, piece.high, *piece.a, piece.b_h, piece.b_s)), piece.source])
+        report.append((species, made, u, kind))
+    rows["sources"] = [[key, SOURCES[key]] for key in sorted(used)]
+    missing = used - set(SOURCES)
+    assert not missing, missing
+    return rows, report
+
+
+def problems_of(report):
+    """Where a record leaves a second source without a reason, or a fit its limits."""
+    found = []
+    for species, made, u, kind in report:
+        line = f"{species.id:22} ΔfH {made['h']:10.3f}  S {made['s']:8.3f}  u {u:.2g} ({kind})"
+        for name, h2, s2 in second_figures(species):
+            dh = made["h"] - h2 if h2 is not None else 0.0
+            ds = made["s"] - s2 if s2 is not None else 0.0
+            line += f"  {name} {dh:+.2f} {ds:+.2f}"
+            if not species.apart and (abs(dh) > SECOND_LIMITS[0] or abs(ds) > SECOND_LIMITS[1]):
+                found.append(f"{species.id} differs from {name} by {dh:.3f} kJ/mol, {ds:.3f} J/mol/K")
+        for low, high, cp, h, s, swing in made["worst"]:
+            line += f"\n    {low:g} to {high:g} K: Cp {cp:.2%}, H {h:.4f} kJ/mol, S {s:.4f} J/(mol K), between rows {swing:.2%}"
+            if cp > 0.003 or h > 0.012 or s > 0.012 or swing > 0.02:
+                found.append(f"the fit of {species.id} from {low} to {high} K is poor")
+        published_cp = published.crc_heat_capacity(species.cas, species.phase)
+        if published_cp and species.form != "monoclinic":
+            piece = next(p for p in made["pieces"] if p.low <= T0 <= p.high)
+            if abs(piece.cp(T0) / published_cp - 1) > 0.025:
+                line += f"\n    Cp(298) {piece.cp(T0):.2f}, CRC {published_cp}"
+        print(line)
+    return found
+
+
+def read(name):
+    lines = (TABLES / f"{name}.tsv").read_text().splitlines()
+    if lines[0].split("\t") != HEADS[name].split():
+        return None
+    return [line.split("\t") for line in lines[1:]]
+
+
+def same(a, b):
+    """Equal text, or figures of a refit that agree to the last digits the fit can give."""
+    if a == b:
+        return True
+    x, y = published.number(a), published.number(b)
+    return x is not None and y is not None and abs(x - y) <= 1e-7 * max(abs(x), abs(y))
+
+
+def check_tables(rows):
+    found = []
+    for name, wanted in rows.items():
+        have = read(name)
+        if have is None or len(have) != len(wanted):
+            found.append(f"{name}.tsv has another shape: write it anew")
+            continue
+        for old, new in zip(have, wanted):
+            equal = same if old[-1] == "janaf" else (lambda a, b: a == b)
+            if len(old) != len(new) or not all(equal(a, b) for a, b in zip(old, new)):
+                found.append(f"{name}.tsv differs:\n  committed {old}\n  published {new}")
+    return found
+
+
+def check_log_kf():
+    """The committed log Kf figures are those of the tables."""
+    found, seen = [], 0
+    tables = {species.id: species.janaf for species in SPECIES}
+    for line in LOG_KF.read_text().splitlines():
+        if line.startswith("#") or line.startswith("id\t"):
+            continue
+        ident, t, value = line.split("\t")
+        seen += 1
+        if published.janaf_at(tables[ident], float(t))[5] != float(value):
+            found.append(f"janaf_log_kf.tsv: {ident} at {t} K is {value}")
+    return found if seen else ["janaf_log_kf.tsv is empty"]
+
+
+def main():
+    assert POWERS[0] == -2 and R_EXACT > 8
+    rows, report = make()
+    found = problems_of(report)
+    if "--write" in sys.argv:
+        for name, lines in rows.items():
+            text = "\n".join("\t".join(line) for line in [HEADS[name].split(), *lines])
+            (TABLES / f"{name}.tsv").write_text(text + "\n")
+    found += check_tables(rows)
+    found += check_log_kf()
+    for line in found:
+        print("WRONG:", line)
+    print(f"{len(rows['species'])} species, {len(rows['heat'])} pieces, {len(found)} problems")
+    return 1 if found else 0
+
+
+if __name__ == "__main__":
+    sys.exit(main())

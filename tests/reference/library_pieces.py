@@ -1,0 +1,158 @@
+"""Pieces of Cp/R as powers of T from T^-2 to T^4, their integrals, and fits of them to tables."""
+
+from math import log
+
+import numpy as np
+
+from library_sources import R_EXACT, T0, janaf
+
+POWERS = (-2, -1, 0, 1, 2, 3, 4)
+# From few terms to many: a fit takes the first that meets the limits.
+BASES = ((0,), (0, 1), (-2, 0, 1), (-2, 0, 1, 2), (-2, -1, 0, 1, 2), (-2, -1, 0, 1, 2, 3), POWERS)
+CP_LIMIT, H_LIMIT, S_LIMIT = 0.0005, 0.004, 0.004  # of Cp; kJ/mol; J/(mol K)
+
+
+def h_term(power, t):
+    """The integral of T^power, without its constant."""
+    return log(t) if power == -1 else t ** (power + 1) / (power + 1)
+
+
+def s_term(power, t):
+    """The integral of T^power / T, without its constant."""
+    return log(t) if power == 0 else t**power / power
+
+
+class Piece:
+    """One range: seven coefficients of Cp/R and the constants of H/R and S/R."""
+
+    def __init__(self, low, high, coefficients, source):
+        self.low, self.high, self.source = low, high, source
+        self.a = [float(value) for value in coefficients]
+        self.b_h = self.b_s = 0.0
+
+    def cp(self, t):
+        return R_EXACT * sum(a * t**p for a, p in zip(self.a, POWERS))
+
+    def h(self, t):
+        """kJ/mol."""
+        return R_EXACT * (sum(a * h_term(p, t) for a, p in zip(self.a, POWERS)) + self.b_h) / 1000
+
+    def s(self, t):
+        return R_EXACT * (sum(a * s_term(p, t) for a, p in zip(self.a, POWERS)) + self.b_s)
+
+    def anchor(self, t, h, s):
+        """Sets the constants so that H(t) is h kJ/mol and S(t) is s J/(mol K)."""
+        self.b_h = rounded(self.b_h + (h - self.h(t)) * 1000 / R_EXACT)
+        self.b_s = rounded(self.b_s + (s - self.s(t)) / R_EXACT)
+
+
+def rounded(value):
+    return float(f"{value:.14g}")
+
+
+def join(pieces, h298, s298, transitions=()):
+    """Anchors the piece that holds 298.15 K, then joins the others to it.
+
+    H and S meet at a joint. At a transition they jump by its enthalpy, in kJ/mol, and by that
+    enthalpy over T, so that G is continuous.
+    """
+    jumps = dict(transitions)
+    start = next(i for i, piece in enumerate(pieces) if piece.low <= T0 <= piece.high)
+    pieces[start].anchor(T0, h298, s298)
+    for lower, upper in zip(pieces[start:], pieces[start + 1 :]):
+        t, jump = upper.low, jumps.get(upper.low, 0.0)
+        upper.anchor(t, lower.h(t) + jump, lower.s(t) + 1000 * jump / t)
+    for upper, lower in list(zip(pieces[1 : start + 1], pieces[:start]))[::-1]:
+        lower.anchor(upper.low, upper.h(upper.low), upper.s(upper.low))
+    return pieces
+
+
+def fit(code, limits, source, blunt=()):
+    """Fits the pieces between `limits` to a JANAF table; gives pieces, transitions, worst errors."""
+    rows = janaf(code)
+    pieces, transitions, worst = [], [], []
+    for index, (low, high) in enumerate(zip(limits, limits[1:])):
+        inside = within(rows, low, high)
+        if index and jump(rows, low) is not None:
+            transitions.append((low, jump(rows, low)))
+        for basis in BASES:
+            if len(basis) > max(1, len(inside) + 2):
+                break
+            piece = Piece(low, high, constrained(inside, basis, blunt), source)
+            errors = compare(piece, inside, blunt)
+            if errors[0] < CP_LIMIT and errors[1] < H_LIMIT and errors[2] < S_LIMIT:
+                break
+        pieces.append(piece)
+        worst.append((low, high, *errors, swing(piece, inside, blunt)))
+    return pieces, transitions, worst
+
+
+def within(rows, low, high):
+    """The rows of one piece: at a transition the side that belongs to it."""
+    found = {}
+    for t, cp, s, h, *_ in rows:
+        if low <= t <= high and not (t == high and t in found):
+            found[t] = (t, cp, s, h)
+    if low not in found or high not in found:
+        raise SystemExit(f"the table has no row at {low} or {high} K")
+    return [found[t] for t in sorted(found)]
+
+
+def jump(rows, t):
+    """The enthalpy of a transition, or None where the table only passes through T."""
+    at = [h for row_t, _, _, h, *_ in rows if row_t == t]
+    return round(at[-1] - at[0], 6) if len(at) > 1 and at[-1] - at[0] > 0.0015 else None
+
+
+def constrained(rows, basis, blunt=()):
+    """Least squares of Cp, H and S with H and S exact at both ends and at 298.15 K."""
+    start = next((row for row in rows if row[0] == T0), rows[0])
+    scale = {p: 1 / 1000.0**p for p in basis}
+    kept = [row for row in rows if row[0] not in blunt]
+    cp = [[t**p * scale[p] for p in basis] for t, *_ in kept]
+    h = [[(h_term(p, t) - h_term(p, start[0])) * scale[p] for p in basis] for t, *_ in rows]
+    s = [[(s_term(p, t) - s_term(p, start[0])) * scale[p] for p in basis] for t, *_ in rows]
+    wanted_cp = [row[1] / R_EXACT for row in kept]
+    wanted_h = [(row[3] - start[3]) * 1000 / R_EXACT for row in rows]
+    wanted_s = [(row[2] - start[2]) / R_EXACT for row in rows]
+    weights_h, weights_s = 0.002, 1.0
+    a = np.array(cp + [[v * weights_h for v in row] for row in h]
+                 + [[v * weights_s for v in row] for row in s])
+    b = np.array(wanted_cp + [v * weights_h for v in wanted_h] + [v * weights_s for v in wanted_s])
+    exact = [i for i in (0, len(rows) - 1) if rows[i][0] != start[0]]
+    if len(basis) < 2 + 2 * len(exact):
+        solution = np.linalg.lstsq(a, b, rcond=None)[0]
+    else:
+        c = np.array([h[i] for i in exact] + [s[i] for i in exact])
+        d = np.array([wanted_h[i] for i in exact] + [wanted_s[i] for i in exact])
+        row_scale = np.abs(c).max(axis=1)
+        c, d = c / row_scale[:, None], d / row_scale
+        q, r = np.linalg.qr(c.T, mode="complete")
+        rank = len(d)
+        particular = np.linalg.solve(r[:rank].T, d)
+        free = np.linalg.lstsq(a @ q[:, rank:], b - a @ q[:, :rank] @ particular, rcond=None)[0]
+        solution = q @ np.concatenate([particular, free])
+    by_power = {p: float(f"{value * scale[p]:.10g}") for p, value in zip(basis, solution)}
+    return [by_power.get(p, 0.0) for p in POWERS]
+
+
+def swing(piece, rows, blunt=()):
+    """How far Cp leaves, between neighbouring rows, what they span: relative to Cp."""
+    worst = 0.0
+    for (t1, c1, *_), (t2, c2, *_) in zip(rows, rows[1:]):
+        if t1 in blunt or t2 in blunt:
+            continue
+        for step in range(1, 10):
+            cp = piece.cp(t1 + (t2 - t1) * step / 10)
+            worst = max(worst, (min(c1, c2) - cp) / c1, (cp - max(c1, c2)) / c1)
+    return worst
+
+
+def compare(piece, rows, blunt=()):
+    """The worst relative error of Cp, and errors of H (kJ/mol) and S (J/(mol K)) within a piece."""
+    t0, _, s0, h0 = next((row for row in rows if row[0] == T0), rows[0])
+    h_start, s_start = piece.h(t0), piece.s(t0)
+    cp = max(abs(piece.cp(t) / value - 1) for t, value, _, _ in rows if t not in blunt)
+    h = max(abs(piece.h(t) - h_start - value + h0) for t, _, _, value in rows)
+    s = max(abs(piece.s(t) - s_start - value + s0) for t, _, value, _ in rows)
+    return cp, h, s
