@@ -42,6 +42,20 @@ pub fn species(text: &str) -> JsValue {
     give(&case::species(text))
 }
 
+/// Gives ln K − ln Q of each reaction of a problem in bare numbers.
+#[wasm_bindgen(unchecked_return_type = "AffinitiesAnswer")]
+pub fn affinities(
+    #[wasm_bindgen(unchecked_param_type = "BareProblem")] problem: JsValue,
+) -> JsValue {
+    give(&case::affinities(&tree(problem)))
+}
+
+/// Gives the state of rest of a problem in bare numbers.
+#[wasm_bindgen(unchecked_return_type = "RestAnswer")]
+pub fn rest(#[wasm_bindgen(unchecked_param_type = "BareProblem")] problem: JsValue) -> JsValue {
+    give(&case::rest(&tree(problem)))
+}
+
 /// Gives the versions of the program and its tables.
 #[wasm_bindgen(unchecked_return_type = "Version")]
 pub fn version() -> JsValue {

@@ -6,4 +6,5 @@
     reason = "a test fails by panicking"
 )]
 
+mod mistakes;
 mod rooms;

@@ -55,10 +55,10 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         _ => None,
     });
     let approach = reading.and_then(|reading| reading.approach.ok());
-    let rest = reading.map(|reading| &reading.rest);
+    let rest = reading.map(|reading| &reading.rest.summary);
     let (verdict, leaning) = reading.map_or((None, None), |reading| words(reading.verdict));
     ReactionReport {
-        equation: equation(found),
+        equation: found.equation.text(),
         terms: TermReport::list(&found.participants),
         delta_nu_gas: found.delta_nu_gas,
         ln_k: at.ln_k,
@@ -83,18 +83,13 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         approach_k: approach.map(|approach| approach.approach_k),
         u_approach_k: None,
         shortfall_k: approach.map(|approach| approach.shortfall_k),
-        approach_note: reading.and_then(|reading| notes::approach_note(reading)),
+        approach_note: reading.and_then(notes::approach_note),
         extent_mol: rest.map(|rest| rest.extent_mol),
         extent_min_mol: rest.and_then(|rest| rest.extent_min_mol),
         extent_max_mol: rest.and_then(|rest| rest.extent_max_mol),
         budget: Vec::new(),
         source: source(found),
     }
-}
-
-pub(super) fn equation(found: &Findings) -> String {
-    let species: Vec<_> = reacting(found).map(|participant| participant.species.clone()).collect();
-    found.question.reaction.equation.text_with(&species)
 }
 
 /// The participants with a stoichiometric number.
@@ -226,7 +221,7 @@ fn species(found: &Findings, reading: &ReadingFindings) -> Vec<SpeciesReport> {
                 now_mol: known.then_some(now_mol),
                 rest_mol: known.then_some(rest_mol),
                 rest_ln_mol: rest_ln_mol.filter(|_| known),
-                change_mol: Some(participant.nu * reading.rest.extent_mol),
+                change_mol: Some(participant.nu * reading.rest.summary.extent_mol),
                 now_fraction,
                 rest_fraction: then.fraction(i, rest_mol),
                 now_ln_activity: now.ln_activity(i, ln_now),
@@ -249,9 +244,9 @@ fn rest(found: &Findings, reading: &ReadingFindings) -> RestReport {
         temperature_k: found.question.temperature.value_si,
         pressure_pa,
         volume_m3: pressure_pa.filter(|_| gas_mol > 0.0).map(|p| gas_mol * rt / p),
-        outcome: reading.rest.outcome.as_str(),
-        iterations: reading.rest.iterations,
-        residual: reading.rest.residual,
+        outcome: reading.rest.summary.outcome.as_str(),
+        iterations: reading.rest.summary.iterations,
+        residual: reading.rest.summary.residual,
     }
 }
 
@@ -263,7 +258,7 @@ fn conversions(found: &Findings, reading: &ReadingFindings) -> Vec<Conversion> {
                 Held::Mol(amount) if *amount > 0.0 => Some(*amount),
                 _ => None,
             };
-            let used = -participant.nu * reading.rest.extent_mol;
+            let used = -participant.nu * reading.rest.summary.extent_mol;
             Conversion {
                 species: participant.species.text(),
                 feed_to_now: None,
@@ -275,7 +270,7 @@ fn conversions(found: &Findings, reading: &ReadingFindings) -> Vec<Conversion> {
 }
 
 fn valley(found: &Findings, reading: &ReadingFindings) -> Option<ValleyReport> {
-    let rest = &reading.rest;
+    let rest = &reading.rest.summary;
     // Where only ample phases limit a side, the drawing ends a little beyond what is of interest.
     let beyond = 2.0 * rest.extent_mol.abs() + 0.1 * reading.setting.gas_mol;
     let from_mol = rest.extent_min_mol.unwrap_or(-beyond);

@@ -58,8 +58,9 @@ pub fn balance(equation: &str) -> Answer<Balanced> {
     balanced
         .map(|balanced| Balanced {
             ok: true,
-            equation: balanced.text,
+            equation: balanced.equation.text(),
             terms: balanced
+                .equation
                 .terms
                 .iter()
                 .map(|term| BalancedTerm {
@@ -139,9 +140,8 @@ fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport>
     let rows: Vec<(&Record, f64)> = rows.collect();
     let constant = Constant::Library(Combination::new(&rows).map_err(at_equation)?);
     let at = constant.at(at_temperature);
-    let species: Vec<_> = found.list.iter().map(|one| one.species.clone()).collect();
     Ok(ConstantReport {
-        equation: parsed.text_with(&species),
+        equation: found.equation.text(),
         terms: TermReport::list(&found.list),
         temperature_k: at_temperature.kelvin(),
         ln_k: at.ln_k,
@@ -197,10 +197,21 @@ pub struct SpeciesMatch {
 /// Finds the species of the library that a formula, a name or a CAS number stands for.
 #[must_use]
 pub fn species(text: &str) -> SpeciesAnswer {
-    let records = library::matching(text);
+    let records = matching(text);
     let near = if records.is_empty() { reaction::nearest(text, library::formulas()) } else { None };
     let species = records.into_iter().map(species_match).collect();
     SpeciesAnswer { ok: true, species, near }
+}
+
+/// Records by formula, with its phase and form if written, else by name or CAS number.
+fn matching(text: &str) -> Vec<&'static Record> {
+    let by_formula = reaction::parse_species(text).map(|species| {
+        library::find(species.formula.text(), species.phase, species.form.as_deref())
+    });
+    match by_formula {
+        Ok(records) if !records.is_empty() => records,
+        _ => library::named(text),
+    }
 }
 
 fn species_match(record: &'static Record) -> SpeciesMatch {

@@ -4,10 +4,11 @@ use super::participants::Participant;
 use super::question::{KSource, KindOfK, Question, StatedK};
 use super::report::FormReport;
 use super::run::{EQUATION, at_field};
-use crate::constant::{Constant, Form, PRESSURE_UNITS, StatedConstant, all_forms, multiple_of};
+use crate::constant::{Constant, Form, PRESSURE_UNITS, StatedConstant, all_forms};
 use crate::library::{Combination, Record, Temperature};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
+use crate::reaction::Equation;
 use std::f64::consts::LN_10;
 
 /// The constant of the reaction as written.
@@ -16,12 +17,13 @@ use std::f64::consts::LN_10;
 /// A number that belongs to another reaction; a Kx without a pressure.
 pub(super) fn constant_of(
     question: &Question,
+    equation: &Equation,
     participants: &[Participant],
     delta_nu_gas: f64,
 ) -> Outcome<Constant> {
     let factor = match &question.reaction.constant_for {
         None => 1.0,
-        Some(other) => match multiple_of(&question.reaction.equation, other) {
+        Some(other) => match equation.multiple_of(&with_phases(other, participants)) {
             Some(factor) => factor.to_f64(),
             None => {
                 let problem = Problem::new(CaseCode::ForIsAnotherReaction);
@@ -50,6 +52,17 @@ pub(super) fn constant_of(
             }))
         }
     }
+}
+
+/// The equation of a stated number, its phases filled in from the reaction's own.
+fn with_phases(other: &Equation, participants: &[Participant]) -> Equation {
+    other.renamed(|species| {
+        let twin = participants.iter().find(|one| one.species.same_substance(species));
+        match (species.phase, twin) {
+            (None, Some(twin)) => twin.species.clone(),
+            _ => species.clone(),
+        }
+    })
 }
 
 fn stated_constant(

@@ -4,6 +4,7 @@
 //! above, and answered with a [`Report`]: plain data, SI, every number finite.
 
 mod answer;
+mod bare;
 mod calls;
 mod constant_of;
 mod node;
@@ -20,6 +21,7 @@ mod shown;
 mod steps;
 mod value;
 
+pub use bare::{AffinitiesAnswer, AffinityReport, RestAnswer, affinities, rest};
 pub use calls::{
     Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
     Version, balance, check, constant, species, version,

@@ -71,6 +71,21 @@ impl Reader {
         self.text(node)
     }
 
+    /// A number that must be there.
+    pub fn needed_number(&mut self, node: &Node) -> Option<f64> {
+        match node.value {
+            Value::Number(number) => Some(*number),
+            Value::Null => {
+                self.problems.push(node.problem(CaseCode::Missing));
+                None
+            }
+            _ => {
+                self.problems.push(node.problem(CaseCode::NotANumber));
+                None
+            }
+        }
+    }
+
     /// The items of a list; nothing if it is null, a problem if it is something else.
     pub fn items<'v>(&mut self, node: &Node<'v>) -> Vec<Node<'v>> {
         match node.value {

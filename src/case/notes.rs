@@ -1,6 +1,5 @@
 //! Notes beside the report, and the sentence of the verdict.
 
-use super::answer::equation;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
@@ -34,10 +33,10 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
 }
 
 fn equation_remarks(found: &Findings) -> Vec<Remark> {
-    if found.question.reaction.equation.coefficients_given {
+    if found.question.reaction.already_balanced {
         return Vec::new();
     }
-    vec![Remark::new(NoteCode::Balanced).with("equation", equation(found))]
+    vec![Remark::new(NoteCode::Balanced).with("equation", found.equation.text())]
 }
 
 fn pressure_remarks(found: &Findings) -> Vec<Remark> {

@@ -20,13 +20,15 @@ pub(super) struct Participant {
 #[derive(Debug, Clone)]
 pub(super) struct Participants {
     pub list: Vec<Participant>,
+    /// The equation with the phases written out.
+    pub equation: Equation,
     pub remarks: Vec<Remark>,
 }
 
 /// Which species a reading names in which phase; empty where there is no reading.
 pub(super) fn named_in(question: &Question) -> Vec<Species> {
     let gas = question.gas.iter().flat_map(|gas| &gas.entries).map(|entry| &entry.species);
-    let pure = question.pure.iter().map(|pure| &pure.entry.species);
+    let pure = question.pure.iter().map(|entry| &entry.species);
     gas.chain(pure).cloned().collect()
 }
 
@@ -67,7 +69,13 @@ pub(super) fn participants(
         };
         list.push(Participant { species, phase, nu: term.nu.to_f64(), record });
     }
-    if problems.is_empty() { Ok(Participants { list, remarks }) } else { Err(problems) }
+    if !problems.is_empty() {
+        return Err(problems);
+    }
+    // Terms and participants stand in the same order.
+    let mut named = list.iter().map(|one| &one.species);
+    let equation = equation.renamed(|species| named.next().unwrap_or(species).clone());
+    Ok(Participants { list, equation, remarks })
 }
 
 /// The phases in which the library has this substance, or the reading names it.
@@ -75,7 +83,8 @@ fn phases_known(term: &Term, reading: &[Species]) -> Vec<Phase> {
     let named = reading.iter().filter(|species| species.same_substance(&term.species));
     let mut phases: Vec<Phase> = named.filter_map(|species| species.phase).collect();
     if phases.is_empty() {
-        let records = library::find(&term.species.formula_text(), None, term.species.form());
+        let records =
+            library::find(term.species.formula.text(), None, term.species.form.as_deref());
         phases.extend(records.iter().map(|record| record.phase));
     }
     phases.sort_unstable();
@@ -106,7 +115,7 @@ fn phase_of(term: &Term, reading: &[Species], all_gas: bool) -> Result<(Phase, b
             let allowed: Vec<String> = several.iter().map(written).collect();
             let example = allowed[0].clone();
             Err(Problem::new(CaseCode::PhaseUnclear)
-                .with("species", term.species.formula_text())
+                .with("species", term.species.formula.text())
                 .with("allowed", allowed.join(" or "))
                 .with("example", example))
         }
@@ -121,7 +130,7 @@ fn record_of(
     if !from_library {
         return Ok(None);
     }
-    let records = library::find(&species.formula_text(), species.phase, species.form());
+    let records = library::find(species.formula.text(), species.phase, species.form.as_deref());
     match records[..] {
         [] => Err(unknown(species)),
         [only] => Ok(Some(only)),
@@ -137,12 +146,12 @@ fn record_of(
 
 /// The problem of a species that the library does not have, with what it has instead.
 fn unknown(species: &Species) -> Problem {
-    let formula = species.formula_text();
-    let other_phases = library::find(&formula, None, None);
+    let formula = species.formula.text();
+    let other_phases = library::find(formula, None, None);
     let try_this = if let Some(other) = other_phases.first() {
         format!("{}({})", other.formula, other.phase.symbol())
     } else {
-        match nearest(&formula, library::formulas()) {
+        match nearest(formula, library::formulas()) {
             Some(near) => near,
             None => "a species of the library".to_owned(),
         }

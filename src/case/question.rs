@@ -2,7 +2,7 @@
 
 use crate::mixture::{Entry, GasReading};
 use crate::quantity::Quantity;
-use crate::reaction::{Equation, Phase};
+use crate::reaction::Equation;
 
 /// What is held while the mixture comes to rest.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -39,24 +39,19 @@ pub(super) struct StatedK {
 #[derive(Debug, Clone)]
 pub(super) enum KSource {
     Library,
-    Value(StatedK),
+    Value(Box<StatedK>),
 }
 
 /// What is asked of one reaction.
 #[derive(Debug, Clone)]
 pub(super) struct ReactionQuestion {
     pub equation: Equation,
+    /// Whether the equation was balanced as it was written.
+    pub already_balanced: bool,
     pub source: KSource,
     /// The equation that a stated K belongs to, if not this one.
     pub constant_for: Option<Equation>,
     pub approach_k: Option<f64>,
-}
-
-/// A line of the solids or the liquid.
-#[derive(Debug, Clone)]
-pub(super) struct PureEntry {
-    pub phase: Phase,
-    pub entry: Entry,
 }
 
 /// One question, read.
@@ -71,7 +66,8 @@ pub(super) struct Question {
     pub hold: Held,
     pub volume_m3: Option<f64>,
     pub gas: Option<GasReading>,
-    pub pure: Vec<PureEntry>,
+    /// The solids and the liquid, each its own phase.
+    pub pure: Vec<Entry>,
     /// Whether a tolerance was stated anywhere.
     pub tolerances: bool,
 }

@@ -1,19 +1,16 @@
 //! The case, walked by hand: every mistake in it is found in one go.
 
 use super::node::{Node, Reader};
-use super::question::{Held, KSource, KindOfK, PureEntry, Question, ReactionQuestion, StatedK};
+use super::question::{Held, KSource, KindOfK, Question, ReactionQuestion, StatedK};
 use super::read_reading::{read_gas, read_pure};
 use super::value::Value;
-use crate::mixture::absolute_pressure_pa;
+use crate::mixture::{Entry, GasReading, absolute_pressure_pa};
 use crate::problem::{CaseCode, Outcome, Problem};
-use crate::quantity::{Measure, PressureReference, Quantity};
-use crate::reaction::{Equation, Phase, parse_equation};
+use crate::quantity::{Measure, PressureReference, Quantity, STANDARD_ATMOSPHERE_PA};
+use crate::reaction::{Balanced, Phase, balance};
 
 /// The first words of every case of this format.
-const FORMAT: &str = "shiftgauge 1";
-
-/// The standard atmosphere, the default for gauge readings, in pascal (exact).
-pub(super) const STANDARD_ATMOSPHERE_PA: f64 = 101_325.0;
+pub(super) const FORMAT: &str = "shiftgauge 1";
 
 const CASE_FIELDS: [&str; 14] = [
     "format",
@@ -144,7 +141,7 @@ fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<f64> {
     Some(atmosphere.value_si)
 }
 
-type Blocks = (Option<crate::mixture::GasReading>, Vec<PureEntry>);
+type Blocks = (Option<GasReading>, Vec<Entry>);
 
 fn read_blocks(reader: &mut Reader, reading: &Node, atmosphere_pa: f64) -> Blocks {
     if !reader.object(reading, &["gas", "liquid", "solution", "solids"]) {
@@ -193,7 +190,7 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3)];
     let source = match reader.choice(&from, &words)? {
         0 => Some(KSource::Library),
-        1 => read_stated(reader, &constant).map(KSource::Value),
+        1 => read_stated(reader, &constant).map(|stated| KSource::Value(Box::new(stated))),
         2 => {
             reader.not_yet(&from, "K from points");
             None
@@ -204,10 +201,13 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
         }
     };
     let constant_for = read_equation(reader, &constant.field("for"), false);
+    let constant_for = constant_for.map(|balanced| balanced.equation);
     let approach = constant.field("approach");
     let approach = reader.quantity(&approach, &[Measure::TemperatureDifference]);
     let approach_k = approach.map(|approach| approach.value_si);
-    Some(ReactionQuestion { equation: equation?, source: source?, constant_for, approach_k })
+    let Balanced { equation, already_balanced } = equation?;
+    let source = source?;
+    Some(ReactionQuestion { equation, already_balanced, source, constant_for, approach_k })
 }
 
 const CONSTANT_FIELDS: [&str; 11] = [
@@ -224,9 +224,9 @@ const CONSTANT_FIELDS: [&str; 11] = [
     "terms",
 ];
 
-fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Equation> {
+fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Balanced> {
     let text = if needed { reader.needed_text(node) } else { reader.text(node) }?;
-    reader.keep(node, parse_equation(text))
+    reader.keep(node, balance(text))
 }
 
 fn read_stated(reader: &mut Reader, node: &Node) -> Option<StatedK> {

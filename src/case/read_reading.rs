@@ -1,7 +1,6 @@
 //! The blocks of a reading, read into entries.
 
 use super::node::{Node, Reader};
-use super::question::PureEntry;
 use crate::mixture::{Basis, Entry, GasReading, Stated, Water, absolute_pressure_pa};
 use crate::problem::{CaseCode, Problem};
 use crate::quantity::{self, Measure};
@@ -32,8 +31,7 @@ pub(super) fn read_gas(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> 
     }
     let mut entries = Vec::new();
     for item in reader.items(&node.field("entries")) {
-        let entry =
-            read_entry(reader, &item, Phase::Gas, |reader, value| read_gas_value(reader, value));
+        let entry = read_entry(reader, &item, Phase::Gas, read_gas_value);
         entries.extend(entry);
     }
     let basis = if dry? { Basis::Dry(water?) } else { Basis::Wet };
@@ -96,14 +94,13 @@ fn read_gas_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
 }
 
 /// Reads the solids or the liquid: an object with `entries`.
-pub(super) fn read_pure(reader: &mut Reader, node: &Node, phase: Phase) -> Vec<PureEntry> {
+pub(super) fn read_pure(reader: &mut Reader, node: &Node, phase: Phase) -> Vec<Entry> {
     if !reader.object(node, &["entries"]) {
         return Vec::new();
     }
     let mut entries = Vec::new();
     for item in reader.items(&node.field("entries")) {
-        let entry = read_entry(reader, &item, phase, read_pure_value);
-        entries.extend(entry.map(|entry| PureEntry { phase, entry }));
+        entries.extend(read_entry(reader, &item, phase, read_pure_value));
     }
     entries
 }

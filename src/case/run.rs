@@ -13,11 +13,13 @@ use crate::equilibrium::{Affinity, Kind, Quotient, Rest, State, System, affinity
 use crate::library::Temperature;
 use crate::mixture::Held;
 use crate::problem::{Outcome, Problem, Remark};
-use crate::reaction::Phase;
+use crate::reaction::{Equation, Phase};
 
 /// All that was found out about a case, in the rooms' own types; the report is written from it.
 pub(super) struct Findings {
     pub question: Question,
+    /// The equation with its phases.
+    pub equation: Equation,
     pub participants: Vec<Participant>,
     pub constant: Constant,
     /// Where K was taken: the reading's temperature, less a stated approach.
@@ -63,7 +65,8 @@ fn find(question: Question) -> Outcome<Findings> {
     let found = participants(&question.reaction.equation, &reading, from_library);
     let found = found.map_err(|problems| at_field(problems, EQUATION))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
-    let constant = constant_of(&question, &found.list, delta_nu_gas)?;
+    let equation = found.equation;
+    let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
     let at = constant.at(k_temperature);
     let mut remarks = found.remarks;
@@ -79,6 +82,7 @@ fn find(question: Question) -> Outcome<Findings> {
         reading.as_ref().map_or(found.list, |reading| reading.setting.participants.clone());
     Ok(Findings {
         question,
+        equation,
         participants,
         constant,
         k_temperature,
@@ -125,7 +129,7 @@ fn judge_reading(
     let quotient = quotient(&system, &state)?;
     let affinity = affinity(&system, &state, ln_k)?;
     let rest = rest(&system, &state, ln_k)?;
-    let verdict = judge(affinity, rest.outcome);
+    let verdict = judge(affinity, rest.summary.outcome);
     let ln_q = match quotient {
         Quotient::Finite(ln_q) => Some(ln_q),
         _ => None,

@@ -3,7 +3,7 @@
 use super::participants::Participant;
 use super::question::{self, Question};
 use crate::equilibrium::Hold;
-use crate::mixture::{AmountBasis, Closing, Entry, GasMixture, Held, gas_mixture, pure_phases};
+use crate::mixture::{AmountBasis, Closing, GasMixture, Held, gas_mixture, pure_phases};
 use crate::problem::{CaseCode, NoteCode, Outcome, Problem, Remark};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::{Phase, Species};
@@ -23,6 +23,8 @@ pub(super) struct Setting {
     pub volume_m3: Option<f64>,
     pub basis: AmountBasis,
     pub gas_mol: f64,
+    /// The fraction of water that was added to a dry analysis.
+    pub added_water_fraction: Option<f64>,
     pub remarks: Vec<Remark>,
 }
 
@@ -45,8 +47,7 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     let gas_basis = gas.as_ref().map(|gas| gas.basis);
     // With the volume known as well, even fractions stand for amounts.
     let measured = if question.volume_m3.is_some() { None } else { gas_basis };
-    let entries: Vec<Entry> = question.pure.iter().map(|pure| pure.entry.clone()).collect();
-    let pure = pure_phases(&entries, measured).unwrap_or_else(|found| {
+    let pure = pure_phases(&question.pure, measured).unwrap_or_else(|found| {
         problems.extend(found);
         Vec::new()
     });
@@ -55,7 +56,7 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     }
     let mut remarks = remarks_of(question, gas.as_ref());
     let pure: Vec<(&Species, Held)> =
-        entries.iter().map(|entry| &entry.species).zip(pure).collect();
+        question.pure.iter().map(|entry| &entry.species).zip(pure).collect();
     let mut held = held_of(&participants, gas.as_ref(), &pure, &mut remarks);
     add_inerts(&mut participants, &mut held, gas.as_ref(), &pure);
     let any_gas = participants.iter().any(|participant| participant.phase == Phase::Gas);
@@ -68,6 +69,7 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
         volume_m3: None,
         basis,
         gas_mol: gas.as_ref().map_or(0.0, |gas| gas.total_mol),
+        added_water_fraction: gas.as_ref().and_then(|gas| gas.added_water_fraction),
         remarks,
     };
     if any_gas {
@@ -84,7 +86,7 @@ fn in_block(problem: Problem, block: &str) -> Problem {
 fn remarks_of(question: &Question, gas: Option<&GasMixture>) -> Vec<Remark> {
     let (Some(gas), Some(reading)) = (gas, &question.gas) else { return Vec::new() };
     let mut remarks = Vec::new();
-    let name = |entry: usize| reading.entries[entry].species.formula_text();
+    let name = |entry: usize| reading.entries[entry].species.formula.text();
     let per_cent = |fraction: f64| format!("{:.3}", fraction * 100.0);
     match gas.closing {
         Closing::ByRemainder { entry, fraction } => {

@@ -122,7 +122,7 @@ fn quotient_formula(found: &Findings) -> String {
             .filter(|participant| matches!(participant.phase, Phase::Gas | Phase::Aqueous))
             .map(|participant| {
                 let power = participant.nu.abs();
-                let species = participant.species.formula_text();
+                let species = participant.species.formula.text();
                 if power == 1.0 { format!("a({species})") } else { format!("a({species})^{power}") }
             })
             .collect()
@@ -177,7 +177,7 @@ fn quotient_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
 }
 
 fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
-    let rest = &reading.rest;
+    let rest = &reading.rest.summary;
     let held = match reading.setting.hold {
         Hold::Pressure { .. } => "temperature and pressure",
         Hold::Volume { .. } => "temperature and volume",
@@ -191,7 +191,7 @@ fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
             .with("outcome", rest.outcome.as_str())
             .with("iterations", rest.iterations.to_string()),
     )];
-    let state = reading.state(found.question.temperature.value_si, &rest.amounts_mol);
+    let state = reading.state(found.question.temperature.value_si, &reading.rest.amounts_mol);
     let at_rest = crate::equilibrium::quotient(&reading.system, &state);
     if let Some(ln_q) = at_rest.ok().and_then(ln_q) {
         let line = Step::new(StepCode::RestCheck)

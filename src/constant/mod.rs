@@ -1,11 +1,9 @@
 //! K of a reaction at a temperature, where it comes from, and the numbers people call K.
 
 mod forms;
-mod multiple;
 mod stated;
 
 pub use forms::{Form, FormValue, PRESSURE_UNITS, PressureUnit, all_forms};
-pub use multiple::multiple_of;
 pub use stated::{Carried, StatedConstant};
 
 use crate::library::{Combination, Reach, Temperature};

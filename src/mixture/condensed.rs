@@ -25,7 +25,7 @@ pub fn pure_phases(entries: &[Entry], gas: Option<AmountBasis>) -> Outcome<Vec<H
     let mut held = Vec::with_capacity(entries.len());
     for (i, entry) in entries.iter().enumerate() {
         if entries[..i].iter().any(|earlier| earlier.species.same_substance(&entry.species)) {
-            let name = entry.species.formula_text();
+            let name = entry.species.text();
             let problem = Problem::new(MixtureCode::SpeciesTwice).with("species", name);
             problems.push(problem.at(&entry.field));
         }
@@ -60,7 +60,7 @@ fn held_of(entry: &Entry, gas: Option<AmountBasis>) -> Result<Held, Problem> {
     if !mass {
         return Ok(Held::Mol(quantity.value_si));
     }
-    let molar_mass = entry.species.molar_mass_kg_per_mol();
+    let molar_mass = entry.species.formula.molar_mass_kg_per_mol();
     let molar_mass = molar_mass.ok_or_else(|| no_molar_mass(&entry.species))?;
     Ok(Held::Mol(quantity.value_si / molar_mass))
 }

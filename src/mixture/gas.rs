@@ -2,10 +2,10 @@
 
 use super::closing::{Closing, close};
 use super::reading::{Basis, Entry, GasReading, Stated};
-use super::water::{WATER, water_fraction};
+use super::water::water_fraction;
 use crate::problem::{MixtureCode, Outcome, Problem};
 use crate::quantity::{FractionBasis, Measure, PressureReference, Quantity};
-use crate::reaction::Species;
+use crate::reaction::{Species, parse_species};
 
 /// What the amounts of a gas stand for.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -46,12 +46,14 @@ pub struct GasMixture {
 /// a negative remainder, a species twice, water named in a dry analysis, a water content that is no
 /// fraction.
 pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<GasMixture> {
+    let water_species = parse_species("H2O(g)")?;
     let mut problems = Vec::new();
     if reading.entries.is_empty() {
         return Err(Problem::new(MixtureCode::Empty).at("entries").into());
     }
     let dry = matches!(reading.basis, Basis::Dry(_));
-    refuse_repeats(&reading.entries, dry, &mut problems);
+    let apart = dry.then_some(&water_species);
+    refuse_repeats(&reading.entries, apart, &mut problems);
     let stated: Vec<Option<(Form, f64)>> = reading
         .entries
         .iter()
@@ -92,7 +94,7 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
         } else {
             dry_mol * fraction / (1.0 - fraction)
         };
-        amounts_mol.push((WATER.clone(), water_mol));
+        amounts_mol.push((water_species, water_mol));
     }
     let total_mol = amounts_mol.iter().map(|(_, amount)| amount).sum();
     let bounds = reading.entries.iter().filter(|entry| is_bound(entry));
@@ -124,7 +126,7 @@ fn form_of(entry: &Entry, dry: bool, pressure_pa: Option<f64>) -> Result<(Form, 
             Err(Problem::new(MixtureCode::MassFractionInGas))
         }
         Measure::Fraction | Measure::Number => Ok((Form::Fraction, quantity.value_si)),
-        Measure::MassPerAmount => match entry.species.molar_mass_kg_per_mol() {
+        Measure::MassPerAmount => match entry.species.formula.molar_mass_kg_per_mol() {
             Some(molar_mass) => Ok((Form::Fraction, quantity.value_si / molar_mass)),
             None => Err(no_molar_mass(&entry.species)),
         },
@@ -135,7 +137,7 @@ fn form_of(entry: &Entry, dry: bool, pressure_pa: Option<f64>) -> Result<(Form, 
 }
 
 pub(super) fn no_molar_mass(species: &Species) -> Problem {
-    Problem::new(MixtureCode::NoMolarMass).with("species", species.formula_text())
+    Problem::new(MixtureCode::NoMolarMass).with("species", species.text())
 }
 
 fn partial_pressure(
@@ -155,14 +157,15 @@ fn partial_pressure(
     }
 }
 
-fn refuse_repeats(entries: &[Entry], dry: bool, problems: &mut Vec<Problem>) {
+/// A species may stand in one line only, and the water of a dry analysis, stated apart, in none.
+fn refuse_repeats(entries: &[Entry], apart: Option<&Species>, problems: &mut Vec<Problem>) {
     for (i, entry) in entries.iter().enumerate() {
-        let name = entry.species.formula_text();
         if entries[..i].iter().any(|earlier| earlier.species.same_substance(&entry.species)) {
-            let problem = Problem::new(MixtureCode::SpeciesTwice).with("species", name.clone());
+            let problem =
+                Problem::new(MixtureCode::SpeciesTwice).with("species", entry.species.text());
             problems.push(problem.at(&entry.field));
         }
-        if dry && entry.species.same_substance(&WATER) {
+        if apart.is_some_and(|apart| apart.same_substance(&entry.species)) {
             problems.push(Problem::new(MixtureCode::WaterInDry).at(&entry.field));
         }
     }

@@ -1,14 +1,8 @@
 //! The water of a dry analysis.
 
-use std::sync::LazyLock;
-
 use super::reading::Water;
 use super::saturation::water_saturation_pressure_pa;
 use crate::problem::{MixtureCode, Problem};
-use crate::reaction::Species;
-
-/// Water, the species that a dry analysis leaves out.
-pub(super) static WATER: LazyLock<Species> = LazyLock::new(Species::water_gas);
 
 /// The fraction of water in the wet gas, from any of the ways it is stated.
 ///

@@ -127,6 +127,7 @@ codes! {
         Format = "case-format",
         Missing = "field-missing",
         NotAText = "not-a-text",
+        NotANumber = "not-a-number",
         NotAList = "not-a-list",
         NotAnObject = "not-an-object",
         UnknownField = "unknown-field",

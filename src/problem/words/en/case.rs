@@ -13,6 +13,10 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "A text is needed here, not {found}.",
             "Put the value with its unit in quotes, such as 215 °C.",
         ),
+        C::NotANumber => (
+            "A number is needed here, not {found}.",
+            "Write the number itself, without quotes or unit.",
+        ),
         C::NotAList => ("A list is needed here, not {found}.", "Put the items in square brackets."),
         C::NotAnObject => (
             "An object with named fields is needed here, not {found}.",
