@@ -1,1 +1,11 @@
 //! Mathematics without chemistry.
+
+mod exact;
+mod root;
+mod scaled;
+mod step;
+
+pub use exact::{difference_of_products, two_product, two_sum};
+pub use root::{Root, RootOutcome, root_between};
+pub use scaled::{LN_2_TAIL, Scaled, split, times_power_of_two};
+pub use step::{growth, step_in_power};
