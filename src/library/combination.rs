@@ -1,6 +1,5 @@
 //! A reaction's species summed once, so that K at any T is one short polynomial.
 
-use super::GAS_CONSTANT_J_PER_MOL_K;
 use super::polynomial::Piece;
 use super::polynomial::Polynomial;
 use super::polynomial::holding;
@@ -10,6 +9,7 @@ use super::temperature::Temperature;
 use crate::problem::LibraryCode;
 use crate::problem::Outcome;
 use crate::problem::Problem;
+use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// The largest stoichiometric number that a combination takes, either sign.
 pub const STOICHIOMETRIC_LIMIT: f64 = 1e6;

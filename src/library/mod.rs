@@ -41,10 +41,6 @@ use crate::problem::Outcome;
 use crate::problem::Problem;
 use crate::reaction::Phase;
 
-/// The gas constant R in J/(mol K), exact: k·N_A = 1.380649e−23 × 6.02214076e23 in the SI
-/// (CODATA 2018 and later).
-pub const GAS_CONSTANT_J_PER_MOL_K: f64 = 8.314_462_618_153_24;
-
 /// Every record whose formula is spelled so, in the phase and the form if they are given.
 ///
 /// The order is that of the table (by id). An unknown formula gives an empty list.

@@ -1,12 +1,12 @@
 //! What is known of one species, and its properties at a temperature.
 
-use super::GAS_CONSTANT_J_PER_MOL_K;
 use super::polynomial::Piece;
 use super::polynomial::Polynomial;
 use super::polynomial::holding;
 use super::table::citation;
 use super::temperature::TEMPERATURE_LIMITS_K;
 use super::temperature::Temperature;
+use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::Phase;
 
 /// Whether a property at T rests on the record's data or on constant heat capacity beyond them.

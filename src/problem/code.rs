@@ -160,6 +160,20 @@ codes! {
     /// What the bare calls cannot work with.
     EquilibriumCode in Equilibrium {
         Shape = "problem-shape",
+        LengthsDiffer = "lengths-differ",
+        TooManySpecies = "too-many-species",
+        NotFinite = "number-not-finite",
+        NuOutOfRange = "nu-out-of-range",
+        NothingReacts = "nothing-reacts",
+        AmountOutOfRange = "amount-out-of-range",
+        LnKOutOfRange = "ln-k-out-of-range",
+        TemperatureNotPositive = "temperature-not-positive",
+        PressureNotPositive = "pressure-not-positive",
+        VolumeNotPositive = "volume-not-positive",
+        SolutesWithGas = "solutes-with-gas",
+        SolutesHoldPressure = "solutes-hold-pressure",
+        NoReaction = "no-reaction",
+        ManyReactions = "many-reactions",
     }
 }
 

@@ -9,6 +9,9 @@ pub const GAS_CONSTANT_J_PER_MOL_K: f64 = 8.314_462_618_153_24;
 /// The standard pressure p°, Pa, of every species: 1 bar, exact by convention (IUPAC, 1982).
 pub const STANDARD_PRESSURE_PA: f64 = 1e5;
 
+/// The standard concentration c° of solutes, mol/m³: 1 mol/L, exact by convention (IUPAC).
+pub const STANDARD_CONCENTRATION_MOL_PER_M3: f64 = 1000.0;
+
 /// The standard atmosphere, Pa: exact by convention (10th CGPM, 1954; NIST SP 811).
 pub const STANDARD_ATMOSPHERE_PA: f64 = 101_325.0;
 

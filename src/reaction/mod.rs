@@ -12,6 +12,7 @@ mod formula;
 mod formula_reader;
 mod formula_text;
 mod limits;
+mod naming;
 mod nearest;
 mod phase;
 mod place;

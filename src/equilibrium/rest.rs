@@ -1,0 +1,396 @@
+//! The state where the reaction stops.
+
+use super::limits::check_ln_k;
+use super::quotient::{Affinity, constant_affinity, constant_quotient, less};
+use super::side::{Point, Side, Term};
+use super::solve::{Zero, solve};
+use super::state::State;
+use super::system::{Kind, System};
+use super::walls::{Wall, Way};
+use crate::numeric::{split, times_power_of_two};
+use crate::problem::Outcome;
+use serde::Serialize;
+
+/// How the search for rest ended; read it before any number.
+#[derive(Debug, Clone, Copy, PartialEq, Eq, Serialize)]
+pub enum RestOutcome {
+    /// The affinity is zero.
+    #[serde(rename = "rest")]
+    Rest,
+    /// A pure phase is used up; the affinity keeps its sign.
+    #[serde(rename = "phase exhausted")]
+    PhaseExhausted,
+    /// Q does not depend on the extent and is not K: something is used up, a pure phase or the gas.
+    #[serde(rename = "ran to its limit")]
+    RanToItsLimit,
+    /// Q does not depend on the extent and is K (to the rounding of the inputs).
+    #[serde(rename = "any extent is at rest")]
+    AnyExtentIsAtRest,
+    /// A reactant and a product are absent.
+    #[serde(rename = "nothing can move")]
+    NothingCanMove,
+    /// Nothing that is known in amount is used up, and Q never reaches K (or only at an amount
+    /// above [`super::AMOUNT_MAX_MOL`]): the amounts are those of the start. This needs an ample
+    /// phase, or a reaction written with one side only.
+    #[serde(rename = "has no limit")]
+    HasNoLimit,
+}
+
+impl RestOutcome {
+    /// The outcome's name at the border.
+    #[must_use]
+    pub fn as_str(self) -> &'static str {
+        match self {
+            RestOutcome::Rest => "rest",
+            RestOutcome::PhaseExhausted => "phase exhausted",
+            RestOutcome::RanToItsLimit => "ran to its limit",
+            RestOutcome::AnyExtentIsAtRest => "any extent is at rest",
+            RestOutcome::NothingCanMove => "nothing can move",
+            RestOutcome::HasNoLimit => "has no limit",
+        }
+    }
+}
+
+/// What is known of a state of rest beside its amounts.
+#[derive(Debug, Clone, Copy, PartialEq, Serialize)]
+pub struct Summary {
+    /// How the search ended.
+    pub outcome: RestOutcome,
+    /// ξ from the start to rest, in mol: n_i = n_i,start + ν_i ξ. Zero where any extent is at rest.
+    pub extent_mol: f64,
+    /// The lowest extent, where the first product is used up; none without such a product.
+    pub extent_min_mol: Option<f64>,
+    /// The highest extent, where the first reactant is used up; none without such a reactant.
+    pub extent_max_mol: Option<f64>,
+    /// A/RT in the final state: about zero at rest, with its sign where a phase is exhausted.
+    pub affinity: Affinity,
+    /// What is left of A/RT that the outcome does not explain: |A/RT| at rest, zero otherwise.
+    pub residual: f64,
+    /// Steps of the solver.
+    pub iterations: u32,
+    /// The largest |∂ ln n_i/∂ ln K| at rest: how many per cent an amount changes when K changes
+    /// by one per cent. Zero where the outcome is not rest.
+    pub condition: f64,
+}
+
+/// The state of rest: its summary and its amounts.
+#[derive(Debug, Clone, PartialEq)]
+pub struct Rest {
+    /// Outcome, extent, residual.
+    pub summary: Summary,
+    /// Amounts in mol; zero for what is used up, or below 5e-324.
+    pub amounts_mol: Vec<f64>,
+    /// ln(n/mol), also of traces below any double; none for what is absent and for ample phases.
+    pub ln_amounts: Vec<Option<f64>>,
+}
+
+/// Room for one calculation, to be used again so that nothing is allocated in a loop.
+#[derive(Debug, Default, Clone)]
+pub struct Workspace {
+    amounts_mol: Vec<f64>,
+    scaled: Vec<f64>,
+    terms: Vec<Term>,
+    shift: i32,
+    trace: Option<(Way, f64)>,
+}
+
+impl Workspace {
+    /// The amounts in mol of the last state of rest.
+    #[must_use]
+    pub fn amounts_mol(&self) -> &[f64] {
+        &self.amounts_mol
+    }
+
+    /// ln(n/mol) of one species in the last state of rest of this system; none if it is absent or
+    /// ample.
+    #[must_use]
+    pub fn ln_amount(&self, system: &System, species: usize) -> Option<f64> {
+        let (&kind, &nu) = (system.kinds.get(species)?, system.nu.get(species)?);
+        let &amount = self.amounts_mol.get(species)?;
+        if kind == Kind::Ample {
+            return None;
+        }
+        if amount > 1e-290 || amount > 0.0 && nu == 0.0 {
+            return Some(libm::log(amount));
+        }
+        let unshift = f64::from(self.shift) * std::f64::consts::LN_2;
+        match (self.scaled.get(species), self.trace) {
+            (Some(&scaled), _) if scaled > 0.0 && nu != 0.0 => Some(libm::log(scaled) - unshift),
+            (_, Some((way, ln_distance))) if nu * way.used_up() > 0.0 => {
+                Some(libm::log(nu.abs()) + ln_distance - unshift)
+            }
+            _ => None,
+        }
+    }
+}
+
+/// The state of rest that is reached from a state, at its temperature and with its pressure or
+/// volume held.
+///
+/// The amounts minimise G (or A at constant volume) along ξ: ln K = Σ ν_i ln a_i, or a pure phase
+/// is used up first. For ideal mixtures there is one such state. It is sought in the logarithm of
+/// the distance from the nearer limit of ξ, so that traces are as good as main components: on 500
+/// problems with K from 1e-300 to 1e300 no ln n is wrong by more than 1e-12, or by eight times the
+/// change that one unit in the last place of some input makes, if that is more.
+///
+/// Where pressure is held and there is no gas at first, the gas that forms has y_i = ν_i/Δν.
+///
+/// # Errors
+/// As [`State::check`], and `ln-k-out-of-range` unless |ln K| ≤ [`super::LN_K_MAX`].
+///
+/// ```
+/// use shiftgauge::equilibrium::{Hold, Kind, RestOutcome, State, System, rest};
+/// // A = B with K = 3: three quarters are B.
+/// let system = System::new(&[Kind::Gas; 2], &[-1.0, 1.0]).unwrap();
+/// let hold = Hold::Pressure { pressure_pa: 100_000.0 };
+/// let state = State { temperature_k: 500.0, hold, amounts_mol: &[1.0, 0.0] };
+/// let end = rest(&system, &state, 3f64.ln()).unwrap();
+/// assert_eq!(end.summary.outcome, RestOutcome::Rest);
+/// assert!((end.amounts_mol[1] - 0.75).abs() < 1e-15);
+/// ```
+pub fn rest(system: &System, state: &State, ln_k: f64) -> Outcome<Rest> {
+    let mut workspace = Workspace::default();
+    let summary = rest_into(system, state, ln_k, &mut workspace)?;
+    let ln_amounts =
+        (0..system.kinds.len()).map(|species| workspace.ln_amount(system, species)).collect();
+    Ok(Rest { summary, amounts_mol: workspace.amounts_mol, ln_amounts })
+}
+
+/// As [`rest`], leaving the amounts in a workspace that is used again.
+///
+/// # Errors
+/// As [`rest`]; the workspace then holds what it held before.
+pub fn rest_into(
+    system: &System,
+    state: &State,
+    ln_k: f64,
+    workspace: &mut Workspace,
+) -> Outcome<Summary> {
+    check_ln_k(ln_k)?;
+    state.check(system)?;
+    Ok(Search::begin(system, state, ln_k, workspace).run())
+}
+
+/// One search.
+struct Search<'a> {
+    system: &'a System,
+    state: &'a State<'a>,
+    ln_k: f64,
+    workspace: &'a mut Workspace,
+    forward: Option<Wall>,
+    reverse: Option<Wall>,
+}
+
+impl<'a> Search<'a> {
+    fn begin(
+        system: &'a System,
+        state: &'a State<'a>,
+        ln_k: f64,
+        workspace: &'a mut Workspace,
+    ) -> Search<'a> {
+        let amounts = state.amounts_mol;
+        workspace.amounts_mol.clear();
+        workspace.amounts_mol.extend_from_slice(amounts);
+        workspace.trace = None;
+        workspace.shift = shift(system, state);
+        workspace.scaled.clear();
+        let shift = workspace.shift;
+        workspace.scaled.extend(amounts.iter().map(|&x| times_power_of_two(x, shift)));
+        let forward = Wall::find(system, &workspace.scaled, Way::Forward);
+        let reverse = Wall::find(system, &workspace.scaled, Way::Reverse);
+        Search { system, state, ln_k, workspace, forward, reverse }
+    }
+
+    fn run(mut self) -> Summary {
+        let closed = |wall: &Option<Wall>| wall.is_some_and(|wall| wall.distance == 0.0);
+        if closed(&self.forward) && closed(&self.reverse) {
+            return self.stay(RestOutcome::NothingCanMove);
+        }
+        if constant_quotient(self.system, self.state, self.state.amounts_mol) {
+            return self.run_to_limit();
+        }
+        let far = match (self.forward, self.reverse) {
+            (Some(forward), Some(reverse)) => return self.between(forward, reverse),
+            (Some(wall), None) | (None, Some(wall)) => wall,
+            (None, None) => return self.stay(RestOutcome::HasNoLimit),
+        };
+        self.across_from_wall(far)
+    }
+
+    /// Both walls are there: the sign of the affinity in the middle says which is nearer.
+    fn between(&mut self, forward: Wall, reverse: Wall) -> Summary {
+        let middle = 0.5 * (forward.distance + reverse.distance);
+        let mut terms = std::mem::take(&mut self.workspace.terms);
+        let side = self.side(&forward, &mut terms);
+        let point = side.point(middle);
+        let summary = if point.value >= 0.0 {
+            self.near(&forward, &side, middle, point, middle)
+        } else {
+            // The same point seen from the other wall.
+            let point = Point {
+                value: -point.value,
+                slope: point.slope,
+                curvature: 2.0 * point.slope - point.curvature,
+            };
+            let side = self.side(&reverse, &mut terms);
+            self.near(&reverse, &side, middle, point, middle)
+        };
+        self.workspace.terms = terms;
+        summary
+    }
+
+    /// There is no wall the other way.
+    fn across_from_wall(&mut self, wall: Wall) -> Summary {
+        if self.state.by_fraction(self.system) {
+            let towards_wall = match wall.way {
+                Way::Forward => 1.0,
+                Way::Reverse => -1.0,
+            };
+            if constant_affinity(self.system, self.state, self.ln_k) * towards_wall <= 0.0 {
+                return self.stay(RestOutcome::HasNoLimit);
+            }
+        }
+        let mut terms = std::mem::take(&mut self.workspace.terms);
+        let side = self.side(&wall, &mut terms);
+        let order = side.order();
+        let start = if order > 0.0 {
+            libm::exp((-side.intercept() / order).clamp(-690.0, 690.0))
+        } else {
+            let reach = side.terms.iter().map(|term| term.at_wall / term.slope);
+            reach.fold(f64::MAX, f64::min).clamp(1e-299, 1e299)
+        };
+        let point = side.point(start);
+        let summary = self.near(&wall, &side, start, point, f64::INFINITY);
+        self.workspace.terms = terms;
+        summary
+    }
+
+    fn side<'t>(&self, wall: &Wall, terms: &'t mut Vec<Term>) -> Side<'t> {
+        let Workspace { scaled, shift, .. } = &*self.workspace;
+        Side::new(self.system, self.state, self.ln_k, wall, scaled, *shift, terms)
+    }
+
+    /// Rest is on this wall's side of `high`, or at the wall.
+    fn near(&mut self, wall: &Wall, side: &Side, start: f64, first: Point, high: f64) -> Summary {
+        let order = side.order();
+        let away = match wall.way {
+            Way::Forward => 1.0,
+            Way::Reverse => -1.0,
+        };
+        if order == 0.0 {
+            let at_wall = side.value(0.0);
+            if at_wall >= 0.0 {
+                let outcome =
+                    if at_wall == 0.0 { RestOutcome::Rest } else { RestOutcome::PhaseExhausted };
+                self.move_to(wall, 0.0);
+                let extent = away * wall.distance;
+                return self.summary(outcome, extent, Affinity::Finite(away * at_wall));
+            }
+        }
+        let (zero, iterations) = solve(side, order, start, first, high);
+        let distance = match zero {
+            Zero::Nowhere => {
+                return Summary { iterations, ..self.stay(RestOutcome::HasNoLimit) };
+            }
+            Zero::At { distance } => distance,
+            Zero::Trace { ln_distance } => {
+                self.workspace.trace = Some((wall.way, ln_distance));
+                0.0
+            }
+        };
+        self.move_to(wall, distance);
+        if self.workspace.amounts_mol.iter().any(|&amount| amount > super::AMOUNT_MAX_MOL * 1e7) {
+            return Summary { iterations, ..self.stay(RestOutcome::HasNoLimit) };
+        }
+        let (left, condition) = if distance > 0.0 {
+            let point = side.point(distance);
+            (point.value, self.condition(wall, distance, point.slope))
+        } else {
+            (0.0, 1.0 / order)
+        };
+        let extent = away * (wall.distance - distance);
+        let summary = self.summary(RestOutcome::Rest, extent, Affinity::Finite(away * left));
+        Summary { residual: left.abs(), iterations, condition, ..summary }
+    }
+
+    /// The largest |ν_i| d/n_i over the slope of the affinity in ln d.
+    fn condition(&self, wall: &Wall, distance: f64, slope: f64) -> f64 {
+        let mut largest = 0.0_f64;
+        for (&nu, &amount) in self.system.nu.iter().zip(&self.workspace.scaled) {
+            if nu != 0.0 && amount > 0.0 {
+                largest = largest.max((wall.slope_of(nu) * distance / amount).abs());
+            }
+        }
+        let condition = largest / slope;
+        if condition.is_finite() { condition } else { f64::MAX }
+    }
+
+    /// Q is the same everywhere.
+    fn run_to_limit(&mut self) -> Summary {
+        let affinity = constant_affinity(self.system, self.state, self.ln_k);
+        let powers: f64 = self.system.mixed.iter().map(|mixed| mixed.nu.abs()).sum();
+        let rounding = 4.0 * f64::EPSILON * powers.max(self.ln_k.abs()).max(1.0);
+        if affinity.abs() <= rounding {
+            return self.stay(RestOutcome::AnyExtentIsAtRest);
+        }
+        let (wall, away) = if affinity > 0.0 { (self.forward, 1.0) } else { (self.reverse, -1.0) };
+        let Some(wall) = wall else { return self.stay(RestOutcome::HasNoLimit) };
+        self.move_to(&wall, 0.0);
+        let extent = away * wall.distance;
+        self.summary(RestOutcome::RanToItsLimit, extent, Affinity::Finite(affinity))
+    }
+
+    /// Puts the amounts where they are at a distance from a wall.
+    fn move_to(&mut self, wall: &Wall, distance: f64) {
+        let Workspace { amounts_mol, scaled, shift, .. } = &mut *self.workspace;
+        for (species, (&nu, &kind)) in self.system.nu.iter().zip(&self.system.kinds).enumerate() {
+            if nu == 0.0 || kind == Kind::Ample {
+                continue;
+            }
+            scaled[species] = wall.amount_of(nu, scaled[species]) + wall.slope_of(nu) * distance;
+            amounts_mol[species] = times_power_of_two(scaled[species], -*shift);
+        }
+    }
+
+    /// The amounts stay as they came.
+    fn stay(&mut self, outcome: RestOutcome) -> Summary {
+        self.workspace.amounts_mol.clear();
+        self.workspace.amounts_mol.extend_from_slice(self.state.amounts_mol);
+        let shift = self.workspace.shift;
+        self.workspace.scaled.clear();
+        let amounts = self.state.amounts_mol.iter();
+        self.workspace.scaled.extend(amounts.map(|&x| times_power_of_two(x, shift)));
+        let affinity = less(self.system, self.state, self.ln_k);
+        self.summary(outcome, 0.0, affinity)
+    }
+
+    fn summary(&self, outcome: RestOutcome, scaled_extent: f64, affinity: Affinity) -> Summary {
+        let unshift = |x: f64| times_power_of_two(x, -self.workspace.shift);
+        Summary {
+            outcome,
+            extent_mol: unshift(scaled_extent),
+            extent_min_mol: self.reverse.map(|wall| -unshift(wall.distance)),
+            extent_max_mol: self.forward.map(|wall| unshift(wall.distance)),
+            affinity,
+            residual: 0.0,
+            iterations: 0,
+            condition: 0.0,
+        }
+    }
+}
+
+/// The power of two that amounts are multiplied by, so that the largest that matters is near 2^990
+/// and traces of 1e-590 of it can still be worked with. Without a wall one way the distance may
+/// become large, so nothing is scaled.
+fn shift(system: &System, state: &State) -> i32 {
+    let by_fraction = state.by_fraction(system);
+    let (mut largest, mut used_up, mut made) = (0.0_f64, false, false);
+    for ((&kind, &nu), &amount) in system.kinds.iter().zip(&system.nu).zip(state.amounts_mol) {
+        if kind != Kind::Ample && (nu != 0.0 || by_fraction && kind == Kind::Gas) {
+            largest = largest.max(amount);
+            used_up |= nu < 0.0;
+            made |= nu > 0.0;
+        }
+    }
+    if largest == 0.0 || !(used_up && made) { 0 } else { 990 - split(largest).1 }
+}

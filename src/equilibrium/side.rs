@@ -1,0 +1,232 @@
+//! The affinity as a function of the distance d from one wall.
+//!
+//! Every amount is n_i = r_i + w_i d, with r_i its amount at the wall and w_i = ∓ν_i. For a root
+//! that is nearer to this wall than to the other, no amount is formed by a subtraction that loses
+//! digits, so traces are as accurate as the rest.
+//!
+//! With the sign that makes it rise with d,
+//! h(d) = Σ w_i ln a_i ∓ ln K, and in u = ln d
+//! dh/du = Σ (d/n_i)(w_i − D y_i)² over all gases, inert ones too,
+//! where D = Σ w_i over gases at constant pressure and D = 0 at constant volume.
+//! The bracket is formed as w_i R/n_t − D r_i/n_t with R = Σ r_i, because d drops out of it.
+
+use super::state::State;
+use super::system::System;
+use super::walls::{Wall, Way};
+use crate::numeric::{LN_2_TAIL, Scaled, split, two_product, two_sum};
+
+/// A reacting species of a mixture, seen from one wall.
+#[derive(Debug, Clone, Copy)]
+pub(super) struct Term {
+    /// The amount at the wall, scaled.
+    pub at_wall: f64,
+    /// w: the change of the amount with the distance.
+    pub slope: f64,
+    /// w times the system's multiple, where that is whole.
+    pub power: i32,
+}
+
+/// The affinity seen from one wall. Amounts are scaled by 2^`shift`.
+#[derive(Debug)]
+pub(super) struct Side<'a> {
+    pub terms: &'a [Term],
+    /// R and the amount of inert gas in it; 1 and 0 where fractions do not matter.
+    total: f64,
+    inert: f64,
+    /// D, and D times the multiple.
+    total_slope: f64,
+    total_power: i32,
+    /// The whole powers that do not change with d.
+    fixed: Scaled,
+    /// ± ln K with the logarithms that the slow path needs.
+    target: f64,
+    multiple: f64,
+}
+
+/// h and its first two derivatives in ln d.
+#[derive(Debug, Clone, Copy)]
+pub(super) struct Point {
+    pub value: f64,
+    pub slope: f64,
+    pub curvature: f64,
+}
+
+impl<'a> Side<'a> {
+    /// Sets up the terms and the constants for one wall.
+    pub fn new(
+        system: &System,
+        state: &State,
+        ln_k: f64,
+        wall: &Wall,
+        scaled: &[f64],
+        shift: i32,
+        terms: &'a mut Vec<Term>,
+    ) -> Side<'a> {
+        let sign = match wall.way {
+            Way::Forward => -1,
+            Way::Reverse => 1,
+        };
+        terms.clear();
+        let mut total = 0.0;
+        for mixed in &system.mixed {
+            let at_wall = wall.amount_of(mixed.nu, scaled[mixed.species]);
+            total += at_wall;
+            let slope = wall.slope_of(mixed.nu);
+            terms.push(Term { at_wall, slope, power: sign * mixed.power });
+        }
+        let by_fraction = state.by_fraction(system);
+        let mut inert = 0.0;
+        if by_fraction {
+            inert = inert_gas(system, scaled);
+            total += inert;
+        } else {
+            total = 1.0;
+        }
+        let signed = f64::from(sign);
+        let (delta, delta_power) = if by_fraction {
+            (signed * system.delta_nu, sign * system.delta_power)
+        } else {
+            (0.0, 0)
+        };
+        let mut side = Side {
+            terms,
+            total,
+            inert,
+            total_slope: delta,
+            total_power: -delta_power,
+            fixed: Scaled::ONE,
+            target: signed * ln_k,
+            multiple: system.multiple,
+        };
+        // At constant volume the scaling of the amounts shows; fractions do not see it.
+        let unscale = if by_fraction { 0 } else { -i64::from(shift) };
+        if system.multiple > 0.0 {
+            let power = sign * system.delta_power;
+            side.fixed =
+                state.activity_unit(system, power).times_two_to(unscale * i64::from(power));
+            side.target *= system.multiple;
+        } else {
+            let unit = state.activity_unit(system, 1).times_two_to(unscale);
+            side.target -= signed * system.delta_nu * unit.ln_less(0.0);
+        }
+        side
+    }
+
+    /// h at a distance.
+    #[inline(never)]
+    pub fn value(&self, d: f64) -> f64 {
+        let total = self.total + self.total_slope * d;
+        if self.multiple == 0.0 {
+            return self.value_by_logarithms(d, total);
+        }
+        let mut product = self.fixed;
+        for term in self.terms {
+            product = product.times(term.at_wall + term.slope * d, term.power);
+        }
+        if self.total_power != 0 {
+            product = product.times(total, self.total_power);
+        }
+        product.ln_less(self.target) / self.multiple
+    }
+
+    /// h and its derivatives at a distance.
+    #[inline(never)]
+    pub fn point(&self, d: f64) -> Point {
+        let total = self.total + self.total_slope * d;
+        let per_total = 1.0 / total;
+        let wall_share = self.total * per_total;
+        let total_bend = 2.0 * self.total_slope * d * per_total;
+        let delta_per_total = self.total_slope * per_total;
+        let mut product = self.fixed;
+        let (mut slope, mut curvature) = (0.0, 0.0);
+        for term in self.terms {
+            let amount = term.at_wall + term.slope * d;
+            let reach = d / amount;
+            let bracket = term.slope * wall_share - delta_per_total * term.at_wall;
+            let part = reach * bracket * bracket;
+            slope += part;
+            curvature += part * (1.0 - term.slope * reach - total_bend);
+            product = product.times(amount, term.power);
+        }
+        if self.total_power != 0 {
+            product = product.times(total, self.total_power);
+            let part = (delta_per_total * d) * (delta_per_total * self.inert);
+            slope += part;
+            curvature += part * (1.0 - total_bend);
+        }
+        let value = if self.multiple == 0.0 {
+            self.value_by_logarithms(d, total)
+        } else {
+            product.ln_less(self.target) / self.multiple
+        };
+        Point { value, slope, curvature }
+    }
+
+    /// h where some ν is no multiple of an eighth: a logarithm for each mantissa, and the powers of
+    /// two added with their rounding errors.
+    #[inline(never)]
+    fn value_by_logarithms(&self, d: f64, total: f64) -> f64 {
+        let (mut twos, mut twos_error, mut small) = (0.0, 0.0, 0.0);
+        let mut add = |x: f64, power: f64| {
+            let (mantissa, exponent) = split(x);
+            small += power * libm::log(mantissa);
+            let (product, product_error) = two_product(power, f64::from(exponent));
+            let (sum, sum_error) = two_sum(twos, product);
+            twos = sum;
+            twos_error += sum_error + product_error;
+        };
+        for term in self.terms {
+            add(term.at_wall + term.slope * d, term.slope);
+        }
+        if self.total_slope != 0.0 {
+            add(total, -self.total_slope);
+        }
+        let ln_2 = std::f64::consts::LN_2;
+        let (large, large_error) = two_product(twos, ln_2);
+        (large - self.target) + (large_error + twos * LN_2_TAIL + twos_error * ln_2 + small)
+    }
+
+    /// The sum of w over the mixture's species that are used up at this wall: h goes as
+    /// λ ln d there, or to a finite value when λ is zero and only pure phases are used up.
+    pub fn order(&self) -> f64 {
+        self.terms.iter().filter(|term| term.at_wall == 0.0).map(|term| term.slope).sum()
+    }
+
+    /// h − λ ln d as d goes to zero.
+    #[inline(never)]
+    pub fn intercept(&self) -> f64 {
+        if self.multiple == 0.0 {
+            let order = self.order();
+            let ends = |term: &Term| {
+                let amount = if term.at_wall == 0.0 { term.slope } else { term.at_wall };
+                (Term { at_wall: amount, ..*term }, term.slope)
+            };
+            let mut sum = -self.target;
+            for (term, power) in self.terms.iter().map(ends) {
+                sum += power * libm::log(term.at_wall);
+            }
+            debug_assert!(order >= 0.0);
+            return sum - self.total_slope * libm::log(self.total);
+        }
+        let mut product = self.fixed;
+        for term in self.terms {
+            let amount = if term.at_wall == 0.0 { term.slope } else { term.at_wall };
+            product = product.times(amount, term.power);
+        }
+        if self.total_power != 0 {
+            product = product.times(self.total, self.total_power);
+        }
+        product.ln_less(self.target) / self.multiple
+    }
+}
+
+/// The amount of gas that takes no part.
+pub(super) fn inert_gas(system: &System, amounts: &[f64]) -> f64 {
+    let mut sum = 0.0;
+    for ((&kind, &nu), &amount) in system.kinds.iter().zip(&system.nu).zip(amounts) {
+        if kind == super::Kind::Gas && nu == 0.0 {
+            sum += amount;
+        }
+    }
+    sum
+}

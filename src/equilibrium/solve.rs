@@ -1,0 +1,95 @@
+//! The zero of the affinity between one wall and a point that is known to lie beyond it.
+
+use super::side::{Point, Side};
+use crate::numeric::{growth, step_in_power};
+
+/// The most steps; the usual number is three or four.
+const STEPS_AT_MOST: u32 = 100;
+/// Steps after which bisection is mixed in.
+const STEPS_ALONE: u32 = 12;
+/// Below this the next step changes nothing: its error is of third order.
+const STEP_ENOUGH: f64 = 1e-6;
+/// The smallest and largest distance that a double can work with here (2^-1000 and 2^1000), and
+/// the logarithm of the smallest.
+const FLOOR: f64 = f64::from_bits((1023 - 1000) << 52);
+const CEILING: f64 = f64::from_bits((1023 + 1000) << 52);
+const LN_FLOOR: f64 = -693.147_180_559_945_3;
+
+/// Where the affinity vanishes.
+#[derive(Debug, Clone, Copy)]
+pub(super) enum Zero {
+    /// At this distance from the wall.
+    At { distance: f64 },
+    /// So near to the wall that only the logarithm of the distance is known.
+    Trace { ln_distance: f64 },
+    /// Beyond any distance that a double holds.
+    Nowhere,
+}
+
+/// Finds the zero of h in (0, `high`), from a start and h there.
+///
+/// `high` is infinite where there is no other wall. `order` is the side's λ, zero where h is finite
+/// at the wall (and has been found negative there).
+pub(super) fn solve(side: &Side, order: f64, start: f64, first: Point, high: f64) -> (Zero, u32) {
+    let (mut low, mut high) = (0.0, high);
+    let (mut d, mut point) = (start, first);
+    for steps in 1..=STEPS_AT_MOST {
+        if point.value == 0.0 {
+            return (Zero::At { distance: d }, steps);
+        }
+        if point.value > 0.0 {
+            high = d;
+        } else {
+            low = d;
+        }
+        let step = step_in_power(point.value, point.slope, point.curvature);
+        let far = steps == 1 && order > 0.0 && step.is_none_or(|step| step < -1.0);
+        let turn = steps > STEPS_ALONE && steps % 2 == 1;
+        let mut next = match step {
+            Some(step) if step.abs() < STEP_ENOUGH => {
+                return (Zero::At { distance: d * growth(step) }, steps);
+            }
+            Some(step) if !far && !turn => d * growth(step.clamp(-600.0, 600.0)),
+            _ => 0.0,
+        };
+        if !(next > low && next < high && next < CEILING) {
+            if far {
+                // h = λ u + c is exact as d goes to zero, and its zero is not too near the wall
+                // where h is convex.
+                let ln_distance = -side.intercept() / order;
+                if ln_distance < LN_FLOOR {
+                    return (Zero::Trace { ln_distance }, steps);
+                }
+                next = libm::exp(ln_distance.min(700.0));
+            }
+            if !(next > low && next < high) {
+                next = between(low, high, d);
+            }
+        }
+        if next < FLOOR {
+            let ln_distance = if order > 0.0 { -side.intercept() / order } else { LN_FLOOR };
+            return (Zero::Trace { ln_distance: ln_distance.min(LN_FLOOR) }, steps);
+        }
+        if next > CEILING {
+            return (Zero::Nowhere, steps);
+        }
+        if high <= low * (1.0 + 2.0 * f64::EPSILON) {
+            return (Zero::At { distance: next }, steps);
+        }
+        d = next;
+        point = side.point(d);
+    }
+    (Zero::At { distance: d }, STEPS_AT_MOST)
+}
+
+/// The middle of a bracket in ln d; a long step towards an end that is not known.
+fn between(low: f64, high: f64, d: f64) -> f64 {
+    const LONG: f64 = 16_777_216.0; // 2^24
+    if low == 0.0 {
+        d / LONG
+    } else if high == f64::INFINITY {
+        d * LONG
+    } else {
+        low.sqrt() * high.sqrt()
+    }
+}
