@@ -6,4 +6,6 @@
     reason = "a test fails by panicking"
 )]
 
+mod library;
+mod library_constants;
 mod rooms;
