@@ -6,5 +6,7 @@
     reason = "a test fails by panicking"
 )]
 
+mod library;
+mod library_constants;
 mod mistakes;
 mod rooms;

@@ -32,14 +32,14 @@ impl Polynomial {
     pub(super) fn enthalpy(&self, at: Temperature) -> f64 {
         let (t, x, a) = (at.kelvin(), at.reciprocal(), &self.a);
         let rising = t * (a[3] / 2.0 + t * (a[4] / 3.0 + t * (a[5] / 4.0 + t * (a[6] / 5.0))));
-        x * (a[1] * at.ln() - a[0] * x + self.b_enthalpy) + a[2] + rising
+        x * (a[1] * at.ln_kelvin() - a[0] * x + self.b_enthalpy) + a[2] + rising
     }
 
     /// S°/R.
     pub(super) fn entropy(&self, at: Temperature) -> f64 {
         let (t, x, a) = (at.kelvin(), at.reciprocal(), &self.a);
         let rising = t * (a[3] + t * (a[4] / 2.0 + t * (a[5] / 3.0 + t * (a[6] / 4.0))));
-        -x * (a[1] + 0.5 * a[0] * x) + a[2] * at.ln() + rising + self.b_entropy
+        -x * (a[1] + 0.5 * a[0] * x) + a[2] * at.ln_kelvin() + rising + self.b_entropy
     }
 
     /// G°/RT = H°/RT − S°/R, with the two sums joined term by term.
@@ -48,8 +48,8 @@ impl Polynomial {
         let rising = t
             * (a[3] * (1.0 / 2.0)
                 + t * (a[4] * (1.0 / 6.0) + t * (a[5] * (1.0 / 12.0) + t * (a[6] * (1.0 / 20.0)))));
-        let falling = x * (self.b_enthalpy + a[1] * (at.ln() + 1.0) - 0.5 * a[0] * x);
-        falling + a[2] * (1.0 - at.ln()) - self.b_entropy - rising
+        let falling = x * (self.b_enthalpy + a[1] * (at.ln_kelvin() + 1.0) - 0.5 * a[0] * x);
+        falling + a[2] * (1.0 - at.ln_kelvin()) - self.b_entropy - rising
     }
 
     /// The polynomial of constant heat capacity that meets this one in C°p, H° and S° at `end`.
@@ -58,7 +58,7 @@ impl Polynomial {
         Polynomial {
             a: [0.0, 0.0, cp, 0.0, 0.0, 0.0, 0.0],
             b_enthalpy: (self.enthalpy(end) - cp) * end.kelvin(),
-            b_entropy: self.entropy(end) - cp * end.ln(),
+            b_entropy: self.entropy(end) - cp * end.ln_kelvin(),
         }
     }
 

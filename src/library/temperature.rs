@@ -60,7 +60,7 @@ impl Temperature {
 
     /// ln(T/K).
     #[must_use]
-    pub fn ln(self) -> f64 {
+    pub fn ln_kelvin(self) -> f64 {
         self.ln
     }
 

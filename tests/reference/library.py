@@ -9,13 +9,14 @@ from math import log, sqrt
 from pathlib import Path
 
 import library_sources as published
-from library_pieces import POWERS, Piece, fit, join
+from library_pieces import POWERS, Piece, fit, fit_heat_capacity, join
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, CODATA, SECOND_LIMITS, SOURCES, SPECIES
 
 ROOT = Path(__file__).resolve().parents[2]
 TABLES = ROOT / "src" / "library" / "tables"
 LOG_KF = ROOT / "tests" / "published" / "janaf_log_kf.tsv"
+REACTIONS = ROOT / "tests" / "published" / "janaf_reactions.tsv"
 HEADS = {
     "species": "id formula phase form names cas enthalpy_kj_per_mol entropy_j_per_mol_k "
     "u_gibbs_kj_per_mol u_class sources",
@@ -45,6 +46,9 @@ def build(species):
         h, s = row[4], row[2]
         pieces, transitions, worst = fit(how[1], how[2], "janaf", species.blunt)
         pieces[0].low = species.low or pieces[0].low
+        if species.crc:
+            h, s = published.crc(cas, phase)
+            sources.append("crc")
         sources.append("janaf")
     elif how[0] == "poling":
         h, s = published.crc(cas, phase)
@@ -59,8 +63,12 @@ def build(species):
         sources += ["crc", "perry"]
     elif how[0] == "calcite":
         h, s = published.crc(cas, phase)
-        a = [-2.1576e6 / R_EXACT, 0, 99.715 / R_EXACT, 0.02692 / R_EXACT, 0, 0, 0]
-        pieces = [Piece(T0, 1200, [float(f"{v:.10g}") for v in a], "jacobs")]
+        pieces = [Piece(T0, 1200, fit_heat_capacity(calcite_heat_capacity, T0, 1200), "jacobs")]
+        perry_figures, low, high = published.perry(cas)
+        for t in range(300, 1033, 20):
+            perry = perry_figures[0] + perry_figures[1] * t + perry_figures[2] / t**2
+            worst_cp = max(abs(pieces[0].cp(t) / perry - 1), 0)
+            assert worst_cp < 0.03, f"calcite at {t} K leaves Perry's Cp by {worst_cp:.1%}"
         sources += ["crc", "jacobs"]
     elif how[0] == "methanol":
         # The liquid is tied to the vapour by its vapour pressure, the vapour taken as ideal.
@@ -81,10 +89,15 @@ def build(species):
     return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": worst}
 
 
+def calcite_heat_capacity(t):
+    """Jacobs, Kerrick and Krupka (1981), J/(mol K)."""
+    return -184.79 + 0.32322 * t - 3_688_200 / t**2 - 1.2974e-4 * t**2 + 3883.5 / sqrt(t)
+
+
 def second_figures(species):
     """(name, ΔfH°, S°) of every other source that knows the species."""
     found = []
-    if species.janaf and species.how[0] != "janaf":
+    if species.janaf and (species.how[0] != "janaf" or species.crc):
         row = next(row for row in published.janaf(species.janaf) if row[0] == T0)
         found.append(("JANAF", row[4], row[2]))
     h, s = published.crc(species.cas, species.phase)
@@ -195,24 +208,32 @@ def check_tables(rows):
             found.append(f"{name}.tsv has another shape: write it anew")
             continue
         for old, new in zip(have, wanted):
-            equal = same if old[-1] == "janaf" else (lambda a, b: a == b)
+            equal = same if old[-1] in ("janaf", "jacobs") else (lambda a, b: a == b)
             if len(old) != len(new) or not all(equal(a, b) for a, b in zip(old, new)):
                 found.append(f"{name}.tsv differs:\n  committed {old}\n  published {new}")
     return found
 
 
-def check_log_kf():
-    """The committed log Kf figures are those of the tables."""
-    found, seen = [], 0
+def log_kf_lines():
+    """Every published figure that the test reactions need: log Kf at each T, ΔfH° at 298.15 K."""
     tables = {species.id: species.janaf for species in SPECIES}
-    for line in LOG_KF.read_text().splitlines():
-        if line.startswith("#") or line.startswith("id\t"):
+    wanted = {}
+    for line in REACTIONS.read_text().splitlines():
+        if line.startswith("#") or line.startswith("terms"):
             continue
-        ident, t, value = line.split("\t")
-        seen += 1
-        if published.janaf_at(tables[ident], float(t))[5] != float(value):
-            found.append(f"janaf_log_kf.tsv: {ident} at {t} K is {value}")
-    return found if seen else ["janaf_log_kf.tsv is empty"]
+        terms, temperatures, *_ = line.split("\t")
+        for ident in terms.split()[1::2]:
+            wanted.setdefault(ident, {298.15}).update(float(t) for t in temperatures.split())
+    lines = [
+        "# Figures of the NIST-JANAF Thermochemical Tables, 4th edition, J. Phys. Chem. Ref. Data "
+        "Monograph 9, 1998: log10 Kf, and the enthalpy of formation in kJ/mol at the same T.",
+        "id\ttemperature_k\tlog10_kf\tformation_enthalpy_kj_per_mol",
+    ]
+    for ident in sorted(wanted):
+        for t in sorted(wanted[ident]):
+            row = published.janaf_at(tables[ident], t)
+            lines.append(f"{ident}\t{t:g}\t{row[5]:.3f}\t{row[4]:.3f}")
+    return lines
 
 
 def main():
@@ -223,8 +244,10 @@ def main():
         for name, lines in rows.items():
             text = "\n".join("\t".join(line) for line in [HEADS[name].split(), *lines])
             (TABLES / f"{name}.tsv").write_text(text + "\n")
+        LOG_KF.write_text("\n".join(log_kf_lines()) + "\n")
     found += check_tables(rows)
-    found += check_log_kf()
+    if LOG_KF.read_text().splitlines() != log_kf_lines():
+        found.append("janaf_log_kf.tsv differs from the published tables")
     for line in found:
         print("WRONG:", line)
     print(f"{len(rows['species'])} species, {len(rows['heat'])} pieces, {len(found)} problems")

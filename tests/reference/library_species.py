@@ -16,6 +16,7 @@ class Species:
     floor: float = 0.0  # kJ/mol; the class of u(ΔfG°) where no better is known
     apart: str = ""  # why a second source may differ by more than the limit
     blunt: tuple = ()  # where a lambda peak of Cp is passed over; H and S still hold
+    crc: bool = False  # ΔfH° and S° from the CRC table, with JANAF's Cp
     low: float = 0.0  # a lower limit below the table's first row, for a short, smooth reach
 
     @property
@@ -90,10 +91,11 @@ SPECIES = [
     Species("CH3OH", "l", "liquid methanol", "67-56-1", ("methanol",)),
     fitted("H2SO4", "l", "sulfuric acid;sulphuric acid;oil of vitriol", "7664-93-9", "H-075",
            (283.456, 600), floor=1.0),
+    # The lime family takes ΔfH° and S° from one table, the CRC's, as its members share reactions.
     fitted("CaO", "s", "lime;quicklime;calcium oxide;burnt lime", "1305-78-8", "Ca-027",
-           (200, 500, 2500)),
+           (200, 500, 2500), crc=True),
     fitted("Ca(OH)2", "s", "slaked lime;hydrated lime;calcium hydroxide", "1305-62-0", "Ca-020",
-           (200, 500, 1000), floor=1.0),
+           (200, 500, 1000), crc=True, floor=0.5),
     Species("CaCO3", "s", "calcite;limestone;calcium carbonate", "471-34-1", ("calcite",),
             form="calcite", floor=0.7),
     Species("CaSO4", "s", "anhydrite;calcium sulfate;calcium sulphate", "7778-18-9",
@@ -108,7 +110,7 @@ SPECIES = [
     fitted("NH4Cl", "s", "ammonium chloride;sal ammoniac", "12125-02-9", "Cl-029",
            (298.15, 457.7, 800), floor=0.5),
     fitted("Fe", "s", "iron", "7439-89-6", "Fe-003", (200, 800, 1000, 1042, 1100, 1184, 1665, 1809),
-           element=True),
+           element=True, blunt=(1042,)),
     fitted("Fe0.947O", "s", "wustite;wüstite", "17125-56-3", "Fe-001", (298.15, 1600), floor=1.0),
     fitted("Fe2O3", "s", "hematite;haematite;iron(III) oxide;ferric oxide", "1309-37-1", "Fe-030",
            (200, 500, 950, 1050, 1700), floor=1.0),
@@ -150,8 +152,10 @@ SOURCES = {
     "perry": "Perry's Chemical Engineers' Handbook, table 2-151, Heat Capacities of Inorganic "
     "Compounds (as carried by the package chemicals 1.5.2).",
     "jacobs": "Jacobs, Kerrick and Krupka, The high-temperature heat capacity of natural calcite, "
-    "Physics and Chemistry of Minerals 7 (1981) 55: Cp = 99.715 + 0.02692 T - 2.1576e6/T^2 "
-    "J/(mol K), 298 to 1200 K. Recalled from memory; it gives 83.47 at 298.15 K, the CRC table 83.5.",
+    "Physics and Chemistry of Minerals 7 (1981) 55: Cp = -184.79 + 0.32322 T - 3688200/T^2 - "
+    "1.2974e-4 T^2 + 3883.5/T^0.5 J/(mol K), to 1200 K. Recalled from memory; it gives 83.47 at "
+    "298.15 K (CRC table 83.5) and agrees with Perry's table 2-151 within its 3 %. Written here "
+    "in powers of T.",
     "codata": "Cox, Wagman and Medvedev, CODATA Key Values for Thermodynamics, Hemisphere, 1989: "
     "95 % half-widths, recalled from memory; u is half of them.",
 }
