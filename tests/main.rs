@@ -6,4 +6,8 @@
     reason = "a test fails by panicking"
 )]
 
+mod laws_quantity;
+mod quantity;
+mod quantity_show;
+mod quantity_units;
 mod rooms;
