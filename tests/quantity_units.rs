@@ -51,7 +51,7 @@ fn factors_agree_with_published_ones() {
         ("lbmol", Amount, 453.592_37, EXACT, "by the pound: 1 lb of a substance of 1 g/mol"),
         ("kmol", Amount, 1e3, EXACT, "SI Brochure, prefixes"),
         ("Nm3", Amount, 1e3 / 22.413_969_54, 5e-10, "CODATA 2018, molar volume at 273.15 K and 101.325 kPa"),
-        ("Sm3", Amount, 1e3 / 23.644_81, 5e-7, "molar volume at 15 °C and 1 atm, 23.6448 L/mol, recalled: no source"),
+        ("Sm3", Amount, 1e3 / 22.413_969_54 * (273.15 / 288.15), 5e-10, "as Nm3, by Gay-Lussac's law"),
         ("scf", Amount, 453.592_37 / 379.48, 3e-5, "379.48 scf to the pound-mole, common practice, no source"),
         ("MMscf", Amount, 453.592_37e6 / 379.48, 3e-5, "as scf"),
         ("scfm", AmountRate, 453.592_37 / 379.48 / 60.0, 3e-5, "as scf"),
@@ -157,7 +157,7 @@ fn a_spelling_that_could_be_two_units_is_asked_back() {
         ("MG", Mass, "mg"),
         ("mmscf", Amount, "MMscf"),
         ("torrr", Pressure, "Torr"),
-        ("kjmol", MolarEnergy, "kJ/mol"),
+        ("kjmol", MolarEnergy, "kJ/mol or kmol"),
     ];
     for (text, measure, near) in rows {
         let problem = parse_unit(text, &[measure]).unwrap_err().remove(0);
