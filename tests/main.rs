@@ -6,7 +6,11 @@
     reason = "a test fails by panicking"
 )]
 
+mod laws_quantity;
 mod library;
 mod library_constants;
 mod mistakes;
+mod quantity;
+mod quantity_show;
+mod quantity_units;
 mod rooms;

@@ -44,6 +44,8 @@ codes! {
         UnitUnknown = "unit-unknown",
         UnitNear = "unit-near",
         UnitMismatch = "unit-mismatch",
+        UnitNotWanted = "unit-not-wanted",
+        PhMissing = "ph-missing",
         UnitTwice = "unit-twice",
         OutOfRange = "quantity-out-of-range",
         FractionOverOne = "fraction-over-one",

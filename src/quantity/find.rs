@@ -37,16 +37,20 @@ const REFERENCES: [(&str, PressureReference); 10] = [
 struct Index {
     exact: HashMap<String, Vec<&'static Unit>>,
     any_case: HashMap<String, Vec<(String, &'static Unit)>>,
+    /// Every name in small letters, in the order of the table.
+    names: Vec<(Vec<char>, &'static Unit)>,
 }
 
 fn index() -> &'static Index {
     static INDEX: OnceLock<Index> = OnceLock::new();
     INDEX.get_or_init(|| {
-        let mut index = Index { exact: HashMap::new(), any_case: HashMap::new() };
+        let mut index =
+            Index { exact: HashMap::new(), any_case: HashMap::new(), names: Vec::new() };
         for unit in all_units() {
             for name in [&unit.symbol].into_iter().chain(unit.aliases) {
                 for key in symbol::keys(name) {
                     let lower = key.to_lowercase();
+                    index.names.push((lower.chars().collect(), unit));
                     index.any_case.entry(lower).or_default().push((key.clone(), unit));
                     index.exact.entry(key).or_default().push(unit);
                 }
@@ -128,12 +132,9 @@ fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
         near.extend(rows.map(|(_, unit)| *unit));
     }
     if near.is_empty() {
-        for unit in all_units() {
-            let names = [&unit.symbol].into_iter().chain(unit.aliases);
-            if names.into_iter().any(|name| is_one_edit_away(&lower[0], name)) {
-                near.push(unit);
-            }
-        }
+        let typed: Vec<char> = lower[0].chars().collect();
+        let names = index().names.iter();
+        near.extend(names.filter(|(name, _)| is_one_edit_away(&typed, name)).map(|row| row.1));
     }
     near.sort_by_key(|unit| !allowed.contains(&unit.measure));
     let mut symbols: Vec<String> = Vec::new();
@@ -148,13 +149,11 @@ fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
 
 /// Whether one letter put in, left out, changed or swapped with its neighbour makes them equal;
 /// words of one or two letters are all near each other and do not count.
-fn is_one_edit_away(typed: &str, name: &str) -> bool {
-    if typed.len() < 3 || name.len() < 3 || typed.len().abs_diff(name.len()) > 4 {
+fn is_one_edit_away(typed: &[char], name: &[char]) -> bool {
+    if typed.len() < 3 || name.len() < 3 || typed.len().abs_diff(name.len()) > 1 {
         return false;
     }
-    let typed: Vec<char> = typed.chars().collect();
-    let name: Vec<char> = symbol::plain(name).to_lowercase().chars().collect();
-    let same_start = typed.iter().zip(&name).take_while(|(a, b)| a == b).count();
+    let same_start = typed.iter().zip(name).take_while(|(a, b)| a == b).count();
     let (a, b) = (&typed[same_start..], &name[same_start..]);
     let swapped =
         a.len() == b.len() && a.len() >= 2 && a[0] == b[1] && a[1] == b[0] && a[2..] == b[2..];

@@ -151,9 +151,6 @@ pub(super) fn examples_of(measures: &[Measure]) -> String {
             }
         }
     }
-    if names.is_empty() {
-        names.push("no unit at all".to_owned());
-    }
     join_or(&names)
 }
 

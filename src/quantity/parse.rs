@@ -46,6 +46,9 @@ pub fn parse(text: &str, allowed: &[Measure]) -> Outcome<Quantity> {
         let problem = Problem::new(QuantityCode::PresetUnknown).with("found", found);
         problems.push(problem.span(Span::of(text, preset.clone())));
     }
+    if pieces.preset.is_some() && text[pieces.head.clone()].trim().is_empty() {
+        return Err(problems);
+    }
     let mut keep = |outcome: Result<Number, Problem>| match outcome {
         Ok(number) => Some(number),
         Err(problem) => {
@@ -138,24 +141,23 @@ fn find_unit(
     problems: &mut Vec<Problem>,
 ) -> Option<(&'static Unit, PressureReference)> {
     let own = trimmed(text, number_end..pieces.head.end.max(number_end));
-    let tail_unit = tail.map(|tail| tail.unit.clone()).unwrap_or(own.end..own.end);
-    let after = pieces.after.clone().map(|after| trimmed(text, after)).unwrap_or(own.end..own.end);
-    let mut places = [own, tail_unit, after].into_iter().filter(|place| !place.is_empty());
-    let ph = pieces.ph.clone().into_iter();
-    let Some(place) = ph.chain(places.by_ref()).next() else {
-        let nothing = number_end..number_end;
-        return match unit_at(text, nothing, allowed) {
-            Ok(found) => Some(found),
-            // a number that is missing or a preset that is not known has said enough
-            Err(_) if !problems.is_empty() => None,
-            Err(problem) => {
-                problems.push(problem);
-                None
-            }
-        };
+    let nowhere = own.end..own.end;
+    let tail_unit = tail.map_or(nowhere.clone(), |tail| tail.unit.clone());
+    let after = pieces.after.clone().map_or(nowhere.clone(), |after| trimmed(text, after));
+    let written = |place: &Range<usize>| !place.is_empty();
+    // a unit after the tolerance is the tolerance's where the value has its own
+    let is_relative = tail.is_some_and(|tail| tail.is_relative);
+    let tail_has_own = written(&own) && !is_relative;
+    let spare_tail = Some(tail_unit.clone()).filter(|_| !tail_has_own);
+    let places = [pieces.ph.clone(), Some(own), spare_tail, Some(after)];
+    let mut places = places.into_iter().flatten().filter(written);
+    let Some(place) = places.next() else {
+        // a number that is missing or a preset that is not known has said enough
+        let missing = unit_at(text, nowhere, allowed);
+        let is_first = problems.is_empty();
+        return missing.map_err(|problem| problems.extend(is_first.then_some(problem))).ok();
     };
-    // with two places the second belongs to the tolerance; after a parenthesis there is one place
-    let spare = if pieces.ph.is_some() || pieces.after.is_some() { places.next() } else { None };
+    let spare = places.next();
     if let Some(spare) = spare {
         let problem = Problem::new(QuantityCode::UnitTwice)
             .with("found", shortened(&text[spare.clone()]))
@@ -191,8 +193,11 @@ fn tolerance(
         let measures = [difference_measure(quantity.measure)];
         let other = match unit_at(text, tail.unit.clone(), &measures) {
             _ if tail.unit.is_empty() => None,
+            Ok((other, _)) if is_other_part(unit, other) => {
+                return fail(QuantityCode::ToleranceUnit, &tail.unit);
+            }
             Ok((other, _)) if other.symbol != "%" || unit.symbol.ends_with('%') => Some(other),
-            Ok(_) => return fail(QuantityCode::TolerancePercent, &tail.unit),
+            Ok((_, _)) => return fail(QuantityCode::TolerancePercent, &tail.unit),
             Err(_) if &text[tail.unit.clone()] == "%" => {
                 return fail(QuantityCode::TolerancePercent, &tail.unit);
             }
@@ -217,6 +222,12 @@ fn difference_measure(measure: Measure) -> Measure {
         Measure::Temperature => Measure::TemperatureDifference,
         other => other,
     }
+}
+
+/// Whether two fractions say that they are parts of different things.
+fn is_other_part(unit: &Unit, other: &Unit) -> bool {
+    let (a, b) = (unit.fraction_basis, other.fraction_basis);
+    a != b && a != FractionBasis::Unstated && b != FractionBasis::Unstated
 }
 
 fn check_bound(

@@ -59,12 +59,13 @@ pub(super) fn split(text: &str, problems: &mut Vec<Problem>) -> Pieces {
         match closing(&text[main.clone()]) {
             Some(close) => {
                 pieces.after = Some(main.start + close + 1..main.end);
-                pieces.head = main.start + 1..main.start + close;
+                pieces.head =
+                    skip_space(text, main.start + 1).min(main.start + close)..main.start + close;
             }
             None => {
                 let problem = Problem::new(QuantityCode::Parenthesis);
                 problems.push(problem.span(Span::of(text, main.start..main.start + 1)));
-                pieces.head = main.start + 1..main.end;
+                pieces.head = skip_space(text, main.start + 1).min(main.end)..main.end;
             }
         }
     }

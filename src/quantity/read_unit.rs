@@ -41,11 +41,17 @@ pub(super) fn unit_at(
         Err(_) if name.is_empty() => {
             // there is nothing to point at: point at the number
             let whole = text.len() - text.trim_start().len()..text.trim_end().len();
-            return Err(Problem::new(QuantityCode::UnitMissing)
+            let only_ph = allowed == [Measure::Ph];
+            let code = if only_ph { QuantityCode::PhMissing } else { QuantityCode::UnitMissing };
+            return Err(Problem::new(code)
+                .with("found", shortened(text.trim()))
                 .with("measure", any_of(allowed))
                 .with("allowed", examples_of(allowed))
                 .with("example", first_example(allowed))
                 .span(Span::of(text, whole)));
+        }
+        Err(_) if allowed.iter().all(|measure| measure.examples().is_empty()) => {
+            Problem::new(QuantityCode::UnitNotWanted)
         }
         Err(find::Fault::OtherMeasure(unit)) => Problem::new(QuantityCode::UnitMismatch)
             .with("is", unit.measure.name())

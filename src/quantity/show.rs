@@ -112,13 +112,16 @@ pub fn show_in(quantity: &Quantity, units: Units) -> String {
         Some(u) if u > 0.0 => with_half_width(quantity.value_si, u, unit),
         _ => {
             let last_digit_si = quantity.unit.difference_to_si(last_digit(quantity.written));
-            let place = libm::floor(libm::log10(unit.difference_from_si(last_digit_si)));
+            let place = libm::floor(libm::log10(unit.difference_from_si(last_digit_si)) + ROUNDING);
             to_place(value, place)
         }
     };
     let text = with_symbol(&text, unit, suffix);
     if quantity.is_bound { format!("< {text}") } else { text }
 }
+
+/// Keeps the logarithm of an exact power of ten from falling one place down.
+const ROUNDING: f64 = 1e-9;
 
 /// The worth of the last digit typed.
 fn last_digit(written: Written) -> f64 {
@@ -134,7 +137,7 @@ fn with_half_width(value_si: f64, standard_uncertainty_si: f64, unit: &'static U
     }
     // rounding first: 0.0996 to two digits is 0.10, one place up
     let rounded: f64 = format!("{width:.1e}").parse().unwrap_or(width);
-    let place = libm::floor(libm::log10(rounded) + 1e-9) - 1.0;
+    let place = libm::floor(libm::log10(rounded) + ROUNDING) - 1.0;
     format!("{} ± {}", to_place(value, place), to_place(width, place))
 }
 
@@ -142,7 +145,8 @@ fn with_half_width(value_si: f64, standard_uncertainty_si: f64, unit: &'static U
 fn to_place(value: f64, place: f64) -> String {
     let top = if value == 0.0 { place } else { libm::floor(libm::log10(value.abs())) };
     let digits = (top - place + 1.0).clamp(1.0, EXACT_DIGITS as f64) as usize;
-    if (-8.0..=0.0).contains(&place) && top < 7.0 {
+    let is_readable = top >= -4.0 || top < place;
+    if (-8.0..=0.0).contains(&place) && top < 7.0 && is_readable {
         return show_fixed(value, (-place) as usize);
     }
     show_number(value, digits)
@@ -170,9 +174,11 @@ fn with_symbol(number: &str, unit: &Unit, suffix: &str) -> String {
 /// The allowed range in the user's unit, for a message.
 pub(super) fn range_text(limit: &Limit, unit: &Unit) -> String {
     let low = if limit.includes_minimum { "at least" } else { "above" };
-    format!(
-        "{low} {} and at most {}",
-        show(limit.minimum_si, unit, 6),
-        show(limit.maximum_si, unit, 6)
-    )
+    let end = |value_si: f64| {
+        let number = show_number(unit.from_si(value_si), 7);
+        let is_plain = number.contains('.') && !number.contains('×');
+        let number = if is_plain { number.trim_end_matches('0') } else { &number };
+        with_symbol(number.trim_end_matches('.'), unit, "")
+    };
+    format!("{low} {} and at most {}", end(limit.minimum_si), end(limit.maximum_si))
 }

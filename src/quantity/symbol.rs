@@ -1,15 +1,16 @@
 //! The text of a unit brought to one form, so that a table can find it.
 
-/// Brings look-alike characters together and drops spaces, dots of multiplication and carets stay
-/// out of the way: `kgf / cm²` becomes `kgf/cm2`, `Nm^3` becomes `Nm3`.
-pub(super) fn plain(text: &str) -> String {
-    ascii_like(text).chars().filter(|c| !c.is_whitespace() && *c != '^').collect()
+/// Brings look-alike characters together and drops spaces and carets: `kgf / cm²` becomes
+/// `kgf/cm2`, `Nm^3` becomes `Nm3`, `lb-mol` becomes `lbmol`.
+fn plain(ascii_like: &str) -> String {
+    ascii_like.chars().filter(|c| !c.is_whitespace() && *c != '^').collect()
 }
 
 /// The two ways a text may be looked up: as it stands, and as numerator over sorted denominators.
 pub(super) fn keys(text: &str) -> Vec<String> {
-    let plain = plain(text);
-    match compound(text) {
+    let text = joined_moles(ascii_like(text));
+    let plain = plain(&text);
+    match compound(&text) {
         Some(compound) if compound != plain => vec![plain, compound],
         _ => vec![plain],
     }
@@ -18,7 +19,7 @@ pub(super) fn keys(text: &str) -> Vec<String> {
 /// `J/(mol·K)`, `J/mol K`, `J/mol-K`, `J mol⁻¹ K⁻¹` and `J/K/mol` are all `J/K/mol`; a text without
 /// a denominator, or with two numerators, is no compound.
 fn compound(text: &str) -> Option<String> {
-    let text = trade_rate(&joined_moles(&ascii_like(text)));
+    let text = trade_rate(text);
     let mut numerator: Option<String> = None;
     let mut denominators: Vec<String> = Vec::new();
     let mut below = false;
@@ -97,10 +98,15 @@ fn standard_name(name: &str, below: bool) -> String {
 }
 
 /// `lb-mol`, `lb mol` and `kg-mol` are one word.
-fn joined_moles(text: &str) -> String {
-    let mut joined = text.to_owned();
+fn joined_moles(text: String) -> String {
+    if !text.contains("mol") {
+        return text;
+    }
+    let mut joined = text;
     for pair in ["lb-mol", "lb mol", "lb·mol", "lb.mol", "kg-mol", "g-mol"] {
-        joined = joined.replace(pair, &pair.replace(|c: char| !c.is_ascii_alphabetic(), ""));
+        if joined.contains(pair) {
+            joined = joined.replace(pair, &pair.replace(|c: char| !c.is_ascii_alphabetic(), ""));
+        }
     }
     joined
 }

@@ -112,6 +112,8 @@ impl Unit {
         factor: (f64, f64),
         source: &'static str,
     ) -> Unit {
+        // kJ/kmol is 1000/1000: without the reduction it would round twice for nothing
+        let factor = if factor.0 == factor.1 { (1.0, 1.0) } else { factor };
         Unit {
             symbol,
             aliases,

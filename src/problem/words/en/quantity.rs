@@ -48,6 +48,14 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "“{found}” is {is}; {measure} is needed, such as {allowed}.",
             "Check that this number belongs in this place.",
         ),
+        C::UnitNotWanted => (
+            "“{found}” follows the number; a plain number is needed here, without a unit.",
+            "Leave the number alone in this place.",
+        ),
+        C::PhMissing => (
+            "“{found}” does not say that it is a pH.",
+            "Write pH before the number, such as pH 7.2.",
+        ),
         C::UnitTwice => {
             ("“{found}” is a second unit; {first} is already there.", "Write the unit once.")
         }
