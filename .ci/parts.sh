@@ -70,6 +70,7 @@ part_lint() {
   ensure_built || return 0
   check "ESLint" node www/node_modules/eslint/bin/eslint.js --config www/eslint.config.js www tests
   check "types of the page and its tests" node www/node_modules/typescript/bin/tsc --project www
+  check "types of the service worker" node www/node_modules/typescript/bin/tsc --project www/offline
 }
 
 # Clippy for the browser's border needs a standard library for the target: the usual compiler's.
@@ -116,7 +117,7 @@ ensure_built() {
 
 # Python recomputes the committed answers from outside tables; its packages are pinned.
 part_reference() {
-  local venv list=tests/reference/requirements.txt
+  local venv file list=tests/reference/requirements.txt
   venv="$CACHE/reference-$(sha256sum "$list" | cut -c1-16)"
   if [ ! -e "$venv/ready" ]; then
     python3 -c 'import venv, ensurepip' 2>/dev/null ||
@@ -126,5 +127,8 @@ part_reference() {
       "check the network; by hand: pip install -r $list" "$venv/bin/pip" install -r "$list"
     touch "$venv/ready"
   fi
-  check "the reference answers" "$venv/bin/python" tests/reference/check.py
+  for file in tests/reference/check_*.py; do
+    [ -e "$file" ] || fail "finding tests/reference/check_*.py" "add a check before running this part"
+    check "$file" "$venv/bin/python" "$file"
+  done
 }

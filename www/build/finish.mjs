@@ -6,7 +6,7 @@ import { env } from 'node:process';
 import { bundle } from './bundle.mjs';
 import { addReset, optimise } from './engine.mjs';
 import { servedPage } from './html.mjs';
-import { writeOffline } from './offline.mjs';
+import { copyOffline, writeServiceWorker } from './offline.mjs';
 import { writeOneFile } from './one-file.mjs';
 import { printSizes } from './sizes.mjs';
 
@@ -17,10 +17,11 @@ const page = join(folder, 'index.html');
 await optimise(folder);
 await addReset(folder);
 await copyFile(join(source, 'shiftgauge.d.ts'), join(folder, 'shiftgauge.d.ts'));
+await copyOffline(source, folder);
 await bundle(source, folder);
 await writeFile(page, servedPage(await readFile(page, 'utf8')));
 await writeOneFile(folder);
-await writeOffline(source, folder);
+await writeServiceWorker(source, folder);
 // Says to Node that the engine's loader is a module, so that it can be imported from this folder.
 await writeFile(join(folder, 'package.json'), '{ "type": "module" }\n');
 await printSizes(folder);

@@ -61,5 +61,5 @@ export function withPolicy(html, policy) {
   const bare = html.replace(POLICY_TAG, '');
   const charset = bare.match(CHARSET_TAG)?.[0];
   if (!charset) throw new Error('index.html has to contain <meta charset="utf-8">');
-  return replaceOnce(bare, charset, `${charset}\n    ${tag}`);
+  return replaceOnce(bare, charset, `${charset}\n  ${tag}`);
 }

@@ -5,18 +5,27 @@ import { cp, readdir, readFile, stat } from 'node:fs/promises';
 import { extname, join } from 'node:path';
 import { build } from 'esbuild';
 
-/** Parts of the folder that are code for the bundle, or for the build. */
-const NOT_COPIED = new Set(['.js', '.ts']);
+/** The rest of the folder is code. */
+const COPIED = new Set(['.png', '.svg', '.webmanifest']);
 
 /**
+ * Copies the manifest and the icons.
+ * @param {string} source the folder of index.html
+ * @param {string} folder where the page is built
+ */
+export async function copyOffline(source, folder) {
+  await cp(join(source, 'offline'), join(folder, 'offline'), {
+    recursive: true,
+    filter: async (path) => (await stat(path)).isDirectory() || COPIED.has(extname(path)),
+  });
+}
+
+/**
+ * Writes the service worker, once everything that it lists is there.
  * @param {string} source the folder of index.html
  * @param {string} folder where the page was built
  */
-export async function writeOffline(source, folder) {
-  await cp(join(source, 'offline'), join(folder, 'offline'), {
-    recursive: true,
-    filter: async (path) => (await stat(path)).isDirectory() || !NOT_COPIED.has(extname(path)),
-  });
+export async function writeServiceWorker(source, folder) {
   const names = ['index.html', 'page.js', 'page.css', 'shiftgauge_bg.wasm'];
   for (const name of await readdir(join(folder, 'offline'))) names.push(`offline/${name}`);
   await build({

@@ -31,7 +31,7 @@ export async function writeOneFile(folder) {
   html = replaceOnce(html, STYLE, `<style>${style}</style>`);
   html = replaceOnce(html, SCRIPT, `<script type="module">${script}</script>`);
   const engine = `<script type="application/wasm-base64" id="engine-bytes">${bytes}</script>`;
-  html = replaceOnce(html, '</body>', `${engine}\n  </body>`);
+  html = replaceOnce(html, '</body>', `${engine}\n</body>`);
   html = withPolicy(html, policy(script, style));
 
   const outside = html.match(OUTSIDE);

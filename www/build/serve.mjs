@@ -54,7 +54,7 @@ export async function startServer({ folder, port = 0 }) {
 async function answer(folder, request, response) {
   if (request.method !== 'GET' && request.method !== 'HEAD') return end(response, 405, 'only GET');
   const path = fileOf(folder, request.url ?? '/');
-  const found = path && (await stat(path).catch(() => null));
+  const found = path ? await stat(path).catch(() => null) : null;
   if (!path || !found?.isFile()) return end(response, 404, 'no such file');
   response.writeHead(200, {
     'Content-Type': TYPES[extname(path)] ?? 'application/octet-stream',

@@ -131,7 +131,7 @@ setup_wasm() {
     CARGO_TARGET_WASM32_UNKNOWN_UNKNOWN_RUSTFLAGS=-Clinker-flavor=wasm-ld)
   # Without a compiled standard library for the target, cargo compiles it from Debian's source.
   wasm_std_present /usr/bin/rustc ||
-    PAGE_ENV+=(RUSTC_BOOTSTRAP=1 CARGO_UNSTABLE_BUILD_STD=std,panic_abort)
+    PAGE_ENV+=(RUSTC_BOOTSTRAP=1 CARGO_UNSTABLE_BUILD_STD="std,panic_abort")
 }
 
 # Runs a command of the WebAssembly build with its compiler; wasm-opt and esbuild are on its PATH.
@@ -157,7 +157,9 @@ locked_version() { grep -A1 "^name = \"$1\"\$" Cargo.lock | sed -n 's/^version =
 
 # The page's tools are kept in the cache under the hash of their lock file, and linked.
 setup_npm() {
-  has node && has npm || fail "finding node and npm" "run: sudo apt-get install nodejs npm"
+  if ! has node || ! has npm; then
+    fail "finding node and npm" "run: sudo apt-get install nodejs npm"
+  fi
   at_least 18.18 "$(node --version | tr -d v)" ||
     fail "node $(node --version) is too old" "install Node 18.18 or newer"
   local store
