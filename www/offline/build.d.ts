@@ -1,0 +1,3 @@
+/** Written into the service worker by the build. */
+declare const OFFLINE_FILES: string[];
+declare const OFFLINE_VERSION: string;
