@@ -129,7 +129,7 @@ const FRACTION_UNITS = [
  * @param {number} rest
  */
 export function fractionPair(now, rest) {
-  const larger = Math.max(now, rest);
+  const larger = Math.max(now, rest) || 1;
   const { factor, unit, whole } = FRACTION_UNITS.find(({ least }) => larger >= least) ?? { factor: 1e2, unit: '%', whole: 100 };
   const shown = pair(now * factor, rest * factor, whole);
   return {
@@ -137,6 +137,14 @@ export function fractionPair(now, rest) {
     rest: `${shown.rest}${NO_BREAK}${unit}`,
     change: `${shown.change}${NO_BREAK}${unit}`,
   };
+}
+
+/**
+ * A unit with its powers raised: `bar^-2` becomes `bar⁻²`.
+ * @param {string} text
+ */
+export function unit(text) {
+  return text.replace(/\^\(?([+\-\u2212]?\d+(?:\.\d+)?)\)?/g, (_, power) => (power === '1' ? '' : superscript(power)));
 }
 
 /** @typedef {'°C' | 'K' | '°F'} TemperatureUnit */

@@ -41,8 +41,12 @@ const state = createState(
   },
 );
 
-/** @param {string} message */
-function tell(message) {
+/**
+ * @param {string} message
+ * @param {boolean} [alarm]
+ */
+function tell(message, alarm = false) {
+  notice.classList.toggle('alarm', alarm);
   notice.textContent = message;
   notice.hidden = message === '';
 }
@@ -95,10 +99,10 @@ function stopped(question, text, thrown) {
   const sorry = 'The engine stopped on this case, which is a fault of the program. The case is still here';
   try {
     restartEngine();
-    tell(`${sorry}, and the engine was started again: change a value to go on.`);
+    tell(`${sorry}, and the engine was started again: change a value to go on.`, true);
   } catch (again) {
     console.error(again);
-    tell(`${sorry}: save it to a file, then load the page again.`);
+    tell(`${sorry}: save it to a file, then load the page again.`, true);
   }
 }
 
@@ -122,7 +126,7 @@ async function openLink(hash) {
     cases.openText(text, 'Opened the case in the link.', actions);
     window.history.replaceState(null, '', window.location.pathname + window.location.search);
   } catch {
-    tell('The case in this link is damaged, perhaps cut short on its way. Nothing was changed.');
+    tell('The case in this link is damaged, perhaps cut short on its way. Nothing was changed.', true);
   }
 }
 
@@ -135,7 +139,7 @@ async function start() {
   state.set({ question });
   fill(question);
   answer();
-  if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.');
+  if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
   cases.connect(actions);
   listen({
     changed() {

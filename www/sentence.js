@@ -5,6 +5,9 @@ import { formula, temperatureDifference } from './format.js';
 /** @import { Report, ReactionReport } from './shiftgauge.js' */
 /** @import { TemperatureUnit } from './format.js' */
 
+/** Phases whose activity does not hang on how much of them there is. */
+const PURE = ['s', 'l'];
+
 /**
  * @typedef {object} Sentence
  * @property {'forward' | 'reverse' | 'rest' | 'unclear'} tone
@@ -65,14 +68,20 @@ function leaning(reaction) {
  * @param {ReactionReport} reaction
  */
 function absence(report, reaction) {
-  /** @param {number} side */
-  const absent = (side) => reaction.terms
-    .filter(({ nu, species }) => Math.sign(nu) === side && report.species.some((row) => row.species === species && row.now_mol === 0))
-    .map(({ species }) => formula(species)).join(', ');
+  /** @param {string} species */
+  const isMissing = (species) => report.species.some((row) => row.species === species && row.now_mol === 0 && !PURE.includes(row.phase));
+  /**
+   * @param {number} side
+   * @param {string} otherwise
+   */
+  const absent = (side, otherwise) => reaction.terms
+    .filter(({ nu, species }) => Math.sign(nu) === side && isMissing(species))
+    .map(({ species }) => `no ${formula(species)}`).join(' and ') || otherwise;
+  const stuck = report.rest?.outcome === 'nothing can move';
   switch (reaction.q) {
-    case 'zero': return `${absent(1) || 'A product'} is absent, so Q is zero: the reaction can only move forward.`;
-    case 'infinite': return `${absent(-1) || 'A reactant'} is absent, so Q is infinite: the reaction can only move in reverse.`;
-    case 'undetermined': return `${absent(-1) || 'A reactant'} and ${absent(1) || 'a product'} are both absent, so Q has no value.`;
+    case 'zero': return `There is ${absent(1, 'a product missing')}, so Q is zero${stuck ? '' : ': the reaction can only move forward'}.`;
+    case 'infinite': return `There is ${absent(-1, 'a reactant missing')}, so Q is infinite${stuck ? '' : ': the reaction can only move in reverse'}.`;
+    case 'undetermined': return `There is ${absent(-1, 'a reactant missing')} and ${absent(1, 'a product missing')}, so Q has no value.`;
     default: return '';
   }
 }

@@ -66,7 +66,7 @@ function axis(x, y, { from, to, highest, floor, width }) {
   return [
     createSvg('line', { class: 'axis', x1: MARGIN.left, x2: width - MARGIN.right, y1: floor, y2: floor }),
     ...along.values.map((value) => createSvg('text', { class: 'tick', x: x(value), y: floor + 18, 'text-anchor': 'middle' }, fixed(value, along.decimals))),
-    createSvg('text', { class: 'tick', x: width - MARGIN.right, y: floor + 37, 'text-anchor': 'end' }, 'extent ξ from now, mol →'),
+    createSvg('text', { class: 'tick', x: width - MARGIN.right, y: floor + 37, 'text-anchor': 'end' }, width < 340 ? 'ξ from now, mol →' : 'extent ξ from now, mol →'),
     ...up.values.flatMap((value) => [
       createSvg('line', { class: 'grid', x1: MARGIN.left, x2: width - MARGIN.right, y1: y(value), y2: y(value) }),
       createSvg('text', { class: 'tick', x: MARGIN.left - 6, y: y(value) + 4, 'text-anchor': 'end' }, fixed(value, up.decimals)),
@@ -111,7 +111,7 @@ function drawRest(at, height, other, width) {
  * @param {number} width
  */
 function drawNow(now, other, arrow, width) {
-  const side = flagSide(now.x, now.x > other, width);
+  const side = flagSide(now.x, other >= now.x, width);
   const top = Math.max(MARGIN.top + 12, now.y - FLAG_NOW);
   return [
     createSvg('line', { class: 'pole now', x1: now.x, x2: now.x, y1: now.y, y2: top }),

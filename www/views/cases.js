@@ -30,12 +30,12 @@ export function firstCase() {
  * @typedef {object} Actions
  * @property {() => Case} current
  * @property {(question: Case, said: string) => void} open
- * @property {(message: string) => void} tell
+ * @property {(message: string, alarm?: boolean) => void} tell
  */
 
 /** @param {Actions} actions */
 export function connect(actions) {
-  button.addEventListener('click', () => show(panel.hidden));
+  button.addEventListener('click', () => show(panel.hidden === true));
   panel.addEventListener('keydown', ({ key }) => {
     if (key !== 'Escape') return;
     show(false);
@@ -105,7 +105,7 @@ async function openFile(file, actions) {
 export function openText(text, said, actions) {
   const found = caseFromText(text);
   if (found.ok) replace(found.question, `${said} The case that stood here is under Cases.`, actions);
-  else actions.tell(found.message);
+  else actions.tell(found.message, true);
 }
 
 /** @param {Actions} actions */

@@ -42,6 +42,7 @@ export function fill(question) {
   choose('gas-basis', gas?.basis === 'wet' ? 'wet' : 'dry');
   waterKind.querySelector('option[value="from_feed"]')?.remove();
   if (water === 'from_feed') waterKind.append(new Option('the feed in the file', 'from_feed'));
+  /** @type {Record<string, unknown>} */
   const known = isRecord(water) ? water : {};
   waterKind.value = water === 'from_feed' ? water : ['per_dry', 'fraction', 'dew_point'].find((kind) => kind in known) ?? 'none';
   perDry.value = asText(known.per_dry);

@@ -37,12 +37,15 @@ function draw() {
   body.replaceChildren(...shown.species.map((species) => row(species, basis, dry)));
 }
 
+/** @param {SpeciesReport} species */
+const isWater = ({ species, phase }) => species === 'H2O' && phase === 'g';
+
 /**
  * @param {readonly SpeciesReport[]} species
  * @param {'now_mol' | 'rest_mol'} which
  */
 function dryTotal(species, which) {
-  return species.filter((one) => one.phase === 'g' && one.species !== 'H2O').reduce((sum, one) => sum + one[which], 0);
+  return species.filter((one) => one.phase === 'g' && !isWater(one)).reduce((sum, one) => sum + one[which], 0);
 }
 
 /**
@@ -53,8 +56,9 @@ function dryTotal(species, which) {
 function row(species, basis, dry) {
   const { now, rest, change } = numbers(species, basis, dry);
   const phase = species.phase === 'g' ? '' : `(${species.phase})`;
-  const head = create('th', { scope: 'row' }, formula(species.species), phase);
-  const gone = species.exhausted ? [' ', create('em', {}, 'used up')] : [];
+  const asRatio = basis === 'dry' && isWater(species) ? [create('small', {}, ' per dry gas')] : [];
+  const head = create('th', { scope: 'row' }, formula(species.species), phase, ...asRatio);
+  const gone = species.exhausted && species.now_mol > 0 ? [' ', create('em', {}, 'used up')] : [];
   return create('tr', { 'data-species': species.species },
     head, create('td', {}, now), create('td', {}, rest, ...gone), create('td', {}, change));
 }
@@ -65,11 +69,9 @@ function row(species, basis, dry) {
  * @param {{ now: number, rest: number }} dry
  */
 function numbers(species, basis, dry) {
-  const isWater = species.species === 'H2O' && species.phase === 'g';
   if (basis === 'dry' && species.phase === 'g' && dry.now > 0 && dry.rest > 0) {
-    if (!isWater) return fractionPair(species.now_mol / dry.now, species.rest_mol / dry.rest);
-    const ratio = pair(species.now_mol / dry.now, species.rest_mol / dry.rest);
-    return { now: `${ratio.now} per dry`, rest: `${ratio.rest} per dry`, change: ratio.change };
+    const show = isWater(species) ? pair : fractionPair;
+    return show(species.now_mol / dry.now, species.rest_mol / dry.rest);
   }
   const fractions = basis !== 'amount' && species.phase === 'g';
   if (fractions && species.now_fraction !== null && species.rest_fraction !== null) {

@@ -28,7 +28,7 @@ export function render({ problems, report, current, trapped }) {
  * @returns {string[]}
  */
 function say(count, hasOld, trapped) {
-  const old = hasOld ? 'Out of date: this is the answer to the case before the last change. ' : '';
+  const old = hasOld ? 'Out of date, from before the last change. ' : '';
   if (count === 0) return [trapped ? `${old}The engine stopped on this case.` : old];
   return [`${old}${count === 1 ? 'One thing' : `${count} things`} to put right.`];
 }

@@ -1,7 +1,7 @@
 /** K in its forms, each with its unit and standard state, and where it comes from. */
 
 import { byId, create } from '../dom.js';
-import { NO_BREAK, fromLog10, molarEnergy } from '../format.js';
+import { NO_BREAK, fromLog10, molarEnergy, unit } from '../format.js';
 
 /** @import { Form } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -15,7 +15,7 @@ export function render({ report }) {
   if (reaction === undefined) return;
   const thermal = reaction.enthalpy_standard_j_per_mol;
   forms.replaceChildren(
-    ...reaction.forms.map((form) => figure(label(form), `${fromLog10(form.log10, 4)}${form.name === 'K' || form.unit === '' ? '' : NO_BREAK + form.unit}`)),
+    ...reaction.forms.map((form) => figure(label(form), `${fromLog10(form.log10, 4)}${form.name === 'K' || form.unit === '' ? '' : NO_BREAK + unit(form.unit)}`)),
     figure('ΔG° of the reaction', molarEnergy(reaction.gibbs_standard_j_per_mol)),
     ...(thermal === null ? [] : [figure('ΔH° of the reaction', molarEnergy(thermal))]),
   );

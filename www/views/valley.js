@@ -13,9 +13,13 @@ const choice = byId('valley-choice', HTMLElement);
 const ARROWS = { forward: '→', reverse: '←', 'at rest': '⇌', 'cannot tell': '?' };
 const NARROWEST_PX = 240;
 
+/** Where now and rest stand closer than this part of the valley, the closer look comes first. */
+const CLOSE = 0.06;
+
 /** @type {Report | null} */
 let shown = null;
 let width = 0;
+let userChose = false;
 
 new ResizeObserver(([entry]) => {
   const found = Math.round(entry?.contentRect.width ?? 0);
@@ -23,7 +27,12 @@ new ResizeObserver(([entry]) => {
   width = found;
   draw();
 }).observe(drawing);
-for (const radio of document.querySelectorAll('input[name="valley-part"]')) radio.addEventListener('change', draw);
+for (const radio of document.querySelectorAll('input[name="valley-part"]')) {
+  radio.addEventListener('change', () => {
+    userChose = true;
+    draw();
+  });
+}
 
 /** @param {State} state */
 export function render({ report }) {
@@ -36,13 +45,15 @@ function draw() {
   const { valley } = shown;
   const reaction = shown.reactions[0];
   const near = valley?.near ?? null;
-  choice.hidden = near === null;
   if (near === null) choose('valley-part', 'whole');
+  else if (!userChose) choose('valley-part', isClose(shown) ? 'near' : 'whole');
   if (valley === null || valley === undefined || reaction === undefined || valley.extent_max_mol <= valley.extent_min_mol) {
+    choice.hidden = true;
     drawing.replaceChildren();
     words.textContent = 'There is no valley to draw: the reaction has nowhere to go from here.';
     return;
   }
+  choice.hidden = near === null;
   words.textContent = describe(shown, valley);
   if (width === 0) return;
   const curve = near !== null && chosen('valley-part') === 'near' ? near : valley;
@@ -55,6 +66,12 @@ function draw() {
     title: 'Gibbs energy along the reaction',
     description: words.textContent,
   }, Math.max(NARROWEST_PX, width)));
+}
+
+/** @param {Report} report */
+function isClose({ valley, reactions }) {
+  const extent = reactions[0]?.extent_mol ?? 0;
+  return valley !== null && Math.abs(extent) < CLOSE * (valley.extent_max_mol - valley.extent_min_mol);
 }
 
 /** @param {Valley} valley */
