@@ -1,16 +1,67 @@
-// Starts the engine: from the bytes inside the page in one file, else from the file beside it.
+/** The engine in WebAssembly: started once, called without waiting, started again after a trap. */
 
-import init, * as engine from './shiftgauge.js';
+import * as glue from './shiftgauge.js';
 
-export async function startEngine() {
-  const embedded = document.getElementById('engine-bytes');
-  if (embedded) engine.initSync({ module: new WebAssembly.Module(bytesOf(embedded.textContent ?? '')) });
-  else await init({ module_or_path: new URL('./shiftgauge_bg.wasm', document.baseURI) });
-  return engine;
+/** @import { BalanceAnswer, Case, CheckAnswer } from './shiftgauge.js' */
+
+/** @type {WebAssembly.Module | null} */
+let compiled = null;
+
+/** Whether this browser can run WebAssembly at all. */
+export function isSupported() {
+  return typeof WebAssembly === 'object' && typeof WebAssembly.Module === 'function';
 }
 
-/** @param {string} base64 */
-function bytesOf(base64) {
-  if (Uint8Array.fromBase64) return Uint8Array.fromBase64(base64);
-  return Uint8Array.from(atob(base64), (character) => character.charCodeAt(0));
+/** Loads the engine: from the page itself where it is one file, from beside the page otherwise. */
+export async function startEngine() {
+  const inline = document.getElementById('engine-bytes');
+  compiled = inline
+    ? await WebAssembly.compile(decodeBase64(inline.textContent ?? ''))
+    : await compileFrom('./shiftgauge_bg.wasm');
+  glue.initSync({ module: compiled });
+}
+
+/** @param {string} path */
+async function compileFrom(path) {
+  const response = await fetch(path);
+  if (!response.ok) throw new Error(`${path} answered ${response.status}`);
+  return WebAssembly.compile(await response.arrayBuffer());
+}
+
+/** @param {string} text */
+function decodeBase64(text) {
+  const bare = text.trim();
+  const direct = /** @type {{ fromBase64?: (text: string) => Uint8Array<ArrayBuffer> }} */ (/** @type {unknown} */ (Uint8Array));
+  if (direct.fromBase64) return direct.fromBase64(bare);
+  return Uint8Array.from(atob(bare), (sign) => sign.charCodeAt(0));
+}
+
+/** Puts a new instance of the same module in the place of one that trapped. */
+export function restartEngine() {
+  if (compiled === null) throw new Error('The engine was never started.');
+  glue.reset();
+  glue.initSync({ module: compiled });
+}
+
+/**
+ * @param {Case} question
+ * @returns {CheckAnswer}
+ */
+export function check(question) {
+  return glue.check(question, { language: 'en', units: 'as typed' });
+}
+
+/**
+ * @param {string} equation
+ * @returns {BalanceAnswer}
+ */
+export function balance(equation) {
+  return glue.balance(equation);
+}
+
+/** The program's and the tables' versions as one line. */
+export function versionLine() {
+  const found = glue.version();
+  if (typeof found === 'string') return found;
+  return Object.entries(found ?? {}).map(([name, value]) => `${name} ${String(value)}`).join(', ');
 }

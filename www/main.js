@@ -1,7 +1,175 @@
-import { startEngine } from './engine.js';
-import { keepOffline } from './offline/keep.js';
+/** Runs the page in one direction: event, case, check, render. */
 
-const engine = await startEngine();
-const output = document.getElementById('version');
-if (output) output.textContent = engine.version();
-keepOffline(() => {});
+import { balance, check, isSupported, restartEngine, startEngine, versionLine } from './engine.js';
+import { byId } from './dom.js';
+import { listen } from './events.js';
+import { forget, keep, recall } from './recall.js';
+import { textFromHash } from './link.js';
+import { keepOffline } from './offline/keep.js';
+import { render } from './render.js';
+import { caseFromText, caseToText, createState } from './state.js';
+import * as cases from './views/cases.js';
+import * as conditions from './views/conditions.js';
+import * as gas from './views/gas.js';
+import * as heading from './views/heading.js';
+import * as keys from './views/keys.js';
+import * as ledger from './views/ledger.js';
+import * as notes from './views/notes.js';
+import * as problems from './views/problems.js';
+import * as reaction from './views/reaction.js';
+import * as solids from './views/solids.js';
+import * as sources from './views/sources.js';
+import * as spoken from './views/spoken.js';
+import * as strip from './views/strip.js';
+import * as valley from './views/valley.js';
+import * as verdict from './views/verdict.js';
+import * as working from './views/working.js';
+
+/** @import { Case } from './shiftgauge.js' */
+/** @import { State } from './state.js' */
+
+const inputs = [heading, reaction, conditions, gas, solids];
+const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, keys, strip];
+const notice = byId('notice', HTMLElement);
+
+const state = createState(
+  /** @type {State} */ ({ question: cases.firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
+  (changed) => {
+    byId('results', HTMLElement).hidden = changed.report === null;
+    byId('results', HTMLElement).classList.toggle('is-old', !changed.current);
+    render(views, changed);
+  },
+);
+
+/**
+ * @param {string} message
+ * @param {boolean} [alarm]
+ */
+function tell(message, alarm = false) {
+  notice.classList.toggle('alarm', alarm);
+  notice.textContent = message;
+  notice.hidden = message === '';
+}
+
+/** @param {Case} question */
+function fill(question) {
+  for (const input of inputs) input.fill(question);
+}
+
+/** Reads the whole form; what the case holds beyond it is kept. */
+function readForm() {
+  return inputs.reduce((question, input) => input.read(question), state.get().question);
+}
+
+/** Answers the case as the form reads now. */
+function answer() {
+  const question = readForm();
+  const text = caseToText(question);
+  keep('case', text);
+  if (text === state.get().trapped) {
+    state.set({ question, current: false, problems: [] });
+    return;
+  }
+  try {
+    const understood = balance(question.reactions[0]?.equation ?? '');
+    const answered = check(question);
+    state.set(answered.ok
+      ? { question, balance: understood, report: answered.report, answered: question, problems: [], current: true }
+      : { question, balance: understood, problems: answered.problems, current: false });
+    if (state.get().trapped !== '') {
+      forget('stopped');
+      state.set({ trapped: '' });
+    }
+  } catch (thrown) {
+    stopped(question, text, thrown);
+  }
+}
+
+/**
+ * The engine never throws for a mistake in the case, so whatever was thrown means that this instance
+ * is dead: a new one takes its place, and the case that did it is not tried again unchanged.
+ * @param {Case} question
+ * @param {string} text
+ * @param {unknown} thrown
+ */
+function stopped(question, text, thrown) {
+  console.error(thrown);
+  keep('stopped', text);
+  state.set({ question, current: false, problems: [], trapped: text });
+  const sorry = 'The engine stopped on this case, which is a fault of the program. The case is still here';
+  try {
+    restartEngine();
+    tell(`${sorry}, and the engine was started again: change a value to go on.`, true);
+  } catch (again) {
+    console.error(again);
+    tell(`${sorry}: save it to a file, then load the page again.`, true);
+  }
+}
+
+/** @type {cases.Actions} */
+const actions = {
+  current: readForm,
+  open(question, said) {
+    state.set({ question, report: null, answered: null, current: false, problems: [] });
+    fill(question);
+    answer();
+    if (state.get().trapped === '') tell(said);
+  },
+  tell,
+};
+
+/** @param {string} hash */
+async function openLink(hash) {
+  try {
+    const text = await textFromHash(hash);
+    if (text === null) return;
+    cases.openText(text, 'Opened the case in the link.', actions);
+    window.history.replaceState(null, '', window.location.pathname + window.location.search);
+  } catch {
+    tell('The case in this link is damaged, perhaps cut short on its way. Nothing was changed.', true);
+  }
+}
+
+async function start() {
+  if (!isSupported()) throw new Error('WebAssembly is off in this browser');
+  await startEngine();
+  byId('version', HTMLElement).textContent = versionLine();
+  const saved = caseFromText(recall('case') ?? '');
+  const question = saved.ok ? saved.question : cases.firstCase();
+  state.set({ question });
+  fill(question);
+  answer();
+  if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
+  cases.connect(actions);
+  listen({
+    changed() {
+      tell('');
+      answer();
+    },
+    linked: (hash) => void openLink(hash),
+  });
+  await openLink(window.location.hash);
+  void keepOffline(tellOffline);
+}
+
+/**
+ * @param {'ready' | 'update'} standing
+ * @param {() => void} [takeOver]
+ */
+function tellOffline(standing, takeOver) {
+  if (standing === 'ready') {
+    byId('offline', HTMLElement).textContent = 'Kept in this browser: works without a network.';
+    return;
+  }
+  const update = byId('update', HTMLButtonElement);
+  update.hidden = false;
+  update.addEventListener('click', () => takeOver?.(), { once: true });
+}
+
+start().catch((thrown) => {
+  console.error(thrown);
+  const alarm = byId('no-engine', HTMLElement);
+  alarm.textContent = `Shiftgauge computes in WebAssembly, which could not be started here: ${thrown instanceof Error ? thrown.message : String(thrown)}. Allow WebAssembly for this page, or try a current browser. Nothing that you type leaves this device.`;
+  alarm.hidden = false;
+  byId('sentence', HTMLElement).textContent = 'No answer: the engine is not running.';
+});

@@ -1,0 +1,40 @@
+/** What stays in this browser: the case in hand, the one before it, and a case that stopped the engine. */
+
+const PREFIX = 'shiftgauge.';
+
+/** @typedef {'case' | 'before' | 'stopped'} Slot */
+
+/**
+ * @param {Slot} slot
+ * @returns {string | null}   null where nothing is kept or the browser keeps nothing
+ */
+export function recall(slot) {
+  try {
+    return window.localStorage.getItem(PREFIX + slot);
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * @param {Slot} slot
+ * @param {string} text
+ * @returns {boolean}   whether it was kept
+ */
+export function keep(slot, text) {
+  try {
+    window.localStorage.setItem(PREFIX + slot, text);
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+/** @param {Slot} slot */
+export function forget(slot) {
+  try {
+    window.localStorage.removeItem(PREFIX + slot);
+  } catch {
+    // A browser that keeps nothing has nothing to forget.
+  }
+}

@@ -1,0 +1,102 @@
+/** The verdict as a sentence, and what else must be said about how the reaction ends. */
+
+import { formula, temperatureDifference } from './format.js';
+
+/** @import { Report, ReactionReport } from './shiftgauge.js' */
+/** @import { TemperatureUnit } from './format.js' */
+
+/** Phases whose activity does not hang on how much of them there is. */
+const PURE = ['s', 'l'];
+
+/**
+ * @typedef {object} Sentence
+ * @property {'forward' | 'reverse' | 'rest' | 'unclear'} tone
+ * @property {string} arrow
+ * @property {string} lead
+ * @property {string} word
+ * @property {string} tail
+ * @property {string} more
+ */
+
+/**
+ * @param {Report} report
+ * @param {TemperatureUnit} unit
+ * @returns {Sentence}
+ */
+export function sentence(report, unit) {
+  const reaction = report.reactions[0];
+  if (reaction === undefined) return unclear('');
+  const more = [absence(report, reaction), ending(report), reaction.t_star_k === null ? reaction.approach_note ?? '' : '']
+    .filter((text) => text !== '').join(' ');
+  const distance = reaction.shortfall_k;
+  /** @param {number} kelvin */
+  const far = (kelvin) => temperatureDifference(kelvin, unit);
+  switch (reaction.verdict) {
+    case 'forward':
+      return { tone: 'forward', arrow: '→', lead: 'The mixture moves ', word: 'forward', tail: distance !== null && distance > 0 ? `, ${far(distance)} short of equilibrium.` : '.', more };
+    case 'reverse':
+      return { tone: 'reverse', arrow: '←', lead: 'The mixture moves in ', word: 'reverse', tail: distance !== null && distance < 0 ? `, ${far(-distance)} past equilibrium.` : '.', more };
+    case 'at rest':
+      return { tone: 'rest', arrow: '⇌', lead: 'The mixture is ', word: 'at rest', tail: leaning(reaction), more };
+    case 'cannot tell':
+      return { ...unclear(more), tail: `${leaning(reaction)} ${reaction.why ?? ''}`.trim() };
+    default:
+      return unclear(more);
+  }
+}
+
+/**
+ * @param {string} more
+ * @returns {Sentence}
+ */
+function unclear(more) {
+  return { tone: 'unclear', arrow: '?', lead: 'This reading ', word: 'cannot tell', tail: ' which way the mixture moves.', more };
+}
+
+/** @param {ReactionReport} reaction */
+function leaning(reaction) {
+  if (reaction.verdict === 'cannot tell') {
+    const side = reaction.leaning === 'forward' || reaction.leaning === 'reverse' ? `, leaning ${reaction.leaning}` : '';
+    return ` which way the mixture moves${side}.`;
+  }
+  return reaction.leaning === 'forward' || reaction.leaning === 'reverse' ? `, leaning ${reaction.leaning}.` : '.';
+}
+
+/**
+ * What a quotient that is no number comes from.
+ * @param {Report} report
+ * @param {ReactionReport} reaction
+ */
+function absence(report, reaction) {
+  /** @param {string} species */
+  const isMissing = (species) => report.species.some((row) => row.species === species && row.now_mol === 0 && !PURE.includes(row.phase));
+  /**
+   * @param {number} side
+   * @param {string} otherwise
+   */
+  const absent = (side, otherwise) => reaction.terms
+    .filter(({ nu, species }) => Math.sign(nu) === side && isMissing(species))
+    .map(({ species }) => `no ${formula(species)}`).join(' and ') || otherwise;
+  const stuck = report.rest?.outcome === 'nothing can move';
+  switch (reaction.q) {
+    case 'zero': return `There is ${absent(1, 'a product missing')}, so Q is zero${stuck ? '' : ': the reaction can only move forward'}.`;
+    case 'infinite': return `There is ${absent(-1, 'a reactant missing')}, so Q is infinite${stuck ? '' : ': the reaction can only move in reverse'}.`;
+    case 'undetermined': return `There is ${absent(-1, 'a reactant missing')} and ${absent(1, 'a product missing')}, so Q has no value.`;
+    default: return '';
+  }
+}
+
+/**
+ * How the way to rest ends, where it ends otherwise than with Q = K.
+ * @param {Report} report
+ */
+function ending(report) {
+  const gone = report.species.filter(({ exhausted }) => exhausted).map(({ species }) => formula(species)).join(' and ');
+  switch (report.rest?.outcome) {
+    case 'phase exhausted': return `It goes on until ${gone || 'a phase'} is used up; Q does not reach K.`;
+    case 'ran to its limit': return `The composition does not change Q, so it runs until ${gone || 'something'} is used up.`;
+    case 'any extent is at rest': return 'Q equals K at every extent: the mixture rests wherever it is.';
+    case 'nothing can move': return 'Nothing can move: on each side something is missing.';
+    default: return '';
+  }
+}

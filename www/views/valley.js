@@ -1,0 +1,100 @@
+/** The valley's drawing with its words: drawn anew for every report and every width. */
+
+import { drawValley } from '../chart/valley.js';
+import { byId, choose, chosen } from '../dom.js';
+import { NO_BREAK, formula, significant } from '../format.js';
+
+/** @import { Report, Valley } from '../shiftgauge.js' */
+/** @import { State } from '../state.js' */
+
+const drawing = byId('valley-drawing', HTMLElement);
+const words = byId('valley-text', HTMLElement);
+const choice = byId('valley-choice', HTMLElement);
+const ARROWS = { forward: '→', reverse: '←', 'at rest': '⇌', 'cannot tell': '?' };
+const NARROWEST_PX = 240;
+
+/** Where now and rest stand closer than this part of the valley, the closer look comes first. */
+const CLOSE = 0.06;
+
+/** @type {Report | null} */
+let shown = null;
+let width = 0;
+let userChose = false;
+
+new ResizeObserver(([entry]) => {
+  const found = Math.round(entry?.contentRect.width ?? 0);
+  if (found === width || found === 0) return;
+  width = found;
+  draw();
+}).observe(drawing);
+for (const radio of document.querySelectorAll('input[name="valley-part"]')) {
+  radio.addEventListener('change', () => {
+    userChose = true;
+    draw();
+  });
+}
+
+/** @param {State} state */
+export function render({ report }) {
+  shown = report;
+  draw();
+}
+
+function draw() {
+  if (shown === null) return;
+  const { valley } = shown;
+  const reaction = shown.reactions[0];
+  const near = valley?.near ?? null;
+  if (near === null) choose('valley-part', 'whole');
+  else if (!userChose) choose('valley-part', isClose(shown) ? 'near' : 'whole');
+  if (valley === null || valley === undefined || reaction === undefined || valley.extent_max_mol <= valley.extent_min_mol) {
+    choice.hidden = true;
+    drawing.replaceChildren();
+    words.textContent = 'There is no valley to draw: the reaction has nowhere to go from here.';
+    return;
+  }
+  choice.hidden = near === null;
+  words.textContent = describe(shown, valley);
+  if (width === 0) return;
+  const curve = near !== null && chosen('valley-part') === 'near' ? near : valley;
+  drawing.replaceChildren(drawValley({
+    curve,
+    now: valley.extent_now_mol,
+    rest: reaction.extent_mol,
+    walls: walls(valley),
+    arrow: ARROWS[reaction.verdict ?? 'cannot tell'],
+    title: 'Gibbs energy along the reaction',
+    description: words.textContent,
+  }, Math.max(NARROWEST_PX, width)));
+}
+
+/** @param {Report} report */
+function isClose({ valley, reactions }) {
+  const extent = reactions[0]?.extent_mol ?? 0;
+  return valley !== null && Math.abs(extent) < CLOSE * (valley.extent_max_mol - valley.extent_min_mol);
+}
+
+/** @param {Valley} valley */
+function walls(valley) {
+  return valley.limits.map(({ side, species }) => ({
+    at: side === 'min' ? valley.extent_min_mol : valley.extent_max_mol,
+    label: `no ${formula(species)} left`,
+  }));
+}
+
+/**
+ * @param {Report} report
+ * @param {Valley} valley
+ */
+function describe(report, valley) {
+  const extent = report.reactions[0]?.extent_mol ?? null;
+  /** @param {number} value */
+  const mol = (value) => `${significant(value, 3)}${NO_BREAK}mol`;
+  const basis = `for ${mol(report.basis_mol)} of mixture`;
+  const way = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
+    : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
+  const limits = valley.limits.map(({ side, species }) => side === 'min'
+    ? `${formula(species)} would run out at ${mol(-valley.extent_min_mol)} in reverse`
+    : `${formula(species)} would run out at ${mol(valley.extent_max_mol)} forward`);
+  return `${way}${limits.length > 0 ? `${limits.join('; ')}.` : ''}`.trim();
+}
