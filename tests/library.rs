@@ -97,7 +97,7 @@ fn gibbs_energy_is_continuous_everywhere_and_the_rest_but_at_transitions() {
         ("Fe.s", 1665.0, 837.0),
         ("Fe2O3.s", 950.0, 669.0),
     ];
-    // Cp may step: at the peaks of lambda transitions, and where the first fits were joined.
+    // At the peak of a lambda transition Cp alone steps.
     let lambda = [("Fe.s", 1042.0), ("Fe3O4.s", 900.0), ("Fe2O3.s", 1050.0), ("S.l", 432.02)];
     let (mut seen, mut worst_cp) = (0, ("", 0.0, 0.0));
     for record in library::all() {

@@ -17,6 +17,8 @@ ROOT = Path(__file__).resolve().parents[2]
 TABLES = ROOT / "src" / "library" / "tables"
 LOG_KF = ROOT / "tests" / "published" / "janaf_log_kf.tsv"
 REACTIONS = ROOT / "tests" / "published" / "janaf_reactions.tsv"
+# What the Gibbs function may leave JANAF's by without a reason, J/(mol K): 0.013 in log10 Kf.
+GIBBS_FUNCTION_LIMIT = 0.25
 HEADS = {
     "species": "id formula phase form names cas enthalpy_kj_per_mol entropy_j_per_mol_k "
     "u_gibbs_kj_per_mol u_class sources",
@@ -161,6 +163,24 @@ def make():
     return rows, report
 
 
+def piece_at(made, t):
+    return next((p for p in made["pieces"] if p.low <= t <= p.high), None)
+
+
+def gibbs_function_difference(species, made):
+    """The largest difference of -[G - H(298)]/T from JANAF's table up to 2000 K, and where."""
+    worst, at = 0.0, T0
+    for t, _, s, h, _, log_kf in published.janaf(species.janaf):
+        piece = piece_at(made, t)
+        if log_kf is None or piece is None or t > 2000:
+            continue
+        here = piece.s(t) - 1000 * (piece.h(t) - made["h"]) / t
+        difference = here - (s - 1000 * h / t)
+        if abs(difference) > abs(worst):
+            worst, at = difference, t
+    return worst, at
+
+
 def problems_of(report):
     """Where a record leaves a second source without a reason, or a fit its limits."""
     found = []
@@ -178,9 +198,15 @@ def problems_of(report):
                 found.append(f"the fit of {species.id} from {low} to {high} K is poor")
         published_cp = published.crc_heat_capacity(species.cas, species.phase)
         if published_cp and species.form != "monoclinic":
-            piece = next(p for p in made["pieces"] if p.low <= T0 <= p.high)
-            if abs(piece.cp(T0) / published_cp - 1) > 0.025:
-                line += f"\n    Cp(298) {piece.cp(T0):.2f}, CRC {published_cp}"
+            cp = piece_at(made, T0).cp(T0)
+            line += f"\n    Cp(298) {cp:.2f}, CRC {published_cp}"
+            if abs(cp / published_cp - 1) > 0.025 and not species.apart:
+                found.append(f"{species.id}: Cp(298) is {cp:.2f}, in the CRC table {published_cp}")
+        if species.janaf:
+            worst, at = gibbs_function_difference(species, made)
+            line += f"\n    Gibbs function from JANAF's by at most {worst:+.3f} J/(mol K), at {at:g} K"
+            if abs(worst) > GIBBS_FUNCTION_LIMIT and not species.apart:
+                found.append(f"{species.id}: the Gibbs function leaves JANAF's by {worst:.3f} at {at} K")
         print(line)
     return found
 

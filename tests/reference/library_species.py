@@ -42,7 +42,8 @@ SPECIES = [
     gas("CO", "C_O", "carbon monoxide", "630-08-0", "C-093"),
     gas("CO2", "C_O2", "carbon dioxide", "124-38-9", "C-095"),
     gas("H2O", "H2_O", "water vapour;steam;water vapor", "7732-18-5", "H-064"),
-    gas("CH4", "C_H4", "methane", "74-82-8", "C-067"),
+    gas("CH4", "C_H4", "methane", "74-82-8", "C-067",
+        apart="TM-4513 revised methane: the Gibbs function is 1.0 J/(mol K) higher at 2000 K"),
     gas("C2H6", "C2_H6", "ethane", "74-84-0"),
     gas("C3H8", "C3_H8", "propane", "74-98-6"),
     gas("C2H4", "C2_H4", "ethylene;ethene", "74-85-1", "C-128"),
@@ -66,13 +67,15 @@ SPECIES = [
     gas("CS2", "C_S2", "carbon disulfide;carbon disulphide", "75-15-0", "C-099", floor=0.4),
     gas("NH3", "H3_N", "ammonia", "7664-41-7", "H-083"),
     gas("NO", "N_O", "nitric oxide;nitrogen monoxide", "10102-43-9", "N-005"),
-    gas("NO2", "N_O2", "nitrogen dioxide", "10102-44-0", "N-007"),
+    gas("NO2", "N_O2", "nitrogen dioxide", "10102-44-0", "N-007",
+        apart="TM-4513 revised NO2: the Gibbs function is 0.7 J/(mol K) higher at 2000 K"),
     gas("N2O", "N2_O", "nitrous oxide;dinitrogen monoxide", "10024-97-2", "N-026"),
     gas("N2O3", "N2_O3", "dinitrogen trioxide", "10544-73-7", "N-028",
         apart="JANAF's table of N2O3 rests on an older structure"),
     gas("N2O4", "N2_O4", "dinitrogen tetroxide", "10544-72-6", "N-032",
         apart="JANAF keeps an older enthalpy of formation, 9.08 kJ/mol"),
-    gas("HNO3", "H_N_O3", "nitric acid vapour;nitric acid", "7697-37-2", "H-030"),
+    gas("HNO3", "H_N_O3", "nitric acid vapour;nitric acid", "7697-37-2", "H-030",
+        apart="TM-4513 revised HNO3: the Gibbs function is 1.6 J/(mol K) higher at 2000 K"),
     gas("HCl", "H_Cl", "hydrogen chloride", "7647-01-0", "Cl-026"),
     gas("COCl2", "C_Cl2_O", "phosgene;carbonyl chloride", "75-44-5", "C-025"),
     gas("NOCl", "Cl_N_O", "nitrosyl chloride", "2696-92-6", "Cl-051"),
@@ -108,7 +111,8 @@ SPECIES = [
            floor=1.0,
            apart="the CRC table keeps the older -1095.8 kJ/mol; half the difference is the u here"),
     fitted("NH4Cl", "s", "ammonium chloride;sal ammoniac", "12125-02-9", "Cl-029",
-           (298.15, 457.7, 800), floor=0.5),
+           (298.15, 457.7, 800), floor=0.5,
+           apart="the CRC table has an older Cp, 84.1; JANAF's curve holds to its transition"),
     fitted("Fe", "s", "iron", "7439-89-6", "Fe-003", (200, 800, 1000, 1042, 1100, 1184, 1665, 1809),
            element=True, blunt=(1042,)),
     fitted("Fe0.947O", "s", "wustite;wüstite", "17125-56-3", "Fe-001", (298.15, 1600), floor=1.0),
@@ -131,31 +135,28 @@ SECOND_LIMITS = (1.5, 1.5)
 
 SOURCES = {
     "tm4513": "McBride, Gordon and Reno, Coefficients for Calculating Thermodynamic and Transport "
-    "Properties of Individual Species, NASA Technical Memorandum 4513, 1993 (as carried by the "
-    "package pyromat 2.2.6). Cp/R and S/R as published; H set so that ΔfH°298 in J/mol is as "
-    "published, whatever R it was made with; the upper piece joined to the lower so that H and S "
-    "are continuous.",
-    "janaf": "Chase, NIST-JANAF Thermochemical Tables, 4th edition, Journal of Physical and "
-    "Chemical Reference Data Monograph 9, 1998 (as carried by the package janaf 1.4.0). Cp fitted "
-    "piece by piece; H and S exact at 298.15 K and at the ends of the pieces.",
-    "atct": "Ruscic and Bross, Active Thermochemical Tables, version 1.112 (as carried by the "
-    "package chemicals 1.5.2). Its ΔfH°298 replaces the older one where they differ by more than "
-    "0.15 kJ/mol, and its uncertainty is used (95 % half-width, halved).",
+    "Properties of Individual Species, NASA Technical Memorandum 4513, 1993. Cp/R and S/R as "
+    "published; H set so that ΔfH°298 in J/mol is as published, whatever R it was made with; "
+    "the upper piece joined to the lower so that H and S are continuous.",
+    "janaf": "Chase, NIST-JANAF Thermochemical Tables, 4th edition, Journal of Physical and Chemical "
+    "Reference Data Monograph 9, 1998. Cp fitted piece by piece; H and S exact at 298.15 K "
+    "and at the ends of the pieces.",
+    "atct": "Ruscic and Bross, Active Thermochemical Tables, version 1.112. Its ΔfH°298 replaces the "
+    "older one where they differ by more than 0.15 kJ/mol, and its uncertainty is used (95 % "
+    "half-width, halved).",
     "crc": "CRC Handbook of Chemistry and Physics, Standard Thermodynamic Properties of Chemical "
-    "Substances (as carried by the package chemicals 1.5.2).",
+    "Substances.",
     "poling": "Poling, Prausnitz and O'Connell, The Properties of Gases and Liquids, 5th edition, "
-    "McGraw-Hill, 2001 (as carried by the package chemicals 1.5.2): Cp of ideal gases; Antoine "
-    "constants.",
-    "zabransky": "Zábranský, Růžička, Majer and Domalski, Heat Capacity of Liquids, Journal of "
-    "Physical and Chemical Reference Data Monograph 6, 1996 (as carried by the package chemicals "
-    "1.5.2).",
+    "McGraw-Hill, 2001: Cp of ideal gases; Antoine constants.",
+    "zabransky": "Zábranský, Růžička, Majer and Domalski, Heat Capacity of Liquids, Journal of Physical "
+    "and Chemical Reference Data Monograph 6, 1996.",
     "perry": "Perry's Chemical Engineers' Handbook, table 2-151, Heat Capacities of Inorganic "
-    "Compounds (as carried by the package chemicals 1.5.2).",
+    "Compounds.",
     "jacobs": "Jacobs, Kerrick and Krupka, The high-temperature heat capacity of natural calcite, "
     "Physics and Chemistry of Minerals 7 (1981) 55: Cp = -184.79 + 0.32322 T - 3688200/T^2 - "
-    "1.2974e-4 T^2 + 3883.5/T^0.5 J/(mol K), to 1200 K. Recalled from memory; it gives 83.47 at "
-    "298.15 K (CRC table 83.5) and agrees with Perry's table 2-151 within its 3 %. Written here "
-    "in powers of T.",
-    "codata": "Cox, Wagman and Medvedev, CODATA Key Values for Thermodynamics, Hemisphere, 1989: "
-    "95 % half-widths, recalled from memory; u is half of them.",
+    "1.2974e-4 T^2 + 3883.5/T^0.5 J/(mol K), to 1200 K. Recalled from memory; it gives 83.47 "
+    "at 298.15 K (CRC table 83.5) and agrees with Perry's table 2-151 within its 3 %. Written "
+    "here in powers of T.",
+    "codata": "Cox, Wagman and Medvedev, CODATA Key Values for Thermodynamics, Hemisphere, 1989: 95 % "
+    "half-widths, recalled from memory; u is half of them.",
 }
