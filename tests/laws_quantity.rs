@@ -207,15 +207,17 @@ fn likely_text(random: &mut Random) -> String {
 
 #[test]
 fn no_input_panics_and_every_answer_is_finite_or_a_problem_in_its_place() {
-    const COUNT: usize = 200_000;
+    // unoptimised code takes about six times as long
+    const COUNT: usize = if cfg!(debug_assertions) { 50_000 } else { 200_000 };
     let mut random = Random(19);
     let mut read = 0;
     let mut taken = Duration::ZERO;
     for _ in 0..COUNT {
         let text = any_text(&mut random);
-        let allowed = [*random.pick(&Measure::ALL), *random.pick(&Measure::ALL)];
+        let pair = [*random.pick(&Measure::ALL), *random.pick(&Measure::ALL)];
+        let allowed = if random.below(2) == 0 { &pair[..] } else { &Measure::ALL[..] };
         let started = Instant::now();
-        let outcome = parse(&text, &allowed);
+        let outcome = parse(&text, allowed);
         taken += started.elapsed();
         match outcome {
             Ok(quantity) => {
@@ -225,7 +227,7 @@ fn no_input_panics_and_every_answer_is_finite_or_a_problem_in_its_place() {
                 assert!(u.is_finite() && u >= 0.0, "{text:?}");
                 assert!(allowed.contains(&quantity.measure), "{text:?}");
                 let shown = show_like(&quantity);
-                assert!(parse(&shown, &allowed).is_ok(), "{text:?} came back as {shown:?}");
+                assert!(parse(&shown, allowed).is_ok(), "{text:?} came back as {shown:?}");
             }
             Err(problems) => {
                 assert!(!problems.is_empty(), "{text:?}");

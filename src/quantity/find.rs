@@ -4,7 +4,7 @@ use super::measure::Measure;
 use super::symbol;
 use super::table::all_units;
 use super::unit::{PressureReference, Unit};
-use std::collections::HashMap;
+use std::collections::{BTreeMap, HashMap};
 use std::sync::OnceLock;
 
 /// A unit as found, with the reference of a pressure.
@@ -37,20 +37,21 @@ const REFERENCES: [(&str, PressureReference); 10] = [
 struct Index {
     exact: HashMap<String, Vec<&'static Unit>>,
     any_case: HashMap<String, Vec<(String, &'static Unit)>>,
-    /// Every name in small letters, in the order of the table.
-    names: Vec<(Vec<char>, &'static Unit)>,
+    /// Every name in small letters, by its length.
+    names: BTreeMap<usize, Vec<(Vec<char>, &'static Unit)>>,
 }
 
 fn index() -> &'static Index {
     static INDEX: OnceLock<Index> = OnceLock::new();
     INDEX.get_or_init(|| {
         let mut index =
-            Index { exact: HashMap::new(), any_case: HashMap::new(), names: Vec::new() };
+            Index { exact: HashMap::new(), any_case: HashMap::new(), names: BTreeMap::new() };
         for unit in all_units() {
             for name in [&unit.symbol].into_iter().chain(unit.aliases) {
                 for key in symbol::keys(name) {
                     let lower = key.to_lowercase();
-                    index.names.push((lower.chars().collect(), unit));
+                    let letters: Vec<char> = lower.chars().collect();
+                    index.names.entry(letters.len()).or_default().push((letters, unit));
                     index.any_case.entry(lower).or_default().push((key.clone(), unit));
                     index.exact.entry(key).or_default().push(unit);
                 }
@@ -132,8 +133,9 @@ fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
         near.extend(rows.map(|(_, unit)| *unit));
     }
     if near.is_empty() {
-        let typed: Vec<char> = lower[0].chars().collect();
-        let names = index().names.iter();
+        let typed: Vec<char> = lower.first().map_or(Vec::new(), |key| key.chars().collect());
+        let lengths = typed.len().saturating_sub(1)..=typed.len() + 1;
+        let names = index().names.range(lengths).flat_map(|(_, names)| names);
         near.extend(names.filter(|(name, _)| is_one_edit_away(&typed, name)).map(|row| row.1));
     }
     near.sort_by_key(|unit| !allowed.contains(&unit.measure));
@@ -150,7 +152,7 @@ fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
 /// Whether one letter put in, left out, changed or swapped with its neighbour makes them equal;
 /// words of one or two letters are all near each other and do not count.
 fn is_one_edit_away(typed: &[char], name: &[char]) -> bool {
-    if typed.len() < 3 || name.len() < 3 || typed.len().abs_diff(name.len()) > 1 {
+    if typed.len() < 3 || name.len() < 3 {
         return false;
     }
     let same_start = typed.iter().zip(name).take_while(|(a, b)| a == b).count();
