@@ -6,4 +6,10 @@
     reason = "a test fails by panicking"
 )]
 
+mod balance;
+mod elements;
+mod equation;
+mod formula;
+mod laws_reaction;
+mod rational;
 mod rooms;
