@@ -6,11 +6,17 @@
     reason = "a test fails by panicking"
 )]
 
+mod balance;
+mod elements;
+mod equation;
+mod formula;
 mod laws_quantity;
+mod laws_reaction;
 mod library;
 mod library_constants;
 mod mistakes;
 mod quantity;
 mod quantity_show;
 mod quantity_units;
+mod rational;
 mod rooms;

@@ -1,5 +1,7 @@
 //! The one set of smallest whole numbers that balances an equation, or why there is none.
 
+use std::cmp::Ordering;
+
 use crate::numeric::Rational;
 use crate::numeric::RationalError;
 use crate::numeric::null_space;
@@ -118,7 +120,19 @@ fn oriented(columns: &[Column], used: &[bool], only: &[Rational]) -> Outcome<Vec
         let wrong = |(column, nu): &(&Column, &Rational)| is_misplaced(column, **nu);
         columns.iter().zip(numbers).filter(wrong).count()
     };
-    let numbers = if misplaced(&reverse) < misplaced(only) { &reverse[..] } else { only };
+    let first_stays = |numbers: &[Rational]| {
+        columns
+            .iter()
+            .zip(numbers)
+            .find(|(_, nu)| !nu.is_zero())
+            .is_some_and(|(c, nu)| !is_misplaced(c, *nu))
+    };
+    let better = match misplaced(&reverse).cmp(&misplaced(only)) {
+        Ordering::Less => true,
+        Ordering::Equal => first_stays(&reverse),
+        Ordering::Greater => false,
+    };
+    let numbers = if better { &reverse[..] } else { only };
     let suggestion = equation(columns, numbers, Vec::new()).text();
     let mut problems = Vec::new();
     for ((column, used), nu) in columns.iter().zip(used).zip(numbers) {
