@@ -6,4 +6,6 @@
     reason = "a test fails by panicking"
 )]
 
+mod laws_rest;
+mod rest;
 mod rooms;
