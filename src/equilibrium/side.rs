@@ -41,8 +41,8 @@ pub(super) struct Side<'a> {
     /// ± ln K with the logarithms that the slow path needs.
     target: f64,
     multiple: f64,
-    /// The power of two that takes an amount back; fractions do not see the scaling.
-    unscale: i32,
+    /// The power of two that amounts are scaled by.
+    shift: i32,
 }
 
 /// h and its first two derivatives in ln d.
@@ -99,13 +99,15 @@ impl<'a> Side<'a> {
             fixed: Scaled::ONE,
             target: signed * ln_k,
             multiple: system.multiple,
-            unscale: if by_fraction { 0 } else { -shift },
+            shift,
         };
         if system.multiple > 0.0 {
             let power = sign * system.delta_power;
-            side.fixed = state
-                .activity_unit(system, power)
-                .times_two_to(i64::from(side.unscale) * i64::from(power));
+            side.fixed = state.activity_unit(system, power);
+            // Fractions do not see how amounts are scaled.
+            if !by_fraction {
+                side.fixed = side.fixed.times_two_to(-i64::from(shift) * i64::from(power));
+            }
             side.target *= system.multiple;
         } else {
             let unit = state.activity_unit(system, 1);
@@ -152,10 +154,10 @@ impl<'a> Side<'a> {
         }
         if self.total_power != 0 {
             product = product.times(total, self.total_power);
-            let part = (delta_per_total * d) * (delta_per_total * self.inert);
-            slope += part;
-            curvature += part * (1.0 - total_bend);
         }
+        let part = (delta_per_total * d) * (delta_per_total * self.inert);
+        slope += part;
+        curvature += part * (1.0 - total_bend);
         let value = if self.multiple == 0.0 {
             self.by_logarithms(|term| term.at_wall + term.slope * d, total)
         } else {
@@ -165,14 +167,15 @@ impl<'a> Side<'a> {
     }
 
     /// h where some ν is no multiple of an eighth: a logarithm for each mantissa, and the powers of
-    /// two added with their rounding errors.
+    /// two added with their rounding errors. The scaling is taken off first, since Σν and the ν
+    /// may not add up to the last digit.
     #[inline(never)]
     fn by_logarithms(&self, amount: impl Fn(&Term) -> f64, total: f64) -> f64 {
         let (mut twos, mut twos_error, mut small) = (0.0, 0.0, 0.0);
         let mut add = |x: f64, power: f64| {
             let (mantissa, exponent) = split(x);
             small += power * libm::log(mantissa);
-            let (product, product_error) = two_product(power, f64::from(exponent + self.unscale));
+            let (product, product_error) = two_product(power, f64::from(exponent - self.shift));
             let (sum, sum_error) = two_sum(twos, product);
             twos = sum;
             twos_error += sum_error + product_error;
@@ -199,7 +202,6 @@ impl<'a> Side<'a> {
     pub fn intercept(&self) -> f64 {
         let factor = |term: &Term| if term.at_wall == 0.0 { term.slope } else { term.at_wall };
         if self.multiple == 0.0 {
-            // Without d, what vanishes at the wall is scaled as d is.
             return self.by_logarithms(factor, self.total);
         }
         let mut product = self.fixed;
