@@ -41,6 +41,8 @@ pub(super) struct Side<'a> {
     /// ± ln K with the logarithms that the slow path needs.
     target: f64,
     multiple: f64,
+    /// The power of two that amounts are scaled by.
+    shift: i32,
 }
 
 /// h and its first two derivatives in ln d.
@@ -97,16 +99,18 @@ impl<'a> Side<'a> {
             fixed: Scaled::ONE,
             target: signed * ln_k,
             multiple: system.multiple,
+            shift,
         };
-        // At constant volume the scaling of the amounts shows; fractions do not see it.
-        let unscale = if by_fraction { 0 } else { -i64::from(shift) };
         if system.multiple > 0.0 {
             let power = sign * system.delta_power;
-            side.fixed =
-                state.activity_unit(system, power).times_two_to(unscale * i64::from(power));
+            side.fixed = state.activity_unit(system, power);
+            // Fractions do not see how amounts are scaled.
+            if !by_fraction {
+                side.fixed = side.fixed.times_two_to(-i64::from(shift) * i64::from(power));
+            }
             side.target *= system.multiple;
         } else {
-            let unit = state.activity_unit(system, 1).times_two_to(unscale);
+            let unit = state.activity_unit(system, 1);
             side.target -= signed * system.delta_nu * unit.ln_less(0.0);
         }
         side
@@ -117,7 +121,7 @@ impl<'a> Side<'a> {
     pub fn value(&self, d: f64) -> f64 {
         let total = self.total + self.total_slope * d;
         if self.multiple == 0.0 {
-            return self.value_by_logarithms(d, total);
+            return self.by_logarithms(|term| term.at_wall + term.slope * d, total);
         }
         let mut product = self.fixed;
         for term in self.terms {
@@ -150,12 +154,12 @@ impl<'a> Side<'a> {
         }
         if self.total_power != 0 {
             product = product.times(total, self.total_power);
-            let part = (delta_per_total * d) * (delta_per_total * self.inert);
-            slope += part;
-            curvature += part * (1.0 - total_bend);
         }
+        let part = (delta_per_total * d) * (delta_per_total * self.inert);
+        slope += part;
+        curvature += part * (1.0 - total_bend);
         let value = if self.multiple == 0.0 {
-            self.value_by_logarithms(d, total)
+            self.by_logarithms(|term| term.at_wall + term.slope * d, total)
         } else {
             product.ln_less(self.target) / self.multiple
         };
@@ -163,20 +167,21 @@ impl<'a> Side<'a> {
     }
 
     /// h where some ν is no multiple of an eighth: a logarithm for each mantissa, and the powers of
-    /// two added with their rounding errors.
+    /// two added with their rounding errors. The scaling is taken off first, since Σν and the ν
+    /// may not add up to the last digit.
     #[inline(never)]
-    fn value_by_logarithms(&self, d: f64, total: f64) -> f64 {
+    fn by_logarithms(&self, amount: impl Fn(&Term) -> f64, total: f64) -> f64 {
         let (mut twos, mut twos_error, mut small) = (0.0, 0.0, 0.0);
         let mut add = |x: f64, power: f64| {
             let (mantissa, exponent) = split(x);
             small += power * libm::log(mantissa);
-            let (product, product_error) = two_product(power, f64::from(exponent));
+            let (product, product_error) = two_product(power, f64::from(exponent - self.shift));
             let (sum, sum_error) = two_sum(twos, product);
             twos = sum;
             twos_error += sum_error + product_error;
         };
         for term in self.terms {
-            add(term.at_wall + term.slope * d, term.slope);
+            add(amount(term), term.slope);
         }
         if self.total_slope != 0.0 {
             add(total, -self.total_slope);
@@ -195,23 +200,13 @@ impl<'a> Side<'a> {
     /// h − λ ln d as d goes to zero.
     #[inline(never)]
     pub fn intercept(&self) -> f64 {
+        let factor = |term: &Term| if term.at_wall == 0.0 { term.slope } else { term.at_wall };
         if self.multiple == 0.0 {
-            let order = self.order();
-            let ends = |term: &Term| {
-                let amount = if term.at_wall == 0.0 { term.slope } else { term.at_wall };
-                (Term { at_wall: amount, ..*term }, term.slope)
-            };
-            let mut sum = -self.target;
-            for (term, power) in self.terms.iter().map(ends) {
-                sum += power * libm::log(term.at_wall);
-            }
-            debug_assert!(order >= 0.0);
-            return sum - self.total_slope * libm::log(self.total);
+            return self.by_logarithms(factor, self.total);
         }
         let mut product = self.fixed;
         for term in self.terms {
-            let amount = if term.at_wall == 0.0 { term.slope } else { term.at_wall };
-            product = product.times(amount, term.power);
+            product = product.times(factor(term), term.power);
         }
         if self.total_power != 0 {
             product = product.times(self.total, self.total_power);

@@ -25,7 +25,7 @@ pub fn step_in_power(value: f64, slope: f64, curvature: f64) -> Option<f64> {
         return Some(-newton * series);
     }
     // A bend that is no number fails here too.
-    if bend < 0.999 { Some(libm::log(1.0 - bend) / power) } else { None }
+    if bend < 1.0 - 4.0 * f64::EPSILON { Some(libm::log(1.0 - bend) / power) } else { None }
 }
 
 /// exp(x) for a step that will be corrected: to 4e-5 below 0.5, to rounding near zero and above.
