@@ -9,7 +9,6 @@ export default [
     rules: {
       eqeqeq: 'error',
       'no-implicit-coercion': 'error',
-      'no-shadow': 'error',
       'no-var': 'error',
       'prefer-const': 'error',
     },
