@@ -147,14 +147,14 @@ fn record_of(
 /// The problem of a species that the library does not have, with what it has instead.
 fn unknown(species: &Species) -> Problem {
     let formula = species.formula.text();
-    let other_phases = library::find(formula, None, None);
-    let try_this = if let Some(other) = other_phases.first() {
-        format!("{}({})", other.formula, other.phase.symbol())
-    } else {
-        match nearest(formula, library::formulas()) {
-            Some(near) => near,
-            None => "a species of the library".to_owned(),
-        }
-    };
-    Problem::new(LibraryCode::Unknown).with("found", species.text()).with("near", try_this)
+    let found = |code: LibraryCode| Problem::new(code).with("found", species.text());
+    let others = library::find(formula, None, None);
+    if !others.is_empty() {
+        let known: Vec<String> = others.iter().map(|record| record.label()).collect();
+        return found(LibraryCode::PhaseUnknown).with("known", known.join(", "));
+    }
+    match nearest(formula, library::formulas()) {
+        Some(near) => found(LibraryCode::UnknownNear).with("near", near),
+        None => found(LibraryCode::Unknown),
+    }
 }

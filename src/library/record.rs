@@ -129,11 +129,14 @@ impl Record {
         self.sources.iter().filter_map(|id| citation(id))
     }
 
-    /// Formula, phase and form in one text for a message, such as `S(s) rhombic`.
+    /// The species as an equation may name it, such as `S(s, rhombic)`.
     #[must_use]
     pub fn label(&self) -> String {
-        let plain = format!("{}({})", self.formula, self.phase.symbol());
-        self.form.map_or(plain.clone(), |form| format!("{plain} {form}"))
+        let (formula, phase) = (self.formula, self.phase.symbol());
+        self.form.map_or_else(
+            || format!("{formula}({phase})"),
+            |form| format!("{formula}({phase}, {form})"),
+        )
     }
 
     /// The temperatures where one range of the data meets the next, in K.

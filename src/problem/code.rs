@@ -117,6 +117,7 @@ codes! {
     /// A species that the library does not hold, or holds in several ways.
     LibraryCode in Library {
         Unknown = "species-unknown",
+        UnknownNear = "species-unknown-near",
         PhaseUnknown = "species-phase-unknown",
         Several = "species-several",
         Temperature = "species-temperature",

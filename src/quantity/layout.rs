@@ -15,7 +15,7 @@ const PLAIN_EXPONENTS: std::ops::RangeInclusive<i32> = -4..=6;
 /// ```
 /// use shiftgauge::quantity::show_number;
 /// assert_eq!(show_number(-0.00001234, 3), "−1.23×10⁻⁵");
-/// assert_eq!(show_number(28413.25, 6), "28\u{202f}413.3");
+/// assert_eq!(show_number(28413.27, 6), "28\u{202f}413.3");
 /// ```
 #[must_use]
 pub fn show_number(value: f64, significant_digits: usize) -> String {

@@ -30,7 +30,7 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             ("{found} is not known here; allowed: {allowed}.", "Choose one of these words.")
         }
         C::NotYet => (
-            "This version does not do {what} yet, and does not leave it out in silence.",
+            "This version does not handle {what}, and does not leave it out in silence.",
             "Take it out of the case to get an answer without it.",
         ),
         C::GaugeAtmosphere => {

@@ -7,6 +7,10 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
         C::Unknown => {
             ("The library has no species {found}.", "Check the formula, or give K yourself.")
         }
+        C::UnknownNear => (
+            "The library has no species {found}; near it is {near}.",
+            "Write the one that is meant, or give K yourself.",
+        ),
         C::PhaseUnknown => (
             "The library has no {found}; it has {known}.",
             "Write the phase or form that the library has, or give K yourself.",
