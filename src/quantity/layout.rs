@@ -10,12 +10,12 @@ const PLAIN_EXPONENTS: std::ops::RangeInclusive<i32> = -4..=6;
 /// The minus is U+2212, five or more digits before the point are grouped by narrow no-break spaces
 /// (ISO 80000-1), and very large or small numbers carry a power of ten. From 17 digits on it is the
 /// shortest text that reads back as exactly this number. A number that is not finite is written as
-/// `no value`.
+/// `no value`. A number exactly halfway is rounded to the even digit (ISO 80000-1, annex B).
 ///
 /// ```
 /// use shiftgauge::quantity::show_number;
 /// assert_eq!(show_number(-0.00001234, 3), "−1.23×10⁻⁵");
-/// assert_eq!(show_number(28413.27, 6), "28\u{202f}413.3");
+/// assert_eq!(show_number(28413.26, 6), "28\u{202f}413.3");
 /// ```
 #[must_use]
 pub fn show_number(value: f64, significant_digits: usize) -> String {
