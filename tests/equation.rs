@@ -1,7 +1,7 @@
 //! Equations: how they divide, what is read, and what each mistake gets.
 
-use shiftgauge::problem::Span;
 use shiftgauge::problem::words::{Language, say};
+use shiftgauge::problem::{Problem, ReactionCode, Span};
 use shiftgauge::reaction::{balance, parse_equation};
 
 #[test]
@@ -156,5 +156,15 @@ fn an_equation_has_its_limits() {
     for (text, code) in rows {
         let problems = parse_equation(&text).unwrap_err();
         assert!(problems.iter().any(|p| p.code.as_str() == code), "{code}: {problems:?}");
+    }
+}
+
+#[test]
+fn every_code_of_the_room_has_its_sentences() {
+    let mut seen = std::collections::HashSet::new();
+    for &code in ReactionCode::ALL {
+        let sentence = say(&Problem::new(code), Language::En);
+        assert!(seen.insert(code.as_str()), "two codes are called {}", code.as_str());
+        assert!(!sentence.message.is_empty() && sentence.hint.ends_with('.'), "{code:?}");
     }
 }

@@ -133,6 +133,8 @@ fn each_mistake_has_its_code_and_says_what_is_likely_meant() {
         ("K2Cr207", "count-zero-for-letter", "Write K2Cr2O7."),
         ("Fe0", "count-zero-for-letter", "Write FeO."),
         ("H2O0", "count-zero-for-letter", "Write H2OO."),
+        ("CuSO4·0H2O", "count-zero", "letter O"),
+        ("C0.0O2", "count-zero", "letter O"),
         ("co2", "formula-capitals", "Write CO2 or Co2."),
         ("h2o", "formula-capitals", "Write H2O."),
         ("CL2", "formula-capitals", "Write Cl2."),

@@ -27,7 +27,7 @@ pub(super) fn read(place: Place<'_>) -> Result<Formula, Problem> {
         _ => {}
     }
     let (text, atoms) = read_body(body).map_err(|problem| advise(problem, body))?;
-    if let Some(likely) = repair::letter_for_zero(body.text()) {
+    if let Some(likely) = repair::letter_for_zero(&text) {
         return Err(body.problem(ReactionCode::ZeroForLetter).with("suggestion", likely));
     }
     Ok(Formula::new(text, atoms, charge))
@@ -41,7 +41,9 @@ fn advise(problem: Problem, body: Place<'_>) -> Problem {
         return problem;
     }
     let text = body.text();
-    let mut likely = repair::spellings(text);
+    let spellings = repair::spellings(text).into_iter();
+    let mut likely: Vec<String> =
+        spellings.map(|text| repair::letter_for_zero(&text).unwrap_or(text)).collect();
     likely.retain(|spelling| read_body(Place::whole(spelling)).is_ok());
     if likely.is_empty() {
         return problem;

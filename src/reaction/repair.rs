@@ -36,13 +36,13 @@ pub(super) fn spellings(text: &str) -> Vec<String> {
     best.pop().unwrap_or_default().into_iter().map(|(_, text)| text).collect()
 }
 
-/// Whether the zero at this place can be no count: nothing stands before it that it could end,
+/// Whether the zero at this place can be no count: it begins a number after an atom or a group,
 /// and no decimals follow.
 fn is_letter_o(letters: &[char], at: usize) -> bool {
     let before = at.checked_sub(1).and_then(|before| letters.get(before));
-    let number_before = before.is_some_and(|c| c.is_ascii_digit() || matches!(c, '.' | ','));
+    let counts = before.is_some_and(|c| c.is_ascii_alphabetic() || matches!(c, ')' | ']' | '}'));
     let decimals = matches!(letters.get(at + 1), Some('.' | ','));
-    letters[at] == '0' && !number_before && !decimals
+    letters[at] == '0' && counts && !decimals
 }
 
 fn symbol(letters: &[char]) -> Option<String> {
