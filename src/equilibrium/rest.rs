@@ -206,10 +206,11 @@ impl<'a> Search<'a> {
     fn between(&mut self, forward: Wall, reverse: Wall) -> Summary {
         let middle = 0.5 * (forward.distance + reverse.distance);
         let mut terms = std::mem::take(&mut self.workspace.terms);
-        let side = self.side(&forward, &mut terms);
+        let (guess, other) = if self.ln_k > 0.0 { (forward, reverse) } else { (reverse, forward) };
+        let side = self.side(&guess, &mut terms);
         let point = side.point(middle);
         let summary = if point.value >= 0.0 {
-            self.near(&forward, &side, middle, point, middle)
+            self.near(&guess, &side, middle, point, middle)
         } else {
             // The same point seen from the other wall.
             let point = Point {
@@ -217,8 +218,8 @@ impl<'a> Search<'a> {
                 slope: point.slope,
                 curvature: 2.0 * point.slope - point.curvature,
             };
-            let side = self.side(&reverse, &mut terms);
-            self.near(&reverse, &side, middle, point, middle)
+            let side = self.side(&other, &mut terms);
+            self.near(&other, &side, middle, point, middle)
         };
         self.workspace.terms = terms;
         summary
@@ -272,7 +273,7 @@ impl<'a> Search<'a> {
                 return self.summary(outcome, extent, Affinity::Finite(away * at_wall));
             }
         }
-        let (zero, iterations) = solve(side, order, start, first, high);
+        let (zero, slope, iterations) = solve(side, order, start, first, high);
         let distance = match zero {
             Zero::Nowhere => {
                 return Summary { iterations, ..self.stay(RestOutcome::HasNoLimit) };
@@ -288,8 +289,7 @@ impl<'a> Search<'a> {
             return Summary { iterations, ..self.stay(RestOutcome::HasNoLimit) };
         }
         let (left, condition) = if distance > 0.0 {
-            let point = side.point(distance);
-            (point.value, self.condition(wall, distance, point.slope))
+            (side.value(distance), self.condition(wall, distance, slope))
         } else {
             (0.0, 1.0 / order)
         };

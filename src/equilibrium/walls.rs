@@ -68,7 +68,8 @@ impl Wall {
         if nu * self.nu < 0.0 {
             return amount + change;
         }
-        if amount > 8.0 * change {
+        // One rounding is left when `change` has none.
+        if amount > 8.0 * change || is_power_of_two(nu) && is_power_of_two(self.nu) {
             return amount - change;
         }
         difference(amount, self.nu.abs(), self.amount, nu.abs()) / self.nu.abs()
@@ -82,6 +83,11 @@ impl Wall {
             Way::Reverse => nu,
         }
     }
+}
+
+#[inline]
+fn is_power_of_two(nu: f64) -> bool {
+    nu.to_bits() << 12 == 0
 }
 
 /// a |ν_b| − b |ν_a| to one rounding, at any size of the amounts.
