@@ -199,7 +199,7 @@ impl<'a> Search<'a> {
             (Some(wall), None) | (None, Some(wall)) => wall,
             (None, None) => return self.stay(RestOutcome::HasNoLimit),
         };
-        self.from_one_wall(far)
+        self.with_one_wall(far)
     }
 
     /// Both walls are there: the sign of the affinity in the middle says which is nearer.
@@ -226,7 +226,7 @@ impl<'a> Search<'a> {
     }
 
     /// There is no wall the other way.
-    fn from_one_wall(&mut self, wall: Wall) -> Summary {
+    fn with_one_wall(&mut self, wall: Wall) -> Summary {
         if self.state.by_fraction(self.system) {
             let towards_wall = match wall.way {
                 Way::Forward => 1.0,

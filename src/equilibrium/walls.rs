@@ -69,7 +69,8 @@ impl Wall {
             return amount + change;
         }
         // One rounding is left when `change` has none.
-        if amount > 8.0 * change || is_power_of_two(nu) && is_power_of_two(self.nu) {
+        let exact = is_power_of_two(nu) && is_power_of_two(self.nu) && change > SMALLEST_EXACT;
+        if exact || amount > 8.0 * change {
             return amount - change;
         }
         difference(amount, self.nu.abs(), self.amount, nu.abs()) / self.nu.abs()
@@ -84,6 +85,9 @@ impl Wall {
         }
     }
 }
+
+/// Above this a power of two between 1e-3 and 1e3 multiplies and divides without rounding.
+const SMALLEST_EXACT: f64 = 1e-300;
 
 #[inline]
 fn is_power_of_two(nu: f64) -> bool {
