@@ -6,6 +6,7 @@
     reason = "a test fails by panicking"
 )]
 
+mod bare;
 mod laws_rest;
 mod rest;
 mod rooms;

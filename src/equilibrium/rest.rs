@@ -270,7 +270,7 @@ impl<'a> Search<'a> {
                     if at_wall == 0.0 { RestOutcome::Rest } else { RestOutcome::PhaseExhausted };
                 self.move_to(wall, 0.0);
                 let extent = away * wall.distance;
-                return self.summary(outcome, extent, Affinity::Finite(away * at_wall));
+                return self.summary(outcome, extent, Affinity::Finite(away * at_wall + 0.0));
             }
         }
         let (zero, slope, iterations) = solve(side, order, start, first, high);
@@ -294,7 +294,7 @@ impl<'a> Search<'a> {
             (0.0, 1.0 / order)
         };
         let extent = away * (wall.distance - distance);
-        let summary = self.summary(RestOutcome::Rest, extent, Affinity::Finite(away * left));
+        let summary = self.summary(RestOutcome::Rest, extent, Affinity::Finite(away * left + 0.0));
         Summary { residual: left.abs(), iterations, condition, ..summary }
     }
 
@@ -350,11 +350,12 @@ impl<'a> Search<'a> {
     }
 
     fn summary(&self, outcome: RestOutcome, scaled_extent: f64, affinity: Affinity) -> Summary {
-        let unshift = |x: f64| times_power_of_two(x, -self.workspace.shift);
+        // Adding zero takes the sign off a zero.
+        let unshift = |x: f64| times_power_of_two(x, -self.workspace.shift) + 0.0;
         Summary {
             outcome,
             extent_mol: unshift(scaled_extent),
-            extent_min_mol: self.reverse.map(|wall| -unshift(wall.distance)),
+            extent_min_mol: self.reverse.map(|wall| unshift(-wall.distance)),
             extent_max_mol: self.forward.map(|wall| unshift(wall.distance)),
             affinity,
             residual: 0.0,

@@ -9,6 +9,10 @@ const STEPS_AT_MOST: u32 = 100;
 const STEPS_ALONE: u32 = 12;
 /// Below this the next step changes nothing: its error is of third order.
 const STEP_ENOUGH: f64 = 1e-6;
+/// A value this small is rounding, and where the affinity hardly changes with d it stays so over a
+/// wide range of d; this many such values end the search.
+const QUIET: f64 = 4.0 * f64::EPSILON;
+const QUIET_ENOUGH: u32 = 3;
 /// The smallest and largest distance that a double can work with here (2^-1000 and 2^1000), and
 /// the logarithm of the smallest.
 const FLOOR: f64 = f64::from_bits((1023 - 1000) << 52);
@@ -40,8 +44,10 @@ pub(super) fn solve(
 ) -> (Zero, f64, u32) {
     let (mut low, mut high) = (0.0, high);
     let (mut d, mut point) = (start, first);
+    let mut quiet = 0;
     for steps in 1..=STEPS_AT_MOST {
-        if point.value == 0.0 {
+        quiet += u32::from(point.value.abs() <= QUIET);
+        if point.value == 0.0 || quiet == QUIET_ENOUGH {
             return (Zero::At { distance: d }, point.slope, steps);
         }
         if point.value > 0.0 {
