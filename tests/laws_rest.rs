@@ -296,7 +296,7 @@ fn wild(draws: &mut Draws) -> Case {
 #[test]
 fn no_input_panics_or_gives_a_number_that_is_not_finite() {
     let mut draws = Draws::new(9);
-    let mut solved = 0;
+    let (mut solved, mut steps) = (0, 0);
     let mut seen = std::collections::BTreeMap::<String, usize>::new();
     for _ in 0..200_000 {
         let case = wild(&mut draws);
@@ -324,9 +324,10 @@ fn no_input_panics_or_gives_a_number_that_is_not_finite() {
         }
         assert!(end.amounts_mol.iter().all(|&amount| amount >= 0.0), "{summary:?} {case:?}");
         assert!(summary.residual < 1e-9, "{summary:?} {case:?}");
-        assert!(summary.iterations <= 60, "{summary:?} {case:?}");
+        steps = steps.max(summary.iterations);
     }
-    println!("{solved} solved: {seen:?}");
+    println!("{solved} solved in up to {steps} steps: {seen:?}");
+    assert!(steps <= 60, "{steps} steps");
     assert!(solved > 80_000, "only {solved} of 200000 could be solved");
     assert_eq!(seen.len(), 6, "{seen:?}");
 }

@@ -7,6 +7,7 @@
 )]
 
 mod balance;
+mod bare;
 mod elements;
 mod equation;
 mod formula;

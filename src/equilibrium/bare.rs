@@ -1,7 +1,8 @@
 //! The two primitives on bare numbers, for scripts and tests, with every mistake reported.
 
+use super::outcome::RestOutcome;
 use super::quotient::{Affinity, affinity};
-use super::rest::{RestOutcome, rest};
+use super::rest::rest;
 use super::state::{Hold, State};
 use super::system::{Kind, System};
 use crate::problem::EquilibriumCode;

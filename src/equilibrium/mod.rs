@@ -15,10 +15,12 @@
 //! | `side` | the affinity as a function of the distance from one wall |
 //! | `solve` | the zero of that function |
 //! | `rest` | which wall, which outcome, which amounts |
+//! | `outcome` | what a state of rest is told by |
 //! | `bare` | the two calls on bare numbers, with every mistake reported |
 
 mod bare;
 mod limits;
+mod outcome;
 mod quotient;
 mod rest;
 mod side;
@@ -30,7 +32,8 @@ mod walls;
 pub use bare::{BareProblem, BareReaction, BareRest, BareSpecies, BareSpeciesAtRest};
 pub use bare::{affinities, rest_of};
 pub use limits::{AMOUNT_MAX_MOL, LN_K_MAX, NU_MAX, NU_MIN, SPECIES_MAX};
+pub use outcome::{Rest, RestOutcome, Summary, Workspace};
 pub use quotient::{Affinity, Quotient, affinity, quotient};
-pub use rest::{Rest, RestOutcome, Summary, Workspace, rest, rest_into};
+pub use rest::{rest, rest_into};
 pub use state::{Hold, State};
 pub use system::{Kind, System};

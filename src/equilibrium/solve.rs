@@ -9,6 +9,10 @@ const STEPS_AT_MOST: u32 = 100;
 const STEPS_ALONE: u32 = 12;
 /// Below this the next step changes nothing: its error is of third order.
 const STEP_ENOUGH: f64 = 1e-6;
+/// A value this small is rounding, and where the affinity hardly changes with d it stays so over a
+/// wide range of d; this many such values end the search.
+const QUIET: f64 = 4.0 * f64::EPSILON;
+const QUIET_ENOUGH: u32 = 3;
 /// The smallest and largest distance that a double can work with here (2^-1000 and 2^1000), and
 /// the logarithm of the smallest.
 const FLOOR: f64 = f64::from_bits((1023 - 1000) << 52);
@@ -29,13 +33,22 @@ pub(super) enum Zero {
 /// Finds the zero of h in (0, `high`), from a start and h there.
 ///
 /// `high` is infinite where there is no other wall. `order` is the side's λ, zero where h is finite
-/// at the wall (and has been found negative there).
-pub(super) fn solve(side: &Side, order: f64, start: f64, first: Point, high: f64) -> (Zero, u32) {
+/// at the wall (and has been found negative there). Gives the zero, the slope of h in ln d next to
+/// it, and the steps taken.
+pub(super) fn solve(
+    side: &Side,
+    order: f64,
+    start: f64,
+    first: Point,
+    high: f64,
+) -> (Zero, f64, u32) {
     let (mut low, mut high) = (0.0, high);
     let (mut d, mut point) = (start, first);
+    let mut quiet = 0;
     for steps in 1..=STEPS_AT_MOST {
-        if point.value == 0.0 {
-            return (Zero::At { distance: d }, steps);
+        quiet += u32::from(point.value.abs() <= QUIET);
+        if point.value == 0.0 || quiet == QUIET_ENOUGH {
+            return (Zero::At { distance: d }, point.slope, steps);
         }
         if point.value > 0.0 {
             high = d;
@@ -47,7 +60,7 @@ pub(super) fn solve(side: &Side, order: f64, start: f64, first: Point, high: f64
         let turn = steps > STEPS_ALONE && steps % 2 == 1;
         let mut next = match step {
             Some(step) if step.abs() < STEP_ENOUGH => {
-                return (Zero::At { distance: d * growth(step) }, steps);
+                return (Zero::At { distance: d * growth(step) }, point.slope, steps);
             }
             Some(step) if !far && !turn => d * growth(step.clamp(-600.0, 600.0)),
             _ => 0.0,
@@ -58,7 +71,7 @@ pub(super) fn solve(side: &Side, order: f64, start: f64, first: Point, high: f64
                 // where h is convex.
                 let ln_distance = -side.intercept() / order;
                 if ln_distance < LN_FLOOR {
-                    return (Zero::Trace { ln_distance }, steps);
+                    return (Zero::Trace { ln_distance }, point.slope, steps);
                 }
                 next = libm::exp(ln_distance.min(700.0));
             }
@@ -68,18 +81,18 @@ pub(super) fn solve(side: &Side, order: f64, start: f64, first: Point, high: f64
         }
         if next < FLOOR {
             let ln_distance = if order > 0.0 { -side.intercept() / order } else { LN_FLOOR };
-            return (Zero::Trace { ln_distance: ln_distance.min(LN_FLOOR) }, steps);
+            return (Zero::Trace { ln_distance: ln_distance.min(LN_FLOOR) }, point.slope, steps);
         }
         if next > CEILING {
-            return (Zero::Nowhere, steps);
+            return (Zero::Nowhere, point.slope, steps);
         }
         if high <= low * (1.0 + 2.0 * f64::EPSILON) {
-            return (Zero::At { distance: next }, steps);
+            return (Zero::At { distance: next }, point.slope, steps);
         }
         d = next;
         point = side.point(d);
     }
-    (Zero::At { distance: d }, STEPS_AT_MOST)
+    (Zero::At { distance: d }, point.slope, STEPS_AT_MOST)
 }
 
 /// The middle of a bracket in ln d; a long step towards an end that is not known.

@@ -68,7 +68,9 @@ impl Wall {
         if nu * self.nu < 0.0 {
             return amount + change;
         }
-        if amount > 8.0 * change {
+        // One rounding is left when `change` has none.
+        let exact = is_power_of_two(nu) && is_power_of_two(self.nu) && change > SMALLEST_EXACT;
+        if exact || amount > 8.0 * change {
             return amount - change;
         }
         difference(amount, self.nu.abs(), self.amount, nu.abs()) / self.nu.abs()
@@ -82,6 +84,14 @@ impl Wall {
             Way::Reverse => nu,
         }
     }
+}
+
+/// Above this a power of two between 1e-3 and 1e3 multiplies and divides without rounding.
+const SMALLEST_EXACT: f64 = 1e-300;
+
+#[inline]
+fn is_power_of_two(nu: f64) -> bool {
+    nu.to_bits() << 12 == 0
 }
 
 /// a |ν_b| − b |ν_a| to one rounding, at any size of the amounts.

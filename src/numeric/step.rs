@@ -12,7 +12,7 @@
 /// use shiftgauge::numeric::{growth, step_in_power};
 /// // h = d − 3 at d = 5: h' = h'' = d, and the step is exact.
 /// let step = step_in_power(2.0, 5.0, 5.0).unwrap();
-/// assert!((5.0 * growth(step) - 3.0).abs() < 1e-3);
+/// assert!((5.0 * growth(step) - 3.0).abs() < 1e-2);
 /// ```
 #[inline]
 #[must_use]
@@ -20,19 +20,20 @@ pub fn step_in_power(value: f64, slope: f64, curvature: f64) -> Option<f64> {
     let newton = value / slope;
     let power = curvature / slope;
     let bend = power * newton;
-    if bend.abs() < 0.125 {
-        let series = 1.0 + bend * (0.5 + bend * (1.0 / 3.0 + bend * (0.25 + bend * 0.2)));
-        return Some(-newton * series);
+    if bend > -2.0 && bend < 0.5 {
+        // ln(1 − z) = −z (6 − z)/(6 − 4 z), off by less than 5 %, and by z⁴/36 near zero.
+        return Some(-newton * (6.0 - bend) / (6.0 - 4.0 * bend));
     }
     // A bend that is no number fails here too.
     if bend < 1.0 - 4.0 * f64::EPSILON { Some(libm::log(1.0 - bend) / power) } else { None }
 }
 
-/// exp(x) for a step that will be corrected: to 4e-5 below 0.5, to rounding near zero and above.
+/// exp(x) for a step that will be corrected: off by up to 5 % where |x| < 2, by rounding near zero
+/// and above.
 #[inline]
 #[must_use]
 pub fn growth(x: f64) -> f64 {
-    if x.abs() < 0.5 {
+    if x.abs() < 2.0 {
         let half = 0.5 * x;
         let square = x * x * (1.0 / 12.0);
         (1.0 + half + square) / (1.0 - half + square)
