@@ -101,7 +101,7 @@ part_page() {
 
 node_tests() {
   counted "the tests of the $1" '^[ℹ#] pass ([0-9]+)$' '^[ℹ#] fail ([0-9]+)$' \
-    node --test --test-reporter=spec tests/"$1"/*.test.js
+    node --test --test-reporter=spec --test-timeout=300000 tests/"$1"/*.test.js
 }
 
 # A page that cannot be built is one failure of each part that needs it.
