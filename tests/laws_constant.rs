@@ -156,9 +156,7 @@ fn a_number_for_another_multiple_or_the_reverse_is_converted() {
     let library = ln_k("2 SO2(g) + O2(g) = 2 SO3(g)", "700 K");
     // Kp in atm of the half reaction and of its reverse, which carry atm^-1/2 and atm^1/2.
     let half = library / 2.0 - 0.5 * (1.0_f64 / 1.01325).ln();
-    for (equation, ln) in
-        [("SO2 + 1/2 O2 = SO3", half), ("SO3(g) = SO2(g) + 1/2 O2(g)", -half)]
-    {
+    for (equation, ln) in [("SO2 + 1/2 O2 = SO3", half), ("SO3(g) = SO2(g) + 1/2 O2(g)", -half)] {
         let constant = json!({
             "from": "value", "kind": "Kp", "pressure_unit": "atm",
             "value": format!("{:e}", ln.exp()), "for": equation
@@ -166,7 +164,6 @@ fn a_number_for_another_multiple_or_the_reverse_is_converted() {
         near(stated(&constant, "3 bar")["ln_k"].as_f64().unwrap(), library, equation);
     }
 }
-
 
 #[test]
 fn an_enthalpy_carries_a_stated_k_as_van_t_hoff_says() {

@@ -8,9 +8,12 @@
 
 mod balance;
 mod bare;
+mod check;
 mod elements;
 mod equation;
+mod examples;
 mod formula;
+mod laws_constant;
 mod laws_quantity;
 mod laws_reaction;
 mod laws_rest;
