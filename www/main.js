@@ -61,10 +61,19 @@ function readForm() {
   return inputs.reduce((question, input) => input.read(question), state.get().question);
 }
 
+/** The case that was tried last, as text. */
+let tried = '';
+
 /** Answers the case as the form reads now. */
 function answer() {
   const question = readForm();
   const text = caseToText(question);
+  if (text === tried) {
+    // Leaving a field also counts as a change; what is being pressed must not be replaced by it.
+    render(inputs, state.get());
+    return;
+  }
+  tried = text;
   keep('case', text);
   if (text === state.get().trapped) {
     state.set({ question, current: false, problems: [] });

@@ -1,4 +1,7 @@
-/** What stays in this browser: the case in hand, the one before it, and a case that stopped the engine. */
+/**
+ * What stays in this browser: the case in hand, the one before it, and a case that stopped the
+ * engine. Each tab comes back to its own; a new tab to the last one written.
+ */
 
 const PREFIX = 'shiftgauge.';
 
@@ -10,7 +13,7 @@ const PREFIX = 'shiftgauge.';
  */
 export function recall(slot) {
   try {
-    return window.localStorage.getItem(PREFIX + slot);
+    return window.sessionStorage.getItem(PREFIX + slot) ?? window.localStorage.getItem(PREFIX + slot);
   } catch {
     return null;
   }
@@ -23,6 +26,7 @@ export function recall(slot) {
  */
 export function keep(slot, text) {
   try {
+    window.sessionStorage.setItem(PREFIX + slot, text);
     window.localStorage.setItem(PREFIX + slot, text);
     return true;
   } catch {
@@ -33,6 +37,7 @@ export function keep(slot, text) {
 /** @param {Slot} slot */
 export function forget(slot) {
   try {
+    window.sessionStorage.removeItem(PREFIX + slot);
     window.localStorage.removeItem(PREFIX + slot);
   } catch {
     // A browser that keeps nothing has nothing to forget.

@@ -1,10 +1,11 @@
 /** The verdict as a sentence, and what else must be said about how the reaction ends. */
 
-import { formula, temperatureDifference } from './format.js';
+import { NO_BREAK, formula, pair, temperatureDifference } from './format.js';
 
 /** @import { Report, ReactionReport } from './shiftgauge.js' */
 /** @import { TemperatureUnit } from './format.js' */
 
+const PASCAL_PER_BAR = 1e5;
 /** Phases whose activity does not hang on how much of them there is. */
 const PURE = ['s', 'l'];
 
@@ -26,7 +27,7 @@ const PURE = ['s', 'l'];
 export function sentence(report, unit) {
   const reaction = report.reactions[0];
   if (reaction === undefined) return unclear('');
-  const more = [absence(report, reaction), ending(report), reaction.t_star_k === null ? reaction.approach_note ?? '' : '']
+  const more = [absence(report, reaction), ending(report), pressureAtRest(report), reaction.t_star_k === null ? reaction.approach_note ?? '' : '']
     .filter((text) => text !== '').join(' ');
   const distance = reaction.shortfall_k;
   /** @param {number} kelvin */
@@ -84,6 +85,17 @@ function absence(report, reaction) {
     case 'undetermined': return `There is ${absent(-1, 'a reactant missing')} and ${absent(1, 'a product missing')}, so Q has no value.`;
     default: return '';
   }
+}
+
+/**
+ * Where the volume is held, the pressure moves with the reaction.
+ * @param {Report} report
+ */
+function pressureAtRest({ pressure_pa: now, rest }) {
+  const then = rest?.pressure_pa;
+  if (then === undefined || Math.abs(then - now) < 1e-9 * now) return '';
+  const shown = pair(now / PASCAL_PER_BAR, then / PASCAL_PER_BAR);
+  return `At this volume the pressure goes from ${shown.now} to ${shown.rest}${NO_BREAK}bar(a).`;
 }
 
 /**

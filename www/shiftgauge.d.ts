@@ -111,8 +111,8 @@ export interface SpeciesReport {
   species: string;
   phase: string;
   now_mol: number;
-  rest_mol: number;
-  change_mol: number;
+  rest_mol: number | null;
+  change_mol: number | null;
   now_fraction: number | null;
   rest_fraction: number | null;
   exhausted: boolean;

@@ -45,7 +45,7 @@ const isWater = ({ species, phase }) => species === 'H2O' && phase === 'g';
  * @param {'now_mol' | 'rest_mol'} which
  */
 function dryTotal(species, which) {
-  return species.filter((one) => one.phase === 'g' && !isWater(one)).reduce((sum, one) => sum + one[which], 0);
+  return species.filter((one) => one.phase === 'g' && !isWater(one)).reduce((sum, one) => sum + (one[which] ?? 0), 0);
 }
 
 /**
@@ -69,6 +69,7 @@ function row(species, basis, dry) {
  * @param {{ now: number, rest: number }} dry
  */
 function numbers(species, basis, dry) {
+  if (species.rest_mol === null) return { now: `${significant(species.now_mol, 4)}${NO_BREAK}mol`, rest: 'not found', change: '' };
   if (basis === 'dry' && species.phase === 'g' && dry.now > 0 && dry.rest > 0) {
     const show = isWater(species) ? pair : fractionPair;
     return show(species.now_mol / dry.now, species.rest_mol / dry.rest);

@@ -16,21 +16,21 @@ export function render({ problems, report, current, trapped }) {
   list.hidden = placed.length === 0;
   list.replaceChildren(...placed.map(({ problem, field }) => create('li', {}, ...inList(problem, field))));
   banner.hidden = current;
-  banner.replaceChildren(...(current ? [] : say(problems.length, report !== null, trapped !== '')));
+  banner.replaceChildren(...(current ? [] : [say(problems.length, report !== null, trapped !== '')]));
   const first = placed.find(({ field }) => field !== null);
-  if (!current && first?.field) banner.append(' ', goButton('Show the first', first.problem, first.field));
+  if (!current && first?.field) banner.append(goButton('Show', first.problem, first.field));
 }
 
 /**
  * @param {number} count
  * @param {boolean} hasOld
  * @param {boolean} trapped
- * @returns {string[]}
+ * @returns {HTMLElement}
  */
 function say(count, hasOld, trapped) {
-  const old = hasOld ? 'Out of date, from before the last change. ' : '';
-  if (count === 0) return [trapped ? `${old}The engine stopped on this case.` : old];
-  return [`${old}${count === 1 ? 'One thing' : `${count} things`} to put right.`];
+  const old = hasOld ? ['Out of date', create('span', { class: 'aside' }, ', from before the last change'), '. '] : [];
+  const counted = `${count === 1 ? 'One thing' : `${count} things`} to put right.`;
+  return create('span', {}, ...old, count > 0 ? counted : trapped ? 'The engine stopped on this case.' : '');
 }
 
 function clear() {

@@ -1,0 +1,62 @@
+import assert from 'node:assert/strict';
+import { test } from 'node:test';
+import { openPage } from './browser.js';
+import { answered, direction, figure, ledger, number, openExample } from './reading.js';
+
+const viewport = { width: 1280, height: 800 };
+
+test('the shift example leads, is marked as invented, and does not mind the pressure', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    assert.match(await page.inputValue('#title'), /invented/);
+    assert.match(await page.inputValue('#note'), /[Ii]nvented/);
+    assert.equal(await direction(page), 'forward');
+    assert.equal(await page.locator('.problem').count(), 0);
+    const q = await figure(page, 'q');
+    await page.fill('#pressure', '40 bar(g)');
+    assert.equal(await figure(page, 'q'), q, 'as many gas molecules on each side');
+    assert.ok((await page.locator('#working-lines li').count()) > 0, 'the working is there');
+    assert.notEqual((await page.textContent('#source-text'))?.trim(), '', 'K has a source');
+  } finally {
+    await close();
+  }
+});
+
+test('the chlorine example is marked as invented, and more pressure drives it further', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'chlorine-recovery');
+    assert.match(await page.inputValue('#title'), /invented/);
+    assert.match(await page.inputValue('#note'), /[Ii]nvented/);
+    assert.equal(await direction(page), 'forward');
+    const [, restBefore] = await ledger(page, 'HCl');
+    const before = number(await figure(page, 'q'));
+    await page.fill('#pressure', '9 bar(g)');
+    const [, restAfter] = await ledger(page, 'HCl');
+    assert.ok(restAfter < restBefore, `HCl at rest falls: ${restBefore} % to ${restAfter} %`);
+    const ratio = number(await figure(page, 'q')) / before;
+    const expected = (2.4 + 1.01325) / (9 + 1.01325);
+    assert.ok(Math.abs(ratio / expected - 1) < 0.02, `Q goes with 1/P: ${ratio} against ${expected}`);
+  } finally {
+    await close();
+  }
+});
+
+test('the valley has its walls, its floor and words that say the same', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    const choice = page.locator('input[name="valley-part"][value="whole"]');
+    if (await page.isVisible('#valley-choice')) await choice.check({ force: true });
+    const labels = await page.locator('.wall-label').allTextContents();
+    assert.deepEqual(labels.sort(), ['no CO left', 'no CO₂ left']);
+    assert.equal(await page.locator('.rest-mark').count(), 1);
+    assert.equal(await page.locator('.now-mark').count(), 1);
+    assert.match((await page.textContent('#valley-text')) ?? '', /forward/);
+    assert.match((await page.textContent('.valley-svg desc')) ?? '', /CO would run out/);
+  } finally {
+    await close();
+  }
+});
