@@ -136,7 +136,7 @@ export interface Valley extends Curve {
   extent_now_mol: number;
   extent_min_mol: number;
   extent_max_mol: number;
-  limits: { side: 'min' | 'max'; species: string }[];
+  limits: { side: 'min' | 'max'; species: string[] }[];
   near?: Curve | null;
 }
 

@@ -38,13 +38,6 @@ function browser() {
 after(async () => (await launched)?.close());
 
 /**
- * Opens the page, runs the body, and fails on any error in the console, any uncaught exception,
- * any failed request and any request to another place than the page's own.
- *
- * @param {Way} way
- * @param {(page: import('playwright-core').Page, visit: Visit) => Promise<void>} body
- * @param {Options} [options]
- *
  * @typedef {object} Visit
  * @property {string} address where the page is
  * @property {string[]} requests addresses that were asked for, in order
@@ -55,20 +48,58 @@ after(async () => (await launched)?.close());
  * @property {RegExp} [expected] faults that this visit provokes on purpose
  * @property {import('playwright-core').BrowserContextOptions} [context] viewport, touch, colours
  */
-export async function visit(way, body, { hash = '', expected, context: settings } = {}) {
+
+/**
+ * Opens the page in a profile of its own. Closing it fails on any error in the console, any uncaught
+ * exception, any failed request and any request to another place than the page's own.
+ *
+ * @param {Way} way
+ * @param {Options} [options]
+ */
+async function open(way, { hash = '', expected, context: settings } = {}) {
   const server = way === 'served' ? await startServer({ folder: fileURLToPath(DIST) }) : null;
   const address = server?.address ?? new URL('shiftgauge.html', DIST).href;
   const context = await (await browser()).newContext(settings);
-  try {
-    const page = await context.newPage();
-    const { faults, requests } = watch(context, page, address);
-    await page.goto(address + hash, { waitUntil: 'networkidle' });
-    await body(page, { address, requests, stopServer: async () => server?.close() });
-    assert.deepEqual(faults.filter((fault) => !expected?.test(fault)), [], 'faults of the page');
-  } finally {
+  const page = await context.newPage();
+  const { faults, requests } = watch(context, page, address);
+  await page.goto(address + hash, { waitUntil: 'networkidle' });
+  const end = async () => {
     await context.close();
     await server?.close();
+  };
+  const close = async () => {
+    await end();
+    assert.deepEqual(faults.filter((fault) => !expected?.test(fault)), [], 'faults of the page');
+  };
+  return { page, close, end, address, requests, stopServer: async () => server?.close() };
+}
+
+/**
+ * Opens the page for a test that closes it itself.
+ *
+ * @param {{ from: 'served' | 'disk', viewport: { width: number, height: number }, expected?: RegExp,
+ *   hash?: string }} options
+ */
+export function openPage({ from, viewport, expected, hash }) {
+  return open(from === 'served' ? 'served' : 'one file', { expected, hash, context: { viewport } });
+}
+
+/**
+ * Opens the page, runs the body and closes the page.
+ *
+ * @param {Way} way
+ * @param {(page: import('playwright-core').Page, visit: Visit) => Promise<void>} body
+ * @param {Options} [options]
+ */
+export async function visit(way, body, options = {}) {
+  const { page, close, end, ...rest } = await open(way, options);
+  try {
+    await body(page, rest);
+  } catch (failure) {
+    await end();
+    throw failure;
   }
+  await close();
 }
 
 /**

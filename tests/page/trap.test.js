@@ -22,7 +22,7 @@ function trapOnTitle() {
 }
 
 test('after a trap the case is still there, the user is told, and the engine runs again', async () => {
-  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 } });
+  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /unreachable/ });
   try {
     await page.addInitScript(trapOnTitle);
     await page.reload();
@@ -48,7 +48,7 @@ test('after a trap the case is still there, the user is told, and the engine run
 });
 
 test('without WebAssembly the page says what it needs', async () => {
-  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 } });
+  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /unreachable/ });
   try {
     await page.addInitScript(() => Reflect.deleteProperty(globalThis, 'WebAssembly'));
     await page.reload();

@@ -74,11 +74,14 @@ function isClose({ valley, reactions }) {
   return valley !== null && Math.abs(extent) < CLOSE * (valley.extent_max_mol - valley.extent_min_mol);
 }
 
+/** @param {string[]} species */
+const listed = (species) => species.map(formula).join(' and ');
+
 /** @param {Valley} valley */
 function walls(valley) {
   return valley.limits.map(({ side, species }) => ({
     at: side === 'min' ? valley.extent_min_mol : valley.extent_max_mol,
-    label: `no ${formula(species)} left`,
+    label: `no ${listed(species)} left`,
   }));
 }
 
@@ -94,7 +97,7 @@ function describe(report, valley) {
   const way = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
     : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
   const limits = valley.limits.map(({ side, species }) => side === 'min'
-    ? `${formula(species)} would run out at ${mol(-valley.extent_min_mol)} in reverse`
-    : `${formula(species)} would run out at ${mol(valley.extent_max_mol)} forward`);
+    ? `${listed(species)} would run out at ${mol(-valley.extent_min_mol)} in reverse`
+    : `${listed(species)} would run out at ${mol(valley.extent_max_mol)} forward`);
   return `${way}${limits.length > 0 ? `${limits.join('; ')}.` : ''}`.trim();
 }
