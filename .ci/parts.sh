@@ -118,6 +118,8 @@ ensure_built() {
 # Python recomputes the committed answers from outside tables; its packages are pinned.
 part_reference() {
   local venv file list=tests/reference/requirements.txt
+  compgen -G 'tests/reference/check_*.py' >/dev/null ||
+    fail "finding tests/reference/check_*.py" "add a check before running this part"
   venv="$CACHE/reference-$(sha256sum "$list" | cut -c1-16)"
   if [ ! -e "$venv/ready" ]; then
     python3 -c 'import venv, ensurepip' 2>/dev/null ||
@@ -128,7 +130,6 @@ part_reference() {
     touch "$venv/ready"
   fi
   for file in tests/reference/check_*.py; do
-    [ -e "$file" ] || fail "finding tests/reference/check_*.py" "add a check before running this part"
     check "$file" "$venv/bin/python" "$file"
   done
 }
