@@ -6,6 +6,7 @@
 use serde::Serialize;
 use serde_wasm_bindgen::Serializer;
 use wasm_bindgen::prelude::{JsValue, wasm_bindgen};
+use web_sys::console;
 
 use crate::case::{self, Value};
 
@@ -62,9 +63,13 @@ pub fn version() -> JsValue {
     give(&case::version())
 }
 
-/// Plain data as a tree; what is not plain data (a function, a symbol) reads as nothing.
+/// Plain data as a tree. What is not plain data (a function, a symbol) reads as nothing, and the
+/// console says so to whoever wrote the page around it.
 fn tree(data: JsValue) -> Value {
-    serde_wasm_bindgen::from_value(data).unwrap_or(Value::Null)
+    serde_wasm_bindgen::from_value(data).unwrap_or_else(|error| {
+        console::warn_2(&JsValue::from_str("This is no plain data:"), &error.into());
+        Value::Null
+    })
 }
 
 fn give(answer: &impl Serialize) -> JsValue {

@@ -175,3 +175,51 @@ fn an_enthalpy_carries_a_stated_k_as_van_t_hoff_says() {
     // 6.907755 + 23813.9 K × (1/700 − 1/650) = 6.907755 − 2.616915 = 4.290840.
     assert!((found - 4.290_840).abs() < 2e-5, "{found}");
 }
+
+/// log10 K at three temperatures evenly spaced in 1/T, as points of a case.
+fn points(log10_k: [&str; 3], at: &str) -> Json {
+    let [one, two, three] = log10_k;
+    let case = json!({
+        "format": "shiftgauge 1",
+        "reactions": [{
+            "equation": "2 SO2(g) + O2(g) = 2 SO3(g)",
+            "constant": { "from": "points", "kind": "log10 K", "points": [
+                ["1000 K", one], ["800 K", two], ["666.6666666666666 K", three]
+            ] }
+        }],
+        "temperature": at
+    });
+    let value: Value = serde_json::from_value(case).unwrap();
+    let answer = serde_json::to_value(case::check(&value)).unwrap();
+    assert_eq!(answer["ok"], true, "{answer}");
+    answer["report"]["reactions"][0].clone()
+}
+
+#[test]
+fn points_give_the_straight_line_that_fits_them_best() {
+    // log10 K = 10000/T − 9 at 1/T = 0.0010, 0.00125 and 0.0015: 1, 3.5 and 6. Moving them by +d, −2d
+    // and +d leaves the line where it is, for these are orthogonal to a shift and to a tilt; then
+    // s² = 6 d² with one degree of freedom and u = s/√3 at the middle (d = 0.01: u = 0.014142).
+    let slope = 10_000.0 * std::f64::consts::LN_10;
+    for (log10_k, u_log10_k) in
+        [(["1", "3.5", "6"], 0.0), (["1.01", "3.48", "6.01"], 0.014_142_135_6)]
+    {
+        let found = points(log10_k, "800 K");
+        let of = |name: &str| found[name].as_f64().unwrap();
+        assert!((of("log10_k") - 3.5).abs() < 1e-11, "{found}");
+        let enthalpy = -8.314_462_618_153_24 * slope;
+        assert!((of("enthalpy_standard_j_per_mol") / enthalpy - 1.0).abs() < 1e-10);
+        assert!((of("u_ln_k") / std::f64::consts::LN_10 - u_log10_k).abs() < 1e-9, "{found}");
+    }
+}
+
+#[test]
+fn stated_tolerances_weigh_the_points() {
+    // Two points alone carry their tolerances on: at the first, u(log10 K) is the half of ± 0.02.
+    let found = points(["1 ± 0.02", "3.5 ± 0.02", "6 ± 1000"], "1000 K");
+    let u = found["u_ln_k"].as_f64().unwrap() / std::f64::consts::LN_10;
+    assert!((u - 0.01).abs() < 1e-6, "{u}");
+    let far = points(["1 ± 0.02", "3.5 ± 0.02", "6 ± 0.02"], "500 K");
+    let extrapolated = far["source"]["extrapolated_by_k"].as_f64().unwrap();
+    assert!((extrapolated - (2000.0 / 3.0 - 500.0)).abs() < 1e-9, "{extrapolated}");
+}

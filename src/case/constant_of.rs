@@ -4,7 +4,9 @@ use super::participants::Participant;
 use super::question::{KSource, KindOfK, Question, StatedK};
 use super::report::FormReport;
 use super::run::{EQUATION, at_field};
-use crate::constant::{Constant, Form, PRESSURE_UNITS, StatedConstant, all_forms};
+use crate::constant::{
+    Constant, Form, PRESSURE_UNITS, Point, StatedConstant, all_forms, line_through,
+};
 use crate::library::{Combination, Record, Temperature};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
@@ -39,6 +41,22 @@ pub(super) fn constant_of(
             let rows: Vec<(&Record, f64)> = rows.collect();
             let combination = Combination::new(&rows);
             Ok(Constant::Library(combination.map_err(|found| at_field(found, EQUATION))?))
+        }
+        KSource::Points(stated) => {
+            let points: Outcome<Vec<Point>> = stated
+                .iter()
+                .map(|one| {
+                    let one = stated_constant(question, one, delta_nu_gas / factor)?;
+                    Ok(Point {
+                        temperature_k: one.at_k.unwrap_or(question.temperature.value_si),
+                        ln_k: one.ln_k * factor,
+                        u_ln_k: one.u_ln_k.map(|u| u * factor.abs()),
+                    })
+                })
+                .collect();
+            let line = line_through(&points?);
+            let line = line.map_err(|found| at_field(found, "reactions[0].constant.points"))?;
+            Ok(Constant::Points(line))
         }
         KSource::Value(stated) => {
             // The number belongs to the other equation, whose Δν is ours over the factor.

@@ -3,6 +3,7 @@
 //! A case is walked by hand ([`Value`] to a question, every problem at once), run through the rooms
 //! above, and answered with a [`Report`]: plain data, SI, every number finite.
 
+mod amounts;
 mod answer;
 mod bare;
 mod calls;
@@ -12,6 +13,7 @@ mod notes;
 mod participants;
 mod question;
 mod read;
+mod read_constant;
 mod read_reading;
 mod refusal;
 mod report;

@@ -72,6 +72,7 @@ fn constant_remarks(found: &Findings) -> Vec<Remark> {
     if let Some(by_k) = found.at.extrapolated_by_k {
         let code = match found.constant {
             Constant::Library(_) => NoteCode::Extrapolated,
+            Constant::Points(_) => NoteCode::LineExtended,
             Constant::Stated(_) => NoteCode::KNotCarried,
         };
         remarks.push(Remark::new(code).with("by_k", shown::number(by_k)));

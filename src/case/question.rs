@@ -40,6 +40,8 @@ pub(super) struct StatedK {
 pub(super) enum KSource {
     Library,
     Value(Box<StatedK>),
+    /// Numbers at several temperatures, which stand in `at` of each.
+    Points(Vec<StatedK>),
 }
 
 /// What is asked of one reaction.

@@ -1,7 +1,8 @@
 //! The case, walked by hand: every mistake in it is found in one go.
 
 use super::node::{Node, Reader};
-use super::question::{Held, KSource, KindOfK, Question, ReactionQuestion, StatedK};
+use super::question::{Held, KSource, Question, ReactionQuestion};
+use super::read_constant::{read_points, read_stated};
 use super::read_reading::{read_gas, read_pure};
 use super::value::Value;
 use crate::mixture::{Entry, GasReading, absolute_pressure_pa};
@@ -191,10 +192,7 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     let source = match reader.choice(&from, &words)? {
         0 => Some(KSource::Library),
         1 => read_stated(reader, &constant).map(|stated| KSource::Value(Box::new(stated))),
-        2 => {
-            reader.not_yet(&from, "K from points");
-            None
-        }
+        2 => read_points(reader, &constant).map(KSource::Points),
         _ => {
             reader.not_yet(&from, "K from a formula");
             None
@@ -227,41 +225,4 @@ const CONSTANT_FIELDS: [&str; 11] = [
 fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Balanced> {
     let text = if needed { reader.needed_text(node) } else { reader.text(node) }?;
     reader.keep(node, balance(text))
-}
-
-fn read_stated(reader: &mut Reader, node: &Node) -> Option<StatedK> {
-    let words = [
-        ("K", KindOfK::K),
-        ("Kp", KindOfK::Kp),
-        ("Kc", KindOfK::Kc),
-        ("Kx", KindOfK::Kx),
-        ("log10 K", KindOfK::Log10K),
-        ("ln K", KindOfK::LnK),
-        ("pK", KindOfK::PK),
-        ("gibbs", KindOfK::Gibbs),
-    ];
-    let kind = reader.choice(&node.field("kind"), &words);
-    let measure = if kind == Some(KindOfK::Gibbs) { Measure::MolarEnergy } else { Measure::Number };
-    let value_node = node.field("value");
-    let value = reader.needed_quantity(&value_node, &[measure]);
-    let is_k = matches!(kind, Some(KindOfK::K | KindOfK::Kp | KindOfK::Kc | KindOfK::Kx));
-    if let Some(value) = value.as_ref().filter(|value| is_k && value.value_si <= 0.0) {
-        let problem = Problem::new(CaseCode::KNotPositive);
-        let found = format!("{}", value.value_si);
-        reader.problems.push(problem.with("found", found).at(&value_node.path));
-    }
-    let unit_node = node.field("pressure_unit");
-    let units = crate::constant::PRESSURE_UNITS.map(|unit| (unit.symbol, unit.symbol));
-    let pressure_unit = if unit_node.is_null() { None } else { reader.choice(&unit_node, &units) };
-    if kind == Some(KindOfK::Kp) && unit_node.is_null() {
-        reader.problems.push(unit_node.problem(CaseCode::KpNeedsUnit));
-    }
-    let at = reader.quantity(&node.field("at"), &[Measure::Temperature]);
-    let enthalpy = reader.quantity(&node.field("enthalpy"), &[Measure::MolarEnergy]);
-    let heat_node = node.field("heat_capacity");
-    let heat_capacity = reader.quantity(&heat_node, &[Measure::MolarHeatCapacity]);
-    if enthalpy.is_none() && heat_capacity.is_some() {
-        reader.problems.push(heat_node.problem(CaseCode::HeatCapacityAlone));
-    }
-    Some(StatedK { value: value?, kind: kind?, pressure_unit, at, enthalpy, heat_capacity })
 }

@@ -28,7 +28,7 @@ pub(super) fn steps(found: &Findings) -> Vec<StepReport> {
 type Line = (&'static str, Step);
 
 fn kelvin(found: &Findings) -> String {
-    show_number(found.k_temperature.kelvin(), 7)
+    shown::kelvin(found.k_temperature.kelvin())
 }
 
 fn constant_lines(found: &Findings) -> Vec<Line> {
@@ -58,10 +58,21 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
                     .with("temperature_k", kelvin(found)),
             ));
         }
+        Constant::Points(line) => lines.push((
+            "k",
+            Step::new(StepCode::Line)
+                .with("points", line.points.to_string())
+                .with("enthalpy", shown::kilojoule(line.enthalpy_j_per_mol))
+                .with("residual", show_number(line.largest_residual, 2))
+                .with("ln_k", shown::number(at.ln_k))
+                .with("temperature_k", kelvin(found)),
+        )),
         Constant::Stated(_) => {
             let stated = match &found.question.reaction.source {
                 super::question::KSource::Value(stated) => show_like(&stated.value),
-                super::question::KSource::Library => String::new(),
+                super::question::KSource::Library | super::question::KSource::Points(_) => {
+                    String::new()
+                }
             };
             lines.push((
                 "k",
@@ -95,7 +106,7 @@ fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
         }
     }
     if let Some(water) = reading.setting.added_water_fraction {
-        lines.push(("q", Step::new(StepCode::WetGas).with("water", show_number(water, 5))));
+        lines.push(("q", Step::new(StepCode::WetGas).with("water", shown::significant(water, 5))));
     }
     let Some(pressure_pa) = reading.setting.pressure_pa else { return lines };
     let rows = found.participants.iter().zip(&reading.amounts_mol);
@@ -106,9 +117,9 @@ fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
         let fraction = amount / reading.setting.gas_mol;
         let line = Step::new(StepCode::Activity)
             .with("species", participant.species.text())
-            .with("fraction", show_number(fraction, 5))
-            .with("pressure_bar", show_number(pressure_pa / 1e5, 6))
-            .with("activity", show_number(fraction * pressure_pa / STANDARD_PRESSURE_PA, 5));
+            .with("fraction", shown::significant(fraction, 5))
+            .with("pressure_bar", shown::significant(pressure_pa / 1e5, 6))
+            .with("activity", shown::significant(fraction * pressure_pa / STANDARD_PRESSURE_PA, 5));
         lines.push(("q", line));
     }
     lines

@@ -1,9 +1,11 @@
 //! K of a reaction at a temperature, where it comes from, and the numbers people call K.
 
 mod forms;
+mod points;
 mod stated;
 
 pub use forms::{Form, FormValue, PRESSURE_UNITS, PressureUnit, all_forms};
+pub use points::{Point, PointsLine, line_through};
 pub use stated::{Carried, StatedConstant};
 
 use crate::library::{Combination, Reach, Temperature};
@@ -16,6 +18,8 @@ pub enum Constant {
     Library(Combination),
     /// From a number that is stated.
     Stated(StatedConstant),
+    /// From a straight line of ln K against 1/T through points.
+    Points(PointsLine),
 }
 
 /// K at one temperature, with what goes with it.
@@ -62,6 +66,20 @@ impl Constant {
                     extrapolated_by_k: outside.reduce(f64::max).filter(|by_k| *by_k > 0.0),
                 }
             }
+            Constant::Points(line) => {
+                let ln_k = line.ln_k(temperature_k);
+                let enthalpy = line.enthalpy_j_per_mol;
+                let outside = (line.range_k.0 - temperature_k).max(temperature_k - line.range_k.1);
+                ConstantAt {
+                    ln_k,
+                    u_ln_k: line.u_ln_k(temperature_k),
+                    gibbs_j_per_mol: -rt * ln_k,
+                    enthalpy_j_per_mol: Some(enthalpy),
+                    entropy_j_per_mol_k: Some((enthalpy + rt * ln_k) / temperature_k),
+                    heat_capacity_j_per_mol_k: None,
+                    extrapolated_by_k: (outside > 0.0).then_some(outside),
+                }
+            }
             Constant::Stated(stated) => {
                 let carried = stated.carried_to(temperature_k);
                 let gibbs = -rt * carried.ln_k;
@@ -86,6 +104,7 @@ impl Constant {
         match self {
             Constant::Library(combination) => combination.ln_k(temperature),
             Constant::Stated(stated) => stated.carried_to(temperature.kelvin()).ln_k,
+            Constant::Points(line) => line.ln_k(temperature.kelvin()),
         }
     }
 
@@ -93,7 +112,7 @@ impl Constant {
     #[must_use]
     pub fn knows_temperature(&self) -> bool {
         match self {
-            Constant::Library(_) => true,
+            Constant::Library(_) | Constant::Points(_) => true,
             Constant::Stated(stated) => stated.enthalpy_j_per_mol.is_some(),
         }
     }
@@ -104,6 +123,7 @@ impl Constant {
         match self {
             Constant::Library(combination) => combination.range_k(),
             Constant::Stated(_) => None,
+            Constant::Points(line) => Some(line.range_k),
         }
     }
 }

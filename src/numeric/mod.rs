@@ -1,6 +1,7 @@
 //! Mathematics without chemistry.
 
 mod exact;
+mod least_squares;
 mod null_space;
 mod rational;
 mod rational_text;
@@ -9,6 +10,7 @@ mod scaled;
 mod step;
 
 pub use exact::{difference_of_products, two_product, two_sum};
+pub use least_squares::{LeastSquares, least_squares};
 pub use null_space::{null_space, rank, smallest_whole};
 pub use rational::{Rational, RationalError};
 pub use root::{Root, RootOutcome, root_between};

@@ -128,7 +128,7 @@ codes! {
 codes! {
     /// Mistakes in where K comes from.
     ConstantCode in Constant {
-        NotANumber = "constant-not-a-number",
+        PointsTooFew = "points-too-few",
     }
 }
 
@@ -197,6 +197,7 @@ codes! {
         WaterNotOneWay = "water-not-one-way",
         PhaseOfAnotherBlock = "phase-of-another-block",
         KNotPositive = "k-not-positive",
+        NotAPair = "not-a-pair",
         KpNeedsUnit = "kp-needs-unit",
         HeatCapacityAlone = "heat-capacity-alone",
         PhaseUnclear = "phase-unclear",
@@ -225,6 +226,7 @@ codes! {
         StandardAtmosphere = "standard-atmosphere",
         Balanced = "balanced",
         Extrapolated = "extrapolated",
+        LineExtended = "line-extended",
         KNotCarried = "k-not-carried",
         ApproachTaken = "approach-taken",
         TolerancesNotCarried = "tolerances-not-carried",
@@ -240,6 +242,7 @@ codes! {
         SpeciesGibbs = "species-gibbs",
         ReactionGibbs = "reaction-gibbs",
         StatedK = "stated-k",
+        Line = "line",
         K = "k",
         Absolute = "absolute",
         WetGas = "wet-gas",

@@ -52,6 +52,7 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "K is a positive number; {found} is not.",
             "Check the sign, or choose log10 K or ln K.",
         ),
+        C::NotAPair => ("A point is a temperature and a value.", "Write both in square brackets."),
         C::KpNeedsUnit => (
             "A Kp means something only with the pressure unit that it was made with.",
             "Choose the unit, such as atm or bar.",

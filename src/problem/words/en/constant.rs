@@ -4,6 +4,9 @@ use crate::problem::ConstantCode as C;
 
 pub(super) fn template(code: C) -> (&'static str, &'static str) {
     match code {
-        C::NotANumber => ("{found} is not a value of K.", "Write a positive number."),
+        C::PointsTooFew => (
+            "K from points needs two or more, at different temperatures.",
+            "Add a point at another temperature, or give K as one value.",
+        ),
     }
 }

@@ -42,6 +42,10 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Warning,
             "The temperature is {by_k} K outside the range of the data; constant heat capacities carry them on.",
         ),
+        C::LineExtended => (
+            Warning,
+            "The temperature is {by_k} K outside the points of K; the straight line is drawn on.",
+        ),
         C::KNotCarried => (
             Warning,
             "K is stated {by_k} K away from this temperature and no enthalpy is given, so it is used unchanged.",
