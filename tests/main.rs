@@ -9,6 +9,7 @@
 mod balance;
 mod bare;
 mod check;
+mod codata;
 mod elements;
 mod equation;
 mod examples;

@@ -11,7 +11,7 @@ from pathlib import Path
 import library_sources as published
 from library_pieces import POWERS, Piece, fit, fit_heat_capacity, join
 from library_sources import R_EXACT, T0
-from library_species import ATCT_LIMIT, CODATA, SECOND_LIMITS, SOURCES, SPECIES
+from library_species import ATCT_LIMIT, CODATA, KEY_VALUES, SECOND_LIMITS, SOURCES, SPECIES
 
 ROOT = Path(__file__).resolve().parents[2]
 TABLES = ROOT / "src" / "library" / "tables"
@@ -87,6 +87,9 @@ def build(species):
     if better and not species.element and abs(better[0] - h) > ATCT_LIMIT and how[0] != "methanol":
         h = round(better[0], 3)
         sources.append("atct")
+    if species.id in KEY_VALUES:
+        h, s = KEY_VALUES[species.id]
+        sources.append("codata")
     join(pieces, h, s, transitions)
     return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": worst}
 

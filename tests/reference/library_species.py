@@ -127,6 +127,10 @@ SPECIES = [
 # from memory: they serve as u where a value kept here is a key value without an ATcT figure.
 CODATA = {"SO2.g": 0.20, "S2.g": 0.30, "H2S.g": 0.50, "CaO.s": 0.90, "MgO.s": 0.30}
 
+# ΔfH° in kJ/mol and S° in J/(mol K) of CODATA, taken in place of the assessed set's: TM-4513's
+# disulfur has 128.40 and 228.31, while JANAF agrees with the key values to 0.002 J/(mol K).
+KEY_VALUES = {"S2.g": (128.60, 228.167)}
+
 # Below this difference the enthalpy of the assessed set is kept; above it ATcT's is taken, kJ/mol.
 ATCT_LIMIT = 0.15
 
