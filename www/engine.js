@@ -61,7 +61,6 @@ export function balance(equation) {
 
 /** The program's and the tables' versions as one line. */
 export function versionLine() {
-  const found = glue.version();
-  if (typeof found === 'string') return found;
-  return Object.entries(found ?? {}).map(([name, value]) => `${name} ${String(value)}`).join(', ');
+  const { program, format, species } = glue.version();
+  return `${program}, ${species} species, case format ${format}`;
 }

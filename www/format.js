@@ -31,6 +31,18 @@ export function formula(text) {
 }
 
 /**
+ * A species as a plant writes it: a gas by its formula alone, all else with its phase.
+ * @param {string} text   as the engine names it, such as `CO2(g)` or `C(s, graphite)`
+ */
+export const bareSpecies = (text) => text.replace(/\(g\)$/, '');
+
+/**
+ * A species by its formula with subscripts; a gas without its phase.
+ * @param {string} text
+ */
+export const speciesName = (text) => formula(bareSpecies(text));
+
+/**
  * A number with this many decimals, thousands apart, and U+2212 as the minus sign.
  * @param {number} value
  * @param {number} decimals

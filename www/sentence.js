@@ -1,6 +1,6 @@
 /** The verdict as a sentence, and what else must be said about how the reaction ends. */
 
-import { NO_BREAK, formula, pair, temperatureDifference } from './format.js';
+import { NO_BREAK, pair, speciesName, temperatureDifference } from './format.js';
 
 /** @import { Report, ReactionReport } from './shiftgauge.js' */
 /** @import { TemperatureUnit } from './format.js' */
@@ -42,7 +42,7 @@ export function sentence(report, unit) {
     case 'cannot tell':
       return { ...unclear(more), tail: `${leaning(reaction)} ${reaction.why ?? ''}`.trim() };
     default:
-      return unclear(more);
+      return { tone: 'unclear', arrow: '', lead: 'There is ', word: 'no reading', tail: ': K alone can be told.', more: '' };
   }
 }
 
@@ -77,7 +77,7 @@ function absence(report, reaction) {
    */
   const absent = (side, otherwise) => reaction.terms
     .filter(({ nu, species }) => Math.sign(nu) === side && isMissing(species))
-    .map(({ species }) => `no ${formula(species)}`).join(' and ') || otherwise;
+    .map(({ species }) => `no ${speciesName(species)}`).join(' and ') || otherwise;
   const stuck = report.rest?.outcome === 'nothing can move';
   switch (reaction.q) {
     case 'zero': return `There is ${absent(1, 'a product missing')}, so Q is zero${stuck ? '' : ': the reaction can only move forward'}.`;
@@ -93,7 +93,7 @@ function absence(report, reaction) {
  */
 function pressureAtRest({ pressure_pa: now, rest }) {
   const then = rest?.pressure_pa;
-  if (then === undefined || Math.abs(then - now) < 1e-9 * now) return '';
+  if (now === null || then === undefined || then === null || Math.abs(then - now) < 1e-9 * now) return '';
   const shown = pair(now / PASCAL_PER_BAR, then / PASCAL_PER_BAR);
   return `At this volume the pressure goes from ${shown.now} to ${shown.rest}${NO_BREAK}bar(a).`;
 }
@@ -103,12 +103,13 @@ function pressureAtRest({ pressure_pa: now, rest }) {
  * @param {Report} report
  */
 function ending(report) {
-  const gone = report.species.filter(({ exhausted }) => exhausted).map(({ species }) => formula(species)).join(' and ');
+  const gone = report.species.filter(({ exhausted }) => exhausted).map(({ species }) => speciesName(species)).join(' and ');
   switch (report.rest?.outcome) {
     case 'phase exhausted': return `It goes on until ${gone || 'a phase'} is used up; Q does not reach K.`;
     case 'ran to its limit': return `The composition does not change Q, so it runs until ${gone || 'something'} is used up.`;
     case 'any extent is at rest': return 'Q equals K at every extent: the mixture rests wherever it is.';
-    case 'nothing can move': return 'Nothing can move: on each side something is missing.';
+    case 'nothing can move': return 'Nothing can move: what the reaction would use up is not there.';
+    case 'has no limit': return 'Nothing that is known in amount stops the reaction: it goes on as long as the ample phases last.';
     default: return '';
   }
 }

@@ -70,9 +70,12 @@ pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Op
         Hold::Volume { .. } => Energy::Helmholtz,
     };
     let at = |extent: f64| energy_over_rt(system, state, ln_k, extent);
-    let mut extent_mol: Vec<f64> = (0..=POINTS)
-        .map(|i| from_mol + width * crowded(f64::from(i) / f64::from(POINTS)))
-        .collect();
+    let place = |i: u16| match i {
+        0 => from_mol,
+        POINTS => to_mol,
+        _ => from_mol + width * crowded(f64::from(i) / f64::from(POINTS)),
+    };
+    let mut extent_mol: Vec<f64> = (0..=POINTS).map(place).collect();
     for extra in [0.0, rest_mol] {
         if extra > from_mol && extra < to_mol {
             extent_mol.push(extra);

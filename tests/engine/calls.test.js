@@ -4,7 +4,7 @@ import { test } from 'node:test';
 import { startedEngine } from './engine.js';
 
 const engine = startedEngine();
-const OPTIONS = { language: 'en', units: 'as typed' };
+const OPTIONS = /** @type {const} */ ({ language: 'en', units: 'as typed' });
 
 /** @param {string} name */
 const example = async (name) =>
@@ -74,7 +74,12 @@ test('balance, constant, species and version answer as the contract says', () =>
   assertPlain(engine.version(), 'version');
 });
 
-/** A bare problem of A = B in the gas; ln K = ln 3 makes three quarters B. */
+/** @import { BareProblem } from '../../dist/shiftgauge.js' */
+
+/**
+ * A bare problem of A = B in the gas; ln K = ln 3 makes three quarters B.
+ * @returns {BareProblem}
+ */
 const bare = () => ({
   species: [
     { name: 'A', phase: 'g', amount_mol: 1 },

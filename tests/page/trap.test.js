@@ -6,7 +6,7 @@ import { answered, direction } from './reading.js';
 /** Makes `check` trap while the title says so, as a fault of the engine would. */
 function trapOnTitle() {
   const Real = WebAssembly.Instance;
-  /** @param {...ConstructorParameters<typeof Real>} args */
+  /** @param {[WebAssembly.Module, WebAssembly.Imports?]} args */
   function Trapping(...args) {
     const exports = { ...new Real(...args).exports };
     const check = exports.check;
@@ -48,7 +48,7 @@ test('after a trap the case is still there, the user is told, and the engine run
 });
 
 test('without WebAssembly the page says what it needs', async () => {
-  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /unreachable/ });
+  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /WebAssembly is off/ });
   try {
     await page.addInitScript(() => Reflect.deleteProperty(globalThis, 'WebAssembly'));
     await page.reload();

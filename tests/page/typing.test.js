@@ -49,7 +49,7 @@ test('a remainder moves to the row that claims it, and a species of the reaction
   const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 } });
   try {
     await answered(page);
-    const row = page.locator('#gas-rows .entry', { has: gasField(page, 'N₂') });
+    const row = page.locator('#gas-rows .entry').filter({ has: page.getByRole('textbox', { name: 'N₂, value', exact: true }) });
     await row.getByRole('button', { name: 'remainder' }).click();
     assert.equal(await gasField(page, 'N₂').inputValue(), 'remainder');
     assert.equal(await gasField(page, 'H₂').inputValue(), '');

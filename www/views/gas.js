@@ -2,6 +2,7 @@
 
 import { byId, chosen, choose, part } from '../dom.js';
 import { createEntries, placeRow } from '../entries.js';
+import { bareSpecies } from '../format.js';
 import { asText, isRecord } from '../state.js';
 
 /** @import { Case, GasBlock, Water } from '../shiftgauge.js' */
@@ -84,6 +85,18 @@ function readWater() {
   }
 }
 
+/**
+ * The gases of the reaction: as the engine understood them, else those not written otherwise.
+ * @param {State} state
+ */
+function gasesOf({ balance, current, report }) {
+  if (current && report !== null) {
+    return report.species.filter(({ phase, nu }) => phase === 'g' && nu !== 0).map(({ species }) => bareSpecies(species));
+  }
+  if (balance?.ok !== true) return null;
+  return balance.terms.filter(({ phase }) => phase === null || phase === 'g').map(({ species }) => bareSpecies(species));
+}
+
 /** @param {State} state */
 export function render(state) {
   const dry = chosen('gas-basis') === 'dry';
@@ -91,10 +104,8 @@ export function render(state) {
   for (const row of document.querySelectorAll('[data-water]')) {
     if (row instanceof HTMLElement) row.hidden = row.dataset.water !== waterKind.value;
   }
-  if (state.balance?.ok === true) {
-    const gases = state.balance.terms.filter(({ phase }) => phase === undefined || phase === null || phase === 'g');
-    entries.offer(gases.map(({ species }) => species).filter((species) => !(dry && species === 'H2O')));
-  }
+  const gases = gasesOf(state);
+  if (gases !== null) entries.offer(gases.filter((species) => !(dry && species === 'H2O')));
   for (const row of entries.all()) {
     const pressed = row.value.value.trim() === REMAINDER;
     part(row.root, 'remainder', HTMLButtonElement).setAttribute('aria-pressed', String(pressed));

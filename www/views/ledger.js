@@ -1,13 +1,14 @@
 /** The ledger: every species now, at rest, and the change between. */
 
 import { byId, choose, chosen, create } from '../dom.js';
-import { NO_BREAK, formula, fractionPair, pair, significant } from '../format.js';
+import { NO_BREAK, bareSpecies, fractionPair, pair, significant, signed, speciesName } from '../format.js';
 
 /** @import { Report, SpeciesReport } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
 
 const body = byId('ledger-body', HTMLElement);
 const caption = byId('ledger-caption', HTMLElement);
+const conversions = byId('conversions', HTMLElement);
 
 /** The report shown last, so that a change of basis needs no new answer. */
 /** @type {Report | null} */
@@ -32,13 +33,27 @@ function draw() {
   caption.textContent = {
     wet: 'Gases as amount fractions of the whole gas. Change is the difference of the two, in the same unit.',
     dry: 'Gases as amount fractions of the gas without its water. Change is the difference of the two, in the same unit.',
-  }[basis] ?? `Amounts for ${significant(shown.basis_mol, 4)}${NO_BREAK}mol of mixture now.`;
+  }[basis] ?? `Amounts on the basis of ${shown.basis}.`;
+  conversions.textContent = conversionText(shown);
   const dry = { now: dryTotal(shown.species, 'now_mol'), rest: dryTotal(shown.species, 'rest_mol') };
   body.replaceChildren(...shown.species.map((species) => row(species, basis, dry)));
 }
 
+/**
+ * What share of each reactant that is here now is still to react, or would be made again.
+ * @param {Report} report
+ */
+function conversionText({ conversions: rows }) {
+  const shares = rows.flatMap(({ species, now_to_rest: share }) => {
+    if (share === null || share === 0) return [];
+    const amount = `${significant(Math.abs(share) * 100, 3)}${NO_BREAK}%`;
+    return [`${amount} of the ${speciesName(species)} here ${share > 0 ? 'is still to react' : 'is to be made again'}`];
+  });
+  return shares.length === 0 ? '' : `On the way to rest, ${shares.join('; ')}.`;
+}
+
 /** @param {SpeciesReport} species */
-const isWater = ({ species, phase }) => species === 'H2O' && phase === 'g';
+const isWater = ({ species }) => species === 'H2O(g)';
 
 /**
  * @param {readonly SpeciesReport[]} species
@@ -55,11 +70,10 @@ function dryTotal(species, which) {
  */
 function row(species, basis, dry) {
   const { now, rest, change } = numbers(species, basis, dry);
-  const phase = species.phase === 'g' ? '' : `(${species.phase})`;
   const asRatio = basis === 'dry' && isWater(species) ? [create('small', {}, ' per dry gas')] : [];
-  const head = create('th', { scope: 'row' }, formula(species.species), phase, ...asRatio);
-  const gone = species.exhausted && species.now_mol > 0 ? [' ', create('em', {}, 'used up')] : [];
-  return create('tr', { 'data-species': species.species },
+  const head = create('th', { scope: 'row' }, speciesName(species.species), ...asRatio);
+  const gone = species.exhausted && (species.now_mol ?? 0) > 0 ? [' ', create('em', {}, 'used up')] : [];
+  return create('tr', { 'data-species': bareSpecies(species.species) },
     head, create('td', {}, now), create('td', {}, rest, ...gone), create('td', {}, change));
 }
 
@@ -69,7 +83,11 @@ function row(species, basis, dry) {
  * @param {{ now: number, rest: number }} dry
  */
 function numbers(species, basis, dry) {
-  if (species.rest_mol === null) return { now: `${significant(species.now_mol, 4)}${NO_BREAK}mol`, rest: 'not found', change: '' };
+  if (species.now_mol === null || species.rest_mol === null) {
+    const change = species.change_mol ?? 0;
+    const moved = change === 0 ? '0' : signed(significant(change, 3));
+    return { now: 'ample', rest: 'ample', change: `${moved}${NO_BREAK}mol` };
+  }
   if (basis === 'dry' && species.phase === 'g' && dry.now > 0 && dry.rest > 0) {
     const show = isWater(species) ? pair : fractionPair;
     return show(species.now_mol / dry.now, species.rest_mol / dry.rest);

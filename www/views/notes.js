@@ -13,5 +13,7 @@ export function render({ report }) {
   const quiet = notes.filter(({ level }) => level !== 'caution');
   list.replaceChildren(...quiet.map(({ text, level }) => create('li', { 'data-level': level }, text)));
   list.closest('section')?.toggleAttribute('hidden', quiet.length === 0);
-  cautions.textContent = notes.filter(({ level }) => level === 'caution').map(({ text }) => text).join(' ');
+  // The general caution stands in the page itself, so that it is there without an answer too.
+  const further = notes.filter(({ level, code }) => level === 'caution' && code !== 'equilibrium-is-not-rate');
+  cautions.textContent = further.map(({ text }) => text).join(' ');
 }

@@ -15,6 +15,7 @@ const unit = byId('constant-unit', HTMLSelectElement);
 const value = byId('constant-value', HTMLInputElement);
 const at = byId('constant-at', HTMLInputElement);
 const enthalpy = byId('constant-enthalpy', HTMLInputElement);
+const heat = byId('constant-heat', HTMLInputElement);
 const belongsTo = byId('constant-for', HTMLInputElement);
 
 /** A source of K that this page has no fields for (points, a formula): kept as it came. */
@@ -34,6 +35,7 @@ export function fill(question) {
   value.value = asText(constant.value);
   at.value = asText(constant.at);
   enthalpy.value = asText(constant.enthalpy);
+  heat.value = asText(constant.heat_capacity);
   belongsTo.value = asText(constant.for);
 }
 
@@ -63,6 +65,7 @@ function readConstant() {
   if (kind.value === 'Kp') constant.pressure_unit = unit.value;
   if (at.value.trim() !== '') constant.at = at.value;
   if (enthalpy.value.trim() !== '') constant.enthalpy = enthalpy.value;
+  if (heat.value.trim() !== '') constant.heat_capacity = heat.value;
   if (belongsTo.value.trim() !== '') constant.for = belongsTo.value;
   return constant;
 }
@@ -78,5 +81,6 @@ export function render(state) {
     return;
   }
   const verb = balance.already_balanced ? 'Read as' : 'Balanced to';
-  understood.textContent = `${verb} ${formula(balance.equation)}`;
+  const equationRead = state.current && state.report !== null ? state.report.reactions[0]?.equation : undefined;
+  understood.textContent = `${verb} ${formula(equationRead ?? balance.equation)}`;
 }

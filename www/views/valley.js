@@ -2,7 +2,7 @@
 
 import { drawValley } from '../chart/valley.js';
 import { byId, choose, chosen } from '../dom.js';
-import { NO_BREAK, formula, significant } from '../format.js';
+import { NO_BREAK, speciesName, significant } from '../format.js';
 
 /** @import { Report, Valley } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -75,7 +75,7 @@ function isClose({ valley, reactions }) {
 }
 
 /** @param {string[]} species */
-const listed = (species) => species.map(formula).join(' and ');
+const listed = (species) => species.map(speciesName).join(' and ');
 
 /** @param {Valley} valley */
 function walls(valley) {
@@ -93,7 +93,7 @@ function describe(report, valley) {
   const extent = report.reactions[0]?.extent_mol ?? null;
   /** @param {number} value */
   const mol = (value) => `${significant(value, 3)}${NO_BREAK}mol`;
-  const basis = `for ${mol(report.basis_mol)} of mixture`;
+  const basis = `on the basis of ${report.basis}`;
   const way = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
     : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
   const limits = valley.limits.map(({ side, species }) => side === 'min'

@@ -1,17 +1,48 @@
-/** The working, line by line; the numbers of the answer lead here. */
+/** The working, line by line under the number it leads to; the numbers of the answer lead here. */
 
 import { byId, create } from '../dom.js';
+import { formula } from '../format.js';
 
+/** @import { Report, Step } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
 
-const lines = byId('working-lines', HTMLElement);
+const HEADINGS = [
+  ['k', 'The constant K'],
+  ['q', 'The quotient Q'],
+  ['gibbs', 'ΔG of the reaction'],
+  ['t_star', 'T*, where this analysis would be at equilibrium'],
+  ['rest', 'The state at rest'],
+];
+
+const groups = byId('working-lines', HTMLElement);
 
 /** @param {State} state */
 export function render({ report }) {
-  const named = new Set();
-  lines.replaceChildren(...(report?.steps ?? []).map(({ text, about }) => {
-    if (!about || named.has(about)) return create('li', {}, text);
-    named.add(about);
-    return create('li', { id: `working-${about}`, tabindex: '-1' }, text);
+  if (report === null) return;
+  const write = formulaWriter(report);
+  let number = 1;
+  groups.replaceChildren(...HEADINGS.flatMap(([about, heading]) => {
+    const steps = report.steps.filter((step) => step.about === about);
+    if (steps.length === 0) return [];
+    const first = number;
+    number += steps.length;
+    return [
+      create('h3', { id: `working-${about}`, tabindex: '-1' }, heading ?? ''),
+      create('ol', { start: String(first) }, ...steps.map(({ text }) => create('li', {}, write(text)))),
+    ];
   }));
+}
+
+/**
+ * Gives the formulas of the report's species their subscripts wherever they stand in a line.
+ * @param {Report} report
+ */
+function formulaWriter(report) {
+  const species = [...report.species, ...report.reactions.flatMap(({ terms }) => terms)].map((one) => one.species);
+  const formulas = new Set(species.map((text) => text.replace(/\((?:g|l|s|aq)(?:, .*)?\)$/, '')));
+  const longestFirst = [...formulas].sort((a, b) => b.length - a.length);
+  if (longestFirst.length === 0) return (/** @type {string} */ text) => text;
+  const escaped = longestFirst.map((text) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&'));
+  const pattern = new RegExp(`(?<![A-Za-z0-9])(?:${escaped.join('|')})(?![A-Za-z0-9])`, 'g');
+  return (/** @type {string} */ text) => text.replace(pattern, (found) => formula(found));
 }
