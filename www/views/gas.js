@@ -91,7 +91,8 @@ function readWater() {
  */
 function gasesOf({ balance, current, report }) {
   if (current && report !== null) {
-    return report.species.filter(({ phase, nu }) => phase === 'g' && nu !== 0).map(({ species }) => bareSpecies(species));
+    const named = report.reactions[0]?.terms.map(({ species }) => species) ?? [];
+    return named.filter((species) => species.endsWith('(g)')).map(bareSpecies);
   }
   if (balance?.ok !== true) return null;
   return balance.terms.filter(({ phase }) => phase === null || phase === 'g').map(({ species }) => bareSpecies(species));

@@ -24,6 +24,7 @@ export function render({ report, answered }) {
   if (basis !== basisOfCase) choose('ledger-basis', basis);
   basisOfCase = basis;
   shown = report;
+  body.closest('section')?.toggleAttribute('hidden', report?.rest === null);
   draw();
 }
 

@@ -37,6 +37,7 @@ for (const radio of document.querySelectorAll('input[name="valley-part"]')) {
 /** @param {State} state */
 export function render({ report }) {
   shown = report;
+  drawing.closest('section')?.toggleAttribute('hidden', report?.rest === null);
   draw();
 }
 

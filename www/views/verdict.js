@@ -53,15 +53,25 @@ function figures(report, unit) {
   const [q, k] = reaction.ln_q === null
     ? [{ finite: '', zero: 'zero', infinite: 'infinite', undetermined: 'no value' }[reaction.q], fromLog10(log10K, 3)]
     : pairFromLog10(reaction.ln_q / Math.LN10, log10K);
+  const constant = { about: 'k', label: kLabel(report, unit), value: k };
+  if (report.rest === null) return [constant];
   const difference = reaction.approach_k;
   const decimals = difference === null ? 0 : decimalsFor(difference);
   return [
     { about: 'q', label: 'Q', value: q },
-    { about: 'k', label: `K at ${temperature(report.temperature_k, unit, plainDecimals(report.temperature_k, unit))}, p°${NO_BREAK}=${NO_BREAK}1${NO_BREAK}bar`, value: k },
+    constant,
     { about: 'gibbs', label: 'ΔG of the reaction', value: reaction.gibbs_j_per_mol === null ? 'open-ended' : molarEnergy(reaction.gibbs_j_per_mol) },
     { about: 't_star', label: 'T*: equilibrium at this analysis', value: reaction.t_star_k === null ? 'none' : temperature(reaction.t_star_k, unit, decimals) },
     ...(difference === null ? [] : [{ about: 'approach', label: `T${NO_BREAK}−${NO_BREAK}T*`, value: signed(temperatureDifference(difference, unit)) }]),
   ];
+}
+
+/**
+ * @param {Report} report
+ * @param {TemperatureUnit} unit
+ */
+function kLabel({ temperature_k: kelvin }, unit) {
+  return `K at ${temperature(kelvin, unit, plainDecimals(kelvin, unit))}, p°${NO_BREAK}=${NO_BREAK}1${NO_BREAK}bar`;
 }
 
 /**
