@@ -116,9 +116,14 @@ ensure_built() {
 }
 
 # Python recomputes the committed answers from outside tables; its packages are pinned.
+# Where the packages of the reference checks are kept, under the hash of their list.
+reference_venv() {
+  printf '%s' "$CACHE/reference-$(sha256sum tests/reference/requirements.txt | cut -c1-16)"
+}
+
 part_reference() {
   local venv list=tests/reference/requirements.txt
-  venv="$CACHE/reference-$(sha256sum "$list" | cut -c1-16)"
+  venv="$(reference_venv)"
   if [ ! -e "$venv/ready" ]; then
     python3 -c 'import venv, ensurepip' 2>/dev/null ||
       fail "making a place for Python's packages" "run: sudo apt-get install python3-venv"

@@ -63,6 +63,20 @@ pub fn version() -> JsValue {
     give(&case::version())
 }
 
+/// Repeats a work inside the engine, for the benchmarks; no number for a name that is not known.
+#[cfg(feature = "bench")]
+#[wasm_bindgen]
+pub fn batch(work: &str, count: u32) -> Option<f64> {
+    case::batch(work, count)
+}
+
+/// Judges one case many times inside the engine, for the benchmarks.
+#[cfg(feature = "bench")]
+#[wasm_bindgen]
+pub fn batch_check(question: JsValue, count: u32) -> Option<f64> {
+    case::batch_check(&tree(question), count)
+}
+
 /// Plain data as a tree. What is not plain data (a function, a symbol) reads as nothing, and the
 /// console says so to whoever wrote the page around it.
 fn tree(data: JsValue) -> Value {

@@ -58,9 +58,9 @@ pub fn approach(
     let (from_k, to_k) = (low.min(temperature_k), high.max(temperature_k));
     // Outside the limits of a temperature there is no K and so no change of sign.
     let distance = |t: f64| Temperature::new(t).map_or(f64::NAN, |t| constant.ln_k(t) - ln_q);
-    let mut found = roots(distance, from_k, to_k);
-    found.sort_by(|a, b| (a - temperature_k).abs().total_cmp(&(b - temperature_k).abs()));
-    let Some(&t_star_k) = found.first() else {
+    let found = roots(distance, from_k, to_k);
+    let away = |t: &f64| (t - temperature_k).abs();
+    let Some(&t_star_k) = found.iter().min_by(|a, b| away(a).total_cmp(&away(b))) else {
         return Err(NoApproach::OutOfReach { from_k, to_k });
     };
     let approach_k = temperature_k - t_star_k;

@@ -78,10 +78,10 @@ pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Op
     let mut extent_mol: Vec<f64> = (0..=POINTS).map(place).collect();
     for extra in [0.0, rest_mol] {
         if extra > from_mol && extra < to_mol {
-            extent_mol.push(extra);
+            let next = extent_mol.partition_point(|extent| *extent < extra);
+            extent_mol.insert(next, extra);
         }
     }
-    extent_mol.sort_by(f64::total_cmp);
     extent_mol.dedup();
     let values: Vec<f64> = extent_mol.iter().map(|extent| at(*extent)).collect();
     let lowest = values.iter().copied().fold(at(rest_mol), f64::min);

@@ -81,15 +81,13 @@ pub(super) fn participants(
 /// The phases in which the library has this substance, or the reading names it.
 fn phases_known(term: &Term, reading: &[Species]) -> Vec<Phase> {
     let named = reading.iter().filter(|species| species.same_substance(&term.species));
-    let mut phases: Vec<Phase> = named.filter_map(|species| species.phase).collect();
-    if phases.is_empty() {
+    let mut found: Vec<Phase> = named.filter_map(|species| species.phase).collect();
+    if found.is_empty() {
         let records =
             library::find(term.species.formula.text(), None, term.species.form.as_deref());
-        phases.extend(records.iter().map(|record| record.phase));
+        found.extend(records.iter().map(|record| record.phase));
     }
-    phases.sort_unstable();
-    phases.dedup();
-    phases
+    Phase::ALL.into_iter().filter(|phase| found.contains(phase)).collect()
 }
 
 fn can_be_gas(term: &Term, reading: &[Species]) -> bool {

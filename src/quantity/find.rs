@@ -4,7 +4,7 @@ use super::measure::Measure;
 use super::symbol;
 use super::table::all_units;
 use super::unit::{PressureReference, Unit};
-use std::collections::{BTreeMap, HashMap};
+use std::collections::{BTreeMap, BTreeSet};
 use std::sync::OnceLock;
 
 /// A unit as found, with the reference of a pressure.
@@ -35,8 +35,8 @@ const REFERENCES: [(&str, PressureReference); 10] = [
 ];
 
 struct Index {
-    exact: HashMap<String, Vec<&'static Unit>>,
-    any_case: HashMap<String, Vec<(String, &'static Unit)>>,
+    exact: BTreeMap<String, Vec<&'static Unit>>,
+    any_case: BTreeMap<String, Vec<(String, &'static Unit)>>,
     /// Every name in small letters, by its length.
     names: BTreeMap<usize, Vec<(Vec<char>, &'static Unit)>>,
 }
@@ -45,7 +45,7 @@ fn index() -> &'static Index {
     static INDEX: OnceLock<Index> = OnceLock::new();
     INDEX.get_or_init(|| {
         let mut index =
-            Index { exact: HashMap::new(), any_case: HashMap::new(), names: BTreeMap::new() };
+            Index { exact: BTreeMap::new(), any_case: BTreeMap::new(), names: BTreeMap::new() };
         for unit in all_units() {
             for name in [&unit.symbol].into_iter().chain(unit.aliases) {
                 for key in symbol::keys(name) {
@@ -110,9 +110,7 @@ fn matching(keys: &[String], look_up: impl Fn(&str) -> Vec<&'static Unit>) -> Ve
 /// differs (a factor of up to 10⁹), nor `Cal`, which older books use for 1000 cal.
 fn forgiving_case(key: &str) -> Vec<&'static Unit> {
     let Some(rows) = index().any_case.get(&key.to_lowercase()) else { return Vec::new() };
-    let mut symbols: Vec<&str> = rows.iter().map(|(_, unit)| unit.symbol).collect();
-    symbols.sort_unstable();
-    symbols.dedup();
+    let symbols: BTreeSet<&str> = rows.iter().map(|(_, unit)| unit.symbol).collect();
     let is_safe = |name: &str| {
         let mut pairs = name.chars().zip(key.chars());
         pairs.all(|(a, b)| a == b || !matches!((a, b), ('m', 'M') | ('M', 'm')))
@@ -138,9 +136,10 @@ fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
         let names = index().names.range(lengths).flat_map(|(_, names)| names);
         near.extend(names.filter(|(name, _)| is_one_edit_away(&typed, name)).map(|row| row.1));
     }
-    near.sort_by_key(|unit| !allowed.contains(&unit.measure));
+    let (wanted, others): (Vec<&Unit>, Vec<&Unit>) =
+        near.into_iter().partition(|unit| allowed.contains(&unit.measure));
     let mut symbols: Vec<String> = Vec::new();
-    for unit in near {
+    for unit in wanted.into_iter().chain(others) {
         if !symbols.iter().any(|symbol| symbol == unit.symbol) {
             symbols.push(unit.symbol.to_owned());
         }

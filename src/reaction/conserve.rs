@@ -2,6 +2,7 @@
 
 use crate::numeric::Rational;
 use crate::numeric::RationalError;
+use crate::numeric::sort_short;
 
 use super::balance::Column;
 use super::elements::Element;
@@ -24,7 +25,7 @@ pub(super) fn conserved(columns: &[Column]) -> Vec<Conserved> {
         all.extend(formula.atoms().iter().map(|(element, _)| Conserved::Atoms(element)));
         all.extend((formula.charge() != 0).then_some(Conserved::Charge));
     }
-    all.sort();
+    sort_short(&mut all, |a, b| a < b);
     all.dedup();
     all
 }

@@ -1,5 +1,6 @@
 //! Formulas: which atoms, how many, and the charge.
 
+use crate::numeric::sort_short;
 use std::fmt;
 
 use crate::numeric::Rational;
@@ -62,7 +63,7 @@ impl Formula {
         mut atoms: Vec<(&'static Element, Rational)>,
         charge: i32,
     ) -> Formula {
-        atoms.sort_by_key(|(element, _)| *element);
+        sort_short(&mut atoms, |a, b| a.0 < b.0);
         let sign = if charge < 0 { '-' } else { '+' };
         match charge.unsigned_abs() {
             0 => {}
