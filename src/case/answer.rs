@@ -1,6 +1,6 @@
 //! The report, written from the findings.
 
-use super::constant_of::form_reports;
+use super::constant_of::k_report;
 use super::report::{ReactionReport, RecordReport, Report, SourceReport, TermReport};
 use super::run::Findings;
 use super::{amounts, notes, steps};
@@ -43,7 +43,6 @@ pub(super) fn basis_name(basis: AmountBasis) -> &'static str {
 
 fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
     let reading = found.reading.as_ref();
-    let at = &found.at;
     let temperature_k = found.question.temperature.value_si;
     let rt = GAS_CONSTANT_J_PER_MOL_K * temperature_k;
     let affinity = reading.and_then(|reading| match reading.affinity {
@@ -57,14 +56,12 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         equation: found.equation.text(),
         terms: TermReport::list(&found.participants),
         delta_nu_gas: found.delta_nu_gas,
-        ln_k: at.ln_k,
-        log10_k: at.ln_k / std::f64::consts::LN_10,
-        u_ln_k: at.u_ln_k,
-        forms: form_reports(at.ln_k, found.delta_nu_gas, found.k_temperature.kelvin(), pressure_pa),
-        gibbs_standard_j_per_mol: at.gibbs_j_per_mol,
-        enthalpy_standard_j_per_mol: at.enthalpy_j_per_mol,
-        entropy_standard_j_per_mol_k: at.entropy_j_per_mol_k,
-        heat_capacity_j_per_mol_k: at.heat_capacity_j_per_mol_k,
+        constant: k_report(
+            &found.at,
+            found.delta_nu_gas,
+            found.k_temperature.kelvin(),
+            pressure_pa,
+        ),
         q: reading.map_or("undetermined", |reading| quotient_word(reading.quotient)),
         ln_q: reading.and_then(|reading| ln_q(reading.quotient)),
         u_ln_q: None,

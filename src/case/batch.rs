@@ -56,7 +56,7 @@ pub fn batch(work: &str, count: u32) -> Option<f64> {
 pub fn batch_check(case: &Value, count: u32) -> Option<f64> {
     let mut sum = 0.0;
     for _ in 0..count {
-        sum += super::run::check(black_box(case)).ok()?.reactions.first()?.ln_k;
+        sum += super::run::check(black_box(case)).ok()?.reactions.first()?.constant.ln_k;
     }
     Some(sum)
 }

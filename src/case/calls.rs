@@ -2,10 +2,10 @@
 
 use serde::Serialize;
 
-use super::constant_of::form_reports;
+use super::constant_of::k_report;
 use super::participants::participants;
 use super::refusal::Answer;
-use super::report::{FormReport, Report, TermReport};
+use super::report::{KReport, Report, TermReport};
 use super::run::{self, at_field, delta_nu_gas};
 use super::value::Value;
 use crate::constant::Constant;
@@ -91,22 +91,9 @@ pub struct ConstantReport {
     pub terms: Vec<TermReport>,
     /// The temperature.
     pub temperature_k: f64,
-    /// ln K, p° = 1 bar.
-    pub ln_k: f64,
-    /// log10 K.
-    pub log10_k: f64,
-    /// Standard uncertainty of ln K.
-    pub u_ln_k: Option<f64>,
-    /// K, Kp in several units, Kc.
-    pub forms: Vec<FormReport>,
-    /// ΔG°.
-    pub gibbs_standard_j_per_mol: f64,
-    /// ΔH°.
-    pub enthalpy_standard_j_per_mol: Option<f64>,
-    /// ΔS°.
-    pub entropy_standard_j_per_mol_k: Option<f64>,
-    /// ΔCp°.
-    pub heat_capacity_j_per_mol_k: Option<f64>,
+    /// K and what goes with it, as fields of their own.
+    #[serde(flatten)]
+    pub constant: KReport,
     /// The range of temperature that all records cover.
     pub range_k: Option<[f64; 2]>,
     /// How far outside it the temperature lies, if it does.
@@ -144,14 +131,7 @@ fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport>
         equation: found.equation.text(),
         terms: TermReport::list(&found.list),
         temperature_k: at_temperature.kelvin(),
-        ln_k: at.ln_k,
-        log10_k: at.ln_k / std::f64::consts::LN_10,
-        u_ln_k: at.u_ln_k,
-        forms: form_reports(at.ln_k, delta_nu_gas(&found.list), at_temperature.kelvin(), None),
-        gibbs_standard_j_per_mol: at.gibbs_j_per_mol,
-        enthalpy_standard_j_per_mol: at.enthalpy_j_per_mol,
-        entropy_standard_j_per_mol_k: at.entropy_j_per_mol_k,
-        heat_capacity_j_per_mol_k: at.heat_capacity_j_per_mol_k,
+        constant: k_report(&at, delta_nu_gas(&found.list), at_temperature.kelvin(), None),
         range_k: constant.range_k().map(Into::into),
         extrapolated_by_k: at.extrapolated_by_k,
     })

@@ -2,10 +2,11 @@
 
 use super::participants::Participant;
 use super::question::{KSource, KindOfK, Question, StatedK};
-use super::report::FormReport;
+use super::report::{FormReport, KReport};
 use super::run::{EQUATION, at_field};
 use crate::constant::{
-    Constant, Form, PRESSURE_UNITS, Point, StatedConstant, all_forms, line_through,
+    Constant, ConstantAt, Form, FormValue, PRESSURE_UNITS, Point, StatedConstant, all_forms,
+    line_through,
 };
 use crate::library::{Combination, Record, Temperature};
 use crate::problem::{CaseCode, Outcome, Problem};
@@ -139,20 +140,28 @@ pub(super) fn k_temperature(question: &Question) -> Outcome<Temperature> {
     })
 }
 
-/// All forms of K as the border carries them.
-pub(super) fn form_reports(
-    ln_k: f64,
+/// K with all its forms as the border carries it; Kx where a pressure is known.
+pub(super) fn k_report(
+    at: &ConstantAt,
     delta_nu_gas: f64,
     temperature_k: f64,
     pressure_pa: Option<f64>,
-) -> Vec<FormReport> {
-    let forms = all_forms(ln_k, delta_nu_gas, temperature_k, pressure_pa).into_iter();
-    forms
-        .map(|form| FormReport {
-            name: form.name,
-            unit: form.unit,
-            log10: form.log10,
-            value: form.value,
-        })
-        .collect()
+) -> KReport {
+    let forms = all_forms(at.ln_k, delta_nu_gas, temperature_k, pressure_pa).into_iter();
+    let form = |form: FormValue| FormReport {
+        name: form.name,
+        unit: form.unit,
+        log10: form.log10,
+        value: form.value,
+    };
+    KReport {
+        ln_k: at.ln_k,
+        log10_k: at.ln_k / LN_10,
+        u_ln_k: at.u_ln_k,
+        forms: forms.map(form).collect(),
+        gibbs_standard_j_per_mol: at.gibbs_j_per_mol,
+        enthalpy_standard_j_per_mol: at.enthalpy_j_per_mol,
+        entropy_standard_j_per_mol_k: at.entropy_j_per_mol_k,
+        heat_capacity_j_per_mol_k: at.heat_capacity_j_per_mol_k,
+    }
 }

@@ -34,7 +34,7 @@ pub use calls::{
 };
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
-    BudgetRow, Conversion, CurveReport, FormReport, Limit, NoteReport, ReactionReport,
+    BudgetRow, Conversion, CurveReport, FormReport, KReport, Limit, NoteReport, ReactionReport,
     RecordReport, Report, RestReport, SourceReport, SpeciesReport, StepReport, TermReport,
     ValleyReport,
 };

@@ -44,22 +44,9 @@ pub struct ReactionReport {
     pub terms: Vec<TermReport>,
     /// The change in the number of gas molecules.
     pub delta_nu_gas: f64,
-    /// ln K, and its standard uncertainty where one is known.
-    pub ln_k: f64,
-    /// log10 K.
-    pub log10_k: f64,
-    /// Standard uncertainty of ln K.
-    pub u_ln_k: Option<f64>,
-    /// The numbers people call K.
-    pub forms: Vec<FormReport>,
-    /// ΔG°.
-    pub gibbs_standard_j_per_mol: f64,
-    /// ΔH°.
-    pub enthalpy_standard_j_per_mol: Option<f64>,
-    /// ΔS°.
-    pub entropy_standard_j_per_mol_k: Option<f64>,
-    /// ΔCp°.
-    pub heat_capacity_j_per_mol_k: Option<f64>,
+    /// K and what goes with it, as fields of their own.
+    #[serde(flatten)]
+    pub constant: KReport,
     /// `finite`, `zero`, `infinite` or `undetermined`.
     pub q: &'static str,
     /// ln Q where Q is finite.
@@ -100,6 +87,27 @@ pub struct ReactionReport {
     pub budget: Vec<BudgetRow>,
     /// Where K comes from.
     pub source: SourceReport,
+}
+
+/// K at one temperature and what goes with it; p° = 1 bar.
+#[derive(Debug, Clone, Serialize)]
+pub struct KReport {
+    /// ln K.
+    pub ln_k: f64,
+    /// log10 K.
+    pub log10_k: f64,
+    /// Standard uncertainty of ln K, where one is known.
+    pub u_ln_k: Option<f64>,
+    /// The numbers people call K.
+    pub forms: Vec<FormReport>,
+    /// ΔG°.
+    pub gibbs_standard_j_per_mol: f64,
+    /// ΔH°.
+    pub enthalpy_standard_j_per_mol: Option<f64>,
+    /// ΔS°.
+    pub entropy_standard_j_per_mol_k: Option<f64>,
+    /// ΔCp°.
+    pub heat_capacity_j_per_mol_k: Option<f64>,
 }
 
 /// A species of an equation.
