@@ -60,3 +60,15 @@ test('the valley has its walls, its floor and words that say the same', async ()
     await close();
   }
 });
+
+test('opening the case that already stands there answers it again', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'low-temperature-shift');
+    assert.equal(await direction(page), 'forward');
+    assert.equal(await page.isHidden('#out-of-date'), true);
+  } finally {
+    await close();
+  }
+});
