@@ -6,6 +6,8 @@
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const SUBSCRIPTS = '₀₁₂₃₄₅₆₇₈₉';
 const MOST_DECIMALS = 9;
+/** More digits than these say nothing of a plant, and a table does not hold them: the change does. */
+const MOST_DIGITS = 6;
 export const NO_BREAK = '\u00a0';
 export const MINUS = '\u2212';
 
@@ -104,7 +106,7 @@ export function decimalsFor(difference) {
 
 /**
  * Two numbers in one unit and their difference, with decimals enough for three digits of the
- * larger, two of the difference, and two of what is missing to `whole` where that is given.
+ * larger, two of the difference (as far as six digits go; the difference itself keeps its two), and two of what is missing to `whole` where that is given.
  * @param {number} now
  * @param {number} rest
  * @param {number | null} [whole]
@@ -112,13 +114,18 @@ export function decimalsFor(difference) {
 export function pair(now, rest, whole = null) {
   const larger = Math.max(Math.abs(now), Math.abs(rest));
   if (larger === 0) return { now: '0', rest: '0', change: '0' };
-  let decimals = Math.min(MOST_DECIMALS, Math.max(0, 2 - Math.floor(Math.log10(larger))));
-  decimals = Math.max(decimals, decimalsFor(rest - now));
+  const power = Math.floor(Math.log10(larger));
+  let decimals = Math.min(MOST_DECIMALS, Math.max(0, 2 - power));
+  decimals = Math.max(decimals, Math.min(decimalsFor(rest - now), MOST_DIGITS - 1 - power));
   if (whole !== null) decimals = Math.max(decimals, ...[now, rest].map((value) => decimalsFor(whole - value)));
   /** @param {number} value */
-  const show = (value) => (value !== 0 && Math.abs(value) < 0.5 * 10 ** -decimals ? significant(value, 2) : fixed(value, decimals));
+  const show = (value) => {
+    if (value === 0) return '0';
+    return Math.abs(value) < 0.5 * 10 ** -decimals ? significant(value, 2) : fixed(value, decimals);
+  };
   const change = rest - now;
-  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(show(change)) };
+  const small = decimalsFor(change) > decimals;
+  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(small ? significant(change, 2) : show(change)) };
 }
 
 /**
@@ -127,6 +134,21 @@ export function pair(now, rest, whole = null) {
  */
 export function signed(text) {
   return text.startsWith(MINUS) || text === '0' ? text : `+${text}`;
+}
+
+const AMOUNT_UNITS = [
+  { least: 0.1, factor: 1, unit: 'mol' },
+  { least: 1e-4, factor: 1e3, unit: 'mmol' },
+  { least: 1e-7, factor: 1e6, unit: 'µmol' },
+  { least: 1e-10, factor: 1e9, unit: 'nmol' },
+];
+
+/**
+ * The unit in which an amount reads well, and the factor from mol.
+ * @param {number} mol
+ */
+export function amountUnit(mol) {
+  return AMOUNT_UNITS.find(({ least }) => Math.abs(mol) >= least) ?? { factor: 1, unit: 'mol' };
 }
 
 const FRACTION_UNITS = [

@@ -72,3 +72,33 @@ test('opening the case that already stands there answers it again', async () => 
     await close();
   }
 });
+
+test('a solid of the reaction is offered a row, and nothing widens the page however small the change', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'chlorine-recovery');
+    await page.fill('#equation', 'CaCO3 = CaO + CO2');
+    assert.equal(await direction(page), 'forward', 'there is no CO2 yet');
+    assert.deepEqual(await page.locator('#pure-rows .name').allTextContents(), ['CaCO₃', 'CaO']);
+    assert.equal(await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth), 0);
+    assert.match((await page.textContent('#valley-text')) ?? '', /[Ww]ithout CO₂ it cannot move in reverse/);
+    await page.locator('#pure-rows').getByRole('textbox', { name: 'CaCO₃, value', exact: true }).fill('absent');
+    assert.equal(await page.locator('#pure-rows .entry').count(), 2, 'a row that is filled in is not offered again');
+  } finally {
+    await close();
+  }
+});
+
+test('with the volume held the valley is of the Helmholtz energy, and the pressure at rest is said', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'chlorine-recovery');
+    await page.selectOption('#hold', 'volume');
+    assert.match((await page.textContent('#valley-heading')) ?? '', /Helmholtz/);
+    assert.match((await page.textContent('#sentence-more')) ?? '', /pressure goes from 3\.41/);
+  } finally {
+    await close();
+  }
+});

@@ -29,6 +29,12 @@ test('numbers that are compared get digits enough to tell them apart', () => {
   assert.deepEqual(pair(3, 3), { now: '3.00', rest: '3.00', change: '0' });
 });
 
+test('a change too small for six digits keeps its own', () => {
+  const shown = pair(12.4, 12.3999959, 100);
+  assert.deepEqual([shown.now, plain(shown.change)], ['12.4000', '-4.1 × 10⁻⁶']);
+  assert.equal(pair(0, 0.332).now, '0');
+});
+
 test('rounding never turns nearly all into all, nor a trace into nothing', () => {
   const nearly = fractionPair(0.999999, 0.999998);
   assert.notEqual(plain(nearly.now), '100 %');
