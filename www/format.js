@@ -110,10 +110,11 @@ export function decimalsFor(difference) {
  * @param {number} now
  * @param {number} rest
  * @param {number | null} [whole]
+ * @returns {{ now: string, rest: string, change: string, small: boolean }}   small: the two look alike, the change is less than their last digit
  */
 export function pair(now, rest, whole = null) {
   const larger = Math.max(Math.abs(now), Math.abs(rest));
-  if (larger === 0) return { now: '0', rest: '0', change: '0' };
+  if (larger === 0) return { now: '0', rest: '0', change: '0', small: false };
   const power = Math.floor(Math.log10(larger));
   let decimals = Math.min(MOST_DECIMALS, Math.max(0, 2 - power));
   decimals = Math.max(decimals, Math.min(decimalsFor(rest - now), MOST_DIGITS - 1 - power));
@@ -125,7 +126,7 @@ export function pair(now, rest, whole = null) {
   };
   const change = rest - now;
   const small = decimalsFor(change) > decimals;
-  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(small ? significant(change, 2) : show(change)) };
+  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(small ? significant(change, 2) : show(change)), small };
 }
 
 /**
@@ -166,11 +167,33 @@ export function fractionPair(now, rest) {
   const larger = Math.max(now, rest) || 1;
   const { factor, unit, whole } = FRACTION_UNITS.find(({ least }) => larger >= least) ?? { factor: 1e2, unit: '%', whole: 100 };
   const shown = pair(now * factor, rest * factor, whole);
+  const smaller = FRACTION_UNITS.find(({ least }) => Math.abs(rest - now) >= least);
   return {
     now: `${shown.now}${NO_BREAK}${unit}`,
     rest: `${shown.rest}${NO_BREAK}${unit}`,
-    change: `${shown.change}${NO_BREAK}${unit}`,
+    change: shown.small && smaller !== undefined
+      ? `${signed(significant((rest - now) * smaller.factor, 2))}${NO_BREAK}${smaller.unit}`
+      : `${shown.change}${NO_BREAK}${unit}`,
   };
+}
+
+/**
+ * Two amounts in mol; their difference in the unit that suits it.
+ * @param {number} now
+ * @param {number} rest
+ */
+export function amountPair(now, rest) {
+  const shown = pair(now, rest);
+  return { now: `${shown.now}${NO_BREAK}mol`, rest: `${shown.rest}${NO_BREAK}mol`, change: amountChange(rest - now) };
+}
+
+/**
+ * A change of an amount, with its sign.
+ * @param {number} mol
+ */
+export function amountChange(mol) {
+  const { factor, unit } = amountUnit(mol);
+  return `${signed(significant(mol * factor, 3))}${NO_BREAK}${unit}`;
 }
 
 /**

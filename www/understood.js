@@ -9,13 +9,13 @@
 export const withoutPhase = (text) => text.trim().replace(/\((?:g|l|s|aq)\)$/, '');
 
 /**
- * As the engine understood them while its answer stands, else as they are written; a phase that is
+ * As the engine understood this equation when it last answered, else as they are written; a phase that is
  * not known yet is null.
  * @param {State} state
  * @returns {{ species: string, phase: string | null }[] | null}   null where the equation cannot be read
  */
-export function understoodSpecies({ balance, current, report }) {
-  if (current && report !== null) {
+export function understoodSpecies({ balance, report, answered, question }) {
+  if (report !== null && answered?.reactions[0]?.equation === question.reactions[0]?.equation) {
     return (report.reactions[0]?.terms ?? []).map(({ species }) => ({
       species: withoutPhase(species),
       phase: /\((g|l|s|aq)(?:, [^()]*)?\)$/.exec(species)?.[1] ?? null,
