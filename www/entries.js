@@ -5,6 +5,7 @@
 
 import { copyTemplate, part } from './dom.js';
 import { formula } from './format.js';
+import { withoutPhase } from './understood.js';
 
 /**
  * @typedef {object} Row
@@ -70,14 +71,14 @@ export function createEntries(list, template, prepare = () => {}) {
    * @param {readonly string[]} wanted
    */
   function offer(wanted) {
-    for (const row of rows.filter((one) => one.offered && !wanted.includes(one.species.value))) {
+    for (const row of rows.filter((one) => one.offered && !wanted.includes(withoutPhase(one.species.value)))) {
       rows = rows.filter((one) => one !== row);
       row.root.remove();
     }
     for (const species of wanted) {
-      if (!rows.some((row) => row.species.value.trim() === species)) add(species, '', true);
+      if (!rows.some((row) => withoutPhase(row.species.value) === species)) add(species, '', true);
     }
-    for (const row of rows) nameRow(row, wanted.includes(row.species.value.trim()));
+    for (const row of rows) nameRow(row, wanted.includes(withoutPhase(row.species.value)));
   }
 
   return {

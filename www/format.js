@@ -6,6 +6,8 @@
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const SUBSCRIPTS = '₀₁₂₃₄₅₆₇₈₉';
 const MOST_DECIMALS = 9;
+/** More digits than these say nothing of a plant, and a table does not hold them: the change does. */
+const MOST_DIGITS = 6;
 export const NO_BREAK = '\u00a0';
 export const MINUS = '\u2212';
 
@@ -104,21 +106,27 @@ export function decimalsFor(difference) {
 
 /**
  * Two numbers in one unit and their difference, with decimals enough for three digits of the
- * larger, two of the difference, and two of what is missing to `whole` where that is given.
+ * larger, two of the difference (as far as six digits go; the difference itself keeps its two), and two of what is missing to `whole` where that is given.
  * @param {number} now
  * @param {number} rest
  * @param {number | null} [whole]
+ * @returns {{ now: string, rest: string, change: string, small: boolean }}   small: the two look alike, the change is less than their last digit
  */
 export function pair(now, rest, whole = null) {
   const larger = Math.max(Math.abs(now), Math.abs(rest));
-  if (larger === 0) return { now: '0', rest: '0', change: '0' };
-  let decimals = Math.min(MOST_DECIMALS, Math.max(0, 2 - Math.floor(Math.log10(larger))));
-  decimals = Math.max(decimals, decimalsFor(rest - now));
+  if (larger === 0) return { now: '0', rest: '0', change: '0', small: false };
+  const power = Math.floor(Math.log10(larger));
+  let decimals = Math.min(MOST_DECIMALS, Math.max(0, 2 - power));
+  decimals = Math.max(decimals, Math.min(decimalsFor(rest - now), MOST_DIGITS - 1 - power));
   if (whole !== null) decimals = Math.max(decimals, ...[now, rest].map((value) => decimalsFor(whole - value)));
   /** @param {number} value */
-  const show = (value) => (value !== 0 && Math.abs(value) < 0.5 * 10 ** -decimals ? significant(value, 2) : fixed(value, decimals));
+  const show = (value) => {
+    if (value === 0) return '0';
+    return Math.abs(value) < 0.5 * 10 ** -decimals ? significant(value, 2) : fixed(value, decimals);
+  };
   const change = rest - now;
-  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(show(change)) };
+  const small = decimalsFor(change) > decimals;
+  return { now: show(now), rest: show(rest), change: change === 0 ? '0' : signed(small ? significant(change, 2) : show(change)), small };
 }
 
 /**
@@ -127,6 +135,21 @@ export function pair(now, rest, whole = null) {
  */
 export function signed(text) {
   return text.startsWith(MINUS) || text === '0' ? text : `+${text}`;
+}
+
+const AMOUNT_UNITS = [
+  { least: 0.1, factor: 1, unit: 'mol' },
+  { least: 1e-4, factor: 1e3, unit: 'mmol' },
+  { least: 1e-7, factor: 1e6, unit: 'µmol' },
+  { least: 1e-10, factor: 1e9, unit: 'nmol' },
+];
+
+/**
+ * The unit in which an amount reads well, and the factor from mol.
+ * @param {number} mol
+ */
+export function amountUnit(mol) {
+  return AMOUNT_UNITS.find(({ least }) => Math.abs(mol) >= least) ?? { factor: 1, unit: 'mol' };
 }
 
 const FRACTION_UNITS = [
@@ -144,11 +167,33 @@ export function fractionPair(now, rest) {
   const larger = Math.max(now, rest) || 1;
   const { factor, unit, whole } = FRACTION_UNITS.find(({ least }) => larger >= least) ?? { factor: 1e2, unit: '%', whole: 100 };
   const shown = pair(now * factor, rest * factor, whole);
+  const smaller = FRACTION_UNITS.find(({ least }) => Math.abs(rest - now) >= least);
   return {
     now: `${shown.now}${NO_BREAK}${unit}`,
     rest: `${shown.rest}${NO_BREAK}${unit}`,
-    change: `${shown.change}${NO_BREAK}${unit}`,
+    change: shown.small && smaller !== undefined
+      ? `${signed(significant((rest - now) * smaller.factor, 2))}${NO_BREAK}${smaller.unit}`
+      : `${shown.change}${NO_BREAK}${unit}`,
   };
+}
+
+/**
+ * Two amounts in mol; their difference in the unit that suits it.
+ * @param {number} now
+ * @param {number} rest
+ */
+export function amountPair(now, rest) {
+  const shown = pair(now, rest);
+  return { now: `${shown.now}${NO_BREAK}mol`, rest: `${shown.rest}${NO_BREAK}mol`, change: amountChange(rest - now) };
+}
+
+/**
+ * A change of an amount, with its sign.
+ * @param {number} mol
+ */
+export function amountChange(mol) {
+  const { factor, unit } = amountUnit(mol);
+  return `${signed(significant(mol * factor, 3))}${NO_BREAK}${unit}`;
 }
 
 /**

@@ -121,6 +121,7 @@ const actions = {
   open(question, said) {
     state.set({ question, report: null, answered: null, current: false, problems: [] });
     fill(question);
+    tried = '';
     answer();
     if (state.get().trapped === '') tell(said);
   },

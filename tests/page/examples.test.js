@@ -60,3 +60,60 @@ test('the valley has its walls, its floor and words that say the same', async ()
     await close();
   }
 });
+
+test('opening the case that already stands there answers it again', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'low-temperature-shift');
+    assert.equal(await direction(page), 'forward');
+    assert.equal(await page.isHidden('#out-of-date'), true);
+  } finally {
+    await close();
+  }
+});
+
+test('a solid of the reaction is offered a row, and nothing widens the page however small the change', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'chlorine-recovery');
+    await page.fill('#equation', 'CaCO3 = CaO + CO2');
+    assert.equal(await direction(page), 'forward', 'there is no CO2 yet');
+    assert.deepEqual(await page.locator('#pure-rows .name').allTextContents(), ['CaCO₃', 'CaO']);
+    assert.equal(await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth), 0);
+    assert.equal(await page.locator('.ledger').evaluate((ledger) => ledger.scrollWidth - ledger.clientWidth), 0, 'no column is cut off');
+    assert.match((await page.textContent('#valley-text')) ?? '', /[Ww]ithout CO₂ it cannot move in reverse/);
+    await page.locator('#pure-rows').getByRole('textbox', { name: 'CaCO₃, value', exact: true }).fill('absent');
+    assert.equal(await page.locator('#pure-rows .entry').count(), 2, 'a row that is filled in is not offered again');
+  } finally {
+    await close();
+  }
+});
+
+test('with the volume held the valley is of the Helmholtz energy, and the pressure at rest is said', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await openExample(page, 'chlorine-recovery');
+    await page.selectOption('#hold', 'volume');
+    assert.match((await page.textContent('#valley-heading')) ?? '', /Helmholtz/);
+    assert.match((await page.textContent('#sentence-more')) ?? '', /pressure goes from 3\.41/);
+  } finally {
+    await close();
+  }
+});
+
+test('a problem elsewhere does not turn the solids of the reaction into gases', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport });
+  try {
+    await answered(page);
+    await page.fill('#equation', 'CaCO3 = CaO + CO2');
+    await page.fill('#temperature', 'warm');
+    assert.equal(await page.isVisible('#out-of-date'), true);
+    assert.equal(await page.locator('#gas-rows .name', { hasText: 'Ca' }).count(), 0);
+    assert.equal(await page.locator('#pure-rows .entry').count(), 2);
+  } finally {
+    await close();
+  }
+});

@@ -1,6 +1,6 @@
 import assert from 'node:assert/strict';
 import { test } from 'node:test';
-import { formula, fractionPair, fromLog10, molarEnergy, pair, pairFromLog10, significant, temperature, temperatureUnit, unit } from '../../www/format.js';
+import { amountChange, formula, fractionPair, fromLog10, molarEnergy, pair, pairFromLog10, significant, temperature, temperatureUnit, unit } from '../../www/format.js';
 
 const FORMULAS = [
   ['CO + H2O = CO2 + H2', 'CO + H₂O = CO₂ + H₂'],
@@ -25,8 +25,16 @@ for (const [found, shown] of NUMBERS) test(`a number reads ${shown}`, () => asse
 
 test('numbers that are compared get digits enough to tell them apart', () => {
   assert.deepEqual(pairFromLog10(2, 2 + 1e-5).map(plain), ['100.000', '100.002']);
-  assert.deepEqual(pair(19.6, 19.6803), { now: '19.600', rest: '19.680', change: '+0.080' });
-  assert.deepEqual(pair(3, 3), { now: '3.00', rest: '3.00', change: '0' });
+  assert.deepEqual(pair(19.6, 19.6803), { now: '19.600', rest: '19.680', change: '+0.080', small: false });
+  assert.deepEqual(pair(3, 3), { now: '3.00', rest: '3.00', change: '0', small: false });
+});
+
+test('a change too small for six digits keeps its own', () => {
+  const shown = pair(12.4, 12.3999959, 100);
+  assert.deepEqual([shown.now, plain(shown.change)], ['12.4000', '-4.1 × 10⁻⁶']);
+  assert.equal(plain(fractionPair(0.124, 0.123999959).change), '-41 ppb');
+  assert.equal(plain(amountChange(-3.32e-7)), '-0.332 µmol');
+  assert.equal(pair(0, 0.332).now, '0');
 });
 
 test('rounding never turns nearly all into all, nor a trace into nothing', () => {

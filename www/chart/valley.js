@@ -4,7 +4,7 @@
  */
 
 import { createSvg } from '../dom.js';
-import { fixed } from '../format.js';
+import { amountUnit, fixed } from '../format.js';
 import { linear, ticks } from './axes.js';
 import { heightAt, path } from './lines.js';
 
@@ -20,6 +20,7 @@ const FLAG_ROOM = 64;
 /**
  * @typedef {object} Scene
  * @property {Curve} curve
+ * @property {'G' | 'A'} energy       Gibbs energy, or Helmholtz energy at constant volume
  * @property {number} now             extent, mol
  * @property {number | null} rest     extent, mol
  * @property {{ at: number, label: string }[]} walls
@@ -47,7 +48,7 @@ export function drawValley(scene, width) {
     createSvg('title', { id: 'valley-svg-title' }, scene.title),
     createSvg('desc', { id: 'valley-svg-text' }, scene.description),
     createSvg('path', { class: 'ground', d: `${line}L${x(to)} ${floor}L${x(from)} ${floor}Z` }),
-    ...axis(x, y, { from, to, highest, floor, width }),
+    ...axis(x, y, { from, to, highest, floor, width, energy: scene.energy }),
     ...scene.walls.filter(({ at }) => at >= from && at <= to).flatMap((wall) => drawWall(x(wall.at), wall.label, floor, width)),
     createSvg('path', { class: 'curve', d: line }),
     ...(scene.rest === null ? [] : drawRest(x(scene.rest), y(heightAt(xs, ys, scene.rest)), now.x, width)),
@@ -58,20 +59,22 @@ export function drawValley(scene, width) {
 /**
  * @param {(value: number) => number} x
  * @param {(value: number) => number} y
- * @param {{ from: number, to: number, highest: number, floor: number, width: number }} frame
+ * @param {{ from: number, to: number, highest: number, floor: number, width: number, energy: string }} frame
  */
-function axis(x, y, { from, to, highest, floor, width }) {
-  const along = ticks(from, to, width < 420 ? 4 : 6);
-  const up = ticks(0, highest, 4);
+function axis(x, y, { from, to, highest, floor, width, energy }) {
+  const xUnit = amountUnit(Math.max(-from, to));
+  const yUnit = amountUnit(highest);
+  const along = ticks(from * xUnit.factor, to * xUnit.factor, width < 420 ? 4 : 6);
+  const up = ticks(0, highest * yUnit.factor, 4);
   return [
     createSvg('line', { class: 'axis', x1: MARGIN.left, x2: width - MARGIN.right, y1: floor, y2: floor }),
-    ...along.values.map((value) => createSvg('text', { class: 'tick', x: x(value), y: floor + 18, 'text-anchor': 'middle' }, fixed(value, along.decimals))),
-    createSvg('text', { class: 'tick', x: width - MARGIN.right, y: floor + 37, 'text-anchor': 'end' }, width < 340 ? 'ξ from now, mol →' : 'extent ξ from now, mol →'),
+    ...along.values.map((value) => createSvg('text', { class: 'tick', x: x(value / xUnit.factor), y: floor + 18, 'text-anchor': 'middle' }, fixed(value, along.decimals))),
+    createSvg('text', { class: 'tick', x: width - MARGIN.right, y: floor + 37, 'text-anchor': 'end' }, `${width < 340 ? 'ξ' : 'extent ξ'} from now, ${xUnit.unit} →`),
     ...up.values.flatMap((value) => [
-      createSvg('line', { class: 'grid', x1: MARGIN.left, x2: width - MARGIN.right, y1: y(value), y2: y(value) }),
-      createSvg('text', { class: 'tick', x: MARGIN.left - 6, y: y(value) + 4, 'text-anchor': 'end' }, fixed(value, up.decimals)),
+      createSvg('line', { class: 'grid', x1: MARGIN.left, x2: width - MARGIN.right, y1: y(value / yUnit.factor), y2: y(value / yUnit.factor) }),
+      createSvg('text', { class: 'tick', x: MARGIN.left - 6, y: y(value / yUnit.factor) + 4, 'text-anchor': 'end' }, fixed(value, up.decimals)),
     ]),
-    createSvg('text', { class: 'tick', x: 0, y: floor + 37 }, 'G/RT above rest, mol ↑'),
+    createSvg('text', { class: 'tick', x: 0, y: floor + 37 }, `${energy}/RT above rest, ${yUnit.unit} ↑`),
   ];
 }
 

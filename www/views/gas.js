@@ -2,8 +2,8 @@
 
 import { byId, chosen, choose, part } from '../dom.js';
 import { createEntries, placeRow } from '../entries.js';
-import { bareSpecies } from '../format.js';
 import { asText, isRecord } from '../state.js';
+import { understoodSpecies } from '../understood.js';
 
 /** @import { Case, GasBlock, Water } from '../shiftgauge.js' */
 /** @import { Row } from '../entries.js' */
@@ -85,19 +85,6 @@ function readWater() {
   }
 }
 
-/**
- * The gases of the reaction: as the engine understood them, else those not written otherwise.
- * @param {State} state
- */
-function gasesOf({ balance, current, report }) {
-  if (current && report !== null) {
-    const named = report.reactions[0]?.terms.map(({ species }) => species) ?? [];
-    return named.filter((species) => species.endsWith('(g)')).map(bareSpecies);
-  }
-  if (balance?.ok !== true) return null;
-  return balance.terms.filter(({ phase }) => phase === null || phase === 'g').map(({ species }) => bareSpecies(species));
-}
-
 /** @param {State} state */
 export function render(state) {
   const dry = chosen('gas-basis') === 'dry';
@@ -105,8 +92,8 @@ export function render(state) {
   for (const row of document.querySelectorAll('[data-water]')) {
     if (row instanceof HTMLElement) row.hidden = row.dataset.water !== waterKind.value;
   }
-  const gases = gasesOf(state);
-  if (gases !== null) entries.offer(gases.filter((species) => !(dry && species === 'H2O')));
+  const gases = understoodSpecies(state)?.filter(({ phase }) => phase === null || phase === 'g').map(({ species }) => species);
+  if (gases !== undefined) entries.offer(gases.filter((species) => !(dry && species === 'H2O')));
   for (const row of entries.all()) {
     const pressed = row.value.value.trim() === REMAINDER;
     part(row.root, 'remainder', HTMLButtonElement).setAttribute('aria-pressed', String(pressed));

@@ -1,7 +1,7 @@
 /** The ledger: every species now, at rest, and the change between. */
 
 import { byId, choose, chosen, create } from '../dom.js';
-import { NO_BREAK, bareSpecies, fractionPair, pair, significant, signed, speciesName } from '../format.js';
+import { NO_BREAK, amountChange, amountPair, bareSpecies, fractionPair, pair, significant, speciesName } from '../format.js';
 
 /** @import { Report, SpeciesReport } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -32,8 +32,8 @@ function draw() {
   if (shown === null) return;
   const basis = chosen('ledger-basis');
   caption.textContent = {
-    wet: 'Gases as amount fractions of the whole gas. Change is the difference of the two, in the same unit.',
-    dry: 'Gases as amount fractions of the gas without its water. Change is the difference of the two, in the same unit.',
+    wet: 'Gases as amount fractions of the whole gas. Change is the difference of the two.',
+    dry: 'Gases as amount fractions of the gas without its water. Change is the difference of the two.',
   }[basis] ?? `Amounts on the basis of ${shown.basis}.`;
   conversions.textContent = conversionText(shown);
   const dry = { now: dryTotal(shown.species, 'now_mol'), rest: dryTotal(shown.species, 'rest_mol') };
@@ -85,9 +85,7 @@ function row(species, basis, dry) {
  */
 function numbers(species, basis, dry) {
   if (species.now_mol === null || species.rest_mol === null) {
-    const change = species.change_mol ?? 0;
-    const moved = change === 0 ? '0' : signed(significant(change, 3));
-    return { now: 'ample', rest: 'ample', change: `${moved}${NO_BREAK}mol` };
+    return { now: 'ample', rest: 'ample', change: amountChange(species.change_mol ?? 0) };
   }
   if (basis === 'dry' && species.phase === 'g' && dry.now > 0 && dry.rest > 0) {
     const show = isWater(species) ? pair : fractionPair;
@@ -97,6 +95,5 @@ function numbers(species, basis, dry) {
   if (fractions && species.now_fraction !== null && species.rest_fraction !== null) {
     return fractionPair(species.now_fraction, species.rest_fraction);
   }
-  const amounts = pair(species.now_mol, species.rest_mol);
-  return { now: `${amounts.now}${NO_BREAK}mol`, rest: `${amounts.rest}${NO_BREAK}mol`, change: `${amounts.change}${NO_BREAK}mol` };
+  return amountPair(species.now_mol, species.rest_mol);
 }

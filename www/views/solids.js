@@ -3,6 +3,7 @@
 import { byId, part } from '../dom.js';
 import { createEntries, placeRow } from '../entries.js';
 import { asText, isRecord } from '../state.js';
+import { understoodSpecies } from '../understood.js';
 
 /** @import { Block, Case } from '../shiftgauge.js' */
 /** @import { Row } from '../entries.js' */
@@ -49,8 +50,8 @@ export function read(question) {
 
 /** @param {State} state */
 export function render(state) {
-  if (state.balance?.ok === true) {
-    const pure = state.balance.terms.filter(({ phase }) => phase === 's' || phase === 'l');
+  const pure = understoodSpecies(state)?.filter(({ phase }) => phase === 's' || phase === 'l');
+  if (pure !== undefined) {
     entries.offer(pure.map(({ species }) => species));
     for (const row of entries.all().filter((one) => one.offered)) {
       phaseOf(row).value = pure.find(({ species }) => species === row.species.value)?.phase ?? 's';

@@ -2,12 +2,13 @@
 
 import { drawValley } from '../chart/valley.js';
 import { byId, choose, chosen } from '../dom.js';
-import { NO_BREAK, speciesName, significant } from '../format.js';
+import { NO_BREAK, amountUnit, speciesName, significant } from '../format.js';
 
 /** @import { Report, Valley } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
 
 const drawing = byId('valley-drawing', HTMLElement);
+const heading = byId('valley-heading', HTMLElement);
 const words = byId('valley-text', HTMLElement);
 const choice = byId('valley-choice', HTMLElement);
 const ARROWS = { forward: '→', reverse: '←', 'at rest': '⇌', 'cannot tell': '?' };
@@ -55,18 +56,25 @@ function draw() {
     return;
   }
   choice.hidden = near === null;
+  heading.textContent = `Valley: ${energyName(valley)}`;
   words.textContent = describe(shown, valley);
   if (width === 0) return;
   const curve = near !== null && chosen('valley-part') === 'near' ? near : valley;
   drawing.replaceChildren(drawValley({
     curve,
+    energy: valley.energy,
     now: valley.extent_now_mol,
     rest: reaction.extent_mol,
     walls: walls(valley),
     arrow: ARROWS[reaction.verdict ?? 'cannot tell'],
-    title: 'Gibbs energy along the reaction',
+    title: energyName(valley),
     description: words.textContent,
   }, Math.max(NARROWEST_PX, width)));
+}
+
+/** @param {Valley} valley */
+function energyName({ energy }) {
+  return `${energy === 'A' ? 'Helmholtz' : 'Gibbs'} energy along the reaction`;
 }
 
 /** @param {Report} report */
@@ -74,6 +82,9 @@ function isClose({ valley, reactions }) {
   const extent = reactions[0]?.extent_mol ?? 0;
   return valley !== null && Math.abs(extent) < CLOSE * (valley.extent_max_mol - valley.extent_min_mol);
 }
+
+/** @param {string} text */
+const capital = (text) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** @param {string[]} species */
 const listed = (species) => species.map(speciesName).join(' and ');
@@ -93,12 +104,16 @@ function walls(valley) {
 function describe(report, valley) {
   const extent = report.reactions[0]?.extent_mol ?? null;
   /** @param {number} value */
-  const mol = (value) => `${significant(value, 3)}${NO_BREAK}mol`;
+  const mol = (value) => {
+    const { factor, unit } = amountUnit(value);
+    return `${significant(value * factor, 3)}${NO_BREAK}${unit}`;
+  };
   const basis = `on the basis of ${report.basis}`;
-  const way = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
+  const course = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
     : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
-  const limits = valley.limits.map(({ side, species }) => side === 'min'
-    ? `${listed(species)} would run out at ${mol(-valley.extent_min_mol)} in reverse`
-    : `${listed(species)} would run out at ${mol(valley.extent_max_mol)} forward`);
-  return `${way}${limits.length > 0 ? `${limits.join('; ')}.` : ''}`.trim();
+  const limits = valley.limits.map(({ side, species }) => {
+    const [room, way] = side === 'min' ? [-valley.extent_min_mol, 'in reverse'] : [valley.extent_max_mol, 'forward'];
+    return room > 0 ? `${listed(species)} would run out at ${mol(room)} ${way}` : `without ${listed(species)} it cannot move ${way}`;
+  });
+  return `${course}${limits.length > 0 ? `${capital(limits.join('; '))}.` : ''}`.trim();
 }
