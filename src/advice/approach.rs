@@ -2,7 +2,7 @@
 
 use crate::constant::Constant;
 use crate::library::Temperature;
-use crate::numeric::{RootOutcome, root_between};
+use crate::numeric::{RootOutcome, root_between, sort_short};
 
 /// T* and the approach.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -59,7 +59,8 @@ pub fn approach(
     // Outside the limits of a temperature there is no K and so no change of sign.
     let distance = |t: f64| Temperature::new(t).map_or(f64::NAN, |t| constant.ln_k(t) - ln_q);
     let mut found = roots(distance, from_k, to_k);
-    found.sort_by(|a, b| (a - temperature_k).abs().total_cmp(&(b - temperature_k).abs()));
+    let distance_k = |root: &f64| (root - temperature_k).abs();
+    sort_short(&mut found, |before, item| distance_k(before) > distance_k(item));
     let Some(&t_star_k) = found.first() else {
         return Err(NoApproach::OutOfReach { from_k, to_k });
     };

@@ -1,6 +1,7 @@
 //! The valley: the energy that falls until the mixture is at rest, drawn against the extent.
 
 use crate::equilibrium::{Affinity, Hold, Kind, State, System, affinity};
+use crate::numeric::sort_short;
 use crate::quantity::{
     GAS_CONSTANT_J_PER_MOL_K, STANDARD_CONCENTRATION_MOL_PER_M3, STANDARD_PRESSURE_PA,
 };
@@ -78,7 +79,7 @@ pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Op
             extent_mol.push(extra);
         }
     }
-    extent_mol.sort_by(f64::total_cmp);
+    sort_short(&mut extent_mol, |before, item| before > item);
     extent_mol.dedup();
     let values: Vec<f64> = extent_mol.iter().map(|extent| at(*extent)).collect();
     let lowest = values.iter().copied().fold(at(rest_mol), f64::min);

@@ -2,6 +2,7 @@
 
 use super::question::Question;
 use crate::library::{self, Record};
+use crate::numeric::sort_short;
 use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase, Species, Term, nearest};
 
@@ -87,7 +88,7 @@ fn phases_known(term: &Term, reading: &[Species]) -> Vec<Phase> {
             library::find(term.species.formula.text(), None, term.species.form.as_deref());
         phases.extend(records.iter().map(|record| record.phase));
     }
-    phases.sort_unstable();
+    sort_short(&mut phases, |before, item| before > item);
     phases.dedup();
     phases
 }

@@ -6,6 +6,7 @@ use super::polynomial::holding;
 use super::record::Reach;
 use super::record::Record;
 use super::temperature::Temperature;
+use crate::numeric::sort_short;
 use crate::problem::LibraryCode;
 use crate::problem::Outcome;
 use crate::problem::Problem;
@@ -71,7 +72,7 @@ impl Combination {
         }
         let starts = terms.iter().flat_map(|(record, _)| &record.pieces).map(|piece| piece.from_k);
         let mut starts: Vec<f64> = starts.collect();
-        starts.sort_by(f64::total_cmp);
+        sort_short(&mut starts, |before, item| before > item);
         starts.dedup();
         let piece = |from_k: f64| {
             let mut polynomial = Polynomial::default();

@@ -36,7 +36,9 @@ fn compound(text: &str) -> Option<String> {
         for part in split_hyphens(&token) {
             let (name, inverted) = without_inverse(&part);
             if below || inverted {
-                denominators.push(standard_name(&name, true));
+                let name = standard_name(&name, true);
+                let after = denominators.iter().position(|other| *other > name);
+                denominators.insert(after.unwrap_or(denominators.len()), name);
             } else if numerator.is_none() {
                 numerator = Some(standard_name(&name, false));
             } else {
@@ -49,7 +51,6 @@ fn compound(text: &str) -> Option<String> {
     if denominators.is_empty() {
         return None;
     }
-    denominators.sort();
     Some(format!("{}/{}", numerator?, denominators.join("/")))
 }
 

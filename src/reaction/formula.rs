@@ -3,6 +3,7 @@
 use std::fmt;
 
 use crate::numeric::Rational;
+use crate::numeric::sort_short;
 use crate::problem::Outcome;
 
 use super::elements::Element;
@@ -62,7 +63,7 @@ impl Formula {
         mut atoms: Vec<(&'static Element, Rational)>,
         charge: i32,
     ) -> Formula {
-        atoms.sort_by_key(|(element, _)| *element);
+        sort_short(&mut atoms, |before, item| before.0 > item.0);
         let sign = if charge < 0 { '-' } else { '+' };
         match charge.unsigned_abs() {
             0 => {}

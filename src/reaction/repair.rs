@@ -1,6 +1,7 @@
 //! What a formula that cannot be read is likely to stand for.
 
 use super::elements::Element;
+use crate::numeric::sort_short;
 
 /// The likeliest spellings, at most two, of a formula whose letters have the wrong size or whose
 /// O is typed as a zero: `co2` gives `CO2` and `Co2`, `CL2` gives `Cl2`, `C02` gives `CO2`.
@@ -16,7 +17,7 @@ pub(super) fn spellings(text: &str) -> Vec<String> {
         let mut go = |to: usize, cost: u32, piece: &str| {
             let longer = reached.iter().map(|(sum, text)| (sum + cost, format!("{text}{piece}")));
             best[to].extend(longer);
-            best[to].sort();
+            sort_short(&mut best[to], |before, item| before > item);
             best[to].dedup();
             best[to].truncate(2);
         };
@@ -57,7 +58,8 @@ pub(super) fn symbols_like(wrong: &str) -> Vec<String> {
     let first = wrong.chars().next().map(|c| c.to_ascii_uppercase());
     let mut like: Vec<&Element> =
         Element::all().filter(|element| element.symbol.chars().next() == first).collect();
-    like.sort_by_key(|element| (element.symbol.len() != wrong.len(), element.rarity()));
+    let rank = |element: &Element| (element.symbol.len() != wrong.len(), element.rarity());
+    sort_short(&mut like, |before, item| rank(before) > rank(item));
     like.iter().take(3).map(|element| element.symbol.to_owned()).collect()
 }
 
