@@ -64,7 +64,7 @@ part_lint() {
   setup_lint
   mapfile -t files < <(git ls-files '*.sh' 2>/dev/null || find www .ci -name '*.sh' -not -path '*/node_modules/*')
   check "rustfmt" cargo fmt --check
-  check "clippy" cargo clippy --quiet --locked --all-targets -- -D warnings
+  check "clippy" cargo clippy --quiet --locked --all-targets --all-features -- -D warnings
   lint_wasm
   check "shellcheck" shellcheck --external-sources Trunkfile .ci/run "${files[@]}"
   ensure_built || return 0
@@ -115,12 +115,13 @@ ensure_built() {
   return 1
 }
 
-# Python recomputes the committed answers from outside tables; its packages are pinned.
 # Where the packages of the reference checks are kept, under the hash of their list.
-reference_venv() {
-  printf '%s' "$CACHE/reference-$(sha256sum tests/reference/requirements.txt | cut -c1-16)"
-}
+reference_venv() { echo "$CACHE/reference-$(sha256sum tests/reference/requirements.txt | cut -c1-16)"; }
 
+# The Python of the reference checks, if it has been set up.
+reference_python() { [ ! -e "$(reference_venv)/ready" ] || echo "$(reference_venv)/bin/python"; }
+
+# Python recomputes the committed answers from outside tables; its packages are pinned.
 part_reference() {
   local venv list=tests/reference/requirements.txt
   venv="$(reference_venv)"

@@ -17,6 +17,8 @@
 //! | [`rounds`] | many readings judged by one case |
 
 pub mod advice;
+#[cfg(feature = "bench")]
+pub mod bench;
 pub mod case;
 pub mod constant;
 pub mod equilibrium;

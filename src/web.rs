@@ -63,18 +63,29 @@ pub fn version() -> JsValue {
     give(&case::version())
 }
 
-/// Repeats a work inside the engine, for the benchmarks; no number for a name that is not known.
+/// Does one kind of work so many times and gives its sum; the work is told by its name.
 #[cfg(feature = "bench")]
 #[wasm_bindgen]
-pub fn batch(work: &str, count: u32) -> Option<f64> {
-    case::batch(work, count)
-}
+pub struct Bench(crate::bench::Bench);
 
-/// Judges one case many times inside the engine, for the benchmarks.
 #[cfg(feature = "bench")]
 #[wasm_bindgen]
-pub fn batch_check(question: JsValue, count: u32) -> Option<f64> {
-    case::batch_check(&tree(question), count)
+impl Bench {
+    /// Sets the work up; nothing where that fails.
+    pub fn set_up() -> Option<Bench> {
+        crate::bench::Bench::new().ok().map(Bench)
+    }
+
+    /// The names of the kinds of work.
+    pub fn names() -> Vec<String> {
+        crate::bench::Work::ALL.iter().map(|(_, name)| (*name).to_owned()).collect()
+    }
+
+    /// Runs a batch of the kind at this place of the names.
+    pub fn run(&mut self, place: usize, count: u32) -> Option<f64> {
+        let (work, _) = crate::bench::Work::ALL.get(place)?;
+        self.0.run(*work, count).ok()
+    }
 }
 
 /// Plain data as a tree. What is not plain data (a function, a symbol) reads as nothing, and the

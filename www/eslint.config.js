@@ -25,7 +25,7 @@ export default [
   },
   // The tests of the page hand functions to the browser, which run there.
   {
-    files: ['tests/page/*.js'],
+    files: ['tests/page/*.js', 'tests/bench/chromium.js', 'tests/bench/batches.js'],
     languageOptions: { globals: { ...globals.nodeBuiltin, ...globals.browser } },
   },
 ];

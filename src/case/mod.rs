@@ -6,8 +6,6 @@
 mod amounts;
 mod answer;
 mod bare;
-#[cfg(feature = "bench")]
-mod batch;
 mod calls;
 mod constant_of;
 mod node;
@@ -26,8 +24,6 @@ mod steps;
 mod value;
 
 pub use bare::{AffinitiesAnswer, AffinityReport, RestAnswer, affinities, rest};
-#[cfg(feature = "bench")]
-pub use batch::{WORKS, batch, batch_check};
 pub use calls::{
     Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
     Version, balance, check, constant, species, version,

@@ -48,10 +48,15 @@ impl Refusal {
     pub fn new(problems: Vec<Problem>) -> Self {
         let problems = problems.into_iter().map(|problem| {
             let sentence = say(&problem, Language::En);
+            // One by one: collecting would sort them first, with code of its own.
+            let mut arguments = BTreeMap::new();
+            for (name, text) in problem.arguments {
+                arguments.insert(name, text);
+            }
             ProblemReport {
                 code: problem.code.as_str(),
                 span: problem.span.map(|span| SpanReport { start: span.start, end: span.end }),
-                arguments: problem.arguments.into_iter().collect(),
+                arguments,
                 message: sentence.message,
                 hint: sentence.hint,
                 field: problem.field,

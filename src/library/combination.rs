@@ -72,7 +72,7 @@ impl Combination {
         }
         let starts = terms.iter().flat_map(|(record, _)| &record.pieces).map(|piece| piece.from_k);
         let mut starts: Vec<f64> = starts.collect();
-        sort_short(&mut starts, |a, b| a < b);
+        sort_short(&mut starts, |before, item| before > item);
         starts.dedup();
         let piece = |from_k: f64| {
             let mut polynomial = Polynomial::default();

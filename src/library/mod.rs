@@ -56,12 +56,12 @@ pub fn find(formula: &str, phase: Option<Phase>, form: Option<&str>) -> Vec<&'st
 /// Every record with this name or CAS number; capital letters and space around it do not matter.
 #[must_use]
 pub fn named(text: &str) -> Vec<&'static Record> {
-    let wanted = text.trim().to_lowercase();
+    let wanted = text.trim().to_ascii_lowercase();
     let is_named = |entry: &&'static table::Entry| {
         let mut cells = entry.line.split('\t').skip(4);
         let names = cells.next().unwrap_or_default();
         cells.next() == Some(wanted.as_str())
-            || names.split(';').any(|name| name.to_lowercase() == wanted)
+            || names.split(';').any(|name| name.eq_ignore_ascii_case(&wanted))
     };
     if wanted.is_empty() {
         return Vec::new();

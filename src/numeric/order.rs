@@ -1,21 +1,23 @@
-//! Short lists in order.
+//! Sorting of short lists.
 
-/// Sorts a short list in place by insertion; equals keep their order.
+/// Sorts a short or nearly sorted list in place: an item moves before its neighbour while
+/// `after(neighbour, item)`; equal items keep their order.
 ///
-/// The lists here have a handful of members. The standard library's sort is made for long ones and
-/// takes some 8 kB of the download for each kind of member; this takes next to nothing.
+/// The time grows with the square of the length (a hundred items: some microseconds). The standard
+/// library's sorts are better for long lists, but each kind of item costs 6 to 10 kB of WebAssembly
+/// there, and 0.2 kB here.
 ///
 /// ```
 /// use shiftgauge::numeric::sort_short;
-/// let mut words = ["mol", "kg", "mol", "bar"];
-/// sort_short(&mut words, |a, b| a < b);
-/// assert_eq!(words, ["bar", "kg", "mol", "mol"]);
+/// let mut roots = [812.0, 640.0, 705.0];
+/// sort_short(&mut roots, |before, item| before > item);
+/// assert_eq!(roots, [640.0, 705.0, 812.0]);
 /// ```
-pub fn sort_short<T>(list: &mut [T], mut comes_before: impl FnMut(&T, &T) -> bool) {
-    for end in 1..list.len() {
-        let mut at = end;
-        while at > 0 && comes_before(&list[at], &list[at - 1]) {
-            list.swap(at, at - 1);
+pub fn sort_short<T>(items: &mut [T], after: impl Fn(&T, &T) -> bool) {
+    for sorted in 1..items.len() {
+        let mut at = sorted;
+        while at > 0 && after(&items[at - 1], &items[at]) {
+            items.swap(at - 1, at);
             at -= 1;
         }
     }

@@ -42,13 +42,26 @@ pub type Outcome<T> = Result<T, Vec<Problem>>;
 impl Problem {
     /// Starts a problem of this code, with no arguments, field or span yet.
     pub fn new(code: impl Into<Code>) -> Self {
-        Self { code: code.into(), arguments: Vec::new(), field: String::new(), span: None }
+        Self::of(code.into())
+    }
+
+    #[cold]
+    #[inline(never)]
+    fn of(code: Code) -> Self {
+        Self { code, arguments: Vec::new(), field: String::new(), span: None }
     }
 
     /// Adds an argument that the sentence of this code names in braces.
     #[must_use]
-    pub fn with(mut self, name: &'static str, value: impl Into<String>) -> Self {
-        self.arguments.push((name, value.into()));
+    pub fn with(self, name: &'static str, value: impl Into<String>) -> Self {
+        self.with_text(name, value.into())
+    }
+
+    // Problems are made at hundreds of places: kept apart, each place is a short call.
+    #[cold]
+    #[inline(never)]
+    fn with_text(mut self, name: &'static str, value: String) -> Self {
+        self.arguments.push((name, value));
         self
     }
 
@@ -61,6 +74,7 @@ impl Problem {
 
     /// Sets the field, or puts its parent's path before the one already there.
     #[must_use]
+    #[inline(never)]
     pub fn at(mut self, field: &str) -> Self {
         self.field = match (field.is_empty(), self.field.as_str()) {
             (true, _) => self.field,

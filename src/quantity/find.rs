@@ -4,7 +4,7 @@ use super::measure::Measure;
 use super::symbol;
 use super::table::all_units;
 use super::unit::{PressureReference, Unit};
-use std::collections::{BTreeMap, BTreeSet};
+use std::collections::BTreeMap;
 use std::sync::OnceLock;
 
 /// A unit as found, with the reference of a pressure.
@@ -34,26 +34,18 @@ const REFERENCES: [(&str, PressureReference); 10] = [
     ("a", PressureReference::Absolute),
 ];
 
-struct Index {
-    exact: BTreeMap<String, Vec<&'static Unit>>,
-    any_case: BTreeMap<String, Vec<(String, &'static Unit)>>,
-    /// Every name in small letters, by its length.
-    names: BTreeMap<usize, Vec<(Vec<char>, &'static Unit)>>,
-}
+/// Every name of every unit as it is written, under the name in small letters.
+type Index = BTreeMap<String, Vec<(String, &'static Unit)>>;
 
 fn index() -> &'static Index {
     static INDEX: OnceLock<Index> = OnceLock::new();
     INDEX.get_or_init(|| {
-        let mut index =
-            Index { exact: BTreeMap::new(), any_case: BTreeMap::new(), names: BTreeMap::new() };
+        let mut index = Index::new();
         for unit in all_units() {
             for name in [&unit.symbol].into_iter().chain(unit.aliases) {
                 for key in symbol::keys(name) {
-                    let lower = key.to_lowercase();
-                    let letters: Vec<char> = lower.chars().collect();
-                    index.names.entry(letters.len()).or_default().push((letters, unit));
-                    index.any_case.entry(lower).or_default().push((key.clone(), unit));
-                    index.exact.entry(key).or_default().push(unit);
+                    let lower = key.to_ascii_lowercase();
+                    index.entry(lower).or_default().push((key, unit));
                 }
             }
         }
@@ -61,10 +53,14 @@ fn index() -> &'static Index {
     })
 }
 
+/// The rows whose name differs from this one in the size of letters at most.
+fn in_any_case(key: &str) -> &'static [(String, &'static Unit)] {
+    index().get(&key.to_ascii_lowercase()).map_or(&[], Vec::as_slice)
+}
+
 /// Finds a unit of one of the allowed measures, trying them in the caller's order.
 pub(super) fn find(text: &str, allowed: &[Measure]) -> Result<Found, Fault> {
     let keys = symbol::keys(text);
-    let exact = |key: &str| index().exact.get(key).cloned().unwrap_or_default();
     let mut found = matching(&keys, exact);
     if found.is_empty() {
         found = matching(&keys, forgiving_case);
@@ -83,7 +79,7 @@ pub(super) fn find(text: &str, allowed: &[Measure]) -> Result<Found, Fault> {
     }
 }
 
-fn matching(keys: &[String], look_up: impl Fn(&str) -> Vec<&'static Unit>) -> Vec<Found> {
+fn matching(keys: &[String], look_up: fn(&str) -> Vec<&'static Unit>) -> Vec<Found> {
     for key in keys {
         let units = look_up(key);
         if !units.is_empty() {
@@ -106,16 +102,21 @@ fn matching(keys: &[String], look_up: impl Fn(&str) -> Vec<&'static Unit>) -> Ve
     Vec::new()
 }
 
+fn exact(key: &str) -> Vec<&'static Unit> {
+    in_any_case(key).iter().filter(|(name, _)| name == key).map(|(_, unit)| *unit).collect()
+}
+
 /// Letters of the wrong case are read where they can mean one thing only: never where an m or M
 /// differs (a factor of up to 10⁹), nor `Cal`, which older books use for 1000 cal.
 fn forgiving_case(key: &str) -> Vec<&'static Unit> {
-    let Some(rows) = index().any_case.get(&key.to_lowercase()) else { return Vec::new() };
-    let symbols: BTreeSet<&str> = rows.iter().map(|(_, unit)| unit.symbol).collect();
+    let rows = in_any_case(key);
+    let Some((_, first)) = rows.first() else { return Vec::new() };
+    let several = rows.iter().any(|(_, unit)| unit.symbol != first.symbol);
     let is_safe = |name: &str| {
         let mut pairs = name.chars().zip(key.chars());
         pairs.all(|(a, b)| a == b || !matches!((a, b), ('m', 'M') | ('M', 'm')))
     };
-    if symbols.len() > 1 || key.starts_with("Cal") {
+    if several || key.starts_with("Cal") {
         return Vec::new();
     }
     rows.iter().filter(|(name, _)| is_safe(name)).map(|(_, unit)| *unit).collect()
@@ -124,28 +125,32 @@ fn forgiving_case(key: &str) -> Vec<&'static Unit> {
 /// Units that differ in letter case only, else by one letter; the allowed measures first.
 fn suggestions(keys: &[String], allowed: &[Measure]) -> Vec<String> {
     const MOST: usize = 3;
-    let lower: Vec<String> = keys.iter().map(|key| key.to_lowercase()).collect();
     let mut near: Vec<&'static Unit> = Vec::new();
-    for key in &lower {
-        let rows = index().any_case.get(key).into_iter().flatten();
-        near.extend(rows.map(|(_, unit)| *unit));
+    for key in keys {
+        near.extend(in_any_case(key).iter().map(|(_, unit)| *unit));
     }
     if near.is_empty() {
-        let typed: Vec<char> = lower.first().map_or(Vec::new(), |key| key.chars().collect());
-        let lengths = typed.len().saturating_sub(1)..=typed.len() + 1;
-        let names = index().names.range(lengths).flat_map(|(_, names)| names);
-        near.extend(names.filter(|(name, _)| is_one_edit_away(&typed, name)).map(|row| row.1));
+        let typed = letters(keys.first().map_or("", String::as_str));
+        for (name, rows) in index() {
+            if is_one_edit_away(&typed, &letters(name)) {
+                near.extend(rows.iter().map(|(_, unit)| *unit));
+            }
+        }
     }
-    let (wanted, others): (Vec<&Unit>, Vec<&Unit>) =
-        near.into_iter().partition(|unit| allowed.contains(&unit.measure));
     let mut symbols: Vec<String> = Vec::new();
-    for unit in wanted.into_iter().chain(others) {
-        if !symbols.iter().any(|symbol| symbol == unit.symbol) {
-            symbols.push(unit.symbol.to_owned());
+    for wanted in [true, false] {
+        for unit in near.iter().filter(|unit| allowed.contains(&unit.measure) == wanted) {
+            if !symbols.iter().any(|symbol| symbol == unit.symbol) {
+                symbols.push(unit.symbol.to_owned());
+            }
         }
     }
     symbols.truncate(MOST);
     symbols
+}
+
+fn letters(text: &str) -> Vec<char> {
+    text.chars().map(|c| c.to_ascii_lowercase()).collect()
 }
 
 /// Whether one letter put in, left out, changed or swapped with its neighbour makes them equal;

@@ -37,8 +37,8 @@ fn compound(text: &str) -> Option<String> {
             let (name, inverted) = without_inverse(&part);
             if below || inverted {
                 let name = standard_name(&name, true);
-                let next = denominators.partition_point(|other| *other <= name);
-                denominators.insert(next, name);
+                let after = denominators.iter().position(|other| *other > name);
+                denominators.insert(after.unwrap_or(denominators.len()), name);
             } else if numerator.is_none() {
                 numerator = Some(standard_name(&name, false));
             } else {

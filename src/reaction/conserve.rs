@@ -22,11 +22,14 @@ pub(super) fn conserved(columns: &[Column]) -> Vec<Conserved> {
     let mut all = Vec::new();
     for column in columns {
         let formula = &column.species.formula;
-        all.extend(formula.atoms().iter().map(|(element, _)| Conserved::Atoms(element)));
-        all.extend((formula.charge() != 0).then_some(Conserved::Charge));
+        let atoms = formula.atoms().iter().map(|(element, _)| Conserved::Atoms(element));
+        for quantity in atoms.chain((formula.charge() != 0).then_some(Conserved::Charge)) {
+            if !all.contains(&quantity) {
+                all.push(quantity);
+            }
+        }
     }
-    sort_short(&mut all, |a, b| a < b);
-    all.dedup();
+    sort_short(&mut all, |before, item| before > item);
     all
 }
 

@@ -1,9 +1,9 @@
 //! Formulas: which atoms, how many, and the charge.
 
-use crate::numeric::sort_short;
 use std::fmt;
 
 use crate::numeric::Rational;
+use crate::numeric::sort_short;
 use crate::problem::Outcome;
 
 use super::elements::Element;
@@ -63,7 +63,7 @@ impl Formula {
         mut atoms: Vec<(&'static Element, Rational)>,
         charge: i32,
     ) -> Formula {
-        sort_short(&mut atoms, |a, b| a.0 < b.0);
+        sort_short(&mut atoms, |before, item| before.0 > item.0);
         let sign = if charge < 0 { '-' } else { '+' };
         match charge.unsigned_abs() {
             0 => {}

@@ -40,7 +40,7 @@ pub fn nearest<'a>(text: &str, candidates: impl Iterator<Item = &'a str>) -> Opt
 }
 
 fn folded(text: &str) -> Vec<char> {
-    text.chars().flat_map(char::to_lowercase).collect()
+    text.chars().map(|c| c.to_ascii_lowercase()).collect()
 }
 
 /// The optimal string alignment distance.

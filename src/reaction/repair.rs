@@ -17,7 +17,7 @@ pub(super) fn spellings(text: &str) -> Vec<String> {
         let mut go = |to: usize, cost: u32, piece: &str| {
             let longer = reached.iter().map(|(sum, text)| (sum + cost, format!("{text}{piece}")));
             best[to].extend(longer);
-            sort_short(&mut best[to], |a, b| a < b);
+            sort_short(&mut best[to], |before, item| before > item);
             best[to].dedup();
             best[to].truncate(2);
         };
@@ -59,7 +59,7 @@ pub(super) fn symbols_like(wrong: &str) -> Vec<String> {
     let mut like: Vec<&Element> =
         Element::all().filter(|element| element.symbol.chars().next() == first).collect();
     let rank = |element: &Element| (element.symbol.len() != wrong.len(), element.rarity());
-    sort_short(&mut like, |a, b| rank(a) < rank(b));
+    sort_short(&mut like, |before, item| rank(before) > rank(item));
     like.iter().take(3).map(|element| element.symbol.to_owned()).collect()
 }
 

@@ -96,7 +96,7 @@ fn split_phase(place: Place<'_>) -> (Place<'_>, Option<Place<'_>>) {
 pub(super) fn is_phase(inside: &str) -> bool {
     let inside = inside.trim();
     let small = inside.chars().next().is_some_and(char::is_lowercase);
-    let symbol = ["g", "l", "s", "aq", "cr"].contains(&inside.to_lowercase().as_str());
+    let symbol = ["g", "l", "s", "aq", "cr"].contains(&inside.to_ascii_lowercase().as_str());
     small || symbol || inside.contains(',')
 }
 

@@ -1,35 +1,42 @@
-//! Times the core natively: one line a work, its name and the nanoseconds of one turn.
+//! Times the work natively and prints a line of JSON for each kind: `work`, `place`, `sum` and the
+//! time of each batch in nanoseconds a turn. `./Trunkfile bench` sets it beside the others.
+#![allow(clippy::unwrap_used, reason = "a benchmark fails by panicking")]
 
-#![allow(clippy::expect_used, reason = "a benchmark that cannot read its case has nothing to do")]
-
+use std::hint::black_box;
 use std::time::Instant;
 
+use shiftgauge::bench::{Bench, Work};
 use shiftgauge::case::{self, Value};
 
-/// Rounds of each work; the median is printed.
-const ROUNDS: usize = 9;
-
-fn time(name: &str, count: u32, mut work: impl FnMut(u32) -> Option<f64>) {
-    work(count / 10);
-    let mut rounds: Vec<f64> = (0..ROUNDS)
-        .map(|_| {
-            let start = Instant::now();
-            let sum = work(count);
-            let nanoseconds = start.elapsed().as_secs_f64() * 1e9 / f64::from(count);
-            assert!(sum.is_some_and(f64::is_finite), "{name} gave no number");
-            nanoseconds
-        })
-        .collect();
-    rounds.sort_by(f64::total_cmp);
-    println!("{name}\t{:.1}", rounds[ROUNDS / 2]);
-}
+const BATCHES: usize = 15;
 
 fn main() {
-    for work in case::WORKS {
-        time(work, 100_000, |count| case::batch(work, count));
+    let mut bench = Bench::new().unwrap();
+    for (work, name) in Work::ALL {
+        let sum = bench.run(work, 256).unwrap();
+        print(name, Some(sum), 20_000, |count| {
+            black_box(bench.run(black_box(work), count).unwrap());
+        });
     }
-    let path = concat!(env!("CARGO_MANIFEST_DIR"), "/www/examples/low-temperature-shift.json");
-    let text = std::fs::read_to_string(path).expect("the example is there");
-    let question: Value = serde_json::from_str(&text).expect("the example is JSON");
-    time("check", 500, |count| case::batch_check(&question, count));
+    let text = include_str!("../mistakes/base.json");
+    let question: Value = serde_json::from_str(text).unwrap();
+    print("check of a case", None, 100, |count| {
+        for _ in 0..count {
+            black_box(case::check(black_box(&question)));
+        }
+    });
+}
+
+/// Runs a batch to warm up, then the batches that count.
+fn print(work: &str, sum: Option<f64>, count: u32, mut batch: impl FnMut(u32)) {
+    batch(count);
+    let times: Vec<f64> = (0..BATCHES)
+        .map(|_| {
+            let start = Instant::now();
+            batch(count);
+            start.elapsed().as_nanos() as f64 / f64::from(count)
+        })
+        .collect();
+    let sum = sum.map_or("null".to_owned(), |sum| format!("{sum:?}"));
+    println!(r#"{{"place":"native","work":"{work}","sum":{sum},"ns":{times:?}}}"#);
 }
