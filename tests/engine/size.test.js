@@ -5,7 +5,7 @@ import { gzippedLength } from '../../www/build/sizes.mjs';
 import { ENGINE_BYTES } from './engine.js';
 
 /** A little above what the engine takes now; it may only be lowered, or raised with a reason. */
-const CEILING_BYTES = 290_000;
+const CEILING_BYTES = 235_000;
 
 const TABLES = new URL('../../src/library/tables/', import.meta.url);
 
