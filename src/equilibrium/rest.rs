@@ -108,7 +108,9 @@ impl<'a> Search<'a> {
     fn between(&mut self, forward: Wall, reverse: Wall) -> Summary {
         let middle = 0.5 * (forward.distance + reverse.distance);
         let mut terms = std::mem::take(&mut self.workspace.terms);
-        let (guess, other) = if self.ln_k > 0.0 { (forward, reverse) } else { (reverse, forward) };
+        // A wrong guess costs setting up the other side.
+        let tends_forward = self.ln_k > self.system.delta_nu * self.state.rough_ln_pressure();
+        let (guess, other) = if tends_forward { (forward, reverse) } else { (reverse, forward) };
         let side = self.side(&guess, &mut terms);
         let point = side.point(middle);
         let summary = if point.value >= 0.0 {

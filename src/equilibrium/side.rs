@@ -41,6 +41,8 @@ pub(super) struct Side<'a> {
     /// ± ln K with the logarithms that the slow path needs.
     target: f64,
     multiple: f64,
+    /// One over the multiple, exact because that is a power of two; 1 where there is none.
+    per_multiple: f64,
     /// The power of two that amounts are scaled by.
     shift: i32,
 }
@@ -99,6 +101,7 @@ impl<'a> Side<'a> {
             fixed: Scaled::ONE,
             target: signed * ln_k,
             multiple: system.multiple,
+            per_multiple: if system.multiple > 0.0 { 1.0 / system.multiple } else { 1.0 },
             shift,
         };
         if system.multiple > 0.0 {
@@ -130,7 +133,7 @@ impl<'a> Side<'a> {
         if self.total_power != 0 {
             product = product.times(total, self.total_power);
         }
-        product.ln_less(self.target) / self.multiple
+        product.ln_less(self.target) * self.per_multiple
     }
 
     /// h and its derivatives at a distance.
@@ -161,7 +164,7 @@ impl<'a> Side<'a> {
         let value = if self.multiple == 0.0 {
             self.by_logarithms(|term| term.at_wall + term.slope * d, total)
         } else {
-            product.ln_less(self.target) / self.multiple
+            product.ln_less(self.target) * self.per_multiple
         };
         Point { value, slope, curvature }
     }
@@ -211,7 +214,7 @@ impl<'a> Side<'a> {
         if self.total_power != 0 {
             product = product.times(self.total, self.total_power);
         }
-        product.ln_less(self.target) / self.multiple
+        product.ln_less(self.target) * self.per_multiple
     }
 }
 

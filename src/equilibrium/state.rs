@@ -2,7 +2,7 @@
 
 use super::limits::AMOUNT_MAX_MOL;
 use super::system::System;
-use crate::numeric::Scaled;
+use crate::numeric::{Scaled, split};
 use crate::problem::EquilibriumCode;
 use crate::problem::Outcome;
 use crate::problem::Problem;
@@ -126,6 +126,16 @@ impl State<'_> {
                 .times(GAS_CONSTANT_J_PER_MOL_K, power)
                 .times(volume_m3, -power)
                 .times(STANDARD_PRESSURE_PA, -power),
+        }
+    }
+
+    /// ln(P/p°) to within ln 2; zero where the pressure is not held.
+    pub(super) fn rough_ln_pressure(&self) -> f64 {
+        match self.hold {
+            Hold::Pressure { pressure_pa } => {
+                f64::from(split(pressure_pa / STANDARD_PRESSURE_PA).1) * std::f64::consts::LN_2
+            }
+            Hold::Volume { .. } => 0.0,
         }
     }
 
