@@ -45,7 +45,7 @@ export function connect(actions) {
     if (!(start instanceof HTMLButtonElement)) continue;
     start.addEventListener('click', () => {
       const make = STARTS[start.dataset.example ?? ''];
-      if (make) replace(make(), `Opened: ${start.textContent?.trim().toLowerCase() ?? ''}.`, actions);
+      if (make) replace(make(), `Opened: ${start.textContent?.trim() ?? ''}.`, actions);
     });
   }
   byId('case-save', HTMLButtonElement).addEventListener('click', () => save(actions));

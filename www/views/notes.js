@@ -1,6 +1,7 @@
 /** What was assumed, converted or extrapolated; cautions join the paragraph that is always there. */
 
 import { byId, create } from '../dom.js';
+import { formulaWriter } from '../formulas.js';
 
 /** @import { State } from '../state.js' */
 
@@ -11,7 +12,8 @@ const cautions = byId('caution-text', HTMLElement);
 export function render({ report }) {
   const notes = report?.notes ?? [];
   const quiet = notes.filter(({ level }) => level !== 'caution');
-  list.replaceChildren(...quiet.map(({ text, level }) => create('li', { 'data-level': level }, text)));
+  const write = report === null ? String : formulaWriter(report);
+  list.replaceChildren(...quiet.map(({ text, level }) => create('li', { 'data-level': level }, write(text))));
   list.closest('section')?.toggleAttribute('hidden', quiet.length === 0);
   // The general caution stands in the page itself, so that it is there without an answer too.
   const further = notes.filter(({ level, code }) => level === 'caution' && code !== 'equilibrium-is-not-rate');

@@ -1,9 +1,8 @@
 /** The working, line by line under the number it leads to; the numbers of the answer lead here. */
 
 import { byId, create } from '../dom.js';
-import { formula } from '../format.js';
+import { formulaWriter } from '../formulas.js';
 
-/** @import { Report, Step } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
 
 const HEADINGS = [
@@ -31,18 +30,4 @@ export function render({ report }) {
       create('ol', { start: String(first) }, ...steps.map(({ text }) => create('li', {}, write(text)))),
     ];
   }));
-}
-
-/**
- * Gives the formulas of the report's species their subscripts wherever they stand in a line.
- * @param {Report} report
- */
-function formulaWriter(report) {
-  const species = [...report.species, ...report.reactions.flatMap(({ terms }) => terms)].map((one) => one.species);
-  const formulas = new Set(species.map((text) => text.replace(/\((?:g|l|s|aq)(?:, .*)?\)$/, '')));
-  const longestFirst = [...formulas].sort((a, b) => b.length - a.length);
-  if (longestFirst.length === 0) return (/** @type {string} */ text) => text;
-  const escaped = longestFirst.map((text) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&'));
-  const pattern = new RegExp(`(?<![A-Za-z0-9])(?:${escaped.join('|')})(?![A-Za-z0-9])`, 'g');
-  return (/** @type {string} */ text) => text.replace(pattern, (found) => formula(found));
 }
