@@ -124,11 +124,13 @@ fn judge_reading(
             Held::Ample => 1.0,
         })
         .collect();
-    let system = System::new(&kinds, &nu)?;
+    let at_equation = |found| at_field(found, EQUATION);
+    let at_constant = |found| at_field(found, "reactions[0].constant");
+    let system = System::new(&kinds, &nu).map_err(at_equation)?;
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
-    let quotient = quotient(&system, &state)?;
-    let affinity = affinity(&system, &state, ln_k)?;
-    let rest = rest(&system, &state, ln_k)?;
+    let quotient = quotient(&system, &state).map_err(at_equation)?;
+    let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
+    let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
     let verdict = judge(affinity, rest.summary.outcome);
     let ln_q = match quotient {
         Quotient::Finite(ln_q) => Some(ln_q),
