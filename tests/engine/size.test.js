@@ -5,7 +5,7 @@ import { gzippedLength } from '../../www/build/sizes.mjs';
 import { ENGINE_BYTES } from './engine.js';
 
 /** A little above what is reached; the aim is 80 kB without the tables of species. */
-const CEILING_BYTES = 215_000;
+const CEILING_BYTES = 220_000;
 
 const TABLES = ['species', 'heat', 'sources'].map(
   (name) => new URL(`../../src/library/tables/${name}.tsv`, import.meta.url),
