@@ -21,7 +21,7 @@ pub enum Kind {
 
 impl Kind {
     /// Whether the activity depends on the amount.
-    #[inline]
+    #[inline(always)]
     pub(super) fn is_mixed(self) -> bool {
         matches!(self, Kind::Gas | Kind::Solute)
     }

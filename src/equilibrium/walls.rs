@@ -12,7 +12,7 @@ pub(super) enum Way {
 
 impl Way {
     /// The sign of ν of the species that this way uses up.
-    #[inline]
+    #[inline(always)]
     pub fn used_up(self) -> f64 {
         match self {
             Way::Forward => -1.0,
@@ -62,7 +62,7 @@ impl Wall {
 
     /// The amount of a species at this wall, to one or two roundings; exactly zero for every
     /// species that is used up there.
-    #[inline]
+    #[inline(always)]
     pub fn amount_of(&self, nu: f64, amount: f64) -> f64 {
         let change = nu.abs() * self.distance;
         if nu * self.nu < 0.0 {
@@ -77,7 +77,7 @@ impl Wall {
     }
 
     /// How the amount of a species changes with the distance from this wall.
-    #[inline]
+    #[inline(always)]
     pub fn slope_of(&self, nu: f64) -> f64 {
         match self.way {
             Way::Forward => -nu,
@@ -89,13 +89,13 @@ impl Wall {
 /// Above this a power of two between 1e-3 and 1e3 multiplies and divides without rounding.
 const SMALLEST_EXACT: f64 = 1e-300;
 
-#[inline]
+#[inline(always)]
 fn is_power_of_two(nu: f64) -> bool {
     nu.to_bits() << 12 == 0
 }
 
 /// a |ν_b| − b |ν_a| to one rounding, at any size of the amounts.
-#[inline]
+#[inline(always)]
 fn difference(a: f64, b_nu: f64, b: f64, a_nu: f64) -> f64 {
     let largest = a.max(b);
     if largest == 0.0 {

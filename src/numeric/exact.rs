@@ -13,7 +13,7 @@
 /// use shiftgauge::numeric::two_sum;
 /// assert_eq!(two_sum(1.0, 1e-30), (1.0, 1e-30));
 /// ```
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn two_sum(a: f64, b: f64) -> (f64, f64) {
     let sum = a + b;
@@ -32,7 +32,7 @@ pub fn two_sum(a: f64, b: f64) -> (f64, f64) {
 /// let x = 1.0 + f64::EPSILON;
 /// assert_eq!(two_product(x, x), (1.0 + 2.0 * f64::EPSILON, f64::EPSILON * f64::EPSILON));
 /// ```
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn two_product(a: f64, b: f64) -> (f64, f64) {
     let product = a * b;
@@ -43,7 +43,7 @@ pub fn two_product(a: f64, b: f64) -> (f64, f64) {
 }
 
 /// A number as the sum of two of 26 bits each, so that their products are exact.
-#[inline]
+#[inline(always)]
 fn halves(x: f64) -> (f64, f64) {
     let spread = 134_217_729.0 * x; // 2^27 + 1
     let high = spread - (spread - x);
@@ -60,7 +60,7 @@ fn halves(x: f64) -> (f64, f64) {
 /// assert_eq!(difference_of_products(0.1, 3.0, 0.3, 1.0), f64::EPSILON / 8.0);
 /// assert_eq!(0.1 * 3.0 - 0.3, f64::EPSILON / 4.0);
 /// ```
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn difference_of_products(a: f64, b: f64, c: f64, d: f64) -> f64 {
     let (first, first_error) = two_product(a, b);

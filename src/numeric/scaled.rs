@@ -5,6 +5,9 @@
 //! 1e-300). Here the mantissas are multiplied, the exponents of two are added as whole numbers, and
 //! one logarithm is taken of a number near one.
 
+// The small functions of this room that the solver calls are inlined by order: a build for size
+// would keep them apart, and a call costs more than they do.
+
 /// ln 2 with 33 bits, so that its product with a whole number below 2^20 is exact.
 const LN_2_HIGH: f64 = f64::from_bits(0x3FE6_2E42_FEE0_0000);
 /// ln 2 − `LN_2_HIGH`.
@@ -22,7 +25,7 @@ const ONE: u64 = 1023 << 52;
 /// assert_eq!(split(12.0), (1.5, 3));
 /// assert_eq!(split(5e-324), (1.0, -1074));
 /// ```
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn split(x: f64) -> (f64, i32) {
     let bits = x.to_bits();
@@ -35,7 +38,7 @@ pub fn split(x: f64) -> (f64, i32) {
 }
 
 /// x 2^exponent, exact unless the result is below 2.2e-308; above the range it is infinite.
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn times_power_of_two(x: f64, exponent: i32) -> f64 {
     if (-1022..=1023).contains(&exponent) {
@@ -66,7 +69,7 @@ impl Scaled {
     /// Multiplies by a positive finite x to a whole power.
     ///
     /// The powers of one product, taken without sign, must add to less than 500.
-    #[inline]
+    #[inline(always)]
     #[must_use]
     pub fn times(mut self, x: f64, power: i32) -> Scaled {
         let (mantissa, exponent) = split(x);
@@ -86,7 +89,7 @@ impl Scaled {
     }
 
     /// Multiplies by a whole power of two.
-    #[inline]
+    #[inline(always)]
     #[must_use]
     pub fn times_two_to(mut self, exponent: i64) -> Scaled {
         self.exponent += exponent;
@@ -97,7 +100,7 @@ impl Scaled {
     ///
     /// Where the two nearly cancel the result is good to a few units of 1e-16, however large they
     /// are, as long as the exponent is below 2^20.
-    #[inline]
+    #[inline(always)]
     #[must_use]
     pub fn ln_less(self, y: f64) -> f64 {
         let exponent = self.exponent as f64;

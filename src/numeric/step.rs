@@ -14,7 +14,7 @@
 /// let step = step_in_power(2.0, 5.0, 5.0).unwrap();
 /// assert!((5.0 * growth(step) - 3.0).abs() < 1e-2);
 /// ```
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn step_in_power(value: f64, slope: f64, curvature: f64) -> Option<f64> {
     let newton = value / slope;
@@ -30,7 +30,7 @@ pub fn step_in_power(value: f64, slope: f64, curvature: f64) -> Option<f64> {
 
 /// exp(x) for a step that will be corrected: off by up to 5 % where |x| < 2, by rounding near zero
 /// and above.
-#[inline]
+#[inline(always)]
 #[must_use]
 pub fn growth(x: f64) -> f64 {
     if x.abs() < 2.0 {

@@ -20,7 +20,7 @@
  * @returns {Line[]}
  */
 export function timeBatches(bench, names, place) {
-  const batches = 15;
+  const batches = 7;
   const count = 20_000;
   return names.map((work, index) => {
     const sum = bench.run(index, 256) ?? null;

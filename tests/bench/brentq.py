@@ -16,7 +16,7 @@ TABLE = Path(__file__).parents[2] / "src/library/tables/heat.tsv"
 NU = {"CH4": -1, "H2O": -1, "CO": 1, "H2": 3, "N2": 0}
 PRESSURE_PA = 2.5e6
 STATES = 256
-BATCHES = 5
+BATCHES = 3
 
 PIECES = {}
 for row in csv.DictReader(TABLE.open(), delimiter="\t"):

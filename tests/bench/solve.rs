@@ -8,7 +8,7 @@ use std::time::Instant;
 use shiftgauge::bench::{Bench, Work};
 use shiftgauge::case::{self, Value};
 
-const BATCHES: usize = 15;
+const BATCHES: usize = 7;
 
 fn main() {
     let mut bench = Bench::new().unwrap();

@@ -1,4 +1,5 @@
-// Sets the benchmarks side by side: medians, the spread of the middle half, and ratios.
+// Sets the benchmarks side by side: medians, their spread, and ratios of the fastest batches, which
+// other work on the machine has disturbed least.
 // usage: node table.js FILE, where FILE holds the lines that the benchmarks printed.
 
 import assert from 'node:assert/strict';
@@ -19,16 +20,16 @@ const lines = readFileSync(argv[2] ?? '', 'utf8')
   .map((line) => JSON.parse(line));
 
 const works = [...new Set(lines.map((line) => line.work))];
-const widths = [18, 24, 24, 24, 24, 9, 9, 9];
+const widths = [17, 26, 26, 26, 26, 8, 9, 8];
 print(['work', ...PLACES, 'Node', 'Chromium', 'SciPy']);
-print(['', ...PLACES.map(() => 'median (quartiles)'), '/native', '/native', '/native']);
+print(['', ...PLACES.map(() => 'median (fastest, 3rd qu.)'), '/native', '/native', '/native']);
 for (const work of works) {
   const found = PLACES.map((place) => lines.filter((l) => l.work === work && l.place === place));
   checkSums(work, found.flat());
-  const quartiles = found.map((rounds) => spread(rounds.flatMap((line) => line.ns)));
-  const native = quartiles[0]?.[1];
-  const ratios = quartiles.slice(1).map((each) => (native && each ? ratio(each[1] / native) : ''));
-  print([work, ...quartiles.map((each) => (each ? shown(each) : '')), ...ratios]);
+  const spreads = found.map((rounds) => spread(rounds.flatMap((line) => line.ns)));
+  const native = spreads[0]?.[0];
+  const ratios = spreads.slice(1).map((each) => (native && each ? ratio(each[0] / native) : ''));
+  print([work, ...spreads.map((each) => (each ? shown(each) : '')), ...ratios]);
 }
 
 /**
@@ -45,20 +46,20 @@ function checkSums(work, rounds) {
 
 /**
  * @param {number[]} times
- * @returns {[number, number, number] | null} the lower quartile, the median, the upper quartile
+ * @returns {[number, number, number] | null} the fastest, the median, the upper quartile
  */
 function spread(times) {
   if (times.length === 0) return null;
   const sorted = [...times].sort((a, b) => a - b);
   const at = (/** @type {number} */ share) =>
     /** @type {number} */ (sorted[Math.round(share * (sorted.length - 1))]);
-  return [at(0.25), at(0.5), at(0.75)];
+  return [at(0), at(0.5), at(0.75)];
 }
 
-/** @param {[number, number, number]} quartiles */
+/** @param {[number, number, number]} spread */
 function shown([low, median, high]) {
   const digits = (/** @type {number} */ ns) => Number((ns / 1000).toPrecision(3)).toString();
-  return `${digits(median)} µs (${digits(low)} to ${digits(high)})`;
+  return `${digits(median)} µs (${digits(low)}, ${digits(high)})`;
 }
 
 /** @param {number} value */
