@@ -3,7 +3,7 @@
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
-use crate::advice::{NoApproach, Verdict};
+use crate::advice::{Direction, NoApproach, Verdict};
 use crate::constant::Constant;
 use crate::problem::words::{Language, note};
 use crate::problem::{NoteCode, Remark};
@@ -92,10 +92,11 @@ pub(super) fn why(found: &Findings) -> String {
         gone.map(|(participant, _)| participant.species.text()).collect::<Vec<_>>().join(", ")
     };
     match reading.verdict {
-        Verdict::Moves(direction) => moving(reading, direction.word()),
+        Verdict::Moves(Direction::Forward) => moving(reading, "forward"),
+        Verdict::Moves(Direction::Reverse) => moving(reading, "in reverse"),
         Verdict::AtRest => "Q equals K: nothing moves.".to_owned(),
         Verdict::Spent(direction) => {
-            let sign = if direction == crate::advice::Direction::Forward { -1.0 } else { 1.0 };
+            let sign = if direction == Direction::Forward { -1.0 } else { 1.0 };
             let gone = names(sign);
             format!("The affinity points {}, but there is no {gone} to use up.", direction.word())
         }
