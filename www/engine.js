@@ -52,11 +52,23 @@ export function check(question) {
 }
 
 /**
+ * How an equation is read: balanced, with the phases that the library alone settles.
  * @param {string} equation
  * @returns {BalanceAnswer}
  */
 export function balance(equation) {
-  return glue.balance(equation);
+  const read = glue.balance(equation);
+  if (!read.ok) return read;
+  return { ...read, terms: read.terms.map((term) => ({ ...term, phase: term.phase ?? onlyPhase(term.species) })) };
+}
+
+/**
+ * The phase of a species that the library has as a gas only, or never as a gas; null otherwise.
+ * @param {string} name
+ */
+function onlyPhase(name) {
+  const phases = [...new Set(glue.species(name).species.map(({ phase }) => phase))];
+  return phases.length > 1 && phases.includes('g') ? null : phases[0] ?? null;
 }
 
 /** The program's and the tables' versions as one line. */

@@ -7,7 +7,7 @@ import { forget, keep, recall } from './recall.js';
 import { textFromHash } from './link.js';
 import { keepOffline } from './offline/keep.js';
 import { render } from './render.js';
-import { caseFromText, caseToText, createState } from './state.js';
+import { caseFromText, caseToText, createState, withoutField } from './state.js';
 import * as cases from './views/cases.js';
 import * as conditions from './views/conditions.js';
 import * as gas from './views/gas.js';
@@ -128,6 +128,15 @@ const actions = {
   tell,
 };
 
+/** @param {string} field   the path of something that this page has no field for */
+function takeOut(field) {
+  const question = withoutField(readForm(), field);
+  state.set({ question });
+  fill(question);
+  answer();
+  byId('sentence', HTMLElement).focus();
+}
+
 /** @param {string} hash */
 async function openLink(hash) {
   try {
@@ -151,6 +160,7 @@ async function start() {
   answer();
   if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
   cases.connect(actions);
+  problems.connect({ takeOut });
   listen({
     changed() {
       tell('');

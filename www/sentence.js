@@ -38,9 +38,9 @@ export function sentence(report, unit) {
     case 'reverse':
       return { tone: 'reverse', arrow: '←', lead: 'The mixture moves in ', word: 'reverse', tail: distance !== null && distance < 0 ? `, ${far(-distance)} past equilibrium.` : '.', more };
     case 'at rest':
-      return { tone: 'rest', arrow: '⇌', lead: 'The mixture is ', word: 'at rest', tail: leaning(reaction), more };
+      return { tone: 'rest', arrow: '⇌', lead: 'The mixture is ', word: 'at rest', tail: restTail(report, reaction), more };
     case 'cannot tell':
-      return { ...unclear(more), tail: `${leaning(reaction)} ${reaction.why ?? ''}`.trim() };
+      return unclear(more);
     default:
       return { tone: 'unclear', arrow: '', lead: 'There is ', word: 'no reading', tail: ': K alone can be told.', more: '' };
   }
@@ -54,13 +54,26 @@ function unclear(more) {
   return { tone: 'unclear', arrow: '?', lead: 'This reading ', word: 'cannot tell', tail: ' which way the mixture moves.', more };
 }
 
-/** @param {ReactionReport} reaction */
-function leaning(reaction) {
-  if (reaction.verdict === 'cannot tell') {
-    const side = reaction.leaning === 'forward' || reaction.leaning === 'reverse' ? `, leaning ${reaction.leaning}` : '';
-    return ` which way the mixture moves${side}.`;
-  }
-  return reaction.leaning === 'forward' || reaction.leaning === 'reverse' ? `, leaning ${reaction.leaning}.` : '.';
+/**
+ * At rest with K not reached, the reaction is spent: it would go on, but what it uses up is gone.
+ * @param {Report} report
+ * @param {ReactionReport} reaction
+ */
+function restTail(report, reaction) {
+  if (reaction.leaning === null) return '.';
+  if (report.rest?.outcome !== 'nothing can move') return `, leaning ${reaction.leaning}.`;
+  const side = reaction.leaning === 'forward' ? -1 : 1;
+  const gone = reaction.terms.filter(({ nu, species }) => Math.sign(nu) === side && isAbsent(report, species));
+  const way = reaction.leaning === 'forward' ? 'move forward' : 'move in reverse';
+  return `: it would ${way}, but there is no ${gone.map(({ species }) => speciesName(species)).join(' and no ')} to use up.`;
+}
+
+/**
+ * @param {Report} report
+ * @param {string} species
+ */
+function isAbsent(report, species) {
+  return report.species.some((row) => row.species === species && row.now_mol === 0);
 }
 
 /**
@@ -70,7 +83,7 @@ function leaning(reaction) {
  */
 function absence(report, reaction) {
   /** @param {string} species */
-  const isMissing = (species) => report.species.some((row) => row.species === species && row.now_mol === 0 && !PURE.includes(row.phase));
+  const isMissing = (species) => isAbsent(report, species) && !report.species.some((row) => row.species === species && PURE.includes(row.phase));
   /**
    * @param {number} side
    * @param {string} otherwise
@@ -108,7 +121,7 @@ function ending(report) {
     case 'phase exhausted': return `It goes on until ${gone || 'a phase'} is used up; Q does not reach K.`;
     case 'ran to its limit': return `The composition does not change Q, so it runs until ${gone || 'something'} is used up.`;
     case 'any extent is at rest': return 'Q equals K at every extent: the mixture rests wherever it is.';
-    case 'nothing can move': return 'Nothing can move: what the reaction would use up is not there.';
+    case 'nothing can move': return report.reactions[0]?.verdict === 'cannot tell' ? 'As it stands, nothing can move.' : '';
     case 'has no limit': return 'Nothing that is known in amount stops the reaction: it goes on as long as the ample phases last.';
     default: return '';
   }

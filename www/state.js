@@ -82,6 +82,34 @@ export function caseToText(question) {
 }
 
 /**
+ * The case without what stands at this path: a known field goes back to that of an empty case.
+ * @param {Case} question
+ * @param {string} path   such as `models.gas` or `reactions[1]`
+ * @returns {Case}
+ */
+export function withoutField(question, path) {
+  const steps = path.split(/[.[\]]+/).filter((step) => step !== '');
+  const last = steps.pop() ?? '';
+  const copy = structuredClone(question);
+  let [at, usual] = /** @type {unknown[]} */ ([copy, emptyCase()]);
+  for (const step of steps) {
+    at = isContainer(at) ? Reflect.get(at, step) : undefined;
+    usual = isContainer(usual) ? Reflect.get(usual, step) : undefined;
+  }
+  if (!isContainer(at)) return question;
+  if (isContainer(usual) && Object.hasOwn(usual, last)) Reflect.set(at, last, Reflect.get(usual, last));
+  else if (Array.isArray(at)) at.splice(Number(last), 1);
+  else Reflect.deleteProperty(at, last);
+  return copy;
+}
+
+/**
+ * @param {unknown} value
+ * @returns {value is object}
+ */
+const isContainer = (value) => typeof value === 'object' && value !== null;
+
+/**
  * Whatever a file holds where a text should stand, as text.
  * @param {unknown} value
  */

@@ -37,7 +37,8 @@ function draw() {
   }[basis] ?? `Amounts on the basis of ${shown.basis}.`;
   conversions.textContent = conversionText(shown);
   const dry = { now: dryTotal(shown.species, 'now_mol'), rest: dryTotal(shown.species, 'rest_mol') };
-  body.replaceChildren(...shown.species.map((species) => row(species, basis, dry)));
+  const found = shown.rest?.outcome !== 'has no limit';
+  body.replaceChildren(...shown.species.map((species) => row(species, basis, dry, found)));
 }
 
 /**
@@ -48,7 +49,7 @@ function conversionText({ conversions: rows }) {
   const shares = rows.flatMap(({ species, now_to_rest: share }) => {
     if (share === null || share === 0) return [];
     const amount = `${significant(Math.abs(share) * 100, 3)}${NO_BREAK}%`;
-    return [`${amount} of the ${speciesName(species)} here ${share > 0 ? 'is still to react' : 'is to be made again'}`];
+    return [share > 0 ? `${amount} of the ${speciesName(species)} here is still to react` : `the ${speciesName(species)} here grows by ${amount}`];
   });
   return shares.length === 0 ? '' : `On the way to rest, ${shares.join('; ')}.`;
 }
@@ -68,9 +69,11 @@ function dryTotal(species, which) {
  * @param {SpeciesReport} species
  * @param {string} basis
  * @param {{ now: number, rest: number }} dry
+ * @param {boolean} found   whether there is a state at rest; the report repeats the start where there is none
  */
-function row(species, basis, dry) {
-  const { now, rest, change } = numbers(species, basis, dry);
+function row(species, basis, dry, found) {
+  const shownNumbers = numbers(species, basis, dry);
+  const { now, rest, change } = found ? shownNumbers : { ...shownNumbers, rest: '–', change: '–' };
   const asRatio = basis === 'dry' && isWater(species) ? [create('small', {}, ' per dry gas')] : [];
   const head = create('th', { scope: 'row' }, speciesName(species.species), ...asRatio);
   const gone = species.exhausted && (species.now_mol ?? 0) > 0 ? [' ', create('em', {}, 'used up')] : [];

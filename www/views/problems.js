@@ -76,7 +76,7 @@ function place(problem, index) {
  */
 function findField(path) {
   for (let at = path; at !== ''; at = at.replace(/(?:^|\.)[^.[\]]+$|\[\d+\]$/, '')) {
-    for (const found of document.querySelectorAll(`[data-field="${CSS.escape(at)}"]`)) {
+    for (const found of document.querySelectorAll(`[data-field~="${CSS.escape(at)}"]`)) {
       if (found instanceof HTMLElement && found.closest('[hidden]') === null) return found;
     }
   }
@@ -89,8 +89,31 @@ function findField(path) {
  * @returns {(Node | string)[]}
  */
 function inList(problem, field) {
-  if (field === null) return [create('strong', {}, problem.message), ' ', problem.hint];
+  if (field === null) return [create('strong', {}, problem.message), ' ', problem.hint, ...takeOutButton(problem)];
   return [goButton(`${nameOf(field)}:`, problem, field), ' ', problem.message];
+}
+
+/**
+ * What the page has no field for can still be taken out of the case.
+ * @param {Problem} problem
+ * @returns {Node[]}
+ */
+function takeOutButton({ field }) {
+  if (field === '') return [];
+  const button = create('button', { type: 'button', class: 'go', 'aria-label': `Take ${field} out of the case` }, 'Take it out');
+  button.addEventListener('click', () => takeOut(field));
+  return [document.createTextNode(' '), button];
+}
+
+/** @type {(field: string) => void} */
+let takeOut = () => {};
+
+/**
+ * Asks whoever runs the page to take out of the case what stands at a path.
+ * @param {{ takeOut: (field: string) => void }} actions
+ */
+export function connect(actions) {
+  takeOut = actions.takeOut;
 }
 
 /** @param {HTMLElement} field */

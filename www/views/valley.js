@@ -64,13 +64,19 @@ function draw() {
     curve,
     energy: valley.energy,
     now: valley.extent_now_mol,
-    rest: reaction.extent_mol,
+    rest: hasNoLimit(shown) ? null : reaction.extent_mol,
     walls: walls(valley),
     arrow: ARROWS[reaction.verdict ?? 'cannot tell'],
     title: energyName(valley),
     description: words.textContent,
   }, Math.max(NARROWEST_PX, width)));
 }
+
+/**
+ * Without a limit there is no state at rest; the report's extent of zero is that of the start.
+ * @param {Report} report
+ */
+const hasNoLimit = ({ rest }) => rest?.outcome === 'has no limit';
 
 /** @param {Valley} valley */
 function energyName({ energy }) {
@@ -109,7 +115,7 @@ function describe(report, valley) {
     return `${significant(value * factor, 3)}${NO_BREAK}${unit}`;
   };
   const basis = `on the basis of ${report.basis}`;
-  const course = extent === null ? '' : extent === 0 ? 'Now stands at rest. '
+  const course = extent === null ? '' : hasNoLimit(report) ? 'There is no state at rest within what is known. ' : extent === 0 ? 'Now stands at rest. '
     : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
   const limits = valley.limits.map(({ side, species }) => {
     const [room, way] = side === 'min' ? [-valley.extent_min_mol, 'in reverse'] : [valley.extent_max_mol, 'forward'];
