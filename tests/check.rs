@@ -247,3 +247,17 @@ fn the_working_leads_to_the_numbers_of_the_answer() {
     assert!(any("Q = a(NO2)^2 / a(N2O4) = 0.53333"), "{lines:#?}");
     assert!(lines.iter().all(|line| !line.contains('{')), "{lines:#?}");
 }
+
+#[test]
+fn without_a_limit_the_working_claims_no_state_at_rest() {
+    // CaCO3 = CaO + CO2 with K = 2 at 1 bar over pure CO2, both solids in plenty: it never stops.
+    let mut case = gas("CaCO3 = CaO + CO2", "2", "1 bar", &[("CO2", "1 mol")]);
+    case["reading"]["solids"] = json!({ "entries": [
+        { "species": "CaCO3", "value": "present" }, { "species": "CaO", "value": "present" }
+    ] });
+    let found = report(case);
+    assert_eq!(found["rest"]["outcome"], "has no limit");
+    assert_eq!(found["reactions"][0]["verdict"], "forward");
+    let steps = found["steps"].as_array().unwrap();
+    assert!(steps.iter().all(|step| step["about"] != "rest"), "{steps:#?}");
+}

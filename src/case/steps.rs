@@ -5,7 +5,7 @@ use super::report::StepReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
 use crate::constant::Constant;
-use crate::equilibrium::{Hold, Quotient};
+use crate::equilibrium::{Hold, Quotient, RestOutcome};
 use crate::problem::words::{Language, step};
 use crate::problem::{Step, StepCode};
 use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference, STANDARD_PRESSURE_PA};
@@ -189,6 +189,10 @@ fn quotient_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
 
 fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
     let rest = &reading.rest.summary;
+    if rest.outcome == RestOutcome::HasNoLimit {
+        // No state at rest was found, so there is none to work out or to check.
+        return Vec::new();
+    }
     let held = match reading.setting.hold {
         Hold::Pressure { .. } => "temperature and pressure",
         Hold::Volume { .. } => "temperature and volume",
