@@ -3,8 +3,7 @@
 use super::constant_of::k_report;
 use super::report::{ReactionReport, RecordReport, Report, SourceReport, TermReport};
 use super::run::Findings;
-use super::{amounts, notes, steps};
-use crate::advice::{Direction, Verdict};
+use super::{amounts, notes, steps, verdict};
 use crate::constant::Constant;
 use crate::equilibrium::{Affinity, Quotient};
 use crate::mixture::AmountBasis;
@@ -15,7 +14,7 @@ pub(super) fn report(found: &Findings) -> Report {
     let reading = found.reading.as_ref();
     let temperature_k = found.question.temperature.value_si;
     let pressure_pa =
-        reading.map_or(found.question.pressure_pa, |reading| reading.setting.pressure_pa);
+        reading.map_or(found.question.pressure_pa(), |reading| reading.setting.pressure_pa);
     Report {
         temperature_k,
         pressure_pa,
@@ -51,7 +50,6 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
     });
     let approach = reading.and_then(|reading| reading.approach.ok());
     let rest = reading.map(|reading| &reading.rest.summary);
-    let (verdict, leaning) = reading.map_or((None, None), |reading| words(reading.verdict));
     ReactionReport {
         equation: found.equation.text(),
         terms: TermReport::list(&found.participants),
@@ -64,23 +62,16 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         ),
         q: reading.map_or("undetermined", |reading| quotient_word(reading.quotient)),
         ln_q: reading.and_then(|reading| ln_q(reading.quotient)),
-        u_ln_q: None,
         affinity_over_rt: affinity,
-        u_affinity_over_rt: None,
         gibbs_j_per_mol: affinity.map(|over_rt| -over_rt * rt),
-        u_gibbs_j_per_mol: None,
-        verdict,
-        leaning,
-        why: notes::why(found),
+        judgement: verdict::report(found),
         t_star_k: approach.map(|approach| approach.t_star_k),
         approach_k: approach.map(|approach| approach.approach_k),
-        u_approach_k: None,
         shortfall_k: approach.map(|approach| approach.shortfall_k),
         approach_note: reading.and_then(notes::approach_note),
         extent_mol: rest.map(|rest| rest.extent_mol),
         extent_min_mol: rest.and_then(|rest| rest.extent_min_mol),
         extent_max_mol: rest.and_then(|rest| rest.extent_max_mol),
-        budget: Vec::new(),
         source: source(found),
     }
 }
@@ -105,15 +96,6 @@ pub(super) fn quotient_word(quotient: Quotient) -> &'static str {
         Quotient::Zero => "zero",
         Quotient::Infinite => "infinite",
         Quotient::Undetermined => "undetermined",
-    }
-}
-
-fn words(verdict: Verdict) -> (Option<&'static str>, Option<&'static str>) {
-    match verdict {
-        Verdict::Moves(direction) => (Some(direction.word()), Some(direction.word())),
-        Verdict::AtRest => (Some("at rest"), None),
-        Verdict::Spent(direction) => (Some("at rest"), Some(Direction::word(direction))),
-        Verdict::CannotTell => (Some("cannot tell"), None),
     }
 }
 

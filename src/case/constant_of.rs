@@ -67,6 +67,7 @@ pub(super) fn constant_of(
                 u_ln_k: stated.u_ln_k.map(|u| u * factor.abs()),
                 at_k: stated.at_k,
                 enthalpy_j_per_mol: stated.enthalpy_j_per_mol.map(|h| h * factor),
+                u_enthalpy_j_per_mol: stated.u_enthalpy_j_per_mol.map(|u| u * factor.abs()),
                 heat_capacity_j_per_mol_k: stated.heat_capacity_j_per_mol_k.map(|c| c * factor),
             }))
         }
@@ -100,7 +101,7 @@ fn stated_constant(
             unit.map_or(Form::K, Form::Kp)
         }
         KindOfK::Kc => Form::Kc,
-        KindOfK::Kx => match question.pressure_pa {
+        KindOfK::Kx => match question.pressure_pa() {
             Some(pressure_pa) => Form::Kx { pressure_pa },
             None => return Err(Problem::new(CaseCode::PressureNeeded).at("pressure").into()),
         },
@@ -121,6 +122,7 @@ fn stated_constant(
         u_ln_k: u_ln,
         at_k,
         enthalpy_j_per_mol: stated.enthalpy.as_ref().map(|enthalpy| enthalpy.value_si),
+        u_enthalpy_j_per_mol: stated.enthalpy.and_then(|enthalpy| enthalpy.standard_uncertainty_si),
         heat_capacity_j_per_mol_k: stated.heat_capacity.as_ref().map(|heat| heat.value_si),
     })
 }

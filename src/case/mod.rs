@@ -8,6 +8,9 @@ mod answer;
 mod bare;
 mod calls;
 mod constant_of;
+mod inputs;
+mod judgement;
+mod judgement_report;
 mod node;
 mod notes;
 mod participants;
@@ -22,16 +25,17 @@ mod setting;
 mod shown;
 mod steps;
 mod value;
+mod verdict;
 
 pub use bare::{AffinitiesAnswer, AffinityReport, RestAnswer, affinities, rest};
 pub use calls::{
     Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
     Version, balance, check, constant, species, version,
 };
+pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
-    BudgetRow, Conversion, CurveReport, FormReport, KReport, Limit, NoteReport, ReactionReport,
-    RecordReport, Report, RestReport, SourceReport, SpeciesReport, StepReport, TermReport,
-    ValleyReport,
+    Conversion, CurveReport, FormReport, KReport, Limit, NoteReport, ReactionReport, RecordReport,
+    Report, RestReport, SourceReport, SpeciesReport, StepReport, TermReport, ValleyReport,
 };
 pub use value::Value;

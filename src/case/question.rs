@@ -1,7 +1,8 @@
 //! A case with all its texts read: what the run needs, in the rooms' own types.
 
-use crate::mixture::{Entry, GasReading};
-use crate::quantity::Quantity;
+use crate::advice::Band;
+use crate::mixture::{Around, Entry, GasReading, absolute_pressure_pa};
+use crate::quantity::{Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::Equation;
 
 /// What is held while the mixture comes to rest.
@@ -62,14 +63,34 @@ pub(super) struct Question {
     pub reaction: ReactionQuestion,
     pub temperature: Quantity,
     pub pressure: Option<Quantity>,
-    pub pressure_pa: Option<f64>,
-    pub atmosphere_pa: f64,
-    pub atmosphere_stated: bool,
+    pub atmosphere: Option<Quantity>,
     pub hold: Held,
-    pub volume_m3: Option<f64>,
+    pub volume: Option<Quantity>,
+    /// How near to rest counts as at rest, where the case says.
+    pub band: Option<Band>,
     pub gas: Option<GasReading>,
     /// The solids and the liquid, each its own phase.
     pub pure: Vec<Entry>,
-    /// Whether a tolerance was stated anywhere.
-    pub tolerances: bool,
+}
+
+impl Question {
+    /// The atmosphere: as stated, else the standard one.
+    pub fn atmosphere_pa(&self) -> f64 {
+        self.atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |atmosphere| atmosphere.value_si)
+    }
+
+    /// The absolute pressure, where one is stated (and anything is left of it).
+    pub fn pressure_pa(&self) -> Option<f64> {
+        absolute_pressure_pa(self.pressure.as_ref()?, self.atmosphere_pa()).ok()
+    }
+
+    /// The volume, where one is stated.
+    pub fn volume_m3(&self) -> Option<f64> {
+        self.volume.map(|volume| volume.value_si)
+    }
+
+    /// What a gas analysis is laid beside.
+    pub fn around(&self) -> Around {
+        Around { pressure_pa: self.pressure_pa(), atmosphere_pa: self.atmosphere_pa() }
+    }
 }

@@ -5,6 +5,7 @@ use super::question::{Held, KSource, Question, ReactionQuestion};
 use super::read_constant::{read_points, read_stated};
 use super::read_reading::{read_gas, read_pure};
 use super::value::Value;
+use crate::advice::Band;
 use crate::mixture::{Entry, GasReading, absolute_pressure_pa};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::{Measure, PressureReference, Quantity, STANDARD_ATMOSPHERE_PA};
@@ -48,51 +49,26 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     let reaction = read_reaction(&mut reader, &root.field("reactions"));
     let temperature = reader.needed_quantity(&root.field("temperature"), &[Measure::Temperature]);
     let atmosphere = read_atmosphere(&mut reader, &root.field("atmosphere"));
-    let atmosphere_pa = atmosphere.unwrap_or(STANDARD_ATMOSPHERE_PA);
+    let atmosphere_pa = atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |stated| stated.value_si);
     let pressure_node = root.field("pressure");
     let pressure = reader.quantity(&pressure_node, &[Measure::Pressure]);
-    let pressure_pa = pressure.as_ref().and_then(|pressure| {
+    if let Some(pressure) = &pressure {
         let absolute = absolute_pressure_pa(pressure, atmosphere_pa);
-        reader.keep(&pressure_node, absolute.map_err(Vec::from))
-    });
+        reader.keep(&pressure_node, absolute.map_err(Vec::from));
+    }
     let words = [("pressure", Held::Pressure), ("volume", Held::Volume)];
     let hold = reader.choice(&root.field("hold"), &words);
     let volume = reader.quantity(&root.field("volume"), &[Measure::Volume]);
     let reading = root.field("reading");
-    let (gas, pure) = read_blocks(&mut reader, &reading, atmosphere_pa);
+    let (gas, pure) = read_blocks(&mut reader, &reading);
+    let band = read_band(&mut reader, &root.field("band"));
     let (Some(reaction), Some(temperature), Some(hold)) = (reaction, temperature, hold) else {
         return Err(reader.problems);
     };
     if !reader.problems.is_empty() {
         return Err(reader.problems);
     }
-    let volume_m3 = volume.map(|volume| volume.value_si);
-    let tolerances = text_anywhere(case, "±") || text_anywhere(case, "+/-");
-    let atmosphere_stated = atmosphere.is_some();
-    Ok(Question {
-        reaction,
-        temperature,
-        pressure,
-        pressure_pa,
-        atmosphere_pa,
-        atmosphere_stated,
-        hold,
-        volume_m3,
-        gas,
-        pure,
-        tolerances,
-    })
-}
-
-fn text_anywhere(value: &Value, piece: &str) -> bool {
-    match value {
-        Value::Text(text) => text.contains(piece),
-        Value::List(items) => items.iter().any(|item| text_anywhere(item, piece)),
-        Value::Object(fields) => fields
-            .iter()
-            .any(|(name, value)| name != "title" && name != "note" && text_anywhere(value, piece)),
-        _ => false,
-    }
+    Ok(Question { reaction, temperature, pressure, atmosphere, hold, volume, band, gas, pure })
 }
 
 fn read_format(reader: &mut Reader, node: &Node) {
@@ -116,7 +92,6 @@ fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
     if !feed.is_null() {
         reader.not_yet(&feed, "a feed reading");
     }
-    reader.quantity(&root.field("band"), &[Measure::TemperatureDifference]);
     let models = root.field("models");
     if reader.object(&models, &["gas", "liquid", "solution"]) {
         let gas = models.field("gas");
@@ -133,22 +108,36 @@ fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
     }
 }
 
-fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<f64> {
+/// A temperature difference, or a share of missing conversion.
+fn read_band(reader: &mut Reader, node: &Node) -> Option<Band> {
+    let measures = [Measure::TemperatureDifference, Measure::Fraction];
+    let stated = reader.quantity(node, &measures)?;
+    if stated.value_si < 0.0 {
+        reader.problems.push(node.problem(CaseCode::BandNegative));
+        return None;
+    }
+    Some(match stated.measure {
+        Measure::Fraction => Band::Conversion { half_width: stated.value_si },
+        _ => Band::Temperature { half_width_k: stated.value_si },
+    })
+}
+
+fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<Quantity> {
     let atmosphere: Quantity = reader.quantity(node, &[Measure::Pressure])?;
     if atmosphere.pressure_reference == PressureReference::Gauge {
         reader.problems.push(node.problem(CaseCode::GaugeAtmosphere));
         return None;
     }
-    Some(atmosphere.value_si)
+    Some(atmosphere)
 }
 
 type Blocks = (Option<GasReading>, Vec<Entry>);
 
-fn read_blocks(reader: &mut Reader, reading: &Node, atmosphere_pa: f64) -> Blocks {
+fn read_blocks(reader: &mut Reader, reading: &Node) -> Blocks {
     if !reader.object(reading, &["gas", "liquid", "solution", "solids"]) {
         return (None, Vec::new());
     }
-    let gas = read_gas(reader, &reading.field("gas"), atmosphere_pa);
+    let gas = read_gas(reader, &reading.field("gas"));
     let mut pure = read_pure(reader, &reading.field("solids"), Phase::Solid);
     let liquid = reading.field("liquid");
     let liquids = read_pure(reader, &liquid, Phase::Liquid);

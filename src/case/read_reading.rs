@@ -1,7 +1,7 @@
 //! The blocks of a reading, read into entries.
 
 use super::node::{Node, Reader};
-use crate::mixture::{Basis, Entry, GasReading, Stated, Water, absolute_pressure_pa};
+use crate::mixture::{Basis, Entry, GasReading, Stated, Water};
 use crate::problem::{CaseCode, Problem};
 use crate::quantity::{self, Measure};
 use crate::reaction::{Phase, Species, parse_species};
@@ -19,13 +19,13 @@ const PURE_MEASURES: [Measure; 4] =
     [Measure::Amount, Measure::AmountRate, Measure::Mass, Measure::MassRate];
 
 /// Reads the gas block; nothing if it is null or has a problem (which is then filed).
-pub(super) fn read_gas(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> Option<GasReading> {
+pub(super) fn read_gas(reader: &mut Reader, node: &Node) -> Option<GasReading> {
     if !reader.object(node, &["basis", "water", "entries"]) {
         return None;
     }
     let water_node = node.field("water");
     let dry = reader.choice(&node.field("basis"), &[("wet", false), ("dry", true)]);
-    let water = read_water(reader, &water_node, atmosphere_pa);
+    let water = read_water(reader, &water_node);
     if dry == Some(false) && !water_node.is_null() {
         reader.problems.push(water_node.problem(CaseCode::WaterBesideWet));
     }
@@ -35,10 +35,10 @@ pub(super) fn read_gas(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> 
         entries.extend(entry);
     }
     let basis = if dry? { Basis::Dry(water?) } else { Basis::Wet };
-    Some(GasReading { basis, entries })
+    Some(GasReading { basis, entries, closed_by: None })
 }
 
-fn read_water(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> Option<Water> {
+fn read_water(reader: &mut Reader, node: &Node) -> Option<Water> {
     if node.is_null() {
         return Some(Water::None);
     }
@@ -70,16 +70,8 @@ fn read_water(reader: &mut Reader, node: &Node, atmosphere_pa: f64) -> Option<Wa
         return reader.quantity(&per_dry, &numbers[1..]).map(Water::PerDry);
     }
     let temperature = reader.quantity(&dew_point, &[Measure::Temperature]);
-    let own = node.field("pressure");
-    let stated = reader.quantity(&own, &[Measure::Pressure]);
-    let pressure_pa = match &stated {
-        Some(stated) => {
-            let absolute = absolute_pressure_pa(stated, atmosphere_pa).map_err(Vec::from);
-            Some(reader.keep(&own, absolute)?)
-        }
-        None => None,
-    };
-    Some(Water::DewPoint { temperature: temperature?, pressure_pa })
+    let pressure = reader.quantity(&node.field("pressure"), &[Measure::Pressure]);
+    Some(Water::DewPoint { temperature: temperature?, pressure })
 }
 
 fn read_gas_value(reader: &mut Reader, node: &Node) -> Option<Stated> {

@@ -2,6 +2,7 @@
 
 use serde::Serialize;
 
+use super::judgement_report::JudgementReport;
 use super::participants::Participant;
 
 /// Everything that is known of one case.
@@ -51,28 +52,17 @@ pub struct ReactionReport {
     pub q: &'static str,
     /// ln Q where Q is finite.
     pub ln_q: Option<f64>,
-    /// Standard uncertainty of ln Q; null while tolerances are not carried through.
-    pub u_ln_q: Option<f64>,
     /// A/RT = ln K − ln Q.
     pub affinity_over_rt: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_affinity_over_rt: Option<f64>,
     /// ΔG = −A.
     pub gibbs_j_per_mol: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_gibbs_j_per_mol: Option<f64>,
-    /// `forward`, `reverse`, `at rest` or `cannot tell`; null where there is no reading.
-    pub verdict: Option<&'static str>,
-    /// The direction it leans to when the verdict is another.
-    pub leaning: Option<&'static str>,
-    /// The verdict in one sentence.
-    pub why: String,
+    /// The verdict and what the tolerances make of it, as fields of their own.
+    #[serde(flatten)]
+    pub judgement: JudgementReport,
     /// The temperature where K equals Q.
     pub t_star_k: Option<f64>,
     /// T − T*.
     pub approach_k: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_approach_k: Option<f64>,
     /// Positive when the bed falls short.
     pub shortfall_k: Option<f64>,
     /// Why there is no T*, or that there are several.
@@ -83,8 +73,6 @@ pub struct ReactionReport {
     pub extent_min_mol: Option<f64>,
     /// The greatest extent that the amounts allow; null where nothing limits it.
     pub extent_max_mol: Option<f64>,
-    /// The shares of each input in the variance; empty while tolerances are not carried through.
-    pub budget: Vec<BudgetRow>,
     /// Where K comes from.
     pub source: SourceReport,
 }
@@ -148,15 +136,6 @@ pub struct Limit {
     pub side: &'static str,
     /// What runs out there.
     pub species: Vec<String>,
-}
-
-/// An input's share of the variance.
-#[derive(Debug, Clone, Serialize)]
-pub struct BudgetRow {
-    /// The input's field.
-    pub input: String,
-    /// Its share, 0 to 1.
-    pub share_of_variance: f64,
 }
 
 /// Where K comes from.

@@ -1,17 +1,20 @@
 //! The run from a case to its report: each room is asked once, in the order of the rooms.
 
 use super::constant_of::{constant_of, k_temperature};
+use super::judgement::{Judgement, judgement, missing_conversion};
 use super::participants::{Participant, named_in, participants};
-use super::question::Question;
+use super::question::{KSource, Question};
 use super::report::Report;
 use super::setting::{Setting, setting};
 use super::value::Value;
 use super::{answer, read};
-use crate::advice::{Approach, NoApproach, Verdict, approach, judge};
+use crate::advice::{Approach, Judged, NoApproach, approach};
 use crate::constant::{Constant, ConstantAt};
-use crate::equilibrium::{Affinity, Kind, Quotient, Rest, State, System, affinity, quotient, rest};
+use crate::equilibrium::{
+    Affinity, Kind, Quotient, Rest, RestOutcome, State, System, affinity, quotient, rest,
+};
 use crate::library::Temperature;
-use crate::mixture::Held;
+use crate::mixture::{Closing, Held};
 use crate::problem::{Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase};
 
@@ -20,14 +23,36 @@ pub(super) struct Findings {
     pub question: Question,
     /// The equation with its phases.
     pub equation: Equation,
+    /// The species of the reaction, then the inerts of the reading.
     pub participants: Vec<Participant>,
-    pub constant: Constant,
     /// Where K was taken: the reading's temperature, less a stated approach.
     pub k_temperature: Temperature,
     pub at: ConstantAt,
     pub delta_nu_gas: f64,
+    pub constant: Constant,
     pub reading: Option<ReadingFindings>,
     pub remarks: Vec<Remark>,
+}
+
+/// What stays as it is while the numbers of a case are moved.
+pub(super) struct Ground<'a> {
+    pub equation: &'a Equation,
+    /// The species of the reaction.
+    pub reacting: &'a [Participant],
+    pub constant: &'a Constant,
+    pub at: &'a ConstantAt,
+    pub delta_nu_gas: f64,
+    pub system: &'a System,
+    pub closing: Option<&'a Closing>,
+    /// What became of the mixture as read.
+    pub outcome: RestOutcome,
+}
+
+impl Ground<'_> {
+    /// ΔH° where it is known, else zero.
+    pub fn enthalpy_j_per_mol(&self) -> f64 {
+        self.at.enthalpy_j_per_mol.unwrap_or(0.0)
+    }
 }
 
 /// What a reading adds.
@@ -39,8 +64,8 @@ pub(super) struct ReadingFindings {
     pub quotient: Quotient,
     pub affinity: Affinity,
     pub rest: Rest,
-    pub verdict: Verdict,
     pub approach: Result<Approach, NoApproach>,
+    pub judgement: Judgement,
 }
 
 impl ReadingFindings {
@@ -61,36 +86,31 @@ pub fn check(case: &Value) -> Outcome<Report> {
 
 fn find(question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
-    let from_library = matches!(question.reaction.source, super::question::KSource::Library);
+    let from_library = matches!(question.reaction.source, KSource::Library);
     let found = participants(&question.reaction.equation, &reading, from_library);
     let found = found.map_err(|problems| at_field(problems, EQUATION))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
-    let at = constant.at(k_temperature);
-    let mut remarks = found.remarks;
-    let no_reading = question.gas.is_none() && question.pure.is_empty();
-    let reading = if no_reading {
-        None
-    } else {
-        let mut setting = setting(&question, found.list.clone())?;
-        remarks.append(&mut setting.remarks);
-        Some(judge_reading(&question, setting, &constant, at.ln_k)?)
-    };
-    let participants =
-        reading.as_ref().map_or(found.list, |reading| reading.setting.participants.clone());
-    Ok(Findings {
+    let mut findings = Findings {
+        at: constant.at(k_temperature),
         question,
         equation,
-        participants,
+        participants: found.list,
         constant,
         k_temperature,
-        at,
         delta_nu_gas,
-        reading,
-        remarks,
-    })
+        reading: None,
+        remarks: found.remarks,
+    };
+    if findings.question.gas.is_some() || !findings.question.pure.is_empty() {
+        let reading = judge_reading(&findings)?;
+        findings.remarks.extend(reading.setting.remarks.iter().cloned());
+        findings.participants.clone_from(&reading.setting.participants);
+        findings.reading = Some(reading);
+    }
+    Ok(findings)
 }
 
 /// The field of the equation.
@@ -106,24 +126,15 @@ pub(super) fn delta_nu_gas(participants: &[Participant]) -> f64 {
     gases.map(|participant| participant.nu).sum()
 }
 
-fn judge_reading(
-    question: &Question,
-    setting: Setting,
-    constant: &Constant,
-    ln_k: f64,
-) -> Outcome<ReadingFindings> {
+fn judge_reading(found: &Findings) -> Outcome<ReadingFindings> {
+    let Findings { question, constant, .. } = found;
+    let ln_k = found.at.ln_k;
     let temperature_k = question.temperature.value_si;
+    let setting = setting(question, found.participants.clone())?;
     let held = setting.participants.iter().zip(&setting.held);
     let kinds: Vec<Kind> = held.map(|(participant, held)| kind(participant.phase, *held)).collect();
     let nu: Vec<f64> = setting.participants.iter().map(|participant| participant.nu).collect();
-    let amounts_mol: Vec<f64> = setting
-        .held
-        .iter()
-        .map(|held| match held {
-            Held::Mol(amount) => *amount,
-            Held::Ample => 1.0,
-        })
-        .collect();
+    let amounts_mol = setting.amounts_mol();
     let at_equation = |found| at_field(found, EQUATION);
     let at_constant = |found| at_field(found, "reactions[0].constant");
     let system = System::new(&kinds, &nu).map_err(at_equation)?;
@@ -131,20 +142,34 @@ fn judge_reading(
     let quotient = quotient(&system, &state).map_err(at_equation)?;
     let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
     let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
-    let verdict = judge(affinity, rest.summary.outcome);
-    let ln_q = match quotient {
-        Quotient::Finite(ln_q) => Some(ln_q),
-        _ => None,
-    };
+    let ln_q = answer::ln_q(quotient);
     let approach = approach(constant, ln_q, temperature_k);
+    let now = Judged {
+        affinity,
+        ln_q,
+        approach_k: approach.ok().map(|approach| approach.approach_k),
+        missing_conversion: missing_conversion(&rest.summary),
+        temperature_k,
+    };
+    let ground = Ground {
+        equation: &found.equation,
+        reacting: &found.participants,
+        constant,
+        at: &found.at,
+        delta_nu_gas: found.delta_nu_gas,
+        system: &system,
+        closing: setting.closing.as_ref(),
+        outcome: rest.summary.outcome,
+    };
+    let judgement = judgement(question, &ground, now);
     Ok(ReadingFindings {
         setting,
         system,
         quotient,
         affinity,
         rest,
-        verdict,
         approach,
+        judgement,
         amounts_mol,
     })
 }

@@ -25,7 +25,20 @@ pub(super) struct Setting {
     pub gas_mol: f64,
     /// The fraction of water that was added to a dry analysis.
     pub added_water_fraction: Option<f64>,
+    /// How the fractions of the gas were closed.
+    pub closing: Option<Closing>,
     pub remarks: Vec<Remark>,
+}
+
+impl Setting {
+    /// Amounts as the engine sees them; an ample phase has a nominal one.
+    pub fn amounts_mol(&self) -> Vec<f64> {
+        let amount = |held: &Held| match held {
+            Held::Mol(amount) => *amount,
+            Held::Ample => 1.0,
+        };
+        self.held.iter().map(amount).collect()
+    }
 }
 
 /// Lays the reading on the participants; the inerts of the reading join them at the end.
@@ -36,7 +49,7 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     let mut problems = Vec::new();
     let gas = match &question.gas {
         None => None,
-        Some(reading) => match gas_mixture(reading, question.pressure_pa) {
+        Some(reading) => match gas_mixture(reading, question.around()) {
             Ok(gas) => Some(gas),
             Err(found) => {
                 problems.extend(found.into_iter().map(|problem| in_block(problem, "reading.gas")));
@@ -46,7 +59,7 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     };
     let gas_basis = gas.as_ref().map(|gas| gas.basis);
     // With the volume known as well, even fractions stand for amounts.
-    let measured = if question.volume_m3.is_some() { None } else { gas_basis };
+    let measured = if question.volume_m3().is_some() { None } else { gas_basis };
     let pure = pure_phases(&question.pure, measured).unwrap_or_else(|found| {
         problems.extend(found);
         Vec::new()
@@ -64,12 +77,13 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     let mut setting = Setting {
         participants,
         held,
-        hold: Hold::Pressure { pressure_pa: question.pressure_pa.unwrap_or(1e5) },
-        pressure_pa: question.pressure_pa,
+        hold: Hold::Pressure { pressure_pa: question.pressure_pa().unwrap_or(1e5) },
+        pressure_pa: question.pressure_pa(),
         volume_m3: None,
         basis,
         gas_mol: gas.as_ref().map_or(0.0, |gas| gas.total_mol),
         added_water_fraction: gas.as_ref().and_then(|gas| gas.added_water_fraction),
+        closing: gas.map(|gas| gas.closing),
         remarks,
     };
     if any_gas {
@@ -88,16 +102,16 @@ fn remarks_of(question: &Question, gas: Option<&GasMixture>) -> Vec<Remark> {
     let mut remarks = Vec::new();
     let name = |entry: usize| reading.entries[entry].species.formula.text();
     let per_cent = |fraction: f64| format!("{:.3}", fraction * 100.0);
-    match gas.closing {
+    match &gas.closing {
         Closing::ByRemainder { entry, fraction } => {
-            let remark = Remark::new(NoteCode::ClosedByRemainder).with("species", name(entry));
-            remarks.push(remark.with("per_cent", per_cent(fraction)));
+            let remark = Remark::new(NoteCode::ClosedByRemainder).with("species", name(*entry));
+            remarks.push(remark.with("per_cent", per_cent(*fraction)));
         }
         Closing::ByLargest { entry, difference } => {
-            let remark = Remark::new(NoteCode::ClosedByLargest).with("species", name(entry));
-            remarks.push(remark.with("per_cent", per_cent(difference)));
+            let remark = Remark::new(NoteCode::ClosedByLargest).with("species", name(*entry));
+            remarks.push(remark.with("per_cent", per_cent(*difference)));
         }
-        Closing::Exact | Closing::NotNeeded => {}
+        Closing::Exact { .. } | Closing::NotNeeded => {}
     }
     match (&reading.basis, gas.added_water_fraction) {
         (crate::mixture::Basis::Dry(_), None) => {
@@ -170,10 +184,10 @@ fn add_inerts(
 fn set_pressure_and_volume(question: &Question, setting: &mut Setting) -> Outcome<()> {
     let rt = GAS_CONSTANT_J_PER_MOL_K * question.temperature.value_si;
     let held_volume = question.hold == question::Held::Volume;
-    if (held_volume || question.volume_m3.is_some()) && setting.basis == AmountBasis::Flows {
+    if (held_volume || question.volume_m3().is_some()) && setting.basis == AmountBasis::Flows {
         return Err(Problem::new(CaseCode::FlowsInVolume).at("hold").into());
     }
-    if let Some(volume_m3) = question.volume_m3 {
+    if let Some(volume_m3) = question.volume_m3() {
         if setting.gas_mol <= 0.0 {
             return Err(Problem::new(CaseCode::VolumeNeedsGas).at("volume").into());
         }
@@ -182,7 +196,7 @@ fn set_pressure_and_volume(question: &Question, setting: &mut Setting) -> Outcom
             scale_gas(setting, pressure_pa * volume_m3 / rt);
         }
         let made_pa = setting.gas_mol * rt / volume_m3;
-        if let Some(stated_pa) = question.pressure_pa {
+        if let Some(stated_pa) = question.pressure_pa() {
             if (made_pa / stated_pa - 1.0).abs() > PRESSURE_AGREEMENT {
                 return Err(Problem::new(CaseCode::VolumeAndPressure)
                     .with("found", format!("{:.5}", made_pa / 1e5))

@@ -96,11 +96,11 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
 fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
     let mut lines = Vec::new();
     let question = &found.question;
-    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa) {
+    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa()) {
         if typed.pressure_reference == PressureReference::Gauge {
             let line = Step::new(StepCode::Absolute)
                 .with("gauge", show_like(typed))
-                .with("atmosphere", shown::pressure(question.atmosphere_pa))
+                .with("atmosphere", shown::pressure(question.atmosphere_pa()))
                 .with("absolute", shown::pressure(absolute_pa));
             lines.push(("q", line));
         }

@@ -85,7 +85,7 @@ impl Constant {
                 let gibbs = -rt * carried.ln_k;
                 ConstantAt {
                     ln_k: carried.ln_k,
-                    u_ln_k: stated.u_ln_k,
+                    u_ln_k: stated.u_ln_k_at(temperature_k),
                     gibbs_j_per_mol: gibbs,
                     enthalpy_j_per_mol: carried.enthalpy_j_per_mol,
                     entropy_j_per_mol_k: carried

@@ -12,8 +12,11 @@ const CLOSING_TOLERANCE: f64 = 0.003;
 pub enum Closing {
     /// Amounts or flows: nothing to close.
     NotNeeded,
-    /// They add up to one as written.
-    Exact,
+    /// They add up to one as written, to rounding.
+    Exact {
+        /// The place of the largest, which took the rounding; none without entries.
+        entry: Option<usize>,
+    },
     /// One entry was stated as the remainder and takes this fraction.
     ByRemainder {
         /// Its place among the entries.
@@ -35,11 +38,19 @@ pub enum Closing {
 ///
 /// # Errors
 /// A sum above one beside a remainder, or a sum that is not one within tolerance.
-pub(super) fn close(entries: &[Entry], fractions: &mut [f64]) -> Outcome<Closing> {
+pub(super) fn close(
+    entries: &[Entry],
+    closed_by: Option<usize>,
+    fractions: &mut [f64],
+) -> Outcome<Closing> {
+    if let Some(fraction) = closed_by.and_then(|entry| fractions.get_mut(entry)) {
+        *fraction = 0.0;
+    }
     let sum: f64 = fractions.iter().sum();
     let rest = 1.0 - sum;
     let per_cent = |fraction: f64| format!("{:.4}", fraction * 100.0);
-    if let Some(entry) = entries.iter().position(|e| matches!(e.stated, Stated::Remainder)) {
+    let remainder = || entries.iter().position(|e| matches!(e.stated, Stated::Remainder));
+    if let Some(entry) = closed_by.or_else(remainder) {
         // A sum that exceeds one by rounding alone (0.1 + 0.9 …) leaves nothing for the remainder.
         if rest < -1e-12 {
             let problem = Problem::new(MixtureCode::RemainderNegative).with("sum", per_cent(sum));
@@ -63,9 +74,9 @@ pub(super) fn close(entries: &[Entry], fractions: &mut [f64]) -> Outcome<Closing
         }
         Some(entry) => {
             fractions[entry] += rest;
-            Ok(Closing::Exact)
+            Ok(Closing::Exact { entry: Some(entry) })
         }
-        None => Ok(Closing::Exact),
+        None => Ok(Closing::Exact { entry: None }),
     }
 }
 

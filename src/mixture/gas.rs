@@ -1,7 +1,7 @@
 //! A gas reading to amounts of each species in the wet gas.
 
 use super::closing::{Closing, close};
-use super::reading::{Basis, Entry, GasReading, Stated};
+use super::reading::{Around, Basis, Entry, GasReading, Stated};
 use super::water::water_fraction;
 use crate::problem::{MixtureCode, Outcome, Problem};
 use crate::quantity::{FractionBasis, Measure, PressureReference, Quantity};
@@ -45,7 +45,7 @@ pub struct GasMixture {
 /// All problems of the block at once: kinds that do not go together, fractions that do not add up,
 /// a negative remainder, a species twice, water named in a dry analysis, a water content that is no
 /// fraction.
-pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<GasMixture> {
+pub fn gas_mixture(reading: &GasReading, around: Around) -> Outcome<GasMixture> {
     let water_species = parse_species("H2O(g)")?;
     let mut problems = Vec::new();
     if reading.entries.is_empty() {
@@ -57,7 +57,7 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
     let stated: Vec<Option<(Form, f64)>> = reading
         .entries
         .iter()
-        .map(|entry| match form_of(entry, dry, pressure_pa) {
+        .map(|entry| match form_of(entry, dry, around.pressure_pa) {
             Ok(stated) => Some(stated),
             Err(problem) => {
                 problems.push(problem.at(&entry.field));
@@ -67,7 +67,7 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
         .collect();
     let water = match &reading.basis {
         Basis::Wet => Ok(None),
-        Basis::Dry(water) => water_fraction(water, pressure_pa),
+        Basis::Dry(water) => water_fraction(water, around),
     };
     let water = water.unwrap_or_else(|problem| {
         problems.push(problem);
@@ -80,7 +80,7 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
     let basis = common_basis(&reading.entries, &stated)?;
     let mut values: Vec<f64> = stated.iter().map(|(_, value)| *value).collect();
     let closing = if basis == AmountBasis::OneMole {
-        close(&reading.entries, &mut values)?
+        close(&reading.entries, reading.closed_by, &mut values)?
     } else {
         Closing::NotNeeded
     };

@@ -12,5 +12,5 @@ pub use closing::Closing;
 pub use condensed::{Held, pure_phases};
 pub use gas::{AmountBasis, GasMixture, gas_mixture};
 pub use pressure::absolute_pressure_pa;
-pub use reading::{Basis, Entry, GasReading, Stated, Water};
+pub use reading::{Around, Basis, Entry, GasReading, Stated, Water};
 pub use saturation::water_saturation_pressure_pa;

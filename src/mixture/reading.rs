@@ -40,8 +40,8 @@ pub enum Water {
     DewPoint {
         /// The dew point.
         temperature: Quantity,
-        /// The absolute pressure where the dew point was read, if not the case's.
-        pressure_pa: Option<f64>,
+        /// The pressure where the dew point was read, if not the case's.
+        pressure: Option<Quantity>,
     },
 }
 
@@ -61,4 +61,16 @@ pub struct GasReading {
     pub basis: Basis,
     /// Its lines.
     pub entries: Vec<Entry>,
+    /// The entry that takes what is missing from one, whatever that is; without it the entry
+    /// stated as remainder does, else the largest, if the sum is one within tolerance.
+    pub closed_by: Option<usize>,
+}
+
+/// What a gas analysis is laid beside.
+#[derive(Debug, Clone, Copy, PartialEq)]
+pub struct Around {
+    /// The absolute pressure of the gas, where it is known.
+    pub pressure_pa: Option<f64>,
+    /// The atmosphere that gauge readings count from.
+    pub atmosphere_pa: f64,
 }

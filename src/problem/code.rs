@@ -207,6 +207,7 @@ codes! {
         VolumeNeedsGas = "volume-needs-gas",
         FlowsInVolume = "flows-in-volume",
         ApproachTooLarge = "approach-too-large",
+        BandNegative = "band-negative",
     }
 }
 
@@ -229,7 +230,9 @@ codes! {
         LineExtended = "line-extended",
         KNotCarried = "k-not-carried",
         ApproachTaken = "approach-taken",
-        TolerancesNotCarried = "tolerances-not-carried",
+        NotLinear = "uncertainty-not-linear",
+        NoTolerance = "no-tolerance",
+        ConversionBand = "conversion-band",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
         Equilibrium = "equilibrium-is-not-rate",
@@ -253,6 +256,48 @@ codes! {
         TStar = "t-star",
         Rest = "rest",
         RestCheck = "rest-check",
+    }
+}
+
+codes! {
+    /// What an input of a case is called.
+    InputCode in Beside {
+        Temperature = "temperature",
+        Pressure = "pressure",
+        Atmosphere = "atmosphere",
+        Volume = "volume",
+        Gas = "gas",
+        Water = "water",
+        DewPoint = "dew-point",
+        DewPointPressure = "dew-point-pressure",
+        Pure = "pure",
+        K = "k",
+        KAt = "k-at",
+        KEnthalpy = "k-enthalpy",
+        KHeatCapacity = "k-heat-capacity",
+        KScatter = "k-scatter",
+        Data = "data",
+    }
+}
+
+codes! {
+    /// The verdict in a sentence, and what would settle it.
+    VerdictCode in Beside {
+        NoReading = "no-reading",
+        Moves = "moves",
+        MovesShort = "moves-short",
+        MovesPast = "moves-past",
+        AtRest = "at-rest",
+        InBand = "in-band",
+        InConversionBand = "in-conversion-band",
+        Spent = "spent",
+        BothAbsent = "both-absent",
+        CannotTell = "cannot-tell",
+        CannotTellOpen = "cannot-tell-open",
+        Better = "better",
+        BetterNotAlone = "better-not-alone",
+        BetterData = "better-data",
+        BetterBound = "better-bound",
     }
 }
 

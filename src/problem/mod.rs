@@ -10,8 +10,8 @@ mod span;
 pub mod words;
 
 pub use code::{
-    CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, NoteCode,
-    QuantityCode, ReactionCode, StepCode,
+    CaseCode, Code, ConstantCode, EquilibriumCode, InputCode, LibraryCode, MixtureCode, NoteCode,
+    QuantityCode, ReactionCode, StepCode, VerdictCode,
 };
 pub use remark::{Level, Remark, Step};
 pub use span::Span;

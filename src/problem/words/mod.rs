@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{Level, Problem, Remark, Step};
+use super::{InputCode, Level, Problem, Remark, Step, VerdictCode};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -53,6 +53,24 @@ pub fn step(step: &Step, language: Language) -> String {
         Language::En => en::step(step.code),
     };
     fill(template, &step.arguments)
+}
+
+/// Says what an input is called, in the middle of a sentence.
+#[must_use]
+pub fn input(name: &Remark<InputCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::input(name.code),
+    };
+    fill(template, &name.arguments)
+}
+
+/// Says the verdict, or what would settle it.
+#[must_use]
+pub fn verdict(sentence: &Remark<VerdictCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::verdict(sentence.code),
+    };
+    fill(template, &sentence.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

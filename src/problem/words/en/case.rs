@@ -89,5 +89,9 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "With this approach K would be taken at {found} K, which is no temperature.",
             "Check the approach.",
         ),
+        C::BandNegative => (
+            "A band is a width and cannot be negative.",
+            "Write it without its sign, such as 10 K.",
+        ),
     }
 }

@@ -9,9 +9,11 @@ mod note;
 mod quantity;
 mod reaction;
 mod step;
+mod verdict;
 
 pub(super) use note::template as note;
 pub(super) use step::template as step;
+pub(super) use verdict::{input, verdict};
 
 use super::super::Code;
 

@@ -51,9 +51,17 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             "K is stated {by_k} K away from this temperature and no enthalpy is given, so it is used unchanged.",
         ),
         C::ApproachTaken => (Conversion, "With the stated approach K is taken at {temperature}."),
-        C::TolerancesNotCarried => (
+        C::NotLinear => (
             Warning,
-            "The tolerances are not yet carried through to the verdict; it rests on the values alone.",
+            "Within the tolerances the result does not change in proportion to the inputs, so that an interval of twice the standard uncertainty is a rough one.",
+        ),
+        C::NoTolerance => (
+            Assumption,
+            "No tolerance is stated for {names}; the verdict takes each of these values as exact.",
+        ),
+        C::ConversionBand => (
+            Assumption,
+            "The heat of reaction is too small for a temperature approach to mean anything; the band is on the missing conversion.",
         ),
         C::IdealGas => (
             Warning,

@@ -1,0 +1,217 @@
+//! The inputs of a case that carry a tolerance, and the case with one of them moved.
+
+use super::question::{KSource, Question, StatedK};
+use crate::mixture::{Basis, Entry, Stated, Water};
+use crate::problem::{InputCode, Remark};
+use crate::quantity::{Measure, Quantity};
+
+/// A number in a case.
+#[derive(Debug, Clone, Copy, PartialEq, Eq)]
+pub(super) enum Place {
+    Temperature,
+    Pressure,
+    Atmosphere,
+    Volume,
+    Gas(usize),
+    Water,
+    WaterPressure,
+    Pure(usize),
+    K(Part),
+    Point(usize, Part),
+}
+
+/// A number of a stated K.
+#[derive(Debug, Clone, Copy, PartialEq, Eq)]
+pub(super) enum Part {
+    Value,
+    At,
+    Enthalpy,
+    HeatCapacity,
+}
+
+impl Place {
+    /// Whether it is about K and not about the reading.
+    pub fn is_of_k(self) -> bool {
+        matches!(self, Place::K(_) | Place::Point(..))
+    }
+}
+
+/// An input with a tolerance or a bound.
+#[derive(Debug, Clone)]
+pub(super) struct Input {
+    pub place: Place,
+    /// The field's path in the case.
+    pub field: String,
+    /// What a sentence calls it.
+    pub name: Remark<InputCode>,
+    /// Its standard uncertainty; zero for a bound.
+    pub u_si: f64,
+}
+
+/// Every number of a case that may have a tolerance, in the order of the page.
+fn places(question: &Question) -> Vec<(Place, String, Remark<InputCode>)> {
+    let plain = Remark::new;
+    let field = |name: &str| name.to_owned();
+    let mut places = vec![
+        (Place::Temperature, field("temperature"), plain(InputCode::Temperature)),
+        (Place::Pressure, field("pressure"), plain(InputCode::Pressure)),
+        (Place::Atmosphere, field("atmosphere"), plain(InputCode::Atmosphere)),
+        (Place::Volume, field("volume"), plain(InputCode::Volume)),
+    ];
+    let named = |code, entry: &Entry| {
+        let species = entry.species.formula.text();
+        (entry.field.clone(), Remark::new(code).with("species", species))
+    };
+    if let Some(gas) = &question.gas {
+        for (i, entry) in gas.entries.iter().enumerate() {
+            let (field, name) = named(InputCode::Gas, entry);
+            places.push((Place::Gas(i), field, name));
+        }
+        let water = match &gas.basis {
+            Basis::Dry(Water::DewPoint { .. }) => Some(("dew_point", InputCode::DewPoint)),
+            Basis::Dry(Water::Fraction(_)) => Some(("fraction", InputCode::Water)),
+            Basis::Dry(Water::PerDry(_)) => Some(("per_dry", InputCode::Water)),
+            _ => None,
+        };
+        if let Some((way, code)) = water {
+            places.push((Place::Water, format!("reading.gas.water.{way}"), plain(code)));
+            let pressure = field("reading.gas.water.pressure");
+            places.push((Place::WaterPressure, pressure, plain(InputCode::DewPointPressure)));
+        }
+    }
+    for (i, entry) in question.pure.iter().enumerate() {
+        let (field, name) = named(InputCode::Pure, entry);
+        places.push((Place::Pure(i), field, name));
+    }
+    let of_k = |part: Part| match part {
+        Part::Value => ("value", InputCode::K),
+        Part::At => ("at", InputCode::KAt),
+        Part::Enthalpy => ("enthalpy", InputCode::KEnthalpy),
+        Part::HeatCapacity => ("heat_capacity", InputCode::KHeatCapacity),
+    };
+    match &question.reaction.source {
+        KSource::Library => {}
+        KSource::Value(_) => {
+            for part in [Part::Value, Part::At, Part::Enthalpy, Part::HeatCapacity] {
+                let (name, code) = of_k(part);
+                let field = format!("reactions[0].constant.{name}");
+                places.push((Place::K(part), field, plain(code)));
+            }
+        }
+        KSource::Points(points) => {
+            // The tolerances of the values are in the line's own uncertainty.
+            for i in 0..points.len() {
+                let field = format!("reactions[0].constant.points[{i}][0]");
+                places.push((Place::Point(i, Part::At), field, plain(InputCode::KAt)));
+            }
+        }
+    }
+    places
+}
+
+/// The inputs that carry a tolerance.
+pub(super) fn inputs(question: &mut Question) -> Vec<Input> {
+    let mut found = Vec::new();
+    for (place, field, name) in places(question) {
+        let u_si = slot(question, place).and_then(|quantity| quantity.standard_uncertainty_si);
+        if let Some(u_si) = u_si.filter(|u| *u > 0.0) {
+            found.push(Input { place, field, name, u_si });
+        }
+    }
+    found
+}
+
+/// What has neither a tolerance nor a bound, of the numbers of the reading.
+pub(super) fn without_tolerance(question: &Question) -> Vec<Remark<InputCode>> {
+    let mut copy = question.clone();
+    let mut found = Vec::new();
+    for (place, _, name) in places(question) {
+        let of_reading = !place.is_of_k() && place != Place::Atmosphere;
+        let bare = slot(&mut copy, place).is_some_and(|quantity| {
+            quantity.standard_uncertainty_si.is_none() && !quantity.is_bound
+        });
+        if of_reading && bare {
+            found.push(name);
+        }
+    }
+    found
+}
+
+/// The places of the bounds: each lies somewhere between nothing and the value written.
+pub(super) fn bounds(question: &mut Question) -> Vec<Place> {
+    let places = places(question).into_iter().map(|(place, ..)| place);
+    places
+        .filter(|place| slot(question, *place).is_some_and(|quantity| quantity.is_bound))
+        .collect()
+}
+
+/// The number at a place, to be read or moved.
+pub(super) fn slot(question: &mut Question, place: Place) -> Option<&mut Quantity> {
+    match place {
+        Place::Temperature => Some(&mut question.temperature),
+        Place::Pressure => question.pressure.as_mut(),
+        Place::Atmosphere => question.atmosphere.as_mut(),
+        Place::Volume => question.volume.as_mut(),
+        Place::Gas(i) => stated(question.gas.as_mut()?.entries.get_mut(i)?),
+        Place::Pure(i) => stated(question.pure.get_mut(i)?),
+        Place::Water | Place::WaterPressure => water(question, place),
+        Place::K(part) => match &mut question.reaction.source {
+            KSource::Value(stated) => part_of(stated, part),
+            _ => None,
+        },
+        Place::Point(i, part) => match &mut question.reaction.source {
+            KSource::Points(points) => part_of(points.get_mut(i)?, part),
+            _ => None,
+        },
+    }
+}
+
+fn stated(entry: &mut Entry) -> Option<&mut Quantity> {
+    match &mut entry.stated {
+        Stated::Quantity(quantity) => Some(quantity),
+        _ => None,
+    }
+}
+
+fn water(question: &mut Question, place: Place) -> Option<&mut Quantity> {
+    let Basis::Dry(water) = &mut question.gas.as_mut()?.basis else { return None };
+    match (water, place) {
+        (Water::Fraction(quantity) | Water::PerDry(quantity), Place::Water) => Some(quantity),
+        (Water::DewPoint { temperature, .. }, Place::Water) => Some(temperature),
+        (Water::DewPoint { pressure, .. }, _) => pressure.as_mut(),
+        _ => None,
+    }
+}
+
+fn part_of(stated: &mut StatedK, part: Part) -> Option<&mut Quantity> {
+    match part {
+        Part::Value => Some(&mut stated.value),
+        Part::At => stated.at.as_mut(),
+        Part::Enthalpy => stated.enthalpy.as_mut(),
+        Part::HeatCapacity => stated.heat_capacity.as_mut(),
+    }
+}
+
+/// Does something with the case while one number in it is another, and puts the number back.
+///
+/// A fraction, an amount or a partial pressure does not go below zero, and no fraction above one.
+pub(super) fn with<T>(
+    question: &mut Question,
+    place: Place,
+    value_si: f64,
+    ask: impl FnOnce(&Question) -> Option<T>,
+) -> Option<T> {
+    let quantity = slot(question, place)?;
+    let before = quantity.value_si;
+    let floor = if quantity.measure.starts_at_zero() { 0.0 } else { f64::MIN };
+    let ceiling = if quantity.measure == Measure::Fraction { 1.0 } else { f64::MAX };
+    if !(floor..=ceiling).contains(&value_si) {
+        return None;
+    }
+    quantity.value_si = value_si;
+    let answer = ask(question);
+    if let Some(quantity) = slot(question, place) {
+        quantity.value_si = before;
+    }
+    answer
+}
