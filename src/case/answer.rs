@@ -1,7 +1,9 @@
 //! The report, written from the findings.
 
 use super::constant_of::k_report;
-use super::report::{ReactionReport, RecordReport, Report, SourceReport, TermReport};
+use super::report::{
+    FitPoint, FitReport, ReactionReport, RecordReport, Report, SourceReport, TermReport,
+};
 use super::run::Findings;
 use super::{amounts, notes, steps, verdict};
 use crate::constant::Constant;
@@ -115,8 +117,14 @@ fn source(found: &Findings) -> SourceReport {
             format!("The library, from the records of {} species", records.len())
         }
         Constant::Stated(_) => "A value that was entered in the case".to_owned(),
+        Constant::Formula(formula) => {
+            format!("A formula of {} terms that was entered in the case", formula.terms.len())
+        }
         Constant::Points(line) => {
-            format!("A straight line through {} points that were entered in the case", line.points)
+            format!(
+                "A straight line through {} points that were entered in the case",
+                line.points.len()
+            )
         }
     };
     SourceReport {
@@ -124,5 +132,22 @@ fn source(found: &Findings) -> SourceReport {
         range_k: found.constant.range_k().map(Into::into),
         extrapolated_by_k: found.at.extrapolated_by_k,
         records,
+        fit: match &found.constant {
+            Constant::Points(line) => Some(FitReport {
+                points: line
+                    .points
+                    .iter()
+                    .map(|point| FitPoint {
+                        temperature_k: point.temperature_k,
+                        ln_k: point.ln_k,
+                        residual: point.ln_k - line.ln_k(point.temperature_k),
+                    })
+                    .collect(),
+                enthalpy_j_per_mol: line.enthalpy_j_per_mol,
+                u_enthalpy_j_per_mol: line.u_enthalpy_j_per_mol,
+                bends: line.bends,
+            }),
+            _ => None,
+        },
     }
 }

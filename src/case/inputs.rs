@@ -90,7 +90,8 @@ fn places(question: &Question) -> Vec<(Place, String, Remark<InputCode>)> {
         Part::HeatCapacity => ("heat_capacity", InputCode::KHeatCapacity),
     };
     match &question.reaction.source {
-        KSource::Library => {}
+        KSource::Library | KSource::Formula(_) => {}
+        KSource::Reading(_) => {}
         KSource::Value(_) => {
             for part in [Part::Value, Part::At, Part::Enthalpy, Part::HeatCapacity] {
                 let (name, code) = of_k(part);

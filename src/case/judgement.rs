@@ -3,7 +3,7 @@
 
 use super::constant_of::{constant_of, k_temperature};
 use super::inputs::{Input, Place, bounds, inputs, slot, with};
-use super::question::Question;
+use super::question::{KSource, Question};
 use super::run::Ground;
 use super::setting::setting;
 use crate::advice::{
@@ -82,7 +82,7 @@ impl Asker<'_> {
         if place.is_of_k() {
             let delta_nu_gas = ground.delta_nu_gas;
             let moved = constant_of(question, ground.equation, ground.reacting, delta_nu_gas);
-            return self.with_constant(question, &moved.ok()?, Shift::default());
+            return self.with_constant(question, &moved.ok()??, Shift::default());
         }
         self.with_constant(question, ground.constant, Shift::default())
     }
@@ -180,6 +180,7 @@ pub(super) fn judgement(question: &Question, ground: &Ground, now: Judged) -> Ju
         Band::Temperature { .. } => approach_interval.map(shifted),
         Band::Conversion { .. } => missing_interval,
     };
+    let of_itself = matches!(question.reaction.source, KSource::Reading(_));
     let verdict = judge(&Evidence {
         affinity: now.affinity,
         affinity_interval,
@@ -187,6 +188,8 @@ pub(super) fn judgement(question: &Question, ground: &Ground, now: Judged) -> Ju
         band,
         outcome: ground.outcome,
     });
+    // A reading that K is taken from is at equilibrium because it is said to be.
+    let verdict = if of_itself { Verdict::AtRest(None) } else { verdict };
     Judgement {
         verdict,
         band,
@@ -235,8 +238,12 @@ fn data_shifts(constant: &Constant) -> Vec<(Remark<InputCode>, Shift)> {
             let shift = Shift { gibbs_j_per_mol: 0.0, times_u: 1.0 };
             vec![(Remark::new(InputCode::KScatter), shift)]
         }
+        Constant::Formula(formula) if formula.u_ln_k.is_some_and(|u| u > 0.0) => {
+            let shift = Shift { gibbs_j_per_mol: 0.0, times_u: 1.0 };
+            vec![(Remark::new(InputCode::KFormula), shift)]
+        }
         // The tolerances of a stated value are inputs of their own.
-        Constant::Points(_) | Constant::Stated(_) => Vec::new(),
+        Constant::Points(_) | Constant::Stated(_) | Constant::Formula(_) => Vec::new(),
     }
 }
 

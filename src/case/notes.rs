@@ -1,6 +1,7 @@
 //! Notes beside the report, and the sentence of the verdict.
 
 use super::inputs::without_tolerance;
+use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
@@ -90,10 +91,17 @@ fn constant_remarks(found: &Findings) -> Vec<Remark> {
         let remark = Remark::new(NoteCode::ApproachTaken);
         remarks.push(remark.with("temperature", shown::temperature(found.k_temperature.kelvin())));
     }
+    if matches!(&found.constant, Constant::Points(line) if line.bends) {
+        remarks.push(Remark::new(NoteCode::PointsBend));
+    }
+    if matches!(found.question.reaction.source, KSource::Reading(_)) {
+        remarks.push(Remark::new(NoteCode::KFromReading));
+    }
     if let Some(by_k) = found.at.extrapolated_by_k {
         let code = match found.constant {
             Constant::Library(_) => NoteCode::Extrapolated,
             Constant::Points(_) => NoteCode::LineExtended,
+            Constant::Formula(_) => NoteCode::FormulaExtended,
             Constant::Stated(_) => NoteCode::KNotCarried,
         };
         remarks.push(Remark::new(code).with("by_k", shown::number(by_k)));

@@ -1,6 +1,7 @@
 //! A case with all its texts read: what the run needs, in the rooms' own types.
 
 use crate::advice::Band;
+use crate::constant::FormulaTerm;
 use crate::mixture::{Around, Entry, GasReading, absolute_pressure_pa};
 use crate::quantity::{Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::Equation;
@@ -36,6 +37,20 @@ pub(super) struct StatedK {
     pub heat_capacity: Option<Quantity>,
 }
 
+/// A formula in T as a user states it.
+#[derive(Debug, Clone)]
+pub(super) struct StatedFormula {
+    /// The coefficients as written, of ln K or of log10 K.
+    pub terms: Vec<(f64, FormulaTerm)>,
+    /// Whether they are of log10 K.
+    pub is_log10: bool,
+    /// The unit of the Kp that they give; none where they give K itself.
+    pub pressure_unit: Option<&'static str>,
+    pub range_k: Option<(f64, f64)>,
+    /// The 95 % half-width of what the formula gives.
+    pub tolerance: Option<f64>,
+}
+
 /// Where K comes from.
 #[derive(Debug, Clone)]
 pub(super) enum KSource {
@@ -43,6 +58,10 @@ pub(super) enum KSource {
     Value(Box<StatedK>),
     /// Numbers at several temperatures, which stand in `at` of each.
     Points(Vec<StatedK>),
+    /// A formula in T.
+    Formula(StatedFormula),
+    /// The reading itself, taken as at equilibrium, with an enthalpy where one is stated.
+    Reading(Option<Quantity>),
 }
 
 /// What is asked of one reaction.

@@ -2,7 +2,7 @@
 
 use super::node::{Node, Reader};
 use super::question::{Held, KSource, Question, ReactionQuestion};
-use super::read_constant::{read_points, read_stated};
+use super::read_constant::{read_formula, read_points, read_stated};
 use super::read_reading::{read_gas, read_pure};
 use super::value::Value;
 use crate::advice::Band;
@@ -177,14 +177,15 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     let constant = first.field("constant");
     reader.object(&constant, &CONSTANT_FIELDS);
     let from = constant.field("from");
-    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3)];
+    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3), ("reading", 4)];
     let source = match reader.choice(&from, &words)? {
         0 => Some(KSource::Library),
         1 => read_stated(reader, &constant).map(|stated| KSource::Value(Box::new(stated))),
         2 => read_points(reader, &constant).map(KSource::Points),
+        3 => read_formula(reader, &constant).map(KSource::Formula),
         _ => {
-            reader.not_yet(&from, "K from a formula");
-            None
+            let enthalpy = constant.field("enthalpy");
+            Some(KSource::Reading(reader.quantity(&enthalpy, &[Measure::MolarEnergy])))
         }
     };
     let constant_for = read_equation(reader, &constant.field("for"), false);
@@ -197,7 +198,7 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     Some(ReactionQuestion { equation, already_balanced, source, constant_for, approach_k })
 }
 
-const CONSTANT_FIELDS: [&str; 11] = [
+const CONSTANT_FIELDS: [&str; 13] = [
     "from",
     "value",
     "kind",
@@ -209,6 +210,8 @@ const CONSTANT_FIELDS: [&str; 11] = [
     "approach",
     "points",
     "terms",
+    "range",
+    "tolerance",
 ];
 
 fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Balanced> {

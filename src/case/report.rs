@@ -149,6 +149,32 @@ pub struct SourceReport {
     pub extrapolated_by_k: Option<f64>,
     /// One for each species that the library gave.
     pub records: Vec<RecordReport>,
+    /// The line through points, where K is from points.
+    pub fit: Option<FitReport>,
+}
+
+/// A straight line of ln K against 1/T through points.
+#[derive(Debug, Clone, Serialize)]
+pub struct FitReport {
+    /// The points, for the reaction as written and p° = 1 bar.
+    pub points: Vec<FitPoint>,
+    /// ΔH° of the line.
+    pub enthalpy_j_per_mol: f64,
+    /// Its standard uncertainty; null for two points without tolerances.
+    pub u_enthalpy_j_per_mol: Option<f64>,
+    /// Whether the points bend away from a straight line: ΔH° is then not constant.
+    pub bends: bool,
+}
+
+/// A point of K.
+#[derive(Debug, Clone, Serialize)]
+pub struct FitPoint {
+    /// Its temperature.
+    pub temperature_k: f64,
+    /// ln K.
+    pub ln_k: f64,
+    /// ln K less that of the line.
+    pub residual: f64,
 }
 
 /// A record of the library, as cited.

@@ -1,6 +1,6 @@
 //! The run from a case to its report: each room is asked once, in the order of the rooms.
 
-use super::constant_of::{constant_of, k_temperature};
+use super::constant_of::{constant_of, constant_of_reading, k_temperature};
 use super::judgement::{Judgement, judgement, missing_conversion};
 use super::participants::{Participant, named_in, participants};
 use super::question::{KSource, Question};
@@ -93,6 +93,12 @@ fn find(question: Question) -> Outcome<Findings> {
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
+    let has_reading = question.gas.is_some() || !question.pure.is_empty();
+    let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
+    let constant = match constant {
+        Some(constant) => constant,
+        None => constant_of_reading(&question, laid.as_ref().map(|laid| laid.quotient))?,
+    };
     let mut findings = Findings {
         at: constant.at(k_temperature),
         question,
@@ -104,8 +110,11 @@ fn find(question: Question) -> Outcome<Findings> {
         reading: None,
         remarks: found.remarks,
     };
-    if findings.question.gas.is_some() || !findings.question.pure.is_empty() {
-        let reading = judge_reading(&findings)?;
+    if let Some(laid) = laid {
+        let reading = judge_reading(&findings, laid)?;
+        if matches!(findings.question.reaction.source, KSource::Reading(_)) {
+            findings.at.u_ln_k = reading.judgement.ln_q.as_ref().map(|budget| budget.u);
+        }
         findings.remarks.extend(reading.setting.remarks.iter().cloned());
         findings.participants.clone_from(&reading.setting.participants);
         findings.reading = Some(reading);
@@ -126,20 +135,35 @@ pub(super) fn delta_nu_gas(participants: &[Participant]) -> f64 {
     gases.map(|participant| participant.nu).sum()
 }
 
-fn judge_reading(found: &Findings) -> Outcome<ReadingFindings> {
-    let Findings { question, constant, .. } = found;
-    let ln_k = found.at.ln_k;
-    let temperature_k = question.temperature.value_si;
-    let setting = setting(question, found.participants.clone())?;
+/// A reading laid on the reaction, before K is asked for.
+struct Laid {
+    setting: Setting,
+    system: System,
+    amounts_mol: Vec<f64>,
+    quotient: Quotient,
+}
+
+fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid> {
+    let setting = setting(question, reacting.to_vec())?;
     let held = setting.participants.iter().zip(&setting.held);
     let kinds: Vec<Kind> = held.map(|(participant, held)| kind(participant.phase, *held)).collect();
     let nu: Vec<f64> = setting.participants.iter().map(|participant| participant.nu).collect();
     let amounts_mol = setting.amounts_mol();
     let at_equation = |found| at_field(found, EQUATION);
-    let at_constant = |found| at_field(found, "reactions[0].constant");
     let system = System::new(&kinds, &nu).map_err(at_equation)?;
+    let temperature_k = question.temperature.value_si;
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let quotient = quotient(&system, &state).map_err(at_equation)?;
+    Ok(Laid { setting, system, amounts_mol, quotient })
+}
+
+fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
+    let Findings { question, constant, .. } = found;
+    let Laid { setting, system, amounts_mol, quotient } = laid;
+    let ln_k = found.at.ln_k;
+    let temperature_k = question.temperature.value_si;
+    let at_constant = |found| at_field(found, "reactions[0].constant");
+    let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
     let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
     let ln_q = answer::ln_q(quotient);

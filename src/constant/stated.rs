@@ -31,6 +31,19 @@ pub struct Carried {
 }
 
 impl StatedConstant {
+    /// The constant of the reaction times a factor: ln K, ΔH° and ΔCp° go with it.
+    #[must_use]
+    pub fn times(self, factor: f64) -> StatedConstant {
+        StatedConstant {
+            ln_k: self.ln_k * factor,
+            u_ln_k: self.u_ln_k.map(|u| u * factor.abs()),
+            at_k: self.at_k,
+            enthalpy_j_per_mol: self.enthalpy_j_per_mol.map(|enthalpy| enthalpy * factor),
+            u_enthalpy_j_per_mol: self.u_enthalpy_j_per_mol.map(|u| u * factor.abs()),
+            heat_capacity_j_per_mol_k: self.heat_capacity_j_per_mol_k.map(|heat| heat * factor),
+        }
+    }
+
     /// Standard uncertainty of ln K at `temperature_k`, where any was stated: that of the value, and
     /// that of ΔH° over the distance, u(ΔH)/R · |1/T − 1/T₀|.
     #[must_use]

@@ -208,6 +208,10 @@ codes! {
         FlowsInVolume = "flows-in-volume",
         ApproachTooLarge = "approach-too-large",
         BandNegative = "band-negative",
+        FormulaWithoutTerms = "formula-without-terms",
+        NotARange = "not-a-range",
+        KFromOpenReading = "k-from-open-reading",
+        KFromNoReading = "k-from-no-reading",
     }
 }
 
@@ -233,6 +237,9 @@ codes! {
         NotLinear = "uncertainty-not-linear",
         NoTolerance = "no-tolerance",
         ConversionBand = "conversion-band",
+        FormulaExtended = "formula-extended",
+        PointsBend = "points-bend",
+        KFromReading = "k-from-reading",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
         Equilibrium = "equilibrium-is-not-rate",
@@ -256,6 +263,8 @@ codes! {
         TStar = "t-star",
         Rest = "rest",
         RestCheck = "rest-check",
+        Formula = "formula",
+        KOfReading = "k-of-reading",
     }
 }
 
@@ -276,6 +285,7 @@ codes! {
         KEnthalpy = "k-enthalpy",
         KHeatCapacity = "k-heat-capacity",
         KScatter = "k-scatter",
+        KFormula = "k-formula",
         Data = "data",
     }
 }

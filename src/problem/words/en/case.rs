@@ -89,6 +89,22 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "With this approach K would be taken at {found} K, which is no temperature.",
             "Check the approach.",
         ),
+        C::FormulaWithoutTerms => (
+            "A formula of K needs at least one term with a number.",
+            "Fill in a term, such as 1/T.",
+        ),
+        C::NotARange => (
+            "A range is two temperatures, the lower first.",
+            "Write both, such as 400 °C and 600 °C.",
+        ),
+        C::KFromOpenReading => (
+            "K cannot be taken from this reading: a species is absent, so that Q is {found}.",
+            "Enter every species of the reaction, or take K from the library.",
+        ),
+        C::KFromNoReading => (
+            "K is to be taken from the reading, but there is none.",
+            "Enter the reading, or take K from the library.",
+        ),
         C::BandNegative => (
             "A band is a width and cannot be negative.",
             "Write it without its sign, such as 10 K.",

@@ -67,6 +67,17 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Warning,
             "The gas is taken as ideal; at {pressure} that can matter. No real-gas correction is made.",
         ),
+        C::FormulaExtended => {
+            (Warning, "The temperature is {by_k} K outside the range of the formula of K.")
+        }
+        C::PointsBend => (
+            Warning,
+            "The points of K bend away from a straight line of ln K against 1/T, so ΔH° is not constant; the line is a compromise and its ΔH° a mean.",
+        ),
+        C::KFromReading => (
+            Assumption,
+            "K is taken from this reading, which is said to be at equilibrium; the reading therefore judges nothing. Carry this K to other readings.",
+        ),
         C::NoReading => (
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",

@@ -19,6 +19,7 @@ pub(in crate::problem::words) fn input(code: InputCode) -> &'static str {
         C::KEnthalpy => "the enthalpy of reaction",
         C::KHeatCapacity => "the change of heat capacity",
         C::KScatter => "the scatter of the points of K",
+        C::KFormula => "the formula of K",
         C::Data => "the data of {species}",
     }
 }
