@@ -1,7 +1,12 @@
 //! The amounts of the report: each species now and at rest, conversions, and the valley.
 
-use super::report::{Conversion, Limit, RestReport, SpeciesReport, ValleyReport};
+use super::participants::Participant;
+use super::report::{
+    BalanceReport, Conversion, ElementReport, Limit, RestReport, RestoredReport, SpeciesReport,
+    ValleyReport,
+};
 use super::run::{Findings, ReadingFindings};
+use super::setting::Setting;
 use crate::advice::{self, Energy, Stretch};
 use crate::equilibrium::{Hold, Kind};
 use crate::mixture::Held;
@@ -117,14 +122,52 @@ pub(super) fn conversions(found: &Findings, reading: &ReadingFindings) -> Vec<Co
                 _ => None,
             };
             let used = -participant.nu * reading.rest.summary.extent_mol;
+            let fed = fed(reading, participant).filter(|fed| *fed > 0.0);
             Conversion {
                 species: participant.species.text(),
-                feed_to_now: None,
+                feed_to_now: fed.map(|fed| 1.0 - now.unwrap_or(0.0) / fed),
                 now_to_rest: now.map(|now| used / now),
-                feed_to_rest: None,
+                feed_to_rest: fed.map(|fed| 1.0 - (now.unwrap_or(0.0) - used) / fed),
             }
         })
         .collect()
+}
+
+/// How much of a species went in, on the basis of the reading.
+fn fed(reading: &ReadingFindings, participant: &Participant) -> Option<f64> {
+    let Setting { feed, balance, gas_mol, .. } = &reading.setting;
+    let (feed, balance) = (feed.as_ref()?, balance.as_ref()?);
+    if participant.phase != Phase::Gas {
+        return None;
+    }
+    let row = feed.amounts_mol.iter().find(|(name, _)| name.same_substance(&participant.species));
+    Some(row.map_or(0.0, |(_, amount)| *amount) * gas_mol / balance.reading_mol)
+}
+
+/// What the feed says of the gas behind it.
+pub(super) fn balance(reading: &ReadingFindings) -> Option<BalanceReport> {
+    let balance = reading.setting.balance.as_ref()?;
+    Some(BalanceReport {
+        contraction: 1.0 - balance.reading_mol / balance.feed_mol,
+        closes_within: balance.closes_within,
+        elements: balance
+            .elements
+            .iter()
+            .map(|row| ElementReport {
+                element: row.element,
+                feed_mol: row.feed_mol,
+                reading_mol: row.reading_mol,
+            })
+            .collect(),
+        restored: balance
+            .restored
+            .iter()
+            .map(|(species, fraction)| RestoredReport {
+                species: species.text(),
+                fraction: *fraction,
+            })
+            .collect(),
+    })
 }
 
 pub(super) fn valley(found: &Findings, reading: &ReadingFindings) -> Option<ValleyReport> {

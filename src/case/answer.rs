@@ -28,6 +28,7 @@ pub(super) fn report(found: &Findings) -> Report {
         species: reading.map_or_else(Vec::new, |reading| amounts::species(found, reading)),
         rest: reading.map(|reading| amounts::rest(found, reading)),
         conversions: reading.map_or_else(Vec::new, |reading| amounts::conversions(found, reading)),
+        balance: reading.and_then(amounts::balance),
         valley: reading.and_then(|reading| amounts::valley(found, reading)),
         steps: steps::steps(found),
         notes: notes::notes(found),

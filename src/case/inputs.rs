@@ -1,7 +1,7 @@
 //! The inputs of a case that carry a tolerance, and the case with one of them moved.
 
 use super::question::{KSource, Question, StatedK};
-use crate::mixture::{Basis, Entry, Stated, Water};
+use crate::mixture::{Basis, Entry, GasReading, Stated, Water};
 use crate::problem::{InputCode, Remark};
 use crate::quantity::{Measure, Quantity};
 
@@ -12,12 +12,19 @@ pub(super) enum Place {
     Pressure,
     Atmosphere,
     Volume,
-    Gas(usize),
-    Water,
-    WaterPressure,
+    Gas(Of, usize),
+    Water(Of),
+    WaterPressure(Of),
     Pure(usize),
     K(Part),
     Point(usize, Part),
+}
+
+/// Which gas.
+#[derive(Debug, Clone, Copy, PartialEq, Eq)]
+pub(super) enum Of {
+    Reading,
+    Feed,
 }
 
 /// A number of a stated K.
@@ -49,7 +56,7 @@ pub(super) struct Input {
 }
 
 /// Every number of a case that may have a tolerance, in the order of the page.
-fn places(question: &Question) -> Vec<(Place, String, Remark<InputCode>)> {
+fn places(question: &Question) -> Vec<Named> {
     let plain = Remark::new;
     let field = |name: &str| name.to_owned();
     let mut places = vec![
@@ -58,25 +65,9 @@ fn places(question: &Question) -> Vec<(Place, String, Remark<InputCode>)> {
         (Place::Atmosphere, field("atmosphere"), plain(InputCode::Atmosphere)),
         (Place::Volume, field("volume"), plain(InputCode::Volume)),
     ];
-    let named = |code, entry: &Entry| {
-        let species = entry.species.formula.text();
-        (entry.field.clone(), Remark::new(code).with("species", species))
-    };
-    if let Some(gas) = &question.gas {
-        for (i, entry) in gas.entries.iter().enumerate() {
-            let (field, name) = named(InputCode::Gas, entry);
-            places.push((Place::Gas(i), field, name));
-        }
-        let water = match &gas.basis {
-            Basis::Dry(Water::DewPoint { .. }) => Some(("dew_point", InputCode::DewPoint)),
-            Basis::Dry(Water::Fraction(_)) => Some(("fraction", InputCode::Water)),
-            Basis::Dry(Water::PerDry(_)) => Some(("per_dry", InputCode::Water)),
-            _ => None,
-        };
-        if let Some((way, code)) = water {
-            places.push((Place::Water, format!("reading.gas.water.{way}"), plain(code)));
-            let pressure = field("reading.gas.water.pressure");
-            places.push((Place::WaterPressure, pressure, plain(InputCode::DewPointPressure)));
+    for (of, gas) in [(Of::Feed, &question.feed), (Of::Reading, &question.gas)] {
+        if let Some(gas) = gas {
+            places_of_gas(&mut places, of, gas);
         }
     }
     for (i, entry) in question.pure.iter().enumerate() {
@@ -108,6 +99,33 @@ fn places(question: &Question) -> Vec<(Place, String, Remark<InputCode>)> {
         }
     }
     places
+}
+
+type Named = (Place, String, Remark<InputCode>);
+
+fn named(code: InputCode, entry: &Entry) -> (String, Remark<InputCode>) {
+    (entry.field.clone(), Remark::new(code).with("species", entry.species.formula.text()))
+}
+
+fn places_of_gas(places: &mut Vec<Named>, of: Of, gas: &GasReading) {
+    let (block, code, water_code) = match of {
+        Of::Reading => ("reading", InputCode::Gas, InputCode::Water),
+        Of::Feed => ("feed", InputCode::Feed, InputCode::FeedWater),
+    };
+    for (i, entry) in gas.entries.iter().enumerate() {
+        let (field, name) = named(code, entry);
+        places.push((Place::Gas(of, i), field, name));
+    }
+    let (way, code) = match &gas.basis {
+        Basis::Dry(Water::DewPoint { .. }) => ("dew_point", InputCode::DewPoint),
+        Basis::Dry(Water::Fraction(_)) => ("fraction", water_code),
+        Basis::Dry(Water::PerDry(_)) => ("per_dry", water_code),
+        Basis::Dry(Water::None | Water::FromFeed) | Basis::Wet => return,
+    };
+    let water = format!("{block}.gas.water");
+    places.push((Place::Water(of), format!("{water}.{way}"), Remark::new(code)));
+    let pressure = Remark::new(InputCode::DewPointPressure);
+    places.push((Place::WaterPressure(of), format!("{water}.pressure"), pressure));
 }
 
 /// The inputs that carry a tolerance.
@@ -153,9 +171,9 @@ pub(super) fn slot(question: &mut Question, place: Place) -> Option<&mut Quantit
         Place::Pressure => question.pressure.as_mut(),
         Place::Atmosphere => question.atmosphere.as_mut(),
         Place::Volume => question.volume.as_mut(),
-        Place::Gas(i) => stated(question.gas.as_mut()?.entries.get_mut(i)?),
+        Place::Gas(of, i) => stated(gas(question, of)?.entries.get_mut(i)?),
         Place::Pure(i) => stated(question.pure.get_mut(i)?),
-        Place::Water | Place::WaterPressure => water(question, place),
+        Place::Water(of) | Place::WaterPressure(of) => water(gas(question, of)?, place),
         Place::K(part) => match &mut question.reaction.source {
             KSource::Value(stated) => part_of(stated, part),
             _ => None,
@@ -174,11 +192,18 @@ fn stated(entry: &mut Entry) -> Option<&mut Quantity> {
     }
 }
 
-fn water(question: &mut Question, place: Place) -> Option<&mut Quantity> {
-    let Basis::Dry(water) = &mut question.gas.as_mut()?.basis else { return None };
+fn gas(question: &mut Question, of: Of) -> Option<&mut GasReading> {
+    match of {
+        Of::Reading => question.gas.as_mut(),
+        Of::Feed => question.feed.as_mut(),
+    }
+}
+
+fn water(gas: &mut GasReading, place: Place) -> Option<&mut Quantity> {
+    let Basis::Dry(water) = &mut gas.basis else { return None };
     match (water, place) {
-        (Water::Fraction(quantity) | Water::PerDry(quantity), Place::Water) => Some(quantity),
-        (Water::DewPoint { temperature, .. }, Place::Water) => Some(temperature),
+        (Water::Fraction(quantity) | Water::PerDry(quantity), Place::Water(_)) => Some(quantity),
+        (Water::DewPoint { temperature, .. }, Place::Water(_)) => Some(temperature),
         (Water::DewPoint { pressure, .. }, _) => pressure.as_mut(),
         _ => None,
     }

@@ -210,14 +210,19 @@ pub(super) fn judgement(question: &Question, ground: &Ground, now: Judged) -> Ju
 
 /// The entry that closes the fractions stays the same while the others are moved.
 fn fix_closing(work: &mut Question, ground: &Ground) {
-    let Some(gas) = &mut work.gas else { return };
-    gas.closed_by = match ground.closing {
-        Some(Closing::ByRemainder { entry, .. } | Closing::ByLargest { entry, .. }) => Some(*entry),
-        Some(Closing::Exact { entry }) => *entry,
-        Some(Closing::NotNeeded) | None => None,
-    };
-    if let Some(entry) = gas.closed_by.and_then(|entry| gas.entries.get_mut(entry)) {
-        entry.stated = Stated::Remainder;
+    let gases = [(&mut work.gas, ground.closing), (&mut work.feed, ground.feed_closing)];
+    for (gas, closing) in gases {
+        let Some(gas) = gas else { continue };
+        gas.closed_by = match closing {
+            Some(Closing::ByRemainder { entry, .. } | Closing::ByLargest { entry, .. }) => {
+                Some(*entry)
+            }
+            Some(Closing::Exact { entry }) => *entry,
+            Some(Closing::NotNeeded) | None => None,
+        };
+        if let Some(entry) = gas.closed_by.and_then(|entry| gas.entries.get_mut(entry)) {
+            entry.stated = Stated::Remainder;
+        }
     }
 }
 

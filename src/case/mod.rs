@@ -35,8 +35,8 @@ pub use calls::{
 pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
-    Conversion, CurveReport, FitPoint, FitReport, FormReport, KReport, Limit, NoteReport,
-    ReactionReport, RecordReport, Report, RestReport, SourceReport, SpeciesReport, StepReport,
-    TermReport, ValleyReport,
+    BalanceReport, Conversion, CurveReport, ElementReport, FitPoint, FitReport, FormReport,
+    KReport, Limit, NoteReport, ReactionReport, RecordReport, Report, RestReport, RestoredReport,
+    SourceReport, SpeciesReport, StepReport, TermReport, ValleyReport,
 };
 pub use value::Value;

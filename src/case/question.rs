@@ -88,6 +88,8 @@ pub(super) struct Question {
     /// How near to rest counts as at rest, where the case says.
     pub band: Option<Band>,
     pub gas: Option<GasReading>,
+    /// The gas that went in.
+    pub feed: Option<GasReading>,
     /// The solids and the liquid, each its own phase.
     pub pure: Vec<Entry>,
 }

@@ -61,6 +61,7 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     let volume = reader.quantity(&root.field("volume"), &[Measure::Volume]);
     let reading = root.field("reading");
     let (gas, pure) = read_blocks(&mut reader, &reading);
+    let feed = read_feed(&mut reader, &root.field("feed"));
     let band = read_band(&mut reader, &root.field("band"));
     let (Some(reaction), Some(temperature), Some(hold)) = (reaction, temperature, hold) else {
         return Err(reader.problems);
@@ -68,7 +69,18 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     if !reader.problems.is_empty() {
         return Err(reader.problems);
     }
-    Ok(Question { reaction, temperature, pressure, atmosphere, hold, volume, band, gas, pure })
+    Ok(Question {
+        reaction,
+        temperature,
+        pressure,
+        atmosphere,
+        hold,
+        volume,
+        band,
+        gas,
+        feed,
+        pure,
+    })
 }
 
 fn read_format(reader: &mut Reader, node: &Node) {
@@ -87,10 +99,6 @@ fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
     let words = [("isothermal", false), ("adiabatic", true)];
     if reader.choice(&heat, &words) == Some(true) {
         reader.not_yet(&heat, "an adiabatic rest");
-    }
-    let feed = root.field("feed");
-    if !feed.is_null() {
-        reader.not_yet(&feed, "a feed reading");
     }
     let models = root.field("models");
     if reader.object(&models, &["gas", "liquid", "solution"]) {
@@ -150,6 +158,20 @@ fn read_blocks(reader: &mut Reader, reading: &Node) -> Blocks {
         reader.not_yet(&solution, "a reading of a solution");
     }
     (gas, pure)
+}
+
+/// The gas that goes in.
+fn read_feed(reader: &mut Reader, node: &Node) -> Option<GasReading> {
+    if !reader.object(node, &["gas", "liquid", "solution", "solids"]) {
+        return None;
+    }
+    for name in ["liquid", "solution", "solids"] {
+        let block = node.field(name);
+        if !block.is_null() {
+            reader.not_yet(&block, "a feed that is not a gas");
+        }
+    }
+    read_gas(reader, &node.field("gas"))
 }
 
 fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {

@@ -20,7 +20,7 @@ const PURE_MEASURES: [Measure; 4] =
 
 /// Reads the gas block; nothing if it is null or has a problem (which is then filed).
 pub(super) fn read_gas(reader: &mut Reader, node: &Node) -> Option<GasReading> {
-    if !reader.object(node, &["basis", "water", "entries"]) {
+    if !reader.object(node, &["basis", "water", "entries", "lost"]) {
         return None;
     }
     let water_node = node.field("water");
@@ -34,8 +34,20 @@ pub(super) fn read_gas(reader: &mut Reader, node: &Node) -> Option<GasReading> {
         let entry = read_entry(reader, &item, Phase::Gas, read_gas_value);
         entries.extend(entry);
     }
+    let lost = read_lost(reader, &node.field("lost"));
     let basis = if dry? { Basis::Dry(water?) } else { Basis::Wet };
-    Some(GasReading { basis, entries, closed_by: None })
+    Some(GasReading { basis, entries, lost, closed_by: None })
+}
+
+/// The species that the sample lost when it was cooled.
+fn read_lost(reader: &mut Reader, node: &Node) -> Vec<Species> {
+    let mut lost = Vec::new();
+    for item in reader.items(node) {
+        let Some(text) = reader.needed_text(&item) else { continue };
+        let species = reader.keep(&item, parse_species(text));
+        lost.extend(species.and_then(|species| in_block(reader, &item, species, Phase::Gas)));
+    }
+    lost
 }
 
 fn read_water(reader: &mut Reader, node: &Node) -> Option<Water> {
@@ -44,12 +56,11 @@ fn read_water(reader: &mut Reader, node: &Node) -> Option<Water> {
     }
     if let super::value::Value::Text(text) = node.value {
         if text == "from_feed" {
-            reader.not_yet(node, "water from the feed");
-        } else {
-            let allowed = "fraction, per_dry, dew_point (an object) or from_feed";
-            let problem = Problem::new(CaseCode::UnknownWord).with("found", text.as_str());
-            reader.problems.push(problem.with("allowed", allowed).at(&node.path));
+            return Some(Water::FromFeed);
         }
+        let allowed = "fraction, per_dry, dew_point (an object) or from_feed";
+        let problem = Problem::new(CaseCode::UnknownWord).with("found", text.as_str());
+        reader.problems.push(problem.with("allowed", allowed).at(&node.path));
         return None;
     }
     if !reader.object(node, &["fraction", "per_dry", "dew_point", "pressure"]) {
@@ -112,7 +123,7 @@ fn read_entry(
     phase: Phase,
     read_value: impl Fn(&mut Reader, &Node) -> Option<Stated>,
 ) -> Option<Entry> {
-    if !reader.object(item, &["species", "value"]) {
+    if !reader.object(item, &["species", "value", "includes"]) {
         if item.is_null() {
             reader.problems.push(item.problem(CaseCode::Missing));
         }
@@ -122,9 +133,13 @@ fn read_entry(
     let species = reader.needed_text(&name);
     let species = species.and_then(|text| reader.keep(&name, parse_species(text)));
     let species = species.and_then(|species| in_block(reader, &name, species, phase));
+    let includes = item.field("includes");
+    let counted = reader.text(&includes);
+    let counted = counted.and_then(|text| reader.keep(&includes, parse_species(text)));
+    let counted = counted.and_then(|counted| in_block(reader, &includes, counted, phase));
     let value = item.field("value");
     let stated = read_value(reader, &value);
-    Some(Entry { species: species?, stated: stated?, field: value.path })
+    Some(Entry { species: species?, stated: stated?, includes: counted, field: value.path })
 }
 
 /// A species of a block carries the block's phase; another phase written on it is a mistake.

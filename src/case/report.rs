@@ -28,6 +28,8 @@ pub struct Report {
     pub rest: Option<RestReport>,
     /// How much of each reactant is converted on the way to rest.
     pub conversions: Vec<Conversion>,
+    /// What the feed says of the gas; null without a feed.
+    pub balance: Option<BalanceReport>,
     /// G along the reaction; null where it has no drawing.
     pub valley: Option<ValleyReport>,
     /// The working, line by line.
@@ -253,6 +255,39 @@ pub struct Conversion {
     pub now_to_rest: Option<f64>,
     /// From the feed to rest; null without a feed.
     pub feed_to_rest: Option<f64>,
+}
+
+/// The gas behind a feed, by the balance of the elements.
+#[derive(Debug, Clone, Serialize)]
+pub struct BalanceReport {
+    /// By what share the gas shrinks from the feed to the reading; negative where it grows.
+    pub contraction: f64,
+    /// The largest difference of an element, as a share of what is fed.
+    pub closes_within: f64,
+    /// One for each element that balances in the gas.
+    pub elements: Vec<ElementReport>,
+    /// What the analysis does not show and the balance found.
+    pub restored: Vec<RestoredReport>,
+}
+
+/// One element in the feed and behind it.
+#[derive(Debug, Clone, Serialize)]
+pub struct ElementReport {
+    /// Its symbol.
+    pub element: &'static str,
+    /// Atoms of it in the feed, mol on the feed's basis.
+    pub feed_mol: f64,
+    /// Atoms of it behind, mol on the feed's basis.
+    pub reading_mol: f64,
+}
+
+/// A species that the balance found.
+#[derive(Debug, Clone, Serialize)]
+pub struct RestoredReport {
+    /// The species with its phase.
+    pub species: String,
+    /// Its fraction of the wet gas.
+    pub fraction: f64,
 }
 
 /// The energy along the extent, from one limit to the other.

@@ -44,6 +44,7 @@ pub(super) struct Ground<'a> {
     pub delta_nu_gas: f64,
     pub system: &'a System,
     pub closing: Option<&'a Closing>,
+    pub feed_closing: Option<&'a Closing>,
     /// What became of the mixture as read.
     pub outcome: RestOutcome,
 }
@@ -183,6 +184,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         delta_nu_gas: found.delta_nu_gas,
         system: &system,
         closing: setting.closing.as_ref(),
+        feed_closing: setting.feed.as_ref().map(|feed| &feed.closing),
         outcome: rest.summary.outcome,
     };
     let judgement = judgement(question, &ground, now);

@@ -3,7 +3,10 @@
 use super::participants::Participant;
 use super::question::{self, Question};
 use crate::equilibrium::Hold;
-use crate::mixture::{AmountBasis, Closing, GasMixture, Held, gas_mixture, pure_phases};
+use crate::mixture::{
+    AmountBasis, Basis, Closing, ElementBalance, Feed, GasMixture, GasReading, Held, Water,
+    gas_mixture, pure_phases,
+};
 use crate::problem::{CaseCode, NoteCode, Outcome, Problem, Remark};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::{Phase, Species};
@@ -11,6 +14,10 @@ use crate::reaction::{Phase, Species};
 /// A stated pressure and the one that amounts make in a stated volume are the same within this
 /// share: the digits of a gauge. Common practice, no source.
 const PRESSURE_AGREEMENT: f64 = 0.002;
+
+/// Elements that differ by more than this share between the feed and the gas behind it are said.
+/// Common practice, no source.
+const BALANCE_CLOSES: f64 = 0.03;
 
 /// The state as read.
 #[derive(Debug, Clone)]
@@ -25,6 +32,10 @@ pub(super) struct Setting {
     pub gas_mol: f64,
     /// The fraction of water that was added to a dry analysis.
     pub added_water_fraction: Option<f64>,
+    /// The gas that went in.
+    pub feed: Option<Feed>,
+    /// What the feed says of the gas behind it.
+    pub balance: Option<ElementBalance>,
     /// How the fractions of the gas were closed.
     pub closing: Option<Closing>,
     pub remarks: Vec<Remark>,
@@ -47,9 +58,19 @@ impl Setting {
 /// All problems of the gas and of the pure phases at once, then those of pressure and volume.
 pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -> Outcome<Setting> {
     let mut problems = Vec::new();
+    let feed = match &question.feed {
+        None => None,
+        Some(feed) => match gas_mixture(feed, question.around(), None) {
+            Ok(gas) => Some(feed_of(gas, &participants)),
+            Err(found) => {
+                problems.extend(found.into_iter().map(|problem| in_block(problem, "feed.gas")));
+                None
+            }
+        },
+    };
     let gas = match &question.gas {
         None => None,
-        Some(reading) => match gas_mixture(reading, question.around()) {
+        Some(reading) => match gas_mixture(reading, question.around(), feed.as_ref()) {
             Ok(gas) => Some(gas),
             Err(found) => {
                 problems.extend(found.into_iter().map(|problem| in_block(problem, "reading.gas")));
@@ -67,7 +88,13 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     if !problems.is_empty() {
         return Err(problems);
     }
-    let mut remarks = remarks_of(question, gas.as_ref());
+    if let (Some(reading), None) = (&question.gas, &feed) {
+        problems.extend(lost_for_good(reading, &participants));
+        if !problems.is_empty() {
+            return Err(problems);
+        }
+    }
+    let mut remarks = remarks_of(question, &participants, gas.as_ref());
     let pure: Vec<(&Species, Held)> =
         question.pure.iter().map(|entry| &entry.species).zip(pure).collect();
     let mut held = held_of(&participants, gas.as_ref(), &pure, &mut remarks);
@@ -83,6 +110,8 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
         basis,
         gas_mol: gas.as_ref().map_or(0.0, |gas| gas.total_mol),
         added_water_fraction: gas.as_ref().and_then(|gas| gas.added_water_fraction),
+        feed,
+        balance: gas.as_ref().and_then(|gas| gas.balance.clone()),
         closing: gas.map(|gas| gas.closing),
         remarks,
     };
@@ -92,12 +121,40 @@ pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -
     Ok(setting)
 }
 
+/// The feed; an element of a reacting liquid or solid need not balance in the gas.
+fn feed_of(gas: GasMixture, participants: &[Participant]) -> Feed {
+    let condensed = participants.iter().filter(|participant| participant.phase != Phase::Gas);
+    let open_elements = condensed
+        .flat_map(|participant| participant.species.formula.atoms())
+        .map(|(element, _)| element.symbol)
+        .collect();
+    Feed { amounts_mol: gas.amounts_mol, basis: gas.basis, closing: gas.closing, open_elements }
+}
+
+/// Without a feed nothing tells how much of a lost species there was; where it reacts, Q hangs on it.
+fn lost_for_good(reading: &GasReading, participants: &[Participant]) -> Vec<Problem> {
+    let reacts = |lost: &&Species| {
+        participants.iter().any(|participant| {
+            participant.phase == Phase::Gas && participant.species.same_substance(lost)
+        })
+    };
+    let problem = |lost: &Species| {
+        let problem = Problem::new(CaseCode::LostNeedsFeed);
+        problem.with("species", lost.formula.text()).at("reading.gas.lost")
+    };
+    reading.lost.iter().filter(reacts).map(problem).collect()
+}
+
 /// Puts a block's path before a field that is inside the block, and leaves a whole path as it is.
 fn in_block(problem: Problem, block: &str) -> Problem {
     if problem.field.starts_with(block) { problem } else { problem.at(block) }
 }
 
-fn remarks_of(question: &Question, gas: Option<&GasMixture>) -> Vec<Remark> {
+fn remarks_of(
+    question: &Question,
+    participants: &[Participant],
+    gas: Option<&GasMixture>,
+) -> Vec<Remark> {
     let (Some(gas), Some(reading)) = (gas, &question.gas) else { return Vec::new() };
     let mut remarks = Vec::new();
     let name = |entry: usize| reading.entries[entry].species.formula.text();
@@ -114,18 +171,54 @@ fn remarks_of(question: &Question, gas: Option<&GasMixture>) -> Vec<Remark> {
         Closing::Exact { .. } | Closing::NotNeeded => {}
     }
     match (&reading.basis, gas.added_water_fraction) {
-        (crate::mixture::Basis::Dry(_), None) => {
-            remarks.push(Remark::new(NoteCode::DryTakenAsFree))
-        }
+        (Basis::Dry(Water::None), None) => remarks.push(Remark::new(NoteCode::DryTakenAsFree)),
         (_, Some(fraction)) => {
             remarks.push(Remark::new(NoteCode::WaterAdded).with("per_cent", per_cent(fraction)));
         }
         _ => {}
     }
+    if let Some(balance) = &gas.balance {
+        for (species, fraction) in &balance.restored {
+            let remark = Remark::new(NoteCode::FoundFromFeed);
+            let remark = remark.with("species", species.formula.text());
+            remarks.push(remark.with("per_cent", per_cent(*fraction)));
+        }
+        if balance.closes_within > BALANCE_CLOSES {
+            let remark = Remark::new(NoteCode::FeedDoesNotClose);
+            remarks.push(remark.with("per_cent", format!("{:.1}", 100.0 * balance.closes_within)));
+        }
+    } else {
+        for lost in &reading.lost {
+            let remark = Remark::new(NoteCode::LostNotRestored);
+            remarks.push(remark.with("species", lost.formula.text()));
+        }
+    }
+    remarks.extend(unseen(reading, participants));
     for field in &gas.bounds {
         remarks.push(Remark::new(NoteCode::TakenAtBound).with("field", field.clone()));
     }
     remarks
+}
+
+/// Gases of a reaction that a dry analysis cannot show, because they stay behind when the sample is
+/// cooled. Common practice, no source.
+const STAYS_BEHIND: [&str; 7] = ["SO3", "H2SO4", "S2", "S6", "S8", "HNO3", "NH4Cl"];
+
+fn unseen(reading: &GasReading, participants: &[Participant]) -> Vec<Remark> {
+    if matches!(reading.basis, Basis::Wet) {
+        return Vec::new();
+    }
+    let named = |species: &Species| {
+        let entries = reading.entries.iter().map(|entry| &entry.species);
+        entries.chain(&reading.lost).any(|name| name.same_substance(species))
+    };
+    participants
+        .iter()
+        .filter(|one| one.phase == Phase::Gas && !named(&one.species))
+        .map(|one| one.species.formula.text())
+        .filter(|formula| STAYS_BEHIND.contains(formula))
+        .map(|formula| Remark::new(NoteCode::CondensesInSample).with("species", formula))
+        .collect()
 }
 
 fn held_of(

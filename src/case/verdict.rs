@@ -1,7 +1,7 @@
 //! The verdict and its uncertainty as the report tells them.
 
 use super::answer::reacting;
-use super::inputs::{Place, slot};
+use super::inputs::{Of, Place, slot};
 use super::judgement::{Judgement, Named};
 use super::judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 use super::run::{Findings, ReadingFindings};
@@ -189,7 +189,7 @@ fn better(found: &Findings, judgement: &Judgement) -> Vec<BetterRow> {
     let mut question = found.question.clone();
     let mut rows: Vec<BetterRow> = Vec::new();
     for place in &judgement.bounds {
-        if let Place::Gas(i) = place {
+        if let Place::Gas(Of::Reading, i) = place {
             let entry = question.gas.as_ref().and_then(|gas| gas.entries.get(*i));
             let Some(entry) = entry else { continue };
             let name = entry.species.formula.text().to_owned();

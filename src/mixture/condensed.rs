@@ -1,6 +1,7 @@
 //! Solids and liquids, each its own pure phase, to amounts.
 
-use super::gas::{AmountBasis, no_molar_mass};
+use super::gas::AmountBasis;
+use super::gas_form::no_molar_mass;
 use super::reading::{Entry, Stated};
 use crate::problem::{MixtureCode, Outcome, Problem};
 use crate::quantity::Measure;

@@ -2,7 +2,9 @@
 
 mod closing;
 mod condensed;
+mod element_balance;
 mod gas;
+mod gas_form;
 mod pressure;
 mod reading;
 mod saturation;
@@ -10,6 +12,7 @@ mod water;
 
 pub use closing::Closing;
 pub use condensed::{Held, pure_phases};
+pub use element_balance::{ElementBalance, ElementRow, Feed};
 pub use gas::{AmountBasis, GasMixture, gas_mixture};
 pub use pressure::absolute_pressure_pa;
 pub use reading::{Around, Basis, Entry, GasReading, Stated, Water};

@@ -10,6 +10,8 @@ pub struct Entry {
     pub species: Species,
     /// What is stated.
     pub stated: Stated,
+    /// Another species that the instrument counts with this one.
+    pub includes: Option<Species>,
     /// The path of the entry's value, for problems.
     pub field: String,
 }
@@ -32,6 +34,8 @@ pub enum Stated {
 pub enum Water {
     /// Nothing is stated: the gas is taken as free of water.
     None,
+    /// Found from the feed by the balance of the elements.
+    FromFeed,
     /// The fraction of water in the wet gas.
     Fraction(Quantity),
     /// Water for each unit of dry gas, by amount.
@@ -61,6 +65,8 @@ pub struct GasReading {
     pub basis: Basis,
     /// Its lines.
     pub entries: Vec<Entry>,
+    /// What the sample lost when it was cooled.
+    pub lost: Vec<Species>,
     /// The entry that takes what is missing from one, whatever that is; without it the entry
     /// stated as remainder does, else the largest, if the sum is one within tolerance.
     pub closed_by: Option<usize>,

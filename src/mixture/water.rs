@@ -10,7 +10,7 @@ use crate::problem::{MixtureCode, Problem};
 /// From r per dry gas: y = r/(1 + r). From a dew point: y = p_sat(T_dew)/P.
 pub(super) fn water_fraction(water: &Water, around: Around) -> Result<Option<f64>, Problem> {
     let (fraction, field) = match water {
-        Water::None => return Ok(None),
+        Water::None | Water::FromFeed => return Ok(None),
         Water::Fraction(quantity) => (quantity.value_si, "water.fraction"),
         Water::PerDry(quantity) => {
             let ratio = quantity.value_si;

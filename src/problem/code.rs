@@ -156,6 +156,11 @@ codes! {
         FractionOfPurePhase = "fraction-of-pure-phase",
         NoCommonMeasure = "no-common-measure",
         VacuumTooDeep = "vacuum-too-deep",
+        WaterNeedsFeed = "water-needs-feed",
+        FeedOpen = "feed-open",
+        FeedContradicts = "feed-contradicts",
+        CountedWithUnknown = "counted-with-unknown",
+        CountedMoreThanAll = "counted-more-than-all",
     }
 }
 
@@ -212,6 +217,7 @@ codes! {
         NotARange = "not-a-range",
         KFromOpenReading = "k-from-open-reading",
         KFromNoReading = "k-from-no-reading",
+        LostNeedsFeed = "lost-needs-feed",
     }
 }
 
@@ -240,6 +246,10 @@ codes! {
         FormulaExtended = "formula-extended",
         PointsBend = "points-bend",
         KFromReading = "k-from-reading",
+        FoundFromFeed = "found-from-feed",
+        FeedDoesNotClose = "feed-does-not-close",
+        LostNotRestored = "lost-not-restored",
+        CondensesInSample = "condenses-in-sample",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
         Equilibrium = "equilibrium-is-not-rate",
@@ -287,6 +297,8 @@ codes! {
         KScatter = "k-scatter",
         KFormula = "k-formula",
         Data = "data",
+        Feed = "feed",
+        FeedWater = "feed-water",
     }
 }
 

@@ -105,6 +105,10 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "K is to be taken from the reading, but there is none.",
             "Enter the reading, or take K from the library.",
         ),
+        C::LostNeedsFeed => (
+            "{species} was lost from the sample and takes part in the reaction; without a feed nothing tells how much there was.",
+            "Enter the feed gas, or the measured {species}.",
+        ),
         C::BandNegative => (
             "A band is a width and cannot be negative.",
             "Write it without its sign, such as 10 K.",

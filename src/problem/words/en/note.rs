@@ -78,6 +78,20 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Assumption,
             "K is taken from this reading, which is said to be at equilibrium; the reading therefore judges nothing. Carry this K to other readings.",
         ),
+        C::FoundFromFeed => (
+            Conversion,
+            "By the balance of the elements with the feed, {species} is {per_cent} % of the wet gas.",
+        ),
+        C::FeedDoesNotClose => {
+            (Warning, "The feed and the reading do not agree: an element differs by {per_cent} %.")
+        }
+        C::LostNotRestored => {
+            (Warning, "{species} was lost from the sample; the reading is judged without it.")
+        }
+        C::CondensesInSample => (
+            Warning,
+            "{species} does not pass a cooled sample line, so that a dry analysis does not show it; mark it as lost and enter the feed to have it restored.",
+        ),
         C::NoReading => (
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",

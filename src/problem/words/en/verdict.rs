@@ -13,6 +13,8 @@ pub(in crate::problem::words) fn input(code: InputCode) -> &'static str {
         C::Water => "the water",
         C::DewPoint => "the dew point",
         C::DewPointPressure => "the pressure at the dew point",
+        C::Feed => "{species} in the feed",
+        C::FeedWater => "the water in the feed",
         C::Pure => "the amount of {species}",
         C::K => "the value of K",
         C::KAt => "the temperature of K",
