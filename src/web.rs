@@ -37,6 +37,12 @@ pub fn constant(reaction: &str, temperature: &str) -> JsValue {
     give(&case::constant(reaction, temperature))
 }
 
+/// Turns a number called K into every other form.
+#[wasm_bindgen(unchecked_return_type = "ConvertAnswer")]
+pub fn convert(#[wasm_bindgen(unchecked_param_type = "StatedNumber")] number: JsValue) -> JsValue {
+    give(&case::convert(&tree(number)))
+}
+
 /// Finds species of the library.
 #[wasm_bindgen(unchecked_return_type = "SpeciesAnswer")]
 pub fn species(text: &str) -> JsValue {

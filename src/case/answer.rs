@@ -2,7 +2,8 @@
 
 use super::constant_of::k_report;
 use super::report::{
-    FitPoint, FitReport, ReactionReport, RecordReport, Report, SourceReport, TermReport,
+    FitPoint, FitReport, MissingReport, ReactionReport, RecordReport, Report, SourceReport,
+    TermReport,
 };
 use super::run::Findings;
 use super::{amounts, notes, steps, verdict};
@@ -28,6 +29,12 @@ pub(super) fn report(found: &Findings) -> Report {
         species: reading.map_or_else(Vec::new, |reading| amounts::species(found, reading)),
         rest: reading.map(|reading| amounts::rest(found, reading)),
         conversions: reading.map_or_else(Vec::new, |reading| amounts::conversions(found, reading)),
+        missing: found.missing.as_ref().zip(reading).map(|(missing, reading)| MissingReport {
+            species: missing.species.clone(),
+            value: missing.value,
+            is_fraction: reading.setting.is_by_fraction(),
+            u_value: missing.value * missing.u_ln_value(reading),
+        }),
         balance: reading.and_then(amounts::balance),
         valley: reading.and_then(|reading| amounts::valley(found, reading)),
         steps: steps::steps(found),

@@ -132,12 +132,21 @@ fn places_of_gas(places: &mut Vec<Named>, of: Of, gas: &GasReading) {
 pub(super) fn inputs(question: &mut Question) -> Vec<Input> {
     let mut found = Vec::new();
     for (place, field, name) in places(question) {
+        if closes(question, place) {
+            continue;
+        }
         let u_si = slot(question, place).and_then(|quantity| quantity.standard_uncertainty_si);
         if let Some(u_si) = u_si.filter(|u| *u > 0.0) {
             found.push(Input { place, field, name, u_si });
         }
     }
     found
+}
+
+/// Whether an entry closes the fractions, so that its own value does not count.
+fn closes(question: &mut Question, place: Place) -> bool {
+    let Place::Gas(of, i) = place else { return false };
+    gas(question, of).is_some_and(|gas| gas.closed_by == Some(i))
 }
 
 /// What has neither a tolerance nor a bound, of the numbers of the reading.

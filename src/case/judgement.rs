@@ -13,7 +13,7 @@ use crate::advice::{
 use crate::constant::Constant;
 use crate::equilibrium::{Affinity, State, Workspace, affinity, rest_into};
 use crate::library::Temperature;
-use crate::mixture::{Closing, Stated};
+use crate::mixture::Closing;
 use crate::problem::{InputCode, Remark};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
@@ -120,7 +120,12 @@ pub(super) fn missing_conversion(summary: &crate::equilibrium::Summary) -> Optio
 }
 
 /// Judges a reading with all its tolerances.
-pub(super) fn judgement(question: &Question, ground: &Ground, now: Judged) -> Judgement {
+pub(super) fn judgement(
+    question: &Question,
+    ground: &Ground,
+    now: Judged,
+    is_found_from_k: bool,
+) -> Judgement {
     let mut work = question.clone();
     fix_closing(&mut work, ground);
     let t_star_k = now.approach_k.map(|approach_k| now.temperature_k - approach_k);
@@ -180,7 +185,7 @@ pub(super) fn judgement(question: &Question, ground: &Ground, now: Judged) -> Ju
         Band::Temperature { .. } => approach_interval.map(shifted),
         Band::Conversion { .. } => missing_interval,
     };
-    let of_itself = matches!(question.reaction.source, KSource::Reading(_));
+    let of_itself = is_found_from_k || matches!(question.reaction.source, KSource::Reading(_));
     let verdict = judge(&Evidence {
         affinity: now.affinity,
         affinity_interval,
@@ -220,9 +225,6 @@ fn fix_closing(work: &mut Question, ground: &Ground) {
             Some(Closing::Exact { entry }) => *entry,
             Some(Closing::NotNeeded) | None => None,
         };
-        if let Some(entry) = gas.closed_by.and_then(|entry| gas.entries.get_mut(entry)) {
-            entry.stated = Stated::Remainder;
-        }
     }
 }
 

@@ -8,9 +8,11 @@ mod answer;
 mod bare;
 mod calls;
 mod constant_of;
+mod convert;
 mod inputs;
 mod judgement;
 mod judgement_report;
+mod missing;
 mod node;
 mod notes;
 mod participants;
@@ -32,11 +34,12 @@ pub use calls::{
     Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
     Version, balance, check, constant, species, version,
 };
+pub use convert::{Converted, convert};
 pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
     BalanceReport, Conversion, CurveReport, ElementReport, FitPoint, FitReport, FormReport,
-    KReport, Limit, NoteReport, ReactionReport, RecordReport, Report, RestReport, RestoredReport,
-    SourceReport, SpeciesReport, StepReport, TermReport, ValleyReport,
+    KReport, Limit, MissingReport, NoteReport, ReactionReport, RecordReport, Report, RestReport,
+    RestoredReport, SourceReport, SpeciesReport, StepReport, TermReport, ValleyReport,
 };
 pub use value::Value;

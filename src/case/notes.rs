@@ -1,6 +1,7 @@
 //! Notes beside the report, and the sentence of the verdict.
 
 use super::inputs::without_tolerance;
+use super::missing::Missing;
 use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
@@ -24,6 +25,9 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
     if found.reading.is_none() {
         remarks.push(Remark::new(NoteCode::NoReading));
     }
+    if let (Some(missing), Some(reading)) = (&found.missing, &found.reading) {
+        remarks.extend(missing_remarks(missing, reading));
+    }
     if let Some(reading) = &found.reading {
         remarks.extend(tolerance_remarks(found, reading));
     }
@@ -33,6 +37,23 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
         NoteReport { level: level.as_str(), code: remark.code.as_str(), text }
     };
     remarks.iter().map(say).collect()
+}
+
+fn missing_remarks(missing: &Missing, reading: &ReadingFindings) -> Vec<Remark> {
+    let u_ln = missing.u_ln_value(reading);
+    let value = if reading.setting.is_by_fraction() {
+        format!("{} %", shown::significant(missing.value * 100.0, 5))
+    } else {
+        format!("{} mol", shown::significant(missing.value, 5))
+    };
+    let species = missing.species.as_str();
+    let found = Remark::new(NoteCode::MissingFound).with("species", species).with("value", value);
+    let mut remarks = vec![found.with("u_per_cent", shown::significant(u_ln * 100.0, 2))];
+    if missing.others > 0 {
+        let several = Remark::new(NoteCode::MissingSeveral).with("species", species);
+        remarks.push(several.with("others", missing.others.to_string()));
+    }
+    remarks
 }
 
 /// What is worth knowing of the verdict's uncertainty.

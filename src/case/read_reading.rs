@@ -88,10 +88,7 @@ fn read_water(reader: &mut Reader, node: &Node) -> Option<Water> {
 fn read_gas_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
     match reader.needed_text(node)? {
         "remainder" => Some(Stated::Remainder),
-        "missing" => {
-            reader.not_yet(node, "an entry found from K");
-            None
-        }
+        "missing" => Some(Stated::Missing { value: 0.0 }),
         text => reader.keep(node, quantity::parse(text, &GAS_MEASURES)).map(Stated::Quantity),
     }
 }

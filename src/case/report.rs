@@ -28,6 +28,8 @@ pub struct Report {
     pub rest: Option<RestReport>,
     /// How much of each reactant is converted on the way to rest.
     pub conversions: Vec<Conversion>,
+    /// The entry that was found from K; null where none was missing.
+    pub missing: Option<MissingReport>,
     /// What the feed says of the gas; null without a feed.
     pub balance: Option<BalanceReport>,
     /// G along the reaction; null where it has no drawing.
@@ -255,6 +257,19 @@ pub struct Conversion {
     pub now_to_rest: Option<f64>,
     /// From the feed to rest; null without a feed.
     pub feed_to_rest: Option<f64>,
+}
+
+/// The entry that was found from K.
+#[derive(Debug, Clone, Serialize)]
+pub struct MissingReport {
+    /// The species.
+    pub species: String,
+    /// A fraction of the gas as analysed, or an amount in mol like those of the other lines.
+    pub value: f64,
+    /// Whether the value is a fraction.
+    pub is_fraction: bool,
+    /// Its standard uncertainty.
+    pub u_value: f64,
 }
 
 /// The gas behind a feed, by the balance of the elements.

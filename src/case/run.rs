@@ -2,6 +2,7 @@
 
 use super::constant_of::{constant_of, constant_of_reading, k_temperature};
 use super::judgement::{Judgement, judgement, missing_conversion};
+use super::missing::{Missing, find_missing};
 use super::participants::{Participant, named_in, participants};
 use super::question::{KSource, Question};
 use super::report::Report;
@@ -31,6 +32,8 @@ pub(super) struct Findings {
     pub delta_nu_gas: f64,
     pub constant: Constant,
     pub reading: Option<ReadingFindings>,
+    /// The entry that was found from K.
+    pub missing: Option<Missing>,
     pub remarks: Vec<Remark>,
 }
 
@@ -85,7 +88,7 @@ pub fn check(case: &Value) -> Outcome<Report> {
     Ok(answer::report(&find(question)?))
 }
 
-fn find(question: Question) -> Outcome<Findings> {
+fn find(mut question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
     let from_library = matches!(question.reaction.source, KSource::Library);
     let found = participants(&question.reaction.equation, &reading, from_library);
@@ -94,6 +97,8 @@ fn find(question: Question) -> Outcome<Findings> {
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
+    let ln_k = constant.as_ref().map(|constant| constant.ln_k(k_temperature));
+    let missing = find_missing(&mut question, &found.list, ln_k)?;
     let has_reading = question.gas.is_some() || !question.pure.is_empty();
     let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
     let constant = match constant {
@@ -109,6 +114,7 @@ fn find(question: Question) -> Outcome<Findings> {
         k_temperature,
         delta_nu_gas,
         reading: None,
+        missing,
         remarks: found.remarks,
     };
     if let Some(laid) = laid {
@@ -137,14 +143,14 @@ pub(super) fn delta_nu_gas(participants: &[Participant]) -> f64 {
 }
 
 /// A reading laid on the reaction, before K is asked for.
-struct Laid {
-    setting: Setting,
-    system: System,
-    amounts_mol: Vec<f64>,
-    quotient: Quotient,
+pub(super) struct Laid {
+    pub setting: Setting,
+    pub system: System,
+    pub amounts_mol: Vec<f64>,
+    pub quotient: Quotient,
 }
 
-fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid> {
+pub(super) fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid> {
     let setting = setting(question, reacting.to_vec())?;
     let held = setting.participants.iter().zip(&setting.held);
     let kinds: Vec<Kind> = held.map(|(participant, held)| kind(participant.phase, *held)).collect();
@@ -187,7 +193,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         feed_closing: setting.feed.as_ref().map(|feed| &feed.closing),
         outcome: rest.summary.outcome,
     };
-    let judgement = judgement(question, &ground, now);
+    let judgement = judgement(question, &ground, now, found.missing.is_some());
     Ok(ReadingFindings {
         setting,
         system,

@@ -42,6 +42,11 @@ pub(super) struct Setting {
 }
 
 impl Setting {
+    /// Whether the gas was given in fractions.
+    pub fn is_by_fraction(&self) -> bool {
+        self.basis == AmountBasis::OneMole
+    }
+
     /// Amounts as the engine sees them; an ample phase has a nominal one.
     pub fn amounts_mol(&self) -> Vec<f64> {
         let amount = |held: &Held| match held {
@@ -147,7 +152,11 @@ fn lost_for_good(reading: &GasReading, participants: &[Participant]) -> Vec<Prob
 
 /// Puts a block's path before a field that is inside the block, and leaves a whole path as it is.
 fn in_block(problem: Problem, block: &str) -> Problem {
-    if problem.field.starts_with(block) { problem } else { problem.at(block) }
+    if problem.field.starts_with(block) || problem.field == "feed" {
+        problem
+    } else {
+        problem.at(block)
+    }
 }
 
 fn remarks_of(

@@ -33,12 +33,32 @@ pub enum Closing {
     },
 }
 
-/// Brings fractions to a sum of one, in place: by the entry stated as remainder, or by the largest
+/// Brings fractions to a sum of one, in place; a species found from K is laid on top where nothing is
+/// stated as the remainder. The others are closed
+/// by the entry stated as remainder, or by the largest
 /// where the sum is one within the tolerances (their half-widths added up, at least 0.3 %).
 ///
 /// # Errors
 /// A sum above one beside a remainder, or a sum that is not one within tolerance.
 pub(super) fn close(
+    entries: &[Entry],
+    closed_by: Option<usize>,
+    fractions: &mut [f64],
+) -> Outcome<Closing> {
+    let missing = entries.iter().position(|e| matches!(e.stated, Stated::Missing { .. }));
+    let has_remainder = entries.iter().any(|e| matches!(e.stated, Stated::Remainder));
+    if let Some(missing) = missing.filter(|_| !has_remainder) {
+        // The others are an analysis of the gas without the missing species.
+        let value = std::mem::take(&mut fractions[missing]);
+        let closing = close_all(entries, closed_by, fractions)?;
+        fractions.iter_mut().for_each(|fraction| *fraction *= 1.0 - value);
+        fractions[missing] = value;
+        return Ok(closing);
+    }
+    close_all(entries, closed_by, fractions)
+}
+
+fn close_all(
     entries: &[Entry],
     closed_by: Option<usize>,
     fractions: &mut [f64],

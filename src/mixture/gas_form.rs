@@ -13,6 +13,14 @@ pub(super) enum Form {
     Amount,
     Flow,
     Remainder,
+    Missing,
+}
+
+impl Form {
+    /// Whether it is neither the remainder nor found from K.
+    fn is_measured(self) -> bool {
+        !matches!(self, Form::Remainder | Form::Missing)
+    }
 }
 
 pub(super) fn form_of(
@@ -23,6 +31,7 @@ pub(super) fn form_of(
     let quantity = match &entry.stated {
         Stated::Quantity(quantity) => quantity,
         Stated::Remainder => return Ok((Form::Remainder, 0.0)),
+        Stated::Missing { value } => return Ok((Form::Missing, *value)),
         Stated::Present | Stated::Absent => return Err(Problem::new(MixtureCode::PresenceInGas)),
     };
     match quantity.measure {
@@ -81,18 +90,20 @@ pub(super) fn refuse_repeats(
     for entry in remainders.skip(1) {
         problems.push(Problem::new(MixtureCode::SecondRemainder).at(&entry.field));
     }
+    let missing = entries.iter().filter(|entry| matches!(entry.stated, Stated::Missing { .. }));
+    for entry in missing.skip(1) {
+        problems.push(Problem::new(MixtureCode::SecondMissing).at(&entry.field));
+    }
 }
 
 /// The basis all entries share; the first that does not go with the others is the problem.
 pub(super) fn common_basis(entries: &[Entry], stated: &[(Form, f64)]) -> Outcome<AmountBasis> {
-    let first = stated.iter().map(|(form, _)| *form).find(|form| *form != Form::Remainder);
+    let first = stated.iter().map(|(form, _)| *form).find(|form| form.is_measured());
     let mut problems = Vec::new();
     for (entry, (form, _)) in entries.iter().zip(stated) {
         let code = match (first, form) {
             (Some(Form::Amount | Form::Flow), Form::Remainder) => MixtureCode::RemainderOfAmounts,
-            (Some(first), form) if first != *form && *form != Form::Remainder => {
-                MixtureCode::MixedForms
-            }
+            (Some(first), form) if first != *form && form.is_measured() => MixtureCode::MixedForms,
             _ => continue,
         };
         problems.push(Problem::new(code).at(&entry.field));

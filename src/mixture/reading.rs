@@ -23,6 +23,12 @@ pub enum Stated {
     Quantity(Quantity),
     /// What is missing from one.
     Remainder,
+    /// Found from K and the others: a fraction of the gas as analysed, or an amount like those of the
+    /// other lines.
+    Missing {
+        /// The value that is tried.
+        value: f64,
+    },
     /// A pure phase that is there, in ample amount.
     Present,
     /// A pure phase that is not there.

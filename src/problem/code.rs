@@ -161,6 +161,7 @@ codes! {
         FeedContradicts = "feed-contradicts",
         CountedWithUnknown = "counted-with-unknown",
         CountedMoreThanAll = "counted-more-than-all",
+        SecondMissing = "second-missing",
     }
 }
 
@@ -218,6 +219,9 @@ codes! {
         KFromOpenReading = "k-from-open-reading",
         KFromNoReading = "k-from-no-reading",
         LostNeedsFeed = "lost-needs-feed",
+        MissingTakesNoPart = "missing-takes-no-part",
+        MissingWithoutK = "missing-without-k",
+        MissingNotFound = "missing-not-found",
     }
 }
 
@@ -250,6 +254,8 @@ codes! {
         FeedDoesNotClose = "feed-does-not-close",
         LostNotRestored = "lost-not-restored",
         CondensesInSample = "condenses-in-sample",
+        MissingFound = "missing-found",
+        MissingSeveral = "missing-several",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
         Equilibrium = "equilibrium-is-not-rate",

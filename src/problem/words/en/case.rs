@@ -109,6 +109,18 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "{species} was lost from the sample and takes part in the reaction; without a feed nothing tells how much there was.",
             "Enter the feed gas, or the measured {species}.",
         ),
+        C::MissingTakesNoPart => (
+            "{species} takes no part in the reaction, so K does not tell how much there is.",
+            "Enter its value, or make it the remainder.",
+        ),
+        C::MissingWithoutK => (
+            "{species} is to be found from K, but K is to be taken from this reading.",
+            "Take K from elsewhere, or enter the value of {species}.",
+        ),
+        C::MissingNotFound => (
+            "No amount of {species} brings this reading to equilibrium.",
+            "Check the other lines, the temperature and the pressure.",
+        ),
         C::BandNegative => (
             "A band is a width and cannot be negative.",
             "Write it without its sign, such as 10 K.",

@@ -84,6 +84,9 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "The gauge reading is below zero by more than the atmosphere; nothing would be left.",
             "Check the reading and the atmosphere, or write an absolute pressure with (a).",
         ),
+        C::SecondMissing => {
+            ("Only one line can be found from K.", "Enter a value here, or in the other line.")
+        }
         C::WaterNeedsFeed => (
             "The water is to be found from the feed, but no feed is given.",
             "Enter the feed, or state the water here.",

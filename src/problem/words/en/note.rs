@@ -92,6 +92,13 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Warning,
             "{species} does not pass a cooled sample line, so that a dry analysis does not show it; mark it as lost and enter the feed to have it restored.",
         ),
+        C::MissingFound => (
+            Assumption,
+            "{species} is found from K as if the reading were at equilibrium: {value}, with a standard uncertainty of {u_per_cent} % of it. The reading therefore judges nothing.",
+        ),
+        C::MissingSeveral => {
+            (Warning, "{others} more amounts of {species} would do as well; this is the smallest.")
+        }
         C::NoReading => (
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",
