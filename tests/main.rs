@@ -29,3 +29,4 @@ mod rational;
 mod rest;
 mod rooms;
 mod saturation;
+mod tolerance;

@@ -81,8 +81,9 @@ pub struct Budget {
     pub is_linear: bool,
 }
 
-/// The bends may add this much to the variance before a figure counts as not linear: 5 % in u.
-const BEND_SHARE: f64 = 0.1;
+/// The bends may be this share of the variance before a figure counts as not linear. For ln x, the
+/// usual case, they are ½ (u/x)² of it, and u itself is then wrong by 5 % (100,000 draws).
+const BEND_SHARE: f64 = 0.02;
 
 /// Adds up what the inputs do to a figure; none if the figure is not finite, or if an input can be
 /// moved neither way.
