@@ -64,6 +64,7 @@ pub(super) fn species(found: &Findings, reading: &ReadingFindings) -> Vec<Specie
         gas_mol: gas_total(kinds, amounts_mol),
         ln_pressure: pressure_pa.map_or(0.0, |p| libm::log(p / STANDARD_PRESSURE_PA)),
     };
+    let extent_mol = reading.rest.summary.extent_mol;
     let now = shares(&reading.amounts_mol, reading.setting.pressure_pa);
     let then = shares(&reading.rest.amounts_mol, rest_pressure_pa(found, reading));
     found
@@ -73,6 +74,7 @@ pub(super) fn species(found: &Findings, reading: &ReadingFindings) -> Vec<Specie
         .map(|(i, participant)| {
             let (now_mol, rest_mol) = (reading.amounts_mol[i], reading.rest.amounts_mol[i]);
             let known = reading.setting.held[i] != Held::Ample;
+            let ends = known && reading.has_rest();
             let now_fraction = now.fraction(i, now_mol);
             let ln_now = (now_mol > 0.0).then(|| libm::log(now_mol));
             let rest_ln_mol = reading.rest.ln_amounts[i];
@@ -82,18 +84,18 @@ pub(super) fn species(found: &Findings, reading: &ReadingFindings) -> Vec<Specie
                 phase: participant.phase.symbol(),
                 nu: participant.nu,
                 now_mol: known.then_some(now_mol),
-                rest_mol: known.then_some(rest_mol),
-                rest_ln_mol: rest_ln_mol.filter(|_| known),
-                change_mol: Some(participant.nu * reading.rest.summary.extent_mol),
+                rest_mol: ends.then_some(rest_mol),
+                rest_ln_mol: rest_ln_mol.filter(|_| ends),
+                change_mol: reading.has_rest().then_some(participant.nu * extent_mol),
                 now_fraction,
-                rest_fraction: then.fraction(i, rest_mol),
+                rest_fraction: then.fraction(i, rest_mol).filter(|_| reading.has_rest()),
                 now_ln_activity: now.ln_activity(i, ln_now),
-                rest_ln_activity: then.ln_activity(i, rest_ln_mol),
+                rest_ln_activity: then.ln_activity(i, rest_ln_mol).filter(|_| reading.has_rest()),
                 activity_coefficient: 1.0,
                 partial_pressure_pa: (participant.phase == Phase::Gas)
                     .then(|| Some(now_fraction? * pressure_pa?))
                     .flatten(),
-                exhausted: known && rest_ln_mol.is_none(),
+                exhausted: ends && rest_ln_mol.is_none(),
             }
         })
         .collect()
@@ -126,8 +128,10 @@ pub(super) fn conversions(found: &Findings, reading: &ReadingFindings) -> Vec<Co
             Conversion {
                 species: participant.species.text(),
                 feed_to_now: fed.map(|fed| 1.0 - now.unwrap_or(0.0) / fed),
-                now_to_rest: now.map(|now| used / now),
-                feed_to_rest: fed.map(|fed| 1.0 - (now.unwrap_or(0.0) - used) / fed),
+                now_to_rest: now.filter(|_| reading.has_rest()).map(|now| used / now),
+                feed_to_rest: fed
+                    .filter(|_| reading.has_rest())
+                    .map(|fed| 1.0 - (now.unwrap_or(0.0) - used) / fed),
             }
         })
         .collect()

@@ -8,7 +8,7 @@ use super::report::{
 use super::run::Findings;
 use super::{amounts, notes, steps, verdict};
 use crate::constant::Constant;
-use crate::equilibrium::{Affinity, Quotient};
+use crate::equilibrium::{Affinity, Quotient, RestOutcome};
 use crate::mixture::AmountBasis;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
@@ -79,7 +79,9 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         approach_k: approach.map(|approach| approach.approach_k),
         shortfall_k: approach.map(|approach| approach.shortfall_k),
         approach_note: reading.and_then(notes::approach_note),
-        extent_mol: rest.map(|rest| rest.extent_mol),
+        extent_mol: rest
+            .filter(|rest| rest.outcome != RestOutcome::HasNoLimit)
+            .map(|rest| rest.extent_mol),
         extent_min_mol: rest.and_then(|rest| rest.extent_min_mol),
         extent_max_mol: rest.and_then(|rest| rest.extent_max_mol),
         source: source(found),

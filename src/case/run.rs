@@ -73,6 +73,11 @@ pub(super) struct ReadingFindings {
 }
 
 impl ReadingFindings {
+    /// Whether the reaction comes to rest anywhere.
+    pub fn has_rest(&self) -> bool {
+        self.rest.summary.outcome != RestOutcome::HasNoLimit
+    }
+
     /// The state as read, or with other amounts.
     pub fn state<'a>(&self, temperature_k: f64, amounts_mol: &'a [f64]) -> State<'a> {
         State { temperature_k, hold: self.setting.hold, amounts_mol }
