@@ -1,7 +1,7 @@
 //! The amounts of the report: each species now and at rest, conversions, and the valley.
 
 use super::participants::Participant;
-use super::report::{
+use super::report_amounts::{
     BalanceReport, Conversion, ElementReport, Limit, RestReport, RestoredReport, SpeciesReport,
     ValleyReport,
 };

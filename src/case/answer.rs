@@ -2,9 +2,9 @@
 
 use super::constant_of::k_report;
 use super::report::{
-    FitPoint, FitReport, MissingReport, ReactionReport, RecordReport, Report, SourceReport,
-    TermReport,
+    FitPoint, FitReport, ReactionReport, RecordReport, Report, SourceReport, TermReport,
 };
+use super::report_amounts::MissingReport;
 use super::run::Findings;
 use super::{amounts, notes, steps, verdict};
 use crate::constant::Constant;

@@ -5,6 +5,7 @@
 
 mod amounts;
 mod answer;
+mod asker;
 mod bare;
 mod calls;
 mod constant_of;
@@ -20,8 +21,10 @@ mod question;
 mod read;
 mod read_constant;
 mod read_reading;
+mod reading_remarks;
 mod refusal;
 mod report;
+mod report_amounts;
 mod run;
 mod setting;
 mod shown;
@@ -38,8 +41,11 @@ pub use convert::{Converted, convert};
 pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
-    BalanceReport, Conversion, CurveReport, ElementReport, FitPoint, FitReport, FormReport,
-    KReport, Limit, MissingReport, NoteReport, ReactionReport, RecordReport, Report, RestReport,
-    RestoredReport, SourceReport, SpeciesReport, StepReport, TermReport, ValleyReport,
+    FitPoint, FitReport, FormReport, KReport, NoteReport, ReactionReport, RecordReport, Report,
+    SourceReport, StepReport, TermReport,
+};
+pub use report_amounts::{
+    BalanceReport, Conversion, CurveReport, ElementReport, Limit, MissingReport, RestReport,
+    RestoredReport, SpeciesReport, ValleyReport,
 };
 pub use value::Value;

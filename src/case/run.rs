@@ -1,7 +1,8 @@
 //! The run from a case to its report: each room is asked once, in the order of the rooms.
 
+use super::asker::missing_conversion;
 use super::constant_of::{constant_of, constant_of_reading, k_temperature};
-use super::judgement::{Judgement, judgement, missing_conversion};
+use super::judgement::{Judgement, judgement};
 use super::missing::{Missing, find_missing};
 use super::participants::{Participant, named_in, participants};
 use super::question::{KSource, Question};

@@ -2,10 +2,10 @@
 
 use super::participants::Participant;
 use super::question::{self, Question};
+use super::reading_remarks::{lost_for_good, remarks_of};
 use crate::equilibrium::Hold;
 use crate::mixture::{
-    AmountBasis, Basis, Closing, ElementBalance, Feed, GasMixture, GasReading, Held, Water,
-    gas_mixture, pure_phases,
+    AmountBasis, Closing, ElementBalance, Feed, GasMixture, Held, gas_mixture, pure_phases,
 };
 use crate::problem::{CaseCode, NoteCode, Outcome, Problem, Remark};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
@@ -14,10 +14,6 @@ use crate::reaction::{Phase, Species};
 /// A stated pressure and the one that amounts make in a stated volume are the same within this
 /// share: the digits of a gauge. Common practice, no source.
 const PRESSURE_AGREEMENT: f64 = 0.002;
-
-/// Elements that differ by more than this share between the feed and the gas behind it are said.
-/// Common practice, no source.
-const BALANCE_CLOSES: f64 = 0.03;
 
 /// The state as read.
 #[derive(Debug, Clone)]
@@ -136,20 +132,6 @@ fn feed_of(gas: GasMixture, participants: &[Participant]) -> Feed {
     Feed { amounts_mol: gas.amounts_mol, basis: gas.basis, closing: gas.closing, open_elements }
 }
 
-/// Without a feed nothing tells how much of a lost species there was; where it reacts, Q hangs on it.
-fn lost_for_good(reading: &GasReading, participants: &[Participant]) -> Vec<Problem> {
-    let reacts = |lost: &&Species| {
-        participants.iter().any(|participant| {
-            participant.phase == Phase::Gas && participant.species.same_substance(lost)
-        })
-    };
-    let problem = |lost: &Species| {
-        let problem = Problem::new(CaseCode::LostNeedsFeed);
-        problem.with("species", lost.formula.text()).at("reading.gas.lost")
-    };
-    reading.lost.iter().filter(reacts).map(problem).collect()
-}
-
 /// Puts a block's path before a field that is inside the block, and leaves a whole path as it is.
 fn in_block(problem: Problem, block: &str) -> Problem {
     if problem.field.starts_with(block) || problem.field == "feed" {
@@ -157,77 +139,6 @@ fn in_block(problem: Problem, block: &str) -> Problem {
     } else {
         problem.at(block)
     }
-}
-
-fn remarks_of(
-    question: &Question,
-    participants: &[Participant],
-    gas: Option<&GasMixture>,
-) -> Vec<Remark> {
-    let (Some(gas), Some(reading)) = (gas, &question.gas) else { return Vec::new() };
-    let mut remarks = Vec::new();
-    let name = |entry: usize| reading.entries[entry].species.formula.text();
-    let per_cent = |fraction: f64| format!("{:.3}", fraction * 100.0);
-    match &gas.closing {
-        Closing::ByRemainder { entry, fraction } => {
-            let remark = Remark::new(NoteCode::ClosedByRemainder).with("species", name(*entry));
-            remarks.push(remark.with("per_cent", per_cent(*fraction)));
-        }
-        Closing::ByLargest { entry, difference } => {
-            let remark = Remark::new(NoteCode::ClosedByLargest).with("species", name(*entry));
-            remarks.push(remark.with("per_cent", per_cent(*difference)));
-        }
-        Closing::Exact { .. } | Closing::NotNeeded => {}
-    }
-    match (&reading.basis, gas.added_water_fraction) {
-        (Basis::Dry(Water::None), None) => remarks.push(Remark::new(NoteCode::DryTakenAsFree)),
-        (_, Some(fraction)) => {
-            remarks.push(Remark::new(NoteCode::WaterAdded).with("per_cent", per_cent(fraction)));
-        }
-        _ => {}
-    }
-    if let Some(balance) = &gas.balance {
-        for (species, fraction) in &balance.restored {
-            let remark = Remark::new(NoteCode::FoundFromFeed);
-            let remark = remark.with("species", species.formula.text());
-            remarks.push(remark.with("per_cent", per_cent(*fraction)));
-        }
-        if balance.closes_within > BALANCE_CLOSES {
-            let remark = Remark::new(NoteCode::FeedDoesNotClose);
-            remarks.push(remark.with("per_cent", format!("{:.1}", 100.0 * balance.closes_within)));
-        }
-    } else {
-        for lost in &reading.lost {
-            let remark = Remark::new(NoteCode::LostNotRestored);
-            remarks.push(remark.with("species", lost.formula.text()));
-        }
-    }
-    remarks.extend(unseen(reading, participants));
-    for field in &gas.bounds {
-        remarks.push(Remark::new(NoteCode::TakenAtBound).with("field", field.clone()));
-    }
-    remarks
-}
-
-/// Gases of a reaction that a dry analysis cannot show, because they stay behind when the sample is
-/// cooled. Common practice, no source.
-const STAYS_BEHIND: [&str; 7] = ["SO3", "H2SO4", "S2", "S6", "S8", "HNO3", "NH4Cl"];
-
-fn unseen(reading: &GasReading, participants: &[Participant]) -> Vec<Remark> {
-    if matches!(reading.basis, Basis::Wet) {
-        return Vec::new();
-    }
-    let named = |species: &Species| {
-        let entries = reading.entries.iter().map(|entry| &entry.species);
-        entries.chain(&reading.lost).any(|name| name.same_substance(species))
-    };
-    participants
-        .iter()
-        .filter(|one| one.phase == Phase::Gas && !named(&one.species))
-        .map(|one| one.species.formula.text())
-        .filter(|formula| STAYS_BEHIND.contains(formula))
-        .map(|formula| Remark::new(NoteCode::CondensesInSample).with("species", formula))
-        .collect()
 }
 
 fn held_of(
