@@ -165,6 +165,12 @@ codes! {
         CountedWithUnknown = "counted-with-unknown",
         CountedMoreThanAll = "counted-more-than-all",
         SecondMissing = "second-missing",
+        PresenceInMixture = "presence-in-mixture",
+        FractionOfWhat = "fraction-of-what",
+        VolumeAndWater = "volume-and-water",
+        NoLiquidWater = "no-liquid-water",
+        RemainderOfSolution = "remainder-of-solution",
+        PhOfAnother = "ph-of-another",
     }
 }
 

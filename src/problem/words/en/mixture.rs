@@ -87,6 +87,29 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
         C::SecondMissing => {
             ("Only one line can be found from K.", "Enter a value here, or in the other line.")
         }
+        C::PresenceInMixture => (
+            "Present and absent are words for solids; this species is dissolved or mixed.",
+            "Write how much of it there is.",
+        ),
+        C::FractionOfWhat => (
+            "In a liquid a per cent says nothing without its kind: by amount or by mass.",
+            "Write mol % or wt %.",
+        ),
+        C::VolumeAndWater => {
+            ("The solution is stated by its volume and by its water as well.", "Keep one of them.")
+        }
+        C::NoLiquidWater => (
+            "At this temperature there is no liquid water for a solution; 0 °C to 374 °C is allowed.",
+            "Check the temperature.",
+        ),
+        C::RemainderOfSolution => (
+            "A solution has no remainder: what is left is water.",
+            "Write a value, or missing to find it from K.",
+        ),
+        C::PhOfAnother => (
+            "A pH tells the activity of H+, not that of another species.",
+            "Put it in a line of H+.",
+        ),
         C::WaterNeedsFeed => (
             "The water is to be found from the feed, but no feed is given.",
             "Enter the feed, or state the water here.",
