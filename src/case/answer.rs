@@ -6,10 +6,10 @@ use super::report::{
 };
 use super::report_amounts::MissingReport;
 use super::run::Findings;
+use super::setting::Basis;
 use super::{amounts, notes, steps, verdict};
 use crate::constant::Constant;
 use crate::equilibrium::{Affinity, Quotient, RestOutcome};
-use crate::mixture::AmountBasis;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// Writes the report.
@@ -24,7 +24,7 @@ pub(super) fn report(found: &Findings) -> Report {
         volume_m3: reading.and_then(|reading| reading.setting.volume_m3),
         ionic_strength_mol_per_kg: None,
         reactions: vec![reaction(found, pressure_pa)],
-        basis_mol: reading.map_or(0.0, |reading| reading.setting.gas_mol),
+        basis_mol: reading.map_or(0.0, |reading| reading.setting.basis_mol()),
         basis: reading.map_or("none", |reading| basis_name(reading.setting.basis)),
         species: reading.map_or_else(Vec::new, |reading| amounts::species(found, reading)),
         rest: reading.map(|reading| amounts::rest(found, reading)),
@@ -42,11 +42,14 @@ pub(super) fn report(found: &Findings) -> Report {
     }
 }
 
-pub(super) fn basis_name(basis: AmountBasis) -> &'static str {
+pub(super) fn basis_name(basis: Basis) -> &'static str {
     match basis {
-        AmountBasis::OneMole => "one mole of wet gas",
-        AmountBasis::Amounts => "the amounts given",
-        AmountBasis::Flows => "the flow of one second",
+        Basis::OneMoleOfGas => "one mole of wet gas",
+        Basis::OneMoleOfLiquid => "one mole of liquid",
+        Basis::Amounts => "the amounts given",
+        Basis::Flows => "the flow of one second",
+        Basis::OneKilogramOfWater => "one kilogram of water",
+        Basis::Solution => "the solution given",
     }
 }
 

@@ -15,6 +15,10 @@ pub(super) enum Place {
     Gas(Of, usize),
     Water(Of),
     WaterPressure(Of),
+    Liquid(usize),
+    Solution(usize),
+    SolutionVolume,
+    SolutionWater,
     Pure(usize),
     K(Part),
     Point(usize, Part),
@@ -69,6 +73,20 @@ fn places(question: &Question) -> Vec<Named> {
         if let Some(gas) = gas {
             places_of_gas(&mut places, of, gas);
         }
+    }
+    for (i, entry) in question.liquid.iter().flat_map(|liquid| &liquid.entries).enumerate() {
+        let (field, name) = named(InputCode::Liquid, entry);
+        places.push((Place::Liquid(i), field, name));
+    }
+    if let Some(solution) = &question.solution {
+        for (i, entry) in solution.entries.iter().enumerate() {
+            let (field, name) = named(InputCode::Solution, entry);
+            places.push((Place::Solution(i), field, name));
+        }
+        let volume = field("reading.solution.volume");
+        places.push((Place::SolutionVolume, volume, plain(InputCode::SolutionVolume)));
+        let water = field("reading.solution.water");
+        places.push((Place::SolutionWater, water, plain(InputCode::SolutionWater)));
     }
     for (i, entry) in question.pure.iter().enumerate() {
         let (field, name) = named(InputCode::Pure, entry);
@@ -145,8 +163,13 @@ pub(super) fn inputs(question: &mut Question) -> Vec<Input> {
 
 /// Whether an entry closes the fractions, so that its own value does not count.
 fn closes(question: &mut Question, place: Place) -> bool {
-    let Place::Gas(of, i) = place else { return false };
-    gas(question, of).is_some_and(|gas| gas.closed_by == Some(i))
+    match place {
+        Place::Gas(of, i) => gas(question, of).is_some_and(|gas| gas.closed_by == Some(i)),
+        Place::Liquid(i) => {
+            question.liquid.as_ref().is_some_and(|liquid| liquid.closed_by == Some(i))
+        }
+        _ => false,
+    }
 }
 
 /// What has neither a tolerance nor a bound, of the numbers of the reading.
@@ -182,6 +205,10 @@ pub(super) fn slot(question: &mut Question, place: Place) -> Option<&mut Quantit
         Place::Volume => question.volume.as_mut(),
         Place::Gas(of, i) => stated(gas(question, of)?.entries.get_mut(i)?),
         Place::Pure(i) => stated(question.pure.get_mut(i)?),
+        Place::Liquid(i) => stated(question.liquid.as_mut()?.entries.get_mut(i)?),
+        Place::Solution(i) => stated(question.solution.as_mut()?.entries.get_mut(i)?),
+        Place::SolutionVolume => question.solution.as_mut()?.volume.as_mut(),
+        Place::SolutionWater => question.solution.as_mut()?.water.as_mut(),
         Place::Water(of) | Place::WaterPressure(of) => water(gas(question, of)?, place),
         Place::K(part) => match &mut question.reaction.source {
             KSource::Value(stated) => part_of(stated, part),

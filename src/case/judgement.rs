@@ -142,16 +142,20 @@ pub(super) fn judgement(
 
 /// The entry that closes the fractions stays the same while the others are moved.
 fn fix_closing(work: &mut Question, ground: &Ground) {
-    let gases = [(&mut work.gas, ground.closing), (&mut work.feed, ground.feed_closing)];
-    for (gas, closing) in gases {
-        let Some(gas) = gas else { continue };
-        gas.closed_by = match closing {
-            Some(Closing::ByRemainder { entry, .. } | Closing::ByLargest { entry, .. }) => {
-                Some(*entry)
-            }
-            Some(Closing::Exact { entry }) => *entry,
-            Some(Closing::NotNeeded) | None => None,
-        };
+    let entry = |closing: Option<&Closing>| match closing {
+        Some(Closing::ByRemainder { entry, .. } | Closing::ByLargest { entry, .. }) => Some(*entry),
+        Some(Closing::Exact { entry }) => *entry,
+        Some(Closing::NotNeeded) | None => None,
+    };
+    let setting = ground.setting;
+    if let Some(gas) = &mut work.gas {
+        gas.closed_by = entry(setting.closing.as_ref());
+    }
+    if let Some(feed) = &mut work.feed {
+        feed.closed_by = entry(setting.feed.as_ref().map(|feed| &feed.closing));
+    }
+    if let Some(liquid) = &mut work.liquid {
+        liquid.closed_by = entry(setting.liquid_closing.as_ref());
     }
 }
 

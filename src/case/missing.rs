@@ -33,7 +33,9 @@ impl Missing {
 /// The entry that is missing, where there is one.
 fn entry(question: &mut Question) -> Option<&mut Entry> {
     let gas = question.gas.iter_mut().flat_map(|gas| &mut gas.entries);
-    gas.chain(&mut question.pure).find(|entry| matches!(entry.stated, Stated::Missing { .. }))
+    let liquid = question.liquid.iter_mut().flat_map(|liquid| &mut liquid.entries);
+    let solution = question.solution.iter_mut().flat_map(|solution| &mut solution.entries);
+    gas.chain(liquid).chain(solution).find(|entry| matches!(entry.stated, Stated::Missing { .. }))
 }
 
 /// The smallest value looked for, as a share of the largest: 1e-30.

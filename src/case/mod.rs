@@ -7,6 +7,7 @@ mod amounts;
 mod answer;
 mod asker;
 mod bare;
+mod blocks;
 mod calls;
 mod constant_of;
 mod convert;

@@ -27,9 +27,11 @@ pub(super) struct Participants {
 
 /// Which species a reading names in which phase; empty where there is no reading.
 pub(super) fn named_in(question: &Question) -> Vec<Species> {
-    let gas = question.gas.iter().flat_map(|gas| &gas.entries).map(|entry| &entry.species);
-    let pure = question.pure.iter().map(|entry| &entry.species);
-    gas.chain(pure).cloned().collect()
+    let gas = question.gas.iter().flat_map(|gas| &gas.entries);
+    let liquid = question.liquid.iter().flat_map(|liquid| &liquid.entries);
+    let solution = question.solution.iter().flat_map(|solution| &solution.entries);
+    let all = gas.chain(liquid).chain(solution).chain(&question.pure);
+    all.map(|entry| entry.species.clone()).collect()
 }
 
 /// Gives every species of the equation its phase and, if `from_library`, its record.

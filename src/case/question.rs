@@ -2,7 +2,9 @@
 
 use crate::advice::Band;
 use crate::constant::FormulaTerm;
-use crate::mixture::{Around, Entry, GasReading, absolute_pressure_pa};
+use crate::mixture::{
+    Around, Entry, GasReading, SolutionModel, SolutionReading, absolute_pressure_pa,
+};
 use crate::quantity::{Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::Equation;
 
@@ -90,11 +92,33 @@ pub(super) struct Question {
     pub gas: Option<GasReading>,
     /// The gas that went in.
     pub feed: Option<GasReading>,
+    /// A liquid of several components.
+    pub liquid: Option<LiquidReading>,
+    /// A solution in water.
+    pub solution: Option<SolutionReading>,
+    /// How activities in the solution are found.
+    pub solution_model: SolutionModel,
     /// The solids and the liquid, each its own phase.
     pub pure: Vec<Entry>,
 }
 
+/// A liquid mixture as read.
+#[derive(Debug, Clone)]
+pub(super) struct LiquidReading {
+    pub entries: Vec<Entry>,
+    /// The entry that takes what is missing from one, once that is known.
+    pub closed_by: Option<usize>,
+}
+
 impl Question {
+    /// Whether anything is read.
+    pub fn has_reading(&self) -> bool {
+        self.gas.is_some()
+            || self.liquid.is_some()
+            || self.solution.is_some()
+            || !self.pure.is_empty()
+    }
+
     /// The atmosphere: as stated, else the standard one.
     pub fn atmosphere_pa(&self) -> f64 {
         self.atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |atmosphere| atmosphere.value_si)

@@ -1,12 +1,12 @@
 //! The case, walked by hand: every mistake in it is found in one go.
 
 use super::node::{Node, Reader};
-use super::question::{Held, KSource, Question, ReactionQuestion};
+use super::question::{Held, KSource, LiquidReading, Question, ReactionQuestion};
 use super::read_constant::{read_formula, read_points, read_stated};
-use super::read_reading::{read_gas, read_pure};
+use super::read_reading::{read_gas, read_liquid, read_pure, read_solution};
 use super::value::Value;
 use crate::advice::Band;
-use crate::mixture::{Entry, GasReading, absolute_pressure_pa};
+use crate::mixture::{Entry, GasReading, SolutionModel, SolutionReading, absolute_pressure_pa};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::{Measure, PressureReference, Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::{Balanced, Phase, balance};
@@ -45,7 +45,7 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     for name in ["title", "note"] {
         reader.text(&root.field(name));
     }
-    refuse_what_is_not_done(&mut reader, &root);
+    let solution_model = read_models(&mut reader, &root).unwrap_or_default();
     let reaction = read_reaction(&mut reader, &root.field("reactions"));
     let temperature = reader.needed_quantity(&root.field("temperature"), &[Measure::Temperature]);
     let atmosphere = read_atmosphere(&mut reader, &root.field("atmosphere"));
@@ -60,7 +60,7 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     let hold = reader.choice(&root.field("hold"), &words);
     let volume = reader.quantity(&root.field("volume"), &[Measure::Volume]);
     let reading = root.field("reading");
-    let (gas, pure) = read_blocks(&mut reader, &reading);
+    let Reading { gas, liquid, solution, pure } = read_blocks(&mut reader, &reading);
     let feed = read_feed(&mut reader, &root.field("feed"));
     let band = read_band(&mut reader, &root.field("band"));
     let (Some(reaction), Some(temperature), Some(hold)) = (reaction, temperature, hold) else {
@@ -79,6 +79,9 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
         band,
         gas,
         feed,
+        liquid,
+        solution,
+        solution_model,
         pure,
     })
 }
@@ -93,27 +96,29 @@ fn read_format(reader: &mut Reader, node: &Node) {
     }
 }
 
-/// What the format has and this version does not do yet: each is refused, none is ignored.
-fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
+/// The models; what the format has and this version does not do yet is refused, none is ignored.
+fn read_models(reader: &mut Reader, root: &Node) -> Option<SolutionModel> {
     let heat = root.field("heat");
     let words = [("isothermal", false), ("adiabatic", true)];
     if reader.choice(&heat, &words) == Some(true) {
         reader.not_yet(&heat, "an adiabatic rest");
     }
     let models = root.field("models");
-    if reader.object(&models, &["gas", "liquid", "solution"]) {
-        let gas = models.field("gas");
-        let words = [("ideal", false), ("SRK", true), ("PR", true)];
-        if reader.choice(&gas, &words) == Some(true) {
-            reader.not_yet(&gas, "a real gas");
-        }
-        reader.choice(&models.field("liquid"), &[("ideal", ())]);
-        let solution = models.field("solution");
-        let words = [("ideal", false), ("Davies", true), ("Debye-Hückel", true)];
-        if reader.choice(&solution, &words) == Some(true) {
-            reader.not_yet(&solution, "activity coefficients in solution");
-        }
+    if !reader.object(&models, &["gas", "liquid", "solution"]) {
+        return None;
     }
+    let gas = models.field("gas");
+    let words = [("ideal", false), ("SRK", true), ("PR", true)];
+    if reader.choice(&gas, &words) == Some(true) {
+        reader.not_yet(&gas, "a real gas");
+    }
+    reader.choice(&models.field("liquid"), &[("ideal", ())]);
+    let words = [
+        ("ideal", SolutionModel::Ideal),
+        ("Davies", SolutionModel::Davies),
+        ("Debye-Hückel", SolutionModel::DebyeHueckel),
+    ];
+    reader.choice(&models.field("solution"), &words)
 }
 
 /// A temperature difference, or a share of missing conversion.
@@ -139,25 +144,31 @@ fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<Quantity> {
     Some(atmosphere)
 }
 
-type Blocks = (Option<GasReading>, Vec<Entry>);
+/// The blocks of a reading.
+#[derive(Default)]
+struct Reading {
+    gas: Option<GasReading>,
+    liquid: Option<LiquidReading>,
+    solution: Option<SolutionReading>,
+    pure: Vec<Entry>,
+}
 
-fn read_blocks(reader: &mut Reader, reading: &Node) -> Blocks {
+fn read_blocks(reader: &mut Reader, reading: &Node) -> Reading {
     if !reader.object(reading, &["gas", "liquid", "solution", "solids"]) {
-        return (None, Vec::new());
+        return Reading::default();
     }
     let gas = read_gas(reader, &reading.field("gas"));
     let mut pure = read_pure(reader, &reading.field("solids"), Phase::Solid);
-    let liquid = reading.field("liquid");
-    let liquids = read_pure(reader, &liquid, Phase::Liquid);
-    if liquids.len() > 1 {
-        reader.not_yet(&liquid, "a liquid mixture");
-    }
-    pure.extend(liquids);
-    let solution = reading.field("solution");
-    if !solution.is_null() {
-        reader.not_yet(&solution, "a reading of a solution");
-    }
-    (gas, pure)
+    let entries = read_liquid(reader, &reading.field("liquid"));
+    // One liquid alone is a phase of its own.
+    let liquid = if entries.len() > 1 {
+        Some(LiquidReading { entries, closed_by: None })
+    } else {
+        pure.extend(entries);
+        None
+    };
+    let solution = read_solution(reader, &reading.field("solution"));
+    Reading { gas, liquid, solution, pure }
 }
 
 /// The gas that goes in.

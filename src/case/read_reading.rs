@@ -1,7 +1,7 @@
 //! The blocks of a reading, read into entries.
 
 use super::node::{Node, Reader};
-use crate::mixture::{Basis, Entry, GasReading, Stated, Water};
+use crate::mixture::{Basis, Entry, GasReading, SolutionReading, Stated, Water};
 use crate::problem::{CaseCode, Problem};
 use crate::quantity::{self, Measure};
 use crate::reaction::{Phase, Species, parse_species};
@@ -13,6 +13,18 @@ const GAS_MEASURES: [Measure; 6] = [
     Measure::Amount,
     Measure::AmountRate,
     Measure::MassPerAmount,
+];
+
+const LIQUID_MEASURES: [Measure; 5] =
+    [Measure::Fraction, Measure::Amount, Measure::AmountRate, Measure::Mass, Measure::MassRate];
+
+const SOLUTE_MEASURES: [Measure; 6] = [
+    Measure::Concentration,
+    Measure::Molality,
+    Measure::MassConcentration,
+    Measure::Ph,
+    Measure::Amount,
+    Measure::Mass,
 ];
 
 const PURE_MEASURES: [Measure; 4] =
@@ -93,24 +105,56 @@ fn read_gas_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
     }
 }
 
-/// Reads the solids or the liquid: an object with `entries`.
+/// Reads the solids.
 pub(super) fn read_pure(reader: &mut Reader, node: &Node, phase: Phase) -> Vec<Entry> {
+    read_entries(reader, node, phase, &PURE_MEASURES)
+}
+
+/// Reads the liquid: one line is a phase of its own, several are a mixture.
+pub(super) fn read_liquid(reader: &mut Reader, node: &Node) -> Vec<Entry> {
+    read_entries(reader, node, Phase::Liquid, &LIQUID_MEASURES)
+}
+
+/// Reads the solution: its lines, and its volume or the mass of its water.
+pub(super) fn read_solution(reader: &mut Reader, node: &Node) -> Option<SolutionReading> {
+    if !reader.object(node, &["entries", "volume", "water"]) {
+        return None;
+    }
+    let volume = reader.quantity(&node.field("volume"), &[Measure::Volume]);
+    let water = reader.quantity(&node.field("water"), &[Measure::Mass]);
+    let mut entries = Vec::new();
+    for item in reader.items(&node.field("entries")) {
+        entries.extend(read_entry(reader, &item, Phase::Aqueous, |reader, node| {
+            read_mixed_value(reader, node, &SOLUTE_MEASURES)
+        }));
+    }
+    Some(SolutionReading { volume, water, entries })
+}
+
+fn read_entries(
+    reader: &mut Reader,
+    node: &Node,
+    phase: Phase,
+    measures: &[Measure],
+) -> Vec<Entry> {
     if !reader.object(node, &["entries"]) {
         return Vec::new();
     }
     let mut entries = Vec::new();
     for item in reader.items(&node.field("entries")) {
-        entries.extend(read_entry(reader, &item, phase, read_pure_value));
+        let value = |reader: &mut Reader, node: &Node| read_mixed_value(reader, node, measures);
+        entries.extend(read_entry(reader, &item, phase, value));
     }
     entries
 }
 
-fn read_pure_value(reader: &mut Reader, node: &Node) -> Option<Stated> {
+fn read_mixed_value(reader: &mut Reader, node: &Node, measures: &[Measure]) -> Option<Stated> {
     match reader.needed_text(node)? {
+        "missing" => Some(Stated::Missing { value: 0.0 }),
         "present" => Some(Stated::Present),
         "absent" => Some(Stated::Absent),
         "remainder" => Some(Stated::Remainder),
-        text => reader.keep(node, quantity::parse(text, &PURE_MEASURES)).map(Stated::Quantity),
+        text => reader.keep(node, quantity::parse(text, measures)).map(Stated::Quantity),
     }
 }
 

@@ -1,8 +1,9 @@
 //! What is said of a reading: how it was closed and made wet, and what a cooled sample does not show.
 
+use super::blocks::Blocks;
 use super::participants::Participant;
 use super::question::Question;
-use crate::mixture::{Basis, Closing, GasMixture, GasReading, Water};
+use crate::mixture::{Basis, Closing, GasReading, Water};
 use crate::problem::{CaseCode, NoteCode, Problem, Remark};
 use crate::reaction::{Phase, Species};
 
@@ -13,10 +14,18 @@ const BALANCE_CLOSES: f64 = 0.03;
 pub(super) fn remarks_of(
     question: &Question,
     participants: &[Participant],
-    gas: Option<&GasMixture>,
+    laid: &Blocks,
 ) -> Vec<Remark> {
-    let (Some(gas), Some(reading)) = (gas, &question.gas) else { return Vec::new() };
     let mut remarks = Vec::new();
+    if let Some(solution) = &laid.solution {
+        if !solution.is_stated {
+            remarks.push(Remark::new(NoteCode::OneKilogramOfWater));
+        }
+        if solution.by_density {
+            remarks.push(Remark::new(NoteCode::ByDensityOfWater));
+        }
+    }
+    let (Some(gas), Some(reading)) = (&laid.gas, &question.gas) else { return remarks };
     let name = |entry: usize| reading.entries[entry].species.formula.text();
     let per_cent = |fraction: f64| format!("{:.3}", fraction * 100.0);
     match &gas.closing {

@@ -16,7 +16,6 @@ use crate::equilibrium::{
     Affinity, Kind, Quotient, Rest, RestOutcome, State, System, affinity, quotient, rest,
 };
 use crate::library::Temperature;
-use crate::mixture::{Closing, Held};
 use crate::problem::{Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase};
 
@@ -47,8 +46,7 @@ pub(super) struct Ground<'a> {
     pub at: &'a ConstantAt,
     pub delta_nu_gas: f64,
     pub system: &'a System,
-    pub closing: Option<&'a Closing>,
-    pub feed_closing: Option<&'a Closing>,
+    pub setting: &'a Setting,
     /// What became of the mixture as read.
     pub outcome: RestOutcome,
 }
@@ -105,7 +103,7 @@ fn find(mut question: Question) -> Outcome<Findings> {
     let k_temperature = k_temperature(&question)?;
     let ln_k = constant.as_ref().map(|constant| constant.ln_k(k_temperature));
     let missing = find_missing(&mut question, &found.list, ln_k)?;
-    let has_reading = question.gas.is_some() || !question.pure.is_empty();
+    let has_reading = question.has_reading();
     let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
     let constant = match constant {
         Some(constant) => constant,
@@ -158,8 +156,7 @@ pub(super) struct Laid {
 
 pub(super) fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid> {
     let setting = setting(question, reacting.to_vec())?;
-    let held = setting.participants.iter().zip(&setting.held);
-    let kinds: Vec<Kind> = held.map(|(participant, held)| kind(participant.phase, *held)).collect();
+    let kinds = setting.kinds();
     let nu: Vec<f64> = setting.participants.iter().map(|participant| participant.nu).collect();
     let amounts_mol = setting.amounts_mol();
     let at_equation = |found| at_field(found, EQUATION);
@@ -195,8 +192,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         at: &found.at,
         delta_nu_gas: found.delta_nu_gas,
         system: &system,
-        closing: setting.closing.as_ref(),
-        feed_closing: setting.feed.as_ref().map(|feed| &feed.closing),
+        setting: &setting,
         outcome: rest.summary.outcome,
     };
     let judgement = judgement(question, &ground, now, found.missing.is_some());
@@ -210,13 +206,4 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         judgement,
         amounts_mol,
     })
-}
-
-fn kind(phase: Phase, held: Held) -> Kind {
-    match (phase, held) {
-        (Phase::Gas, _) => Kind::Gas,
-        (Phase::Aqueous, _) => Kind::Solute,
-        (_, Held::Ample) => Kind::Ample,
-        (_, Held::Mol(_)) => Kind::Pure,
-    }
 }

@@ -99,6 +99,14 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
         C::MissingSeveral => {
             (Warning, "{others} more amounts of {species} would do as well; this is the smallest.")
         }
+        C::OneKilogramOfWater => (
+            Assumption,
+            "Neither the volume nor the water of the solution is stated: the amounts are for one kilogram of water.",
+        ),
+        C::ByDensityOfWater => (
+            Conversion,
+            "Volumes of solution are turned into water by the density of water; the room that the solutes take is neglected.",
+        ),
         C::NoReading => (
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",
