@@ -22,6 +22,7 @@ mod laws_rest;
 mod library;
 mod library_constants;
 mod mistakes;
+mod nudges;
 mod quantity;
 mod quantity_show;
 mod quantity_units;

@@ -1,9 +1,21 @@
 //! What the numbers mean for the plant: the verdict, the temperature approach, the valley.
 
 mod approach;
+mod border;
+mod held;
+mod knob;
+mod local;
+mod moved;
+mod nudge;
+mod reason;
 mod valley;
 mod verdict;
+mod why;
 
 pub use approach::{Approach, NoApproach, approach};
+pub use knob::{Knob, Knobs, Plant};
+pub use nudge::{Nudge, nudge, nudges};
+pub use reason::Reason;
 pub use valley::{Curve, Energy, Stretch, Valley, valley};
 pub use verdict::{Direction, Verdict, judge};
+pub use why::{Wording, why};

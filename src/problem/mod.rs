@@ -11,9 +11,9 @@ pub mod words;
 
 pub use code::{
     CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, NoteCode,
-    QuantityCode, ReactionCode, StepCode,
+    QuantityCode, ReactionCode, StepCode, WhyCode,
 };
-pub use remark::{Level, Remark, Step};
+pub use remark::{Level, Remark, Step, Why};
 pub use span::Span;
 
 /// One mistake in what the user gave: a code, its arguments, the field and the span in its text.

@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{Level, Problem, Remark, Step};
+use super::{Level, Problem, Remark, Step, Why};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -53,6 +53,15 @@ pub fn step(step: &Step, language: Language) -> String {
         Language::En => en::step(step.code),
     };
     fill(template, &step.arguments)
+}
+
+/// Says why a nudge does what it does.
+#[must_use]
+pub fn why(why: &Why, language: Language) -> String {
+    let template = match language {
+        Language::En => en::why(why.code),
+    };
+    fill(template, &why.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

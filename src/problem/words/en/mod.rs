@@ -9,9 +9,11 @@ mod note;
 mod quantity;
 mod reaction;
 mod step;
+mod why;
 
 pub(super) use note::template as note;
 pub(super) use step::template as step;
+pub(super) use why::template as why;
 
 use super::super::Code;
 
