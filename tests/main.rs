@@ -23,6 +23,7 @@ mod laws_rest;
 mod library;
 mod library_constants;
 mod mistakes;
+mod nudges;
 mod quantity;
 mod quantity_show;
 mod quantity_units;

@@ -1,11 +1,22 @@
-//! What the numbers mean for the plant: the verdict, the temperature approach, the valley.
+//! What the numbers mean for the plant: the verdict, the temperature approach, the valley, nudges.
 
 mod approach;
+mod border;
+mod held;
+mod knob;
+mod local;
+mod moved;
+mod nudge;
+mod reason;
 mod tolerance;
 mod valley;
 mod verdict;
+mod why;
 
 pub use approach::{Approach, NoApproach, approach, follow};
+pub use knob::{Knob, Knobs, Plant};
+pub use nudge::{Nudge, nudge, nudges};
+pub use reason::Reason;
 pub use tolerance::{
     Budget, End, Figure, Interval, Judged, Moved, Share, budget, tolerance_needed,
 };
@@ -14,3 +25,4 @@ pub use verdict::{
     Band, DEFAULT_BAND, DEFAULT_CONVERSION_BAND, Direction, Evidence, Verdict, judge,
     temperature_says_something,
 };
+pub use why::{Wording, why};

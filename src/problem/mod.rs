@@ -14,8 +14,8 @@ pub use code::{
     CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, QuantityCode,
     ReactionCode,
 };
-pub use remark::{Level, Remark, Step};
-pub use sentence_code::{InputCode, NoteCode, StepCode, VerdictCode};
+pub use remark::{Level, Remark, Step, Why};
+pub use sentence_code::{InputCode, NoteCode, StepCode, VerdictCode, WhyCode};
 pub use span::Span;
 
 /// One mistake in what the user gave: a code, its arguments, the field and the span in its text.

@@ -1,6 +1,6 @@
 //! Notes and lines of the working: data too, said by the same catalogue as problems.
 
-use super::sentence_code::{NoteCode, StepCode};
+use super::sentence_code::{NoteCode, StepCode, WhyCode};
 
 /// How much a note matters.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -39,6 +39,9 @@ pub struct Remark<C = NoteCode> {
 
 /// A line of the working.
 pub type Step = Remark<StepCode>;
+
+/// Why a nudge does what it does.
+pub type Why = Remark<WhyCode>;
 
 impl<C> Remark<C> {
     /// Starts a remark without arguments.

@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{InputCode, Level, Problem, Remark, Step, VerdictCode};
+use super::{InputCode, Level, Problem, Remark, Step, VerdictCode, Why};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -71,6 +71,15 @@ pub fn verdict(sentence: &Remark<VerdictCode>, language: Language) -> String {
         Language::En => en::verdict(sentence.code),
     };
     fill(template, &sentence.arguments)
+}
+
+/// Says why a nudge does what it does.
+#[must_use]
+pub fn why(why: &Why, language: Language) -> String {
+    let template = match language {
+        Language::En => en::why(why.code),
+    };
+    fill(template, &why.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

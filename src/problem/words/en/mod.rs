@@ -10,10 +10,12 @@ mod quantity;
 mod reaction;
 mod step;
 mod verdict;
+mod why;
 
 pub(super) use note::template as note;
 pub(super) use step::template as step;
 pub(super) use verdict::{input, verdict};
+pub(super) use why::template as why;
 
 use super::super::Code;
 

@@ -1,0 +1,108 @@
+//! How far rest moved: what never moves it, the slope on either side of a limit, and the finite
+//! difference without cancellation.
+
+use super::knob::Knob;
+use super::local::Local;
+use crate::equilibrium::Affinity;
+use crate::equilibrium::Kind;
+use crate::equilibrium::RestOutcome;
+
+/// Below this a Δν is the rounding of its sum.
+const ROUNDING_NU: f64 = 1e-12;
+/// A change of an amount below this share of it is rounding of the two solutions.
+const ROUNDING_SHARE: f64 = 2e-13;
+
+/// Whether a knob has no part in A at all, so that no step of it ever moves rest.
+///
+/// Pressure, volume and an inert where Δν = 0, an inert in a fixed volume, dilution where as many
+/// solutes are made as used up, and more of a pure phase of which some is left.
+pub(super) fn is_idle(local: &Local, knob: Knob, step: f64) -> bool {
+    let even = |kind| local.delta_nu(kind).abs() < ROUNDING_NU;
+    match knob {
+        Knob::Temperature => false,
+        Knob::Pressure | Knob::Volume | Knob::InertAtPressure => even(Kind::Gas),
+        Knob::InertAtVolume => true,
+        Knob::Dilution => even(Kind::Solute),
+        Knob::Amount(species) => match local.system.kinds().get(species) {
+            Some(Kind::Ample) => true,
+            Some(Kind::Pure) => step >= 0.0 && local.amounts_mol[species] > 0.0,
+            _ => false,
+        },
+    }
+}
+
+/// dξ/dk of rest, also where a phase is used up: there only that phase moves it, by 1/|ν|.
+///
+/// `None` where there is no such slope: on the border of a phase's being used up, where any extent
+/// is at rest, where nothing can move and something is added.
+pub(super) fn slope(
+    local: &Local,
+    knob: Knob,
+    outcome: RestOutcome,
+    affinity: &Affinity,
+) -> Option<f64> {
+    let gone = |species: usize| {
+        let nu = local.system.nu()[species];
+        nu != 0.0
+            && local.amounts_mol[species] == 0.0
+            && local.system.kinds()[species] != Kind::Ample
+    };
+    let places = || 0..local.amounts_mol.len();
+    match outcome {
+        RestOutcome::Rest if places().any(gone) => None,
+        RestOutcome::Rest => local.derivative(knob),
+        RestOutcome::AnyExtentIsAtRest | RestOutcome::HasNoLimit => None,
+        RestOutcome::NothingCanMove => match knob {
+            Knob::Amount(_) => None,
+            _ => Some(0.0),
+        },
+        RestOutcome::PhaseExhausted | RestOutcome::RanToItsLimit => {
+            let Knob::Amount(species) = knob else { return Some(0.0) };
+            let forward = affinity.finite()? > 0.0;
+            let used_up = if forward { -1.0 } else { 1.0 };
+            let limits =
+                |species: usize| gone(species) && local.system.nu()[species] * used_up > 0.0;
+            let alone = places().filter(|&place| limits(place)).count() == 1;
+            let pure = local.system.kinds()[species] == Kind::Pure;
+            match outcome {
+                // Another gas than what Q is made of may leave the proportion in which it is fixed.
+                RestOutcome::RanToItsLimit if !pure => None,
+                // Forward more of a reactant carries ξ up, reverse more of a product down.
+                _ if limits(species) && alone => Some(-1.0 / local.system.nu()[species]),
+                _ => Some(0.0),
+            }
+        }
+    }
+}
+
+/// ξ after the step less ξ before it, from the scarcest species that both rests hold: its change
+/// over ν keeps digits that the difference of two extents loses.
+///
+/// Where even that difference is rounding, the slope times the step is taken.
+pub(super) fn extent_change(
+    local: &Local,
+    knob: Knob,
+    step: f64,
+    after_mol: &[f64],
+    plain_mol: f64,
+    derivative: Option<f64>,
+) -> f64 {
+    let nu = local.system.nu();
+    let kinds = local.system.kinds();
+    let mut scarcest: Option<(f64, f64)> = None;
+    for species in 0..local.amounts_mol.len() {
+        if nu[species] == 0.0 || kinds[species] == Kind::Ample || knob == Knob::Amount(species) {
+            continue;
+        }
+        let (before, after) = (local.amounts_mol[species], after_mol[species]);
+        let size = before.max(after) / nu[species].abs();
+        if scarcest.is_none_or(|(known, _)| size < known) {
+            scarcest = Some((size, (after - before) / nu[species]));
+        }
+    }
+    let Some((size, change)) = scarcest else { return plain_mol };
+    if change.abs() <= ROUNDING_SHARE * size {
+        return derivative.map_or(change, |slope| slope * step);
+    }
+    change
+}
