@@ -7,7 +7,7 @@ use super::report::{
 use super::report_amounts::MissingReport;
 use super::run::Findings;
 use super::setting::Basis;
-use super::{amounts, notes, steps, verdict};
+use super::{amounts, notes, nudges, steps, verdict};
 use crate::constant::Constant;
 use crate::equilibrium::{Affinity, Quotient, RestOutcome};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
@@ -37,6 +37,7 @@ pub(super) fn report(found: &Findings) -> Report {
         }),
         balance: reading.and_then(amounts::balance),
         valley: reading.and_then(|reading| amounts::valley(found, reading)),
+        nudges: reading.map_or_else(Vec::new, |reading| nudges::nudges(found, reading)),
         steps: steps::steps(found),
         notes: notes::notes(found),
     }

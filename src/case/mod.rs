@@ -17,6 +17,7 @@ mod judgement_report;
 mod missing;
 mod node;
 mod notes;
+mod nudges;
 mod participants;
 mod question;
 mod read;
@@ -40,6 +41,7 @@ pub use calls::{
 };
 pub use convert::{Converted, convert};
 pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
+pub use nudges::{ChangeReport, NudgeReport};
 pub use refusal::{Answer, ProblemReport, Refusal, SpanReport};
 pub use report::{
     FitPoint, FitReport, FormReport, KReport, NoteReport, ReactionReport, RecordReport, Report,

@@ -3,6 +3,7 @@
 use serde::Serialize;
 
 use super::judgement_report::JudgementReport;
+use super::nudges::NudgeReport;
 use super::participants::Participant;
 use super::report_amounts::{
     BalanceReport, Conversion, MissingReport, RestReport, SpeciesReport, ValleyReport,
@@ -37,6 +38,8 @@ pub struct Report {
     pub balance: Option<BalanceReport>,
     /// G along the reaction; null where it has no drawing.
     pub valley: Option<ValleyReport>,
+    /// One small change of each knob, and what it does to rest.
+    pub nudges: Vec<NudgeReport>,
     /// The working, line by line.
     pub steps: Vec<StepReport>,
     /// What was assumed, converted or extrapolated, and cautions.

@@ -162,3 +162,17 @@ codes! {
         OutOfRange = "step-out-of-range",
     }
 }
+
+codes! {
+    /// What a nudge does.
+    TurnCode in Beside {
+        Temperature = "turn-temperature",
+        Pressure = "turn-pressure",
+        Volume = "turn-volume",
+        Water = "turn-water",
+        InertAtPressure = "turn-inert-at-pressure",
+        InertAtVolume = "turn-inert-at-volume",
+        Add = "turn-add",
+        Remove = "turn-remove",
+    }
+}

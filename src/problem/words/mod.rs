@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{InputCode, Level, Problem, Remark, Step, VerdictCode, Why};
+use super::{InputCode, Level, Problem, Remark, Step, TurnCode, VerdictCode, Why};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -80,6 +80,15 @@ pub fn why(why: &Why, language: Language) -> String {
         Language::En => en::why(why.code),
     };
     fill(template, &why.arguments)
+}
+
+/// Says what a nudge does.
+#[must_use]
+pub fn turn(turn: &Remark<TurnCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::turn(turn.code),
+    };
+    fill(template, &turn.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

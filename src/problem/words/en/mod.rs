@@ -16,6 +16,7 @@ pub(super) use note::template as note;
 pub(super) use step::template as step;
 pub(super) use verdict::{input, verdict};
 pub(super) use why::template as why;
+pub(super) use why::turn;
 
 use super::super::Code;
 
