@@ -2,7 +2,7 @@
 
 import * as glue from './shiftgauge.js';
 
-/** @import { BalanceAnswer, Case, CheckAnswer } from './shiftgauge.js' */
+/** @import { BalanceAnswer, Case, CheckAnswer, SpeciesMatch } from './shiftgauge.js' */
 
 /** @type {WebAssembly.Module | null} */
 let compiled = null;
@@ -69,6 +69,18 @@ export function balance(equation) {
 function onlyPhase(name) {
   const phases = [...new Set(glue.species(name).species.map(({ phase }) => phase))];
   return phases.length > 1 && phases.includes('g') ? null : phases[0] ?? null;
+}
+
+/**
+ * The species of the library that a formula, a name or a CAS number stands for; where it stands for none,
+ * those of the formula that is nearest.
+ * @param {string} text
+ * @returns {SpeciesMatch[]}
+ */
+export function findSpecies(text) {
+  if (text.trim() === '') return [];
+  const { species, near } = glue.species(text);
+  return species.length === 0 && near !== null ? glue.species(near).species : species;
 }
 
 /** The program's and the tables' versions as one line. */

@@ -124,3 +124,10 @@ export function asText(value) {
 export function isRecord(value) {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
+
+/**
+ * The fields of whatever should be an object; none where it is something else.
+ * @param {unknown} value
+ * @returns {Record<string, unknown>}
+ */
+export const fieldsOf = (value) => (isRecord(value) ? value : {});
