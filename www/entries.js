@@ -7,7 +7,7 @@ import { copyTemplate, part } from './dom.js';
 import { formula } from './format.js';
 import { suggest } from './suggest.js';
 import { withoutPhase } from './understood.js';
-import { attach } from './units.js';
+import { attach, nameChooser } from './units.js';
 
 /** @import { SpeciesMatch } from './shiftgauge.js' */
 
@@ -96,8 +96,8 @@ export function createEntries(list, template, prepare = () => {}, picked = () =>
       rows = [];
       list.replaceChildren();
     },
-    /** The rows that belong to the reading: all but the offers that nobody took up. */
-    given: () => rows.filter((row) => !row.offered),
+    /** The rows that belong to the reading: all but the offers that nobody took up, and rows still empty. */
+    given: () => rows.filter(({ offered, species, value }) => !offered && (species.value + value.value).trim() !== ''),
     all: () => rows,
   };
 }
@@ -113,6 +113,7 @@ function nameRow(row, inReaction) {
   row.species.closest('.combobox')?.toggleAttribute('hidden', asName);
   row.name.textContent = formula(species);
   row.value.setAttribute('aria-label', species === '' ? 'Value' : `${formula(species)}, value`);
+  nameChooser(row.value);
   part(row.root, 'remove', HTMLButtonElement).setAttribute('aria-label', species === '' ? 'Remove this row' : `Remove ${formula(species)}`);
 }
 

@@ -32,13 +32,15 @@ export function createGasBlock(prefix, path) {
     const button = part(row.root, 'remainder', HTMLButtonElement);
     button.addEventListener('click', () => {
       const becomes = row.value.value.trim() !== REMAINDER;
-      if (becomes) {
-        for (const other of entries.all()) if (other.value.value.trim() === REMAINDER) other.value.value = '';
-        before = row.value.value;
-      }
+      if (becomes) before = row.value.value;
       row.value.value = becomes ? REMAINDER : before;
       row.value.dispatchEvent(new Event('input', { bubbles: true }));
       if (!becomes) row.value.focus();
+    });
+    // Pressed or chosen, the remainder moves to the row that claims it; typed, it is checked like anything typed.
+    row.value.addEventListener('input', ({ isTrusted }) => {
+      if (isTrusted || row.value.value !== REMAINDER) return;
+      for (const other of entries.all()) if (other !== row && other.value.value.trim() === REMAINDER) other.value.value = '';
     });
   }
 

@@ -24,7 +24,7 @@ const escaped = (text) => text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
 function places(text, units) {
   const named = units.flatMap((unit) => [unit, ...(SPELLINGS[unit] ?? []).filter((other) => !units.includes(other))].map((spelling) => ({ unit, spelling })));
   named.sort((a, b) => b.spelling.length - a.spelling.length);
-  const pattern = new RegExp(`(?<![\\p{L}/])(?:${named.map(({ spelling }) => escaped(spelling)).join('|')})(?![\\p{L}\\d(/])(?!\\s*rel)`, 'gu');
+  const pattern = new RegExp(`(?<![\\p{L}/])(?<!type\\s*)(?:${named.map(({ spelling }) => escaped(spelling)).join('|')})(?![\\p{L}\\d(/])(?!\\s*rel)`, 'gu');
   return [...text.matchAll(pattern)].map((found) => ({
     unit: named.find(({ spelling }) => spelling === found[0])?.unit ?? '', start: found.index, end: found.index + found[0].length,
   }));
@@ -57,7 +57,7 @@ export function withUnit(text, unit, units) {
   if (found.length > 0) {
     return found.reduceRight((sofar, { start, end }) => sofar.slice(0, start) + unit + sofar.slice(end), plain);
   }
-  const number = /^(?:[^\p{L}%°]|(?<=\d)[eE](?=[-+\u2212]?\d))*/u.exec(plain)?.[0].trimEnd() ?? '';
+  const number = /^(?:[^\p{L}%°]|%?\s*rel\b|(?<=\d)[eE](?=[-+\u2212]?\d))*/u.exec(plain)?.[0].trimEnd() ?? '';
   // What follows the number is a unit that the chooser does not know, or the class of an instrument.
   const after = /(?:\s+(?:type|class|Pt\d+).*)?$/.exec(plain.slice(number.length))?.[0] ?? '';
   return `${number} ${unit}${after}`.trimStart();

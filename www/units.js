@@ -17,8 +17,9 @@ export function attach(field) {
   const around = create('span', { class: 'quantity' });
   field.replaceWith(around);
   around.append(field, chooser);
+  /** What stands in the field now is what the list opens at. */
   const show = () => { chooser.value = unitOf(field.value, units); };
-  for (const kind of ['focus', 'pointerdown']) chooser.addEventListener(kind, () => { name(field, chooser); show(); });
+  for (const kind of ['focus', 'pointerdown']) chooser.addEventListener(kind, show);
   chooser.addEventListener('input', (event) => {
     event.stopPropagation();
     if (chooser.value === '') return;
@@ -26,16 +27,16 @@ export function attach(field) {
     field.dispatchEvent(new Event('input', { bubbles: true }));
   });
   chooser.addEventListener('change', (event) => event.stopPropagation());
-  name(field, chooser);
+  nameChooser(field);
 }
 
 /**
+ * Names the chooser of a field after it, for those who hear the page.
  * @param {HTMLInputElement} field
- * @param {HTMLElement} chooser
  */
-function name(field, chooser) {
+export function nameChooser(field) {
   const label = field.getAttribute('aria-label') ?? field.labels?.[0]?.textContent?.trim() ?? '';
-  chooser.setAttribute('aria-label', `Unit of ${label.replace(/, value$/, '') || 'this row'}`);
+  field.nextElementSibling?.setAttribute('aria-label', `Unit of ${label.replace(/, value$/, '') || 'this row'}`);
 }
 
 /** Gives every quantity that the page itself has a chooser; rows get theirs as they come. */

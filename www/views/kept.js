@@ -105,11 +105,13 @@ function row(one, actions) {
     }
   });
   field.addEventListener('keydown', (event) => {
-    if (event.key === 'Enter') take();
-    if (event.key !== 'Escape') return;
+    if (event.key !== 'Enter' && event.key !== 'Escape') return;
+    // The key must not go on to the button that gets the focus, nor close the panel.
+    event.preventDefault();
     event.stopPropagation();
+    if (event.key === 'Enter') return take();
     show(actions);
-    focusRow(one.name);
+    return focusRow(one.name);
   });
   remove.addEventListener('click', () => {
     kept.remove(one.name);
