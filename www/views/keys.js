@@ -7,10 +7,15 @@ const bar = byId('keys', HTMLElement);
 /** Only where fingers type; a keyboard on the desk has what it needs, and `+/-` reads as ±. */
 const byFinger = window.matchMedia('(pointer: coarse)');
 
+/** What was pressed elsewhere must not move away under the finger: the bar leaves after it is pressed. */
+const LEAVE_MS = 350;
+let leaving = 0;
+
 document.addEventListener('focusin', ({ target }) => {
+  window.clearTimeout(leaving);
   const keys = target instanceof HTMLInputElement && byFinger.matches ? keysOf(target) : [];
   if (!(target instanceof HTMLInputElement) || keys.length === 0) {
-    if (!(target instanceof Node && bar.contains(target))) bar.hidden = true;
+    if (!(target instanceof Node && bar.contains(target))) leaving = window.setTimeout(() => { bar.hidden = true; }, LEAVE_MS);
     return;
   }
   bar.replaceChildren(...keys);
