@@ -79,8 +79,15 @@ function onlyPhase(name) {
  */
 export function findSpecies(text) {
   if (text.trim() === '') return [];
-  const { species, near } = glue.species(text);
-  return species.length === 0 && near !== null ? glue.species(near).species : species;
+  try {
+    const { species, near } = glue.species(text);
+    return species.length === 0 && near !== null ? glue.species(near).species : species;
+  } catch (thrown) {
+    // Help with typing is not worth a dead page: a new instance takes over, and nothing is offered.
+    console.error(thrown);
+    restartEngine();
+    return [];
+  }
 }
 
 /** The program's and the tables' versions as one line. */

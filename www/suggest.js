@@ -65,18 +65,17 @@ export function suggest(field, picked = () => {}) {
     field.removeAttribute('aria-activedescendant');
   }
 
-  function offer() {
+  /** @param {number} least   so many signs must be there */
+  function offer(least) {
     const { text } = word();
-    const found = text.length < 2 ? [] : findSpecies(text);
+    const found = text.length < least ? [] : findSpecies(text);
     matches = found.filter((match) => inEquation || phases.includes(match.phase)).slice(0, MOST);
     const alreadyThere = matches.length === 1 && [matches[0]?.formula, matches[0]?.species].includes(text);
-    if (matches.length === 0 || alreadyThere) return close();
-    active = -1;
-    field.removeAttribute('aria-activedescendant');
+    close();
+    if (matches.length === 0 || alreadyThere) return;
     list.replaceChildren(...matches.map(option));
     list.hidden = false;
     field.setAttribute('aria-expanded', 'true');
-    return undefined;
   }
 
   /**
@@ -105,7 +104,6 @@ export function suggest(field, picked = () => {}) {
     close();
     picked(match);
     field.dispatchEvent(new Event('input', { bubbles: true }));
-    close();
   }
 
   /** @param {number} step */
@@ -119,18 +117,17 @@ export function suggest(field, picked = () => {}) {
   }
 
   field.addEventListener('input', (event) => {
-    if (event.isTrusted) offer();
+    if (event.isTrusted) offer(2);
   });
   field.addEventListener('blur', () => {
     close();
     // A name that means one species alone is written as its formula.
-    const found = inEquation ? [] : findSpecies(field.value.trim()).filter(({ phase }) => phases.includes(phase));
-    const [only] = found;
-    if (found.length !== 1 || only === undefined || !only.names.some((name) => name.toLowerCase() === field.value.trim().toLowerCase()) && only.cas !== field.value.trim()) return;
-    take(only);
+    const typed = field.value.trim();
+    const [only, ...others] = inEquation ? [] : findSpecies(typed).filter(({ phase }) => phases.includes(phase));
+    if (only !== undefined && others.length === 0 && isNamed(only, typed)) take(only);
   });
   field.addEventListener('keydown', (event) => {
-    if (event.key === 'ArrowDown' && list.hidden) offer();
+    if (event.key === 'ArrowDown' && list.hidden) offer(1);
     if (list.hidden) return;
     const chosen = matches[active];
     if (event.key === 'ArrowDown') move(1);
@@ -142,6 +139,12 @@ export function suggest(field, picked = () => {}) {
     event.stopPropagation();
   });
 }
+
+/**
+ * @param {SpeciesMatch} match
+ * @param {string} text
+ */
+const isNamed = ({ names, cas }, text) => cas === text || names.some((name) => name.toLowerCase() === text.toLowerCase());
 
 /**
  * How a block names a species: without the phase, which the block says, but with the name of its form.

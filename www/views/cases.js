@@ -80,7 +80,11 @@ function replace(question, said, actions) {
  * @param {Actions} actions
  */
 async function openFile(file, actions) {
-  openText(file.size > 1e6 ? ' '.repeat(1_000_001) : await file.text(), `Opened ${file.name}.`, actions);
+  try {
+    openText(file.size > 1e6 ? ' '.repeat(1_000_001) : await file.text(), `Opened ${file.name}.`, actions);
+  } catch {
+    actions.tell(`${file.name} could not be read: perhaps it is a folder. Nothing was changed.`, true);
+  }
 }
 
 /**
