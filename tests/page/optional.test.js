@@ -90,6 +90,21 @@ test('a solution and a liquid mixture are entered by touch', () =>
     assert.equal(await page.isVisible('#mixture-hint'), true);
   }, BY_TOUCH));
 
+test('odd things in the optional parts of a file do no harm', () =>
+  visit('one file', async (page) => {
+    await answered(page);
+    await openCase(page, {
+      ...base, band: { a: 1 }, feed: { gas: [7], liquid: 7 },
+      reactions: [{ equation: 'CO + H2O(g) = CO2 + H2', constant: { from: 'points', points: [7, null, ['400 °C']], terms: [], for: 3 } }],
+      reading: { gas: { ...gas, lost: 'SO3', entries: [{ species: 'O2', value: 7, includes: 4 }] }, solution: { volume: 7, entries: 'none' } },
+    });
+    assert.equal(await page.isVisible('#out-of-date'), true);
+    await page.reload();
+    await page.waitForSelector('#out-of-date:visible');
+    await openExample(page, 'low-temperature-shift');
+    assert.equal(await page.isHidden('#out-of-date'), true);
+  }, AT_DESK));
+
 test('a problem in a folded part unfolds it and stands at its field', () =>
   visit('one file', async (page) => {
     await answered(page);

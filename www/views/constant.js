@@ -15,6 +15,9 @@ const kind = byId('constant-kind', HTMLSelectElement);
 const formulaKind = byId('constant-formula-kind', HTMLSelectElement);
 const unit = byId('constant-unit', HTMLSelectElement);
 const points = byId('constant-points', HTMLTextAreaElement);
+const formulaUnit = byId('constant-formula-unit', HTMLSelectElement);
+const range = [input('range-from'), input('range-to')];
+const tolerance = input('tolerance');
 const value = input('value');
 /** What a value may carry beside itself, by the name in the case. */
 const extras = { at: input('at'), enthalpy: input('enthalpy'), heat_capacity: input('heat') };
@@ -23,7 +26,7 @@ const shared = { for: input('for'), approach: input('approach') };
 const { approach } = shared;
 const terms = [...document.querySelectorAll('[data-term]')].filter((field) => field instanceof HTMLInputElement);
 /** What the fields stand for, by source; all else in the case's constant is kept as it came. */
-const OWN = ['from', 'kind', 'pressure_unit', 'value', 'points', 'terms', ...Object.keys(extras), ...Object.keys(shared)];
+const OWN = ['from', 'kind', 'pressure_unit', 'value', 'points', 'terms', 'range', 'tolerance', ...Object.keys(extras), ...Object.keys(shared)];
 /** @type {Record<string, unknown>} */
 let others = {};
 
@@ -37,6 +40,10 @@ export function fill(question) {
   choose(kind, asText(constant.kind), 'K');
   choose(formulaKind, asText(constant.kind), 'log10 K');
   choose(unit, asText(constant.pressure_unit), 'bar');
+  choose(formulaUnit, asText(constant.pressure_unit), '');
+  const ends = Array.isArray(constant.range) ? constant.range : [];
+  range.forEach((field, index) => { field.value = asText(ends[index]); });
+  tolerance.value = asText(constant.tolerance);
   value.value = asText(constant.value);
   points.value = linesOfPoints(constant.points);
   for (const [name, field] of Object.entries({ ...extras, ...shared })) field.value = asText(constant[name]);
@@ -81,7 +88,11 @@ function readConstant() {
   if (source === 'formula') {
     constant.kind = /** @type {ConstantKind} */ (formulaKind.value);
     constant.terms = Object.fromEntries(terms.filter((field) => field.value.trim() !== '').map((field) => [field.dataset.term ?? '', field.value]));
+    if (formulaUnit.value !== '') constant.pressure_unit = formulaUnit.value;
+    if (range.some((field) => field.value.trim() !== '')) constant.range = range.map((field) => field.value);
+    addGiven(constant, { tolerance });
   }
+  if (source === 'reading') addGiven(constant, { enthalpy: extras.enthalpy });
   addGiven(constant, source === 'library' ? { approach } : shared);
   return constant;
 }
