@@ -67,7 +67,7 @@ export function balance(equation) {
  * @param {string} name
  */
 function onlyPhase(name) {
-  const phases = [...new Set(glue.species(name).species.map(({ phase }) => phase))];
+  const phases = [...new Set(lookUp(name).species.map(({ phase }) => phase))];
   return phases.length > 1 && phases.includes('g') ? null : phases[0] ?? null;
 }
 
@@ -79,14 +79,21 @@ function onlyPhase(name) {
  */
 export function findSpecies(text) {
   if (text.trim() === '') return [];
+  const { species, near } = lookUp(text);
+  return species.length === 0 && near !== null ? lookUp(near).species : species;
+}
+
+/**
+ * Help with typing is not worth a dead page: after a trap a new instance takes over, and nothing is found.
+ * @param {string} text
+ */
+function lookUp(text) {
   try {
-    const { species, near } = glue.species(text);
-    return species.length === 0 && near !== null ? glue.species(near).species : species;
+    return glue.species(text);
   } catch (thrown) {
-    // Help with typing is not worth a dead page: a new instance takes over, and nothing is offered.
     console.error(thrown);
     restartEngine();
-    return [];
+    return { species: [], near: null };
   }
 }
 
