@@ -3,24 +3,35 @@
 import { balance, check, isSupported, restartEngine, startEngine, versionLine } from './engine.js';
 import { byId } from './dom.js';
 import { listen } from './events.js';
+import { firstCase } from './examples.js';
+import { foldAll } from './folds.js';
+import { createHistory } from './history.js';
 import { forget, keep, recall } from './recall.js';
 import { textFromHash } from './link.js';
 import { keepOffline } from './offline/keep.js';
 import { render } from './render.js';
 import { caseFromText, caseToText, createState, withoutField } from './state.js';
+import { attachAll } from './units.js';
 import * as cases from './views/cases.js';
 import * as conditions from './views/conditions.js';
+import * as constant from './views/constant.js';
+import * as feed from './views/feed.js';
 import * as gas from './views/gas.js';
 import * as heading from './views/heading.js';
+import * as kept from './views/kept.js';
 import * as keys from './views/keys.js';
 import * as ledger from './views/ledger.js';
 import * as notes from './views/notes.js';
+import * as paste from './views/paste.js';
 import * as problems from './views/problems.js';
 import * as reaction from './views/reaction.js';
+import * as record from './views/record.js';
 import * as solids from './views/solids.js';
+import * as solution from './views/solution.js';
 import * as sources from './views/sources.js';
 import * as spoken from './views/spoken.js';
 import * as strip from './views/strip.js';
+import * as undo from './views/undo.js';
 import * as valley from './views/valley.js';
 import * as verdict from './views/verdict.js';
 import * as working from './views/working.js';
@@ -28,12 +39,12 @@ import * as working from './views/working.js';
 /** @import { Case } from './shiftgauge.js' */
 /** @import { State } from './state.js' */
 
-const inputs = [heading, reaction, conditions, gas, solids];
-const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, keys, strip];
+const inputs = [heading, reaction, constant, conditions, gas, solids, solution, feed];
+const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
 const notice = byId('notice', HTMLElement);
 
 const state = createState(
-  /** @type {State} */ ({ question: cases.firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
+  /** @type {State} */ ({ question: firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
   (changed) => {
     byId('results', HTMLElement).hidden = changed.report === null;
     byId('results', HTMLElement).classList.toggle('is-old', !changed.current);
@@ -64,6 +75,24 @@ function readForm() {
 /** The case that was tried last, as text. */
 let tried = '';
 
+const history = createHistory({ load: () => recall('steps'), store: (text) => keep('steps', text) });
+/** Whether it was said that this browser keeps nothing. */
+let saidUnkept = false;
+
+/** The field in hand, so that typing in it is one step back. */
+function fieldInHand() {
+  const field = document.activeElement;
+  return field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement ? field.dataset.field ?? field.id : '';
+}
+
+/** @param {string} text */
+function keepCase(text) {
+  history.note(text, fieldInHand());
+  if (keep('case', text) || saidUnkept) return;
+  saidUnkept = true;
+  tell('This browser keeps nothing for this page: its storage is full or blocked. Save the case to a file before you close the page.', true);
+}
+
 /** Answers the case as the form reads now. */
 function answer() {
   const question = readForm();
@@ -74,7 +103,7 @@ function answer() {
     return;
   }
   tried = text;
-  keep('case', text);
+  keepCase(text);
   if (text === state.get().trapped) {
     state.set({ question, current: false, problems: [] });
     return;
@@ -119,6 +148,7 @@ function stopped(question, text, thrown) {
 const actions = {
   current: readForm,
   open(question, said) {
+    foldAll();
     state.set({ question, report: null, answered: null, current: false, problems: [] });
     fill(question);
     tried = '';
@@ -128,12 +158,27 @@ const actions = {
   tell,
 };
 
-/** @param {string} field   the path of something that this page has no field for */
-function takeOut(field) {
-  const question = withoutField(readForm(), field);
+/**
+ * Takes a case over that came from this one: the old answer stays in sight until the new one is there.
+ * @param {Case} question
+ */
+function change(question) {
   state.set({ question });
   fill(question);
   answer();
+}
+
+/** @param {string | null} text   a step of the history */
+function step(text) {
+  const found = caseFromText(text ?? '');
+  if (!found.ok) return;
+  tell('');
+  change(found.question);
+}
+
+/** @param {string} field   the path of something that this page has no field for */
+function takeOut(field) {
+  change(withoutField(readForm(), field));
   byId('sentence', HTMLElement).focus();
 }
 
@@ -150,17 +195,24 @@ async function openLink(hash) {
 }
 
 async function start() {
+  attachAll();
   if (!isSupported()) throw new Error('WebAssembly is off in this browser');
   await startEngine();
   byId('version', HTMLElement).textContent = versionLine();
   const saved = caseFromText(recall('case') ?? '');
-  const question = saved.ok ? saved.question : cases.firstCase();
+  const question = saved.ok ? saved.question : firstCase();
   state.set({ question });
   fill(question);
   answer();
   if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
   cases.connect(actions);
   problems.connect({ takeOut });
+  kept.connect({ current: readForm, openText: (text, said) => cases.openText(text, said, actions) });
+  paste.connect({ current: readForm, change: (question, said) => { change(question); tell(said); } });
+  undo.connect({
+    back: () => step(history.back()), forward: () => step(history.forward()),
+    canGoBack: history.canGoBack, canGoForward: history.canGoForward,
+  });
   listen({
     changed() {
       tell('');
@@ -181,9 +233,8 @@ function tellOffline(standing, takeOver) {
     byId('offline', HTMLElement).textContent = 'Kept in this browser: works without a network.';
     return;
   }
-  const update = byId('update', HTMLButtonElement);
-  update.hidden = false;
-  update.addEventListener('click', () => takeOver?.(), { once: true });
+  byId('update-line', HTMLElement).hidden = false;
+  byId('update', HTMLButtonElement).addEventListener('click', () => takeOver?.(), { once: true });
 }
 
 start().catch((thrown) => {

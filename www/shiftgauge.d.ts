@@ -16,18 +16,23 @@ export interface ConstantSource {
   at?: string;
   enthalpy?: string;
   heat_capacity?: string;
+  approach?: string;
+  points?: [string, string][];
+  terms?: Record<string, string>;
   [other: string]: unknown;
 }
 
 export interface Entry {
   species: string;
   value: string;
+  /** What the analyser counts in with this species. */
+  includes?: string;
 }
 
 export type Water =
   | { fraction: string }
   | { per_dry: string }
-  | { dew_point: string; pressure: string }
+  | { dew_point: string; pressure?: string }
   | 'from_feed';
 
 export interface Block {
@@ -38,12 +43,25 @@ export interface Block {
 export interface GasBlock extends Block {
   basis: 'wet' | 'dry';
   water: Water | null;
+  /** What the sample lost when it was cooled. */
+  lost?: string[];
+}
+
+/** Neither a volume nor a mass of water stands for 1 kg of water. */
+export interface SolutionBlock extends Block {
+  volume: string | null;
+  water: string | null;
+}
+
+export interface Feed {
+  gas: GasBlock | null;
+  [other: string]: unknown;
 }
 
 export interface Reading {
   gas: GasBlock | null;
   liquid: Block | null;
-  solution: unknown;
+  solution: SolutionBlock | null;
   solids: Block | null;
 }
 
@@ -58,7 +76,9 @@ export interface Case {
   atmosphere: string;
   hold: 'pressure' | 'volume';
   volume: string | null;
+  band: string;
   reading: Reading;
+  feed: Feed | null;
   [other: string]: unknown;
 }
 

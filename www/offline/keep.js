@@ -8,7 +8,6 @@
  */
 export async function keepOffline(tell) {
   if (document.getElementById('engine-bytes') || !navigator.serviceWorker) return;
-  const first = !navigator.serviceWorker.controller;
   try {
     const registration = await navigator.serviceWorker.register('./service-worker.js');
     if (registration.waiting) offer(registration.waiting, tell);
@@ -19,7 +18,7 @@ export async function keepOffline(tell) {
       });
     });
     await navigator.serviceWorker.ready;
-    if (first) tell('ready');
+    tell('ready');
   } catch (error) {
     // The page works all the same while there is a network.
     console.info('Shiftgauge is not kept for offline use:', error);
