@@ -21,6 +21,7 @@ mod laws_reaction;
 mod laws_rest;
 mod library;
 mod library_constants;
+mod library_dissolved;
 mod mistakes;
 mod quantity;
 mod quantity_show;

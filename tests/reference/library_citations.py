@@ -47,5 +47,12 @@ SOURCES = {
     "hydrogen fluoride, 3.17 at 25 °C; enthalpy of the NBS tables. Recalled from memory.",
     "wilhelm": "Wilhelm, Battino and Wilcock, Chemical Reviews 77 (1977) 219: solubility of methane, "
     "0.0014 mol/(kg bar) at 25 °C, and -13.8 kJ/mol. Recalled from memory.",
+    "goldberg": "Goldberg and Parker, Journal of Research of the National Bureau of Standards 90 (1985) 341: "
+    "pK1 1.857 and pK2 7.172 of sulfur dioxide, -17.80 and -3.65 kJ/mol. Recalled from memory.",
+    "palmer": "Palmer and Wesolowski, Geochimica et Cosmochimica Acta 56 (1992) 1093: gibbsite in acid, "
+    "log K 7.74 at 25 °C and -105 kJ/mol. Recalled from memory.",
+    "busenberg": "Busenberg, Plummer and Parker, Geochimica et Cosmochimica Acta 48 (1984) 2021, and "
+    "Busenberg and Plummer, 50 (1986) 2225: log Ksp of strontianite -9.271 and witherite -8.562, -1.67 "
+    "and 2.94 kJ/mol. Recalled from memory.",
     "handbook": "Common practice: Cp of liquid sulfur trioxide is near 258 J/(mol K). From memory.",
 }

@@ -8,7 +8,7 @@ from library_condensed import CONDENSED
 from library_dissolved import DISSOLVED
 from library_gases import GASES
 from library_pieces import Piece, constant_piece, fit, fit_heat_capacity, join, written
-from library_solution import build_dissolved
+from library_solution import build_dissolved, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 
@@ -82,6 +82,10 @@ def build(species):
         h, s = published.crc(cas, phase)
         pieces = recalled_pieces(how[1], how[2])
         sources += ["crc", how[2]]
+    elif how[0] == "formed":
+        h, s = formed(how[1:4], built)
+        pieces = [constant_piece(288.15, 400, published.crc_heat_capacity(cas, phase), "crc")]
+        sources += [how[4], "crc"]
     elif how[0] == "calcite":
         h, s = published.crc(cas, phase)
         pieces = [Piece(T0, 1200, fit_heat_capacity(calcite_heat_capacity, T0, 1200), "jacobs")]

@@ -72,17 +72,23 @@ def build_dissolved(species, built):
         else:
             parts, log_k, change = how[1:4]
             sources = [how[4]]
-        made = {ident: built(ident) for ident in parts}
-        h = sum(nu * made[ident]["h"] for ident, nu in parts.items()) + change
-        s = sum(nu * made[ident]["s"] for ident, nu in parts.items())
-        s += 1000 * (change + RT_LN_10 * log_k) / T0
+        h, s = formed((parts, log_k, change), built)
         if cp is None:
-            cp = sum(nu * heat_capacity(made[ident]) for ident, nu in parts.items())
+            cp = sum(nu * heat_capacity(built(ident)) for ident, nu in parts.items())
             source = sources[0]
     pieces = [constant_piece(low, high, cp or 0.0, source or sources[0])]
     h, s = round(h, 3), round(s, 3)
     join(pieces, h, s)
     return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": []}
+
+
+def formed(equilibrium, built):
+    """ΔfH° and S° of what forms from other species by an equilibrium: parts, log10 K, ΔrH."""
+    parts, log_k, change = equilibrium
+    made = {ident: built(ident) for ident in parts}
+    h = sum(nu * made[ident]["h"] for ident, nu in parts.items()) + change
+    s = sum(nu * made[ident]["s"] for ident, nu in parts.items())
+    return round(h, 3), round(s + 1000 * (change + RT_LN_10 * log_k) / T0, 3)
 
 
 def heat_capacity(made):
