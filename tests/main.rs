@@ -22,6 +22,7 @@ mod laws_reaction;
 mod laws_rest;
 mod library;
 mod library_constants;
+mod library_dissolved;
 mod mistakes;
 mod nudges;
 mod quantity;

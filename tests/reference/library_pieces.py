@@ -50,6 +50,14 @@ def rounded(value):
     return float(f"{value:.14g}")
 
 
+def written(value):
+    return float(f"{value:.10g}")
+
+
+def constant_piece(low, high, heat_capacity, source):
+    return Piece(low, high, [0, 0, written(heat_capacity / R_EXACT), 0, 0, 0, 0], source)
+
+
 def join(pieces, h298, s298, transitions=()):
     """Anchors the piece that holds 298.15 K, then joins the others to it.
 
@@ -136,8 +144,8 @@ def constrained(rows, basis, blunt=()):
     return [by_power.get(p, 0.0) for p in POWERS]
 
 
-def fit_heat_capacity(formula, low, high):
-    """Coefficients of Cp/R that follow another formula of Cp within 0.01 %."""
+def fit_heat_capacity(formula, low, high, within=1e-4):
+    """Coefficients of Cp/R that follow another formula of Cp."""
     grid = np.linspace(low, high, 200)
     scale = [1 / 1000.0**p for p in POWERS]
     matrix = np.array([[t**p * s for p, s in zip(POWERS, scale)] for t in grid])
@@ -145,7 +153,7 @@ def fit_heat_capacity(formula, low, high):
     coefficients = [float(f"{value * s:.10g}") for value, s in zip(solution, scale)]
     piece = Piece(low, high, coefficients, "")
     worst = max(abs(piece.cp(t) / formula(t) - 1) for t in grid)
-    assert worst < 1e-4, f"the fit leaves the formula by {worst:.2%}"
+    assert worst < within, f"the fit leaves the formula by {worst:.2%}"
     return coefficients
 
 
