@@ -171,6 +171,7 @@ codes! {
         NoLiquidWater = "no-liquid-water",
         RemainderOfSolution = "remainder-of-solution",
         PhOfAnother = "ph-of-another",
+        TemperatureOutsideSolution = "temperature-outside-solution",
     }
 }
 
@@ -192,6 +193,12 @@ codes! {
         SolutesHoldPressure = "solutes-hold-pressure",
         NoReaction = "no-reaction",
         ManyReactions = "many-reactions",
+        LiquidWithSolutes = "liquid-with-solutes",
+        GasHoldsSolvent = "gas-holds-solvent",
+        WaterNotPositive = "water-not-positive",
+        ModelNeedsWater = "model-needs-water",
+        ChargeOutOfRange = "charge-out-of-range",
+        IonSizeOutOfRange = "ion-size-out-of-range",
     }
 }
 

@@ -130,5 +130,9 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "The {counted} that comes with the nitrogen is more than all that was read as {species}.",
             "Take the mark off if the gas does not come from air, or check the reading.",
         ),
+        C::TemperatureOutsideSolution => (
+            "At {found} °C there is no model of the solution; it holds from {low} °C to {high} °C.",
+            "Check the temperature, or take the solution as ideal.",
+        ),
     }
 }
