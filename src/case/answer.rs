@@ -18,11 +18,16 @@ pub(super) fn report(found: &Findings) -> Report {
     let temperature_k = found.question.temperature.value_si;
     let pressure_pa =
         reading.map_or(found.question.pressure_pa(), |reading| reading.setting.pressure_pa);
+    let activities = reading.and_then(|reading| reading.activities.as_ref());
+    let dissolved = activities.and_then(|activities| activities.solution);
     Report {
         temperature_k,
         pressure_pa,
         volume_m3: reading.and_then(|reading| reading.setting.volume_m3),
-        ionic_strength_mol_per_kg: None,
+        ionic_strength_mol_per_kg: dissolved.map(|found| found.ionic_strength_mol_per_kg),
+        charge_balance: reading.and_then(amounts::charges),
+        water_activity: dissolved.map(|found| libm::exp(found.ln_water_activity)),
+        saturation: reading.map_or_else(Vec::new, |reading| amounts::saturation(found, reading)),
         reactions: vec![reaction(found, pressure_pa)],
         basis_mol: reading.map_or(0.0, |reading| reading.setting.basis_mol()),
         basis: reading.map_or("none", |reading| basis_name(reading.setting.basis)),

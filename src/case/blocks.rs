@@ -4,10 +4,12 @@ use super::participants::Participant;
 use super::question::Question;
 use super::reading_remarks::lost_for_good;
 use crate::mixture::{
-    Feed, GasMixture, Held, LiquidMixture, Solution, gas_mixture, liquid_mixture, pure_phases,
-    solution,
+    Entry, Feed, GasMixture, Held, Ion, LiquidMixture, Solution, SolutionLaw, SolutionModel,
+    SolutionReading, Stated, gas_mixture, ion_size_pm, ionic_strength_mol_per_kg, liquid_mixture,
+    pure_phases, solution,
 };
 use crate::problem::{NoteCode, Outcome, Problem, Remark};
+use crate::quantity::Measure;
 use crate::reaction::{Phase, Species};
 
 /// Where a participant stands.
@@ -63,8 +65,10 @@ impl Blocks {
                 .map_err(|found| at_block(found, "reading.liquid"))
         });
         let temperature_k = question.temperature.value_si;
-        let dissolved =
-            question.solution.as_ref().map(|dissolved| solution(dissolved, temperature_k, 1.0));
+        let dissolved = question
+            .solution
+            .as_ref()
+            .map(|dissolved| dissolved_in_water(question, dissolved, temperature_k));
         // With the volume known as well, even fractions stand for amounts.
         let measured = gas.as_ref().map(|gas| gas.basis).filter(|_| question.volume.is_none());
         let pure = pure_phases(&question.pure, measured);
@@ -156,6 +160,47 @@ impl Blocks {
         }
         found
     }
+}
+
+/// The solution; a pH tells an activity, so that the amount of H+ and the ionic strength are found
+/// together.
+fn dissolved_in_water(
+    question: &Question,
+    reading: &SolutionReading,
+    temperature_k: f64,
+) -> Outcome<Solution> {
+    const ROUNDS_AT_MOST: u32 = 60;
+    let mut found = solution(reading, temperature_k, 1.0)?;
+    let by_ph = |entry: &Entry| match &entry.stated {
+        Stated::Quantity(quantity) => quantity.measure == Measure::Ph,
+        _ => false,
+    };
+    if question.solution_model == SolutionModel::Ideal || !reading.entries.iter().any(by_ph) {
+        return Ok(found);
+    }
+    let law = SolutionLaw::new(question.solution_model, temperature_k)?;
+    let mut before = 1.0;
+    for _ in 0..ROUNDS_AT_MOST {
+        let solutes = found.amounts_mol.iter();
+        let solutes = solutes.map(|(species, amount)| (ion(species), amount / found.water_kg));
+        let strength = ionic_strength_mol_per_kg(solutes);
+        let hydrogen =
+            Ion { charge: 1, size_pm: ion_size_pm("H", 1).unwrap_or(Ion::USUAL_SIZE_PM) };
+        let coefficient = libm::exp(law.ln_coefficient(hydrogen, strength));
+        found = solution(reading, temperature_k, coefficient)?;
+        if (coefficient / before - 1.0).abs() < 1e-14 {
+            break;
+        }
+        before = coefficient;
+    }
+    Ok(found)
+}
+
+/// What the models of a solution need to know of a species.
+pub(super) fn ion(species: &Species) -> Ion {
+    let charge = species.formula.charge();
+    let plain = species.formula.text().split('^').next().unwrap_or_default();
+    Ion { charge, size_pm: ion_size_pm(plain, charge).unwrap_or(Ion::USUAL_SIZE_PM) }
 }
 
 fn is_water(species: &Species) -> bool {

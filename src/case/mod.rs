@@ -48,7 +48,7 @@ pub use report::{
     SourceReport, StepReport, TermReport,
 };
 pub use report_amounts::{
-    BalanceReport, Conversion, CurveReport, ElementReport, Limit, MissingReport, RestReport,
-    RestoredReport, SpeciesReport, ValleyReport,
+    BalanceReport, ChargeReport, Conversion, CurveReport, ElementReport, Limit, MissingReport,
+    RestReport, RestoredReport, SaturationReport, SpeciesReport, ValleyReport,
 };
 pub use value::Value;

@@ -6,7 +6,8 @@ use super::judgement_report::JudgementReport;
 use super::nudges::NudgeReport;
 use super::participants::Participant;
 use super::report_amounts::{
-    BalanceReport, Conversion, MissingReport, RestReport, SpeciesReport, ValleyReport,
+    BalanceReport, ChargeReport, Conversion, MissingReport, RestReport, SaturationReport,
+    SpeciesReport, ValleyReport,
 };
 
 /// Everything that is known of one case.
@@ -18,8 +19,14 @@ pub struct Report {
     pub pressure_pa: Option<f64>,
     /// The volume of the gas on the basis below, where one is known.
     pub volume_m3: Option<f64>,
-    /// The ionic strength; null while no solution is read.
+    /// The ionic strength; null where no solution is read.
     pub ionic_strength_mol_per_kg: Option<f64>,
+    /// The charges of the solution; null where none is read.
+    pub charge_balance: Option<ChargeReport>,
+    /// The activity of the water in the solution; null where none is read.
+    pub water_activity: Option<f64>,
+    /// How far the solution is from being saturated with a solid of the reaction.
+    pub saturation: Vec<SaturationReport>,
     /// One for each reaction.
     pub reactions: Vec<ReactionReport>,
     /// The total amount that the amounts below stand for.

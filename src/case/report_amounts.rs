@@ -23,6 +23,10 @@ pub struct SpeciesReport {
     pub now_fraction: Option<f64>,
     /// The fraction of its phase at rest.
     pub rest_fraction: Option<f64>,
+    /// The molality now, for a solute.
+    pub now_mol_per_kg: Option<f64>,
+    /// The molality at rest, for a solute.
+    pub rest_mol_per_kg: Option<f64>,
     /// ln of the activity now.
     pub now_ln_activity: Option<f64>,
     /// ln of the activity at rest.
@@ -154,4 +158,24 @@ pub struct Limit {
     pub side: &'static str,
     /// What runs out there.
     pub species: Vec<String>,
+}
+
+/// How far a solution is from being saturated with a solid.
+#[derive(Debug, Clone, Serialize)]
+pub struct SaturationReport {
+    /// The solid.
+    pub species: String,
+    /// log10(Q/K) of dissolving one of it: above zero it may precipitate, below it dissolves.
+    pub saturation_index: f64,
+}
+
+/// The charges of a solution as read.
+#[derive(Debug, Clone, Copy, Serialize)]
+pub struct ChargeReport {
+    /// Σ z m of the cations.
+    pub positive_eq_per_kg: f64,
+    /// Σ |z| m of the anions.
+    pub negative_eq_per_kg: f64,
+    /// The first less the second.
+    pub difference: f64,
 }

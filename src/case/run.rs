@@ -1,6 +1,7 @@
 //! The run from a case to its report: each room is asked once, in the order of the rooms.
 
 use super::asker::missing_conversion;
+use super::blocks::ion;
 use super::constant_of::{constant_of, constant_of_reading, k_temperature};
 use super::judgement::{Judgement, judgement};
 use super::missing::{Missing, find_missing};
@@ -13,9 +14,11 @@ use super::{answer, read};
 use crate::advice::{Approach, Judged, NoApproach, approach};
 use crate::constant::{Constant, ConstantAt};
 use crate::equilibrium::{
-    Affinity, Kind, Quotient, Rest, RestOutcome, State, System, affinity, quotient, rest,
+    Activities, Affinity, Quotient, Rest, RestOutcome, State, System, activities, affinity,
+    quotient, rest,
 };
 use crate::library::Temperature;
+use crate::mixture::Ion;
 use crate::problem::{Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase};
 
@@ -65,6 +68,8 @@ pub(super) struct ReadingFindings {
     /// Amounts in mol as the engine sees them; an ample phase has a nominal one.
     pub amounts_mol: Vec<f64>,
     pub quotient: Quotient,
+    /// The activities as read.
+    pub activities: Option<Activities>,
     pub affinity: Affinity,
     pub rest: Rest,
     pub approach: Result<Approach, NoApproach>,
@@ -160,7 +165,10 @@ pub(super) fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid
     let nu: Vec<f64> = setting.participants.iter().map(|participant| participant.nu).collect();
     let amounts_mol = setting.amounts_mol();
     let at_equation = |found| at_field(found, EQUATION);
-    let system = System::new(&kinds, &nu).map_err(at_equation)?;
+    let ions: Vec<Ion> = setting.participants.iter().map(|one| ion(&one.species)).collect();
+    let system = System::new(&kinds, &nu)
+        .and_then(|system| system.with_solution(question.solution_model, &ions))
+        .map_err(at_equation)?;
     let temperature_k = question.temperature.value_si;
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let quotient = quotient(&system, &state).map_err(at_equation)?;
@@ -176,6 +184,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
     let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
+    let activities = activities(&system, &state).ok();
     let ln_q = answer::ln_q(quotient);
     let approach = approach(constant, ln_q, temperature_k);
     let now = Judged {
@@ -200,6 +209,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         setting,
         system,
         quotient,
+        activities,
         affinity,
         rest,
         approach,
