@@ -19,8 +19,8 @@ impl Shares<'_> {
     fn fraction(&self, i: usize, amount_mol: f64) -> Option<f64> {
         match self.kinds[i] {
             Kind::Gas if self.gas_mol > 0.0 => Some(amount_mol / self.gas_mol),
-            Kind::Gas | Kind::Solute => None,
-            Kind::Pure | Kind::Ample => None,
+            Kind::Gas | Kind::Solute | Kind::Liquid => None,
+            Kind::Pure | Kind::Ample | Kind::Solvent => None,
         }
     }
 
@@ -29,8 +29,8 @@ impl Shares<'_> {
             Kind::Gas if self.gas_mol > 0.0 => {
                 Some(ln_mol? - libm::log(self.gas_mol) + self.ln_pressure)
             }
-            Kind::Pure | Kind::Ample => Some(0.0),
-            Kind::Gas | Kind::Solute => None,
+            Kind::Pure | Kind::Ample | Kind::Solvent => Some(0.0),
+            Kind::Gas | Kind::Solute | Kind::Liquid => None,
         }
     }
 }
@@ -43,8 +43,10 @@ fn gas_total(kinds: &[Kind], amounts_mol: &[f64]) -> f64 {
 /// The pressure at rest: held, or what the gas then makes in its volume.
 fn rest_pressure_pa(found: &Findings, reading: &ReadingFindings) -> Option<f64> {
     match reading.setting.hold {
-        Hold::Pressure { .. } => reading.setting.pressure_pa,
-        Hold::Volume { volume_m3 } => {
+        Hold::Pressure { .. } | Hold::PressureAndSolvent { .. } | Hold::Solvent { .. } => {
+            reading.setting.pressure_pa
+        }
+        Hold::Volume { volume_m3 } | Hold::VolumeAndSolvent { volume_m3, .. } => {
             let gas_mol = gas_total(reading.system.kinds(), &reading.rest.amounts_mol);
             let rt = GAS_CONSTANT_J_PER_MOL_K * found.question.temperature.value_si;
             (gas_mol > 0.0).then(|| gas_mol * rt / volume_m3)

@@ -194,8 +194,9 @@ fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
         return Vec::new();
     }
     let held = match reading.setting.hold {
-        Hold::Pressure { .. } => "temperature and pressure",
-        Hold::Volume { .. } => "temperature and volume",
+        Hold::Pressure { .. } | Hold::PressureAndSolvent { .. } => "temperature and pressure",
+        Hold::Volume { .. } | Hold::VolumeAndSolvent { .. } => "temperature and volume",
+        Hold::Solvent { .. } => "temperature",
     };
     let mut lines = vec![(
         "rest",

@@ -156,6 +156,7 @@ codes! {
         FractionOfPurePhase = "fraction-of-pure-phase",
         NoCommonMeasure = "no-common-measure",
         VacuumTooDeep = "vacuum-too-deep",
+        TemperatureOutsideSolution = "temperature-outside-solution",
     }
 }
 
@@ -177,6 +178,12 @@ codes! {
         SolutesHoldPressure = "solutes-hold-pressure",
         NoReaction = "no-reaction",
         ManyReactions = "many-reactions",
+        LiquidWithSolutes = "liquid-with-solutes",
+        GasHoldsSolvent = "gas-holds-solvent",
+        WaterNotPositive = "water-not-positive",
+        ModelNeedsWater = "model-needs-water",
+        ChargeOutOfRange = "charge-out-of-range",
+        IonSizeOutOfRange = "ion-size-out-of-range",
     }
 }
 

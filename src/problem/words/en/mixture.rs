@@ -84,5 +84,9 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "The gauge reading is below zero by more than the atmosphere; nothing would be left.",
             "Check the reading and the atmosphere, or write an absolute pressure with (a).",
         ),
+        C::TemperatureOutsideSolution => (
+            "At {found} °C there is no model of the solution; it holds from {low} °C to {high} °C.",
+            "Check the temperature, or take the solution as ideal.",
+        ),
     }
 }
