@@ -140,6 +140,9 @@ def problems_of(report):
             line += f"\n    {low:g} to {high:g} K: Cp {cp:.2%}, H {h:.4f} kJ/mol, S {s:.4f} J/(mol K), between rows {swing:.2%}"
             if cp > 0.003 or h > 0.012 or s > 0.012 or swing > 0.02:
                 found.append(f"the fit of {species.id} from {low} to {high} K is poor")
+        g = gibbs_apart(species, made)
+        if g is not None and abs(g) > SECOND_LIMITS[0] and not species.apart:
+            found.append(f"{species.id}: ΔfG° leaves the CRC table's by {g:.2f} kJ/mol")
         if species.phase == "aq":
             more, wrong = solution.problems_of_dissolved(species, made, built)
             line += "\n" + more
@@ -157,6 +160,39 @@ def problems_of(report):
                 found.append(f"{species.id}: the Gibbs function leaves JANAF's by {worst:.3f} at {at} K")
         print(line)
     return found
+
+
+def gibbs_apart(species, made):
+    """ΔfG° from ΔfH° and S° here less that of the CRC table, kJ/mol, or None."""
+    g = published.crc_gibbs(species.cas, species.phase)
+    if g is None or species.form == "monoclinic":
+        return None
+    return solution.formation_gibbs(species, made) - g
+
+
+def compared_with(report):
+    """For each second source the worst differences, and the species that have none."""
+    worst, alone = {}, []
+    for species, made, _, _ in report:
+        others = second_figures(species)
+        better = published.atct(species.cas, species.phase)
+        others += [("ATcT", better[0], None)] if better else []
+        own = {key.upper() for key in made["sources"]}
+        others = [row for row in others if row[0].upper() not in own]
+        if not others and not species.element and species.phase != "aq":
+            alone.append(species.id)
+        g = gibbs_apart(species, made)
+        if g is not None and not species.apart:
+            worst.setdefault(("CRC", "ΔfG°"), []).append((abs(g), species.id))
+        for name, h, s in others:
+            for what, here, there in (("ΔfH°", made["h"], h), ("S°", made["s"], s)):
+                if there is not None and not species.apart:
+                    rows = worst.setdefault((name, what), [])
+                    rows.append((abs(here - there), species.id))
+    for (name, what), rows in sorted(worst.items()):
+        text = ", ".join(f"{ident} {apart:.2f}" for apart, ident in sorted(rows)[-3:][::-1])
+        print(f"{name} {what}: {len(rows)} compared and not set apart, the worst: {text}")
+    print(f"no second source: {', '.join(alone)}")
 
 
 def read(name):
@@ -222,6 +258,7 @@ def main():
     found += check_tables(rows)
     if LOG_KF.read_text().splitlines() != log_kf_lines():
         found.append("janaf_log_kf.tsv differs from the published tables")
+    compared_with(report)
     for line in found:
         print("WRONG:", line)
     print(f"{len(rows['species'])} species, {len(rows['heat'])} pieces, {len(found)} problems")

@@ -8,7 +8,7 @@ from library_condensed import CONDENSED
 from library_dissolved import DISSOLVED
 from library_gases import GASES
 from library_pieces import Piece, constant_piece, fit, fit_heat_capacity, join, written
-from library_solution import build_dissolved, formed
+from library_solution import build_dissolved, formation_entropy, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 
@@ -70,8 +70,11 @@ def build(species):
         a = [inverse / R_EXACT, 0, const / R_EXACT, linear / R_EXACT, square / R_EXACT, 0, 0]
         pieces = [Piece(how[1], high, [written(v) for v in a], "perry")]
         sources += ["crc", "perry"]
-    elif how[0] == "constant":
+    elif how[0] in ("constant", "constant_gibbs"):
         h, s = published.crc(cas, phase)
+        if how[0] == "constant_gibbs":
+            g = published.crc_gibbs(cas, phase)
+            h = round(g + T0 * formation_entropy(species.formula, s), 2)
         pieces = [constant_piece(how[1], how[2], published.crc_heat_capacity(cas, phase), "crc")]
         sources.append("crc")
     elif how[0] == "recalled":

@@ -2,6 +2,9 @@
 
 from library_species import Species, fitted, gas, trc
 
+# Traps of the carrier of TM-4513, found by comparing: the file of C2H2 holds vinylidene, that of Zn
+# 1036.8 kJ/mol and the entropy of an ion, that of C3H6O propylene oxide, those of C3H6 and C4H8
+# the rings. Those species are taken from elsewhere.
 GASES = [
     gas("H2", "H2", "hydrogen", "1333-74-0", "H-050", element=True),
     gas("O2", "O2", "oxygen", "7782-44-7", "O-029", element=True),
@@ -20,8 +23,8 @@ GASES = [
     gas("CH3OH", "C_H4_O", "methanol vapour;methanol;methyl alcohol", "67-56-1"),
     gas("CH2O", "C_H2_O", "formaldehyde;methanal", "50-00-0", "C-061",
         apart="JANAF keeps an older enthalpy of formation, -115.90 kJ/mol"),
-    gas("HCOOH", "C_H2_O2", "formic acid vapour;formic acid", "64-18-6", floor=0.5),
-    gas("C2H5OH", "C2_H6_O", "ethanol vapour;ethanol;ethyl alcohol", "64-17-5"),
+    gas("HCOOH", "C_H2_O2", "formic acid vapour;formic acid;CH2O2", "64-18-6", floor=0.5),
+    gas("C2H5OH", "C2_H6_O", "ethanol vapour;ethanol;ethyl alcohol;C2H6O", "64-17-5"),
     Species("CH3OCH3", "g", "dimethyl ether;methoxymethane", "115-10-6", ("poling",)),
     gas("SO2", "O2_S", "sulfur dioxide;sulphur dioxide", "7446-09-5", "O-034"),
     gas("SO3", "O3_S", "sulfur trioxide;sulphur trioxide", "7446-11-9", "O-058", floor=0.4),
@@ -69,7 +72,8 @@ GASES = [
         apart="JANAF and TM-4513 keep an estimate, -101.7 kJ/mol"),
     gas("CH3Cl", "C_H3_Cl", "chloromethane;methyl chloride", "74-87-3", "C-063"),
     gas("CH2Cl2", "C_H2_Cl2", "dichloromethane vapour;methylene chloride", "75-09-2", "C-059"),
-    gas("CHCl3", "C_H_Cl3", "chloroform vapour;trichloromethane", "67-66-3", "C-048"),
+    gas("CHCl3", "C_H_Cl3", "chloroform vapour;trichloromethane", "67-66-3", "C-048",
+        apart="the CRC table's ΔfG° is far from its own ΔfH° and S°"),
     gas("CCl4", "C_Cl4", "carbon tetrachloride vapour;tetrachloromethane", "56-23-5", "C-028",
         apart="ATcT lowers the enthalpy of formation by 1.8 kJ/mol"),
     gas("C4H10", "C4_H10", "butane;n-butane", "106-97-8", form="butane"),
@@ -78,7 +82,7 @@ GASES = [
     gas("C7H8", "C7_H8", "toluene vapour;methylbenzene", "108-88-3"),
     gas("C8H8", "C8_H8", "styrene vapour", "100-42-5", floor=1.5),
     gas("C8H10", "C8_H10", "ethylbenzene vapour", "100-41-4", form="ethylbenzene", floor=1.0),
-    gas("CH3COOH", "C2_H4_O2", "acetic acid vapour", "64-19-7", floor=1.5),
+    gas("CH3COOH", "C2_H4_O2", "acetic acid vapour;C2H4O2", "64-19-7", floor=1.5),
     gas("CH3CHO", "C2_H4_O", "acetaldehyde;ethanal", "75-07-0"),
     gas("C3H7OH", "C3_H8_O", "2-propanol vapour;isopropanol vapour", "67-63-0", form="2-propanol"),
     gas("C6H5OH", "C6_H6_O", "phenol vapour", "108-95-2", floor=1.5),
@@ -118,9 +122,9 @@ GASES = [
     trc("C2H4Cl2", "1,2-dichloroethane vapour;ethylene dichloride vapour", "107-06-2",
         form="1,2-dichloroethane",
         apart="ATcT has -130.1 kJ/mol, the CRC table -126.4 and 2.4 J/(mol K) more"),
-    trc("CH3COCH3", "acetone vapour;propanone vapour", "67-64-1"),
+    trc("CH3COCH3", "acetone vapour;propanone vapour;C3H6O", "67-64-1"),
     trc("CH3COOCH3", "methyl acetate vapour", "79-20-9", floor=2.0),
-    trc("CH3COOC2H5", "ethyl acetate vapour", "141-78-6", floor=2.0,
+    trc("CH3COOC2H5", "ethyl acetate vapour;C4H8O2", "141-78-6", floor=2.0,
         apart="Yaws has 2.5 J/(mol K) less; the vapour pressure agrees with Yaws within 0.1"),
     trc("HCOOCH3", "methyl formate vapour", "107-31-3", outliers=("CRC", "Yaws"),
         apart="the CRC table has 285.3 J/(mol K) and Yaws -349.7 kJ/mol, each alone"),

@@ -86,6 +86,13 @@ def crc_heat_capacity(cas, phase):
     return number(row[f"Cp{phase}"]) if row and phase != "aq" else None
 
 
+def crc_gibbs(cas, phase):
+    """ΔfG° in kJ/mol of the CRC table, None where it has none."""
+    row = one("Heat Capacity/CRC Standard Thermodynamic Properties of Chemical Substances.tsv", cas)
+    g = number(row[f"Gf{phase}"]) if row and phase != "aq" else None
+    return None if g is None else g / 1000
+
+
 def atct(cas, phase):
     """ΔfH° and its 95 % half-width in kJ/mol, from version 1.112 of the ATcT, or None."""
     if phase not in ("g", "l"):
