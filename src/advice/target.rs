@@ -87,7 +87,12 @@ const REACHED: f64 = 1e-9;
 /// two-hundredth of the range with no turn visible between the samples around them are not seen.
 pub fn target(knobs: &mut Knobs, goal: &Goal) -> Target {
     let Goal { knob, reach, value, .. } = *goal;
-    let mut off = |at: f64| reach.of(knobs, &[(knob, at)]).map(|number| number - value);
+    let mut off = |at: f64| {
+        let number = reach.of(knobs, &[(knob, at)])?;
+        let off = number - value;
+        // The same to rounding is the same, so that a level stretch has no zeros within it.
+        Some(if off.abs() <= 4.0 * f64::EPSILON * value.abs() { 0.0 } else { off })
+    };
     let points = sampled(&mut off, goal.from, goal.to, SAMPLES);
     let numbers = || points.iter().filter_map(|(_, off)| *off);
     let spread =
@@ -95,7 +100,19 @@ pub fn target(knobs: &mut Knobs, goal: &Goal) -> Target {
     let enough = if spread.is_finite() { REACHED * spread.max(1e-3 * value.abs()) } else { 0.0 };
     let mut found = Found { settings: Vec::new(), jumps: Vec::new(), near: None };
     for (place, &(x, here)) in points.iter().enumerate() {
-        let Some(here) = here else { continue };
+        let Some(here) = here else {
+            // One sample without a number between two of different sign: any extent is at rest
+            // there, and the number jumps.
+            let before = place.checked_sub(1).map(|place| points[place]);
+            if let (Some((low, Some(at_low))), Some(&(high, Some(at_high)))) =
+                (before, points.get(place + 1))
+            {
+                if at_low * at_high < 0.0 {
+                    found.root(&mut off, (low, at_low), (high, at_high), enough);
+                }
+            }
+            continue;
+        };
         found.look(x, here);
         let next = points.get(place + 1).and_then(|&(next_x, off)| Some((next_x, off?)));
         if here == 0.0 {
