@@ -28,6 +28,10 @@ use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::System;
 
+/// Where a species' own effect on Q and its thinning of the others cancel to this share, the rest of
+/// it is the rounding of the amounts.
+const ROUNDING: f64 = 1e-14;
+
 /// A state of rest, to be differentiated.
 #[derive(Debug, Clone, Copy)]
 pub(super) struct Local<'a> {
@@ -108,7 +112,9 @@ impl Local<'_> {
                 }
                 let (nu, amount) =
                     (*self.system.nu().get(species)?, *self.amounts_mol.get(species)?);
-                self.dilution(kind) - if nu == 0.0 { 0.0 } else { nu / amount }
+                let own = if nu == 0.0 { 0.0 } else { nu / amount };
+                let drive = self.dilution(kind) - own;
+                if drive.abs() <= ROUNDING * own.abs() { 0.0 } else { drive }
             }
             Knob::InertAtPressure => self.dilution(Kind::Gas),
             Knob::InertAtVolume => 0.0,

@@ -102,7 +102,8 @@ pub(super) fn extent_change(
     }
     let Some((size, change)) = scarcest else { return plain_mol };
     if change.abs() <= ROUNDING_SHARE * size {
-        return derivative.map_or(change, |slope| slope * step);
+        return derivative.map_or(change, |slope| slope * step) + 0.0;
     }
-    change
+    // Adding zero takes the sign off a zero.
+    change + 0.0
 }

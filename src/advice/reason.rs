@@ -88,7 +88,7 @@ pub(super) fn reason(
         Some(_) => {}
     }
     let moved = turned.direction.is_some();
-    let spent = || spent(local, before.affinity.finite().is_some_and(|over_rt| over_rt > 0.0));
+    let forward = before.affinity.finite().is_some_and(|over_rt| over_rt > 0.0);
     match before.outcome {
         RestOutcome::NothingCanMove => alone(match turned.knob {
             Knob::Amount(species) if moved => Reason::of(C::Opens, species),
@@ -96,7 +96,9 @@ pub(super) fn reason(
         }),
         RestOutcome::AnyExtentIsAtRest => alone(Reason::new(C::AnyExtent)),
         RestOutcome::PhaseExhausted | RestOutcome::RanToItsLimit => {
-            let Some(species) = spent() else { return alone(mechanism()) };
+            let Some(species) = spent(local, forward, turned.knob) else {
+                return alone(mechanism());
+            };
             if turned.knob == Knob::Amount(species) && moved && turned.step > 0.0 {
                 return alone(Reason::of(C::Needed, species));
             }
@@ -128,13 +130,17 @@ pub(super) fn reason(
     }
 }
 
-/// The species that is used up and stops the reaction this way.
-fn spent(local: &Local, forward: bool) -> Option<usize> {
+/// The species that is used up and stops the reaction this way; of two, the one that is not added.
+fn spent(local: &Local, forward: bool, knob: Knob) -> Option<usize> {
     let used_up = if forward { -1.0 } else { 1.0 };
-    let each = local.system.nu().iter().zip(local.system.kinds()).zip(local.amounts_mol);
-    let mut gone = each
-        .map(|((nu, kind), amount)| nu * used_up > 0.0 && *kind != Kind::Ample && *amount == 0.0);
-    gone.position(|gone| gone)
+    let gone = |species: &usize| {
+        local.system.nu()[*species] * used_up > 0.0
+            && local.system.kinds()[*species] != Kind::Ample
+            && local.amounts_mol[*species] == 0.0
+    };
+    let mut all = (0..local.amounts_mol.len()).filter(gone);
+    let first = all.next()?;
+    if knob == Knob::Amount(first) { all.next().or(Some(first)) } else { Some(first) }
 }
 
 fn mechanism(knobs: &Knobs, local: &Local, turned: &Turned) -> Reason {
