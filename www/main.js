@@ -225,12 +225,12 @@ async function start() {
 }
 
 /**
- * @param {'ready' | 'update'} standing
+ * @param {'file' | 'ready' | 'update'} standing
  * @param {() => void} [takeOver]
  */
 function tellOffline(standing, takeOver) {
-  if (standing === 'ready') {
-    byId('offline', HTMLElement).textContent = 'Kept in this browser: works without a network.';
+  if (standing !== 'update') {
+    byId('offline', HTMLElement).textContent = `${standing === 'file' ? 'All of it is in this file' : 'Kept in this browser'}: works without a network.`;
     return;
   }
   byId('update-line', HTMLElement).hidden = false;
