@@ -9,6 +9,12 @@ const PREFIX = 'shiftgauge.kept.';
  * @property {number} saved  when, in ms since 1970
  */
 
+/**
+ * Whether a place of the storage holds a kept case.
+ * @param {string} key
+ */
+export const isKept = (key) => key.startsWith(PREFIX);
+
 /** @typedef {'kept' | 'full' | 'blocked'} Outcome */
 
 /**
@@ -19,7 +25,7 @@ export function list() {
   try {
     const storage = window.localStorage;
     const keys = Array.from({ length: storage.length }, (_, index) => storage.key(index) ?? '');
-    return keys.filter((key) => key.startsWith(PREFIX))
+    return keys.filter(isKept)
       .flatMap((key) => read(key.slice(PREFIX.length)) ?? [])
       .sort((a, b) => a.name.localeCompare(b.name));
   } catch {

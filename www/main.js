@@ -5,7 +5,7 @@ import { byId } from './dom.js';
 import { listen } from './events.js';
 import { firstCase } from './examples.js';
 import { foldAll } from './folds.js';
-import { createHistory } from './history.js';
+import { createMemory } from './memory.js';
 import { forget, keep, recall } from './recall.js';
 import { textFromHash } from './link.js';
 import { keepOffline } from './offline/keep.js';
@@ -30,6 +30,7 @@ import * as solids from './views/solids.js';
 import * as solution from './views/solution.js';
 import * as sources from './views/sources.js';
 import * as spoken from './views/spoken.js';
+import * as standing from './views/standing.js';
 import * as strip from './views/strip.js';
 import * as undo from './views/undo.js';
 import * as valley from './views/valley.js';
@@ -75,23 +76,7 @@ function readForm() {
 /** The case that was tried last, as text. */
 let tried = '';
 
-const history = createHistory({ load: () => recall('steps'), store: (text) => keep('steps', text) });
-/** Whether it was said that this browser keeps nothing. */
-let saidUnkept = false;
-
-/** The field in hand, so that typing in it is one step back. */
-function fieldInHand() {
-  const field = document.activeElement;
-  return field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement ? field.dataset.field ?? field.id : '';
-}
-
-/** @param {string} text */
-function keepCase(text) {
-  history.note(text, fieldInHand());
-  if (keep('case', text) || saidUnkept) return;
-  saidUnkept = true;
-  tell('This browser keeps nothing for this page: its storage is full or blocked. Save the case to a file before you close the page.', true);
-}
+const memory = createMemory(tell);
 
 /** Answers the case as the form reads now. */
 function answer() {
@@ -103,7 +88,7 @@ function answer() {
     return;
   }
   tried = text;
-  keepCase(text);
+  memory.keepCase(text);
   if (text === state.get().trapped) {
     state.set({ question, current: false, problems: [] });
     return;
@@ -210,8 +195,9 @@ async function start() {
   kept.connect({ current: readForm, openText: (text, said) => cases.openText(text, said, actions) });
   paste.connect({ current: readForm, change: (question, said) => { change(question); tell(said); } });
   undo.connect({
-    back: () => step(history.back()), forward: () => step(history.forward()),
-    canGoBack: history.canGoBack, canGoForward: history.canGoForward,
+    ...memory.history,
+    back: () => step(memory.history.back()),
+    forward: () => step(memory.history.forward()),
   });
   listen({
     changed() {
@@ -221,20 +207,7 @@ async function start() {
     linked: (hash) => void openLink(hash),
   });
   await openLink(window.location.hash);
-  void keepOffline(tellOffline);
-}
-
-/**
- * @param {'ready' | 'update'} standing
- * @param {() => void} [takeOver]
- */
-function tellOffline(standing, takeOver) {
-  if (standing === 'ready') {
-    byId('offline', HTMLElement).textContent = 'Kept in this browser: works without a network.';
-    return;
-  }
-  byId('update-line', HTMLElement).hidden = false;
-  byId('update', HTMLButtonElement).addEventListener('click', () => takeOver?.(), { once: true });
+  void keepOffline(standing.tell);
 }
 
 start().catch((thrown) => {

@@ -17,6 +17,9 @@ const HAS_NUMBER = /^[<~]?\s*[-+\u2212]?[.,]?\d/;
 const BARE_NUMBER = /^[<]?\s*[.,]?\d[\d.,\s]*(?:e[-+]?\d+)?(?:\s*(?:±|\+\/-)\s*[\d.,]+)?$/i;
 /** A unit that stands in a heading with its name: `CO [%]`, `CO (vol %)`, `CO, ppm`, `CO %`. */
 const HEADING = /^(.*?)\s*(?:\[\s*([^\]]*)\]|\(\s*((?:(?:vol|mol)[ .-]*)?(?:%|ppm\w?)|[^()]*\/[^()]*|bar|kPa)\s*\)|[,;]\s*(\S.*)|\s(%|ppm\w?|vol\s?%|mol\s?%|°C|K|bar\([ga]\)|bar|kPa))$/i;
+/** A heading that is a unit and nothing else. */
+const UNIT = /^(?:(?:vol|mol)[ .-]?)?%$|^ppm\w?$|^bar(?:\([ga]\))?$|^kPa$/i;
+const FURTHER = 'the further rows';
 /** Above this, bare numbers cannot be fractions of one gas. */
 const MOST_OF_FRACTIONS = 1.05;
 
@@ -27,12 +30,15 @@ const MOST_OF_FRACTIONS = 1.05;
  * @returns {Understood}
  */
 export function readPasted(text, formulaOf) {
-  const lines = text.replace(/\r\n?/g, '\n').split('\n').filter((line) => line.trim() !== '');
+  const given = text.replace(/\r\n?/g, '\n').split('\n').filter((line) => line.trim() !== '');
+  const lines = given.some((line) => line.includes('\t')) ? given : given.map((line) => line.replace(/\s*;\s*/g, '\t'));
   /** @type {Understood} */
   const found = { entries: [], temperature: null, pressure: null, left: [], asPercent: false };
-  for (const { name, value, raw } of isTable(lines) ? pairsOfTable(lines) : lines.map(pairOfLine)) {
+  const names = (/** @type {readonly string[]} */ some) => some.filter((cell) => formulaOf(splitHeading(cell).name) !== null).length;
+  const isAcross = isTable(lines) && names(cells(lines[0] ?? '')) >= names(lines.map((line) => cells(line)[0] ?? ''));
+  for (const { name, value, raw } of isAcross ? pairsOfTable(lines) : pairsOfColumn(lines)) {
     const species = formulaOf(name);
-    if (value === '') found.left.push(raw);
+    if (value === '' || raw === FURTHER) found.left.push(raw);
     else if (species !== null) found.entries.push({ species, value: REMAINDER.test(value) ? 'remainder' : value });
     else if (TEMPERATURE.test(name)) found.temperature = value;
     else if (PRESSURE.test(name)) found.pressure = value;
@@ -69,12 +75,26 @@ function pairsOfTable(lines) {
   const [heading = [], ...rows] = lines.map(cells);
   const values = rows.find((row) => row.some((cell) => HAS_NUMBER.test(cell))) ?? [];
   const units = rows[0] === values ? [] : rows[0] ?? [];
-  return heading.flatMap((cell, index) => {
+  const pairs = heading.flatMap((cell, index) => {
     const { name, unit } = splitHeading(cell);
     const value = values[index] ?? '';
     if (cell === '' && value === '') return [];
     return [{ name, value: withUnit(value, units[index] ?? unit), raw: cell === '' ? value : cell }];
   });
+  return rows.indexOf(values) < rows.length - 1 ? [...pairs, { name: '', value: '', raw: FURTHER }] : pairs;
+}
+
+/**
+ * A name and its value on each line; the unit may stand in a heading over the values.
+ * @param {readonly string[]} lines
+ * @returns {Pair[]}
+ */
+function pairsOfColumn(lines) {
+  const [heading = '', ...rows] = lines;
+  const over = cells(heading);
+  if (rows.length === 0 || over.length < 2 || over.some((cell) => HAS_NUMBER.test(cell) || REMAINDER.test(cell))) return lines.map(pairOfLine);
+  const unit = over.slice(1).map((cell) => (UNIT.test(cell) ? cell : splitHeading(cell).unit)).find((text) => text !== '') ?? '';
+  return rows.map(pairOfLine).map((pair) => ({ ...pair, value: withUnit(pair.value, unit) }));
 }
 
 /**

@@ -34,7 +34,9 @@ export function connect(actions) {
   });
   show(actions);
   // Another tab may keep or delete a case meanwhile.
-  window.addEventListener('storage', () => show(actions));
+  window.addEventListener('storage', ({ key }) => {
+    if (key === null || kept.isKept(key)) show(actions);
+  });
 }
 
 /** @param {State} state */
