@@ -171,7 +171,7 @@ pub(super) fn conversions(found: &Findings, reading: &ReadingFindings) -> Vec<Co
 }
 
 /// How much of a species went in, on the basis of the reading.
-fn fed(reading: &ReadingFindings, participant: &Participant) -> Option<f64> {
+pub(super) fn fed(reading: &ReadingFindings, participant: &Participant) -> Option<f64> {
     let Setting { feed, balance, gas_mol, .. } = &reading.setting;
     let (feed, balance) = (feed.as_ref()?, balance.as_ref()?);
     if participant.phase != Phase::Gas {

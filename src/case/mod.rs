@@ -5,6 +5,7 @@
 
 mod amounts;
 mod answer;
+mod ask;
 mod asker;
 mod bare;
 mod blocks;
@@ -31,6 +32,8 @@ mod run;
 mod setting;
 mod shown;
 mod steps;
+mod sweep;
+mod target;
 mod value;
 mod verdict;
 
@@ -51,4 +54,6 @@ pub use report_amounts::{
     BalanceReport, ChargeReport, Conversion, CurveReport, ElementReport, Limit, MissingReport,
     RestReport, RestoredReport, SaturationReport, SpeciesReport, ValleyReport,
 };
+pub use sweep::{AxisReport, LineReport, NowReport, ShowReport, SweepReport, Swept, sweep};
+pub use target::{SettingReport, TargetReport, Targeted, target};
 pub use value::Value;

@@ -97,7 +97,8 @@ pub fn check(case: &Value) -> Outcome<Report> {
     Ok(answer::report(&find(question)?))
 }
 
-fn find(mut question: Question) -> Outcome<Findings> {
+/// All that is found out about a question.
+pub(super) fn find(mut question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
     let from_library = matches!(question.reaction.source, KSource::Library);
     let found = participants(&question.reaction.equation, &reading, from_library);

@@ -15,7 +15,9 @@ pub use code::{
     ReactionCode,
 };
 pub use remark::{Level, Remark, Step, Why};
-pub use sentence_code::{InputCode, NoteCode, StepCode, TurnCode, VerdictCode, WhyCode};
+pub use sentence_code::{
+    InputCode, NoteCode, StepCode, TargetCode, TurnCode, VerdictCode, WhyCode,
+};
 pub use span::Span;
 
 /// One mistake in what the user gave: a code, its arguments, the field and the span in its text.

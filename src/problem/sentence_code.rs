@@ -176,3 +176,15 @@ codes! {
         Remove = "turn-remove",
     }
 }
+
+codes! {
+    /// What a target found.
+    TargetCode in Beside {
+        One = "target-one",
+        Several = "target-several",
+        Nearest = "target-nearest",
+        Nowhere = "target-nowhere",
+        Jumps = "target-jumps",
+        NotThroughout = "target-not-throughout",
+    }
+}

@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{InputCode, Level, Problem, Remark, Step, TurnCode, VerdictCode, Why};
+use super::{InputCode, Level, Problem, Remark, Step, TargetCode, TurnCode, VerdictCode, Why};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -89,6 +89,15 @@ pub fn turn(turn: &Remark<TurnCode>, language: Language) -> String {
         Language::En => en::turn(turn.code),
     };
     fill(template, &turn.arguments)
+}
+
+/// Says what a target found.
+#[must_use]
+pub fn target(sentence: &Remark<TargetCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::target(sentence.code),
+    };
+    fill(template, &sentence.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

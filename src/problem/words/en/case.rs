@@ -121,6 +121,24 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "No amount of {species} brings this reading to equilibrium.",
             "Check the other lines, the temperature and the pressure.",
         ),
+        C::ReadingNeeded => (
+            "A chart and a target start from a reading, and there is none.",
+            "Enter the reading, or what is fed.",
+        ),
+        C::SpeciesNotHere => (
+            "{species} is neither in the reaction nor in the reading.",
+            "Choose a species of the ledger.",
+        ),
+        C::KnobNotHere => {
+            ("There is no gas, so the {knob} changes nothing here.", "Choose another knob.")
+        }
+        C::SweepCount => {
+            ("{found} is no number of points; 2 to {most} are allowed.", "Take 200 points.")
+        }
+        C::SweepLines => (
+            "{found} lines are asked for; 1 to {most} are allowed.",
+            "Name a few settings of the other knob.",
+        ),
         C::BandNegative => (
             "A band is a width and cannot be negative.",
             "Write it without its sign, such as 10 K.",
