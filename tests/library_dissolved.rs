@@ -1,6 +1,7 @@
 //! Dissolved species: their conventions, their spellings, and equilibria measured in water.
 
 use crate::library::{combination, kelvin, record, rows};
+use shiftgauge::case;
 use shiftgauge::library;
 use shiftgauge::library::{Combination, Reach};
 use shiftgauge::quantity::GAS_CONSTANT_J_PER_MOL_K;
@@ -99,4 +100,21 @@ fn a_reaction_of_ions_without_balanced_charge_would_show() {
     let ln_k = |reaction: &Combination| reaction.ln_k(kelvin(298.15));
     let apart = ln_k(&direct) - (ln_k(&acid) - ln_k(&base));
     assert!(apart.abs() < 1e-9, "{apart}");
+}
+
+#[test]
+fn k_is_had_from_an_equation_of_ions_as_it_is_written() {
+    for (equation, log10_k) in [
+        ("H2O(l) = H+ + OH-", -13.995),
+        ("CaCO3(s, calcite) = Ca^2+ + CO3^2-", -8.480),
+        ("CaCO3 = Ca(2+) + CO3(2-)", -8.480),
+        ("CaSO4·2H2O = Ca²⁺ + SO4²⁻ + 2 H2O(l)", -4.581),
+        ("CH3COOH(aq) = H⁺ + CH3COO⁻", -4.756),
+        ("NH4+ = NH3(aq) + H+", -9.245),
+    ] {
+        let answer = serde_json::to_value(case::constant(equation, "25 °C")).unwrap();
+        let ln_k = answer["constant"]["ln_k"].as_f64();
+        let found = ln_k.unwrap_or_else(|| panic!("{equation}: {answer}")) / LN_10;
+        assert!((found - log10_k).abs() < 0.03, "{equation}: {found}, not {log10_k}");
+    }
 }

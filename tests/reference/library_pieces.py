@@ -29,6 +29,7 @@ class Piece:
         self.low, self.high, self.source = low, high, source
         self.a = [float(value) for value in coefficients]
         self.b_h = self.b_s = 0.0
+        self.alone = False
 
     def cp(self, t):
         return R_EXACT * sum(a * t**p for a, p in zip(self.a, POWERS))
@@ -42,8 +43,11 @@ class Piece:
 
     def anchor(self, t, h, s):
         """Sets the constants so that H(t) is h kJ/mol and S(t) is s J/(mol K)."""
-        self.b_h = rounded(self.b_h + (h - self.h(t)) * 1000 / R_EXACT)
-        self.b_s = rounded(self.b_s + (s - self.s(t)) / R_EXACT)
+        self.b_h += (h - self.h(t)) * 1000 / R_EXACT
+        self.b_s += (s - self.s(t)) / R_EXACT
+        # A piece alone needs no more digits than its figures have.
+        self.b_h = round(self.b_h, 5) if self.alone else rounded(self.b_h)
+        self.b_s = round(self.b_s, 6) if self.alone else rounded(self.b_s)
 
 
 def rounded(value):
@@ -55,7 +59,11 @@ def written(value):
 
 
 def constant_piece(low, high, heat_capacity, source):
-    return Piece(low, high, [0, 0, written(heat_capacity / R_EXACT), 0, 0, 0, 0], source)
+    """The one piece of a species whose Cp is constant."""
+    powers = [0, 0, float(f"{heat_capacity / R_EXACT:.7g}"), 0, 0, 0, 0]
+    piece = Piece(low, high, powers, source)
+    piece.alone = True
+    return piece
 
 
 def join(pieces, h298, s298, transitions=()):
