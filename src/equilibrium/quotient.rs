@@ -116,6 +116,7 @@ pub(super) fn less(system: &System, state: &State, ln_k: f64) -> Affinity {
 }
 
 /// As [`less`], with γ = 1 and the solvent left out.
+#[inline(always)]
 pub(super) fn ideal(system: &System, state: &State, ln_k: f64) -> Affinity {
     if system.parts.len() > 1 {
         return several::less(system, state, ln_k);
@@ -176,6 +177,7 @@ pub(super) fn in_proportion_throughout(
 }
 
 /// Whether two species react on the same side and are there in exact proportion.
+#[inline(always)]
 fn alike(first: &Mixed, mixed: &Mixed, amounts: &[f64]) -> bool {
     let (amount, other) = (amounts[first.species], amounts[mixed.species]);
     let far = other > FAR * amount || amount > FAR * other;
