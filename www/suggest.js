@@ -6,37 +6,13 @@
 import { create } from './dom.js';
 import { findSpecies } from './engine.js';
 import { formula } from './format.js';
+import { wordAt } from './word.js';
 
 /** @import { SpeciesMatch } from './shiftgauge.js' */
 
 const MOST = 8;
 const PHASES = { g: 'gas', l: 'liquid', s: 'solid', aq: 'dissolved' };
 let serial = 0;
-
-/**
- * @typedef {object} Word
- * @property {string} text
- * @property {number} start
- * @property {number} end
- */
-
-/**
- * The word of an equation that the cursor stands in, without a coefficient and a sign before it.
- * @param {string} text
- * @param {number} cursor
- * @returns {Word}
- */
-export function wordAt(text, cursor) {
-  // A plus belongs to the equation where a space stands before it, and to a charge otherwise.
-  const breaks = /\s\+\s?|\s*(?:<?=>?|<?->|[⇌→])\s*/g;
-  let [start, end] = [0, text.length];
-  for (const found of text.matchAll(breaks)) {
-    if (found.index + found[0].length <= cursor) start = found.index + found[0].length;
-    else if (found.index >= cursor) { end = found.index; break; }
-  }
-  const lead = /^\s*(?:[\d.,/½]+\s+)?/.exec(text.slice(start, end))?.[0].length ?? 0;
-  return { text: text.slice(start + lead, end).trimEnd(), start: start + lead, end: start + lead + text.slice(start + lead, end).trimEnd().length };
-}
 
 /**
  * @param {HTMLInputElement} field        says in `data-suggest` which phases are asked for, or `equation`
@@ -117,7 +93,10 @@ export function suggest(field, picked = () => {}) {
   }
 
   field.addEventListener('input', (event) => {
-    if (event.isTrusted) offer(2);
+    // A space behind a word ends it, so the list does not stay in the way of the next.
+    const isEnded = inEquation && (field.selectionStart ?? 0) > word().end;
+    if (isEnded) close();
+    else if (event.isTrusted) offer(2);
   });
   field.addEventListener('blur', () => {
     close();
