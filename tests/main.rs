@@ -23,6 +23,7 @@ mod laws_rest;
 mod library;
 mod library_constants;
 mod library_dissolved;
+mod liquids;
 mod mistakes;
 mod nudges;
 mod quantity;

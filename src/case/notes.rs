@@ -1,13 +1,16 @@
 //! Notes beside the report, and the sentence of the verdict.
 
+use super::blocks::Block;
 use super::inputs::without_tolerance;
 use super::missing::Missing;
 use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
+use super::setting::Basis;
 use super::shown;
 use crate::advice::NoApproach;
 use crate::constant::Constant;
+use crate::mixture::SolutionModel;
 use crate::problem::words::{Language, input, note};
 use crate::problem::{NoteCode, Remark};
 use crate::quantity::PressureReference;
@@ -29,6 +32,7 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
         remarks.extend(missing_remarks(missing, reading));
     }
     if let Some(reading) = &found.reading {
+        remarks.extend(liquid_remarks(found, reading));
         remarks.extend(tolerance_remarks(found, reading));
     }
     remarks.push(Remark::new(NoteCode::Equilibrium));
@@ -52,6 +56,44 @@ fn missing_remarks(missing: &Missing, reading: &ReadingFindings) -> Vec<Remark> 
     if missing.others > 0 {
         let several = Remark::new(NoteCode::MissingSeveral).with("species", species);
         remarks.push(several.with("others", missing.others.to_string()));
+    }
+    remarks
+}
+
+/// An ideal solution is marked from this ionic strength on: coefficients are then below 0.9.
+/// From the limiting law of Debye and Hückel, log10 γ = −0.509 √I.
+const IDEAL_SOLUTION_MARK_MOL_PER_KG: f64 = 0.01;
+/// Charges that differ by more than this share of their mean are said. Common practice, no source.
+const CHARGES_AGREE: f64 = 0.05;
+
+/// What weakens a solution or a liquid mixture.
+fn liquid_remarks(found: &Findings, reading: &ReadingFindings) -> Vec<Remark> {
+    let mut remarks = Vec::new();
+    let blocks = &reading.setting.blocks;
+    let digits = |value: f64| shown::significant(value, 3);
+    if blocks.contains(&Block::Liquid) {
+        remarks.push(Remark::new(NoteCode::IdealLiquid));
+    }
+    let beside = blocks.iter().any(|block| matches!(block, Block::Liquid | Block::Solution));
+    if beside && reading.setting.basis == Basis::OneMoleOfGas {
+        remarks.push(Remark::new(NoteCode::NoCommonBasis));
+    }
+    let solution = reading.activities.as_ref().and_then(|activities| activities.solution);
+    let Some(solution) = solution else { return remarks };
+    let strength = solution.ionic_strength_mol_per_kg;
+    let model = found.question.solution_model;
+    if model == SolutionModel::Ideal && strength > IDEAL_SOLUTION_MARK_MOL_PER_KG {
+        remarks.push(Remark::new(NoteCode::IdealSolution).with("strength", digits(strength)));
+    }
+    if let Some(limit) = model.limit_mol_per_kg().filter(|limit| strength > *limit) {
+        let remark = Remark::new(NoteCode::BeyondModel).with("strength", digits(strength));
+        remarks.push(remark.with("limit", digits(limit)));
+    }
+    let (positive, negative) =
+        (solution.charge_balance.positive_eq_per_kg, solution.charge_balance.negative_eq_per_kg);
+    if (positive - negative).abs() > 0.5 * CHARGES_AGREE * (positive + negative) {
+        let remark = Remark::new(NoteCode::ChargesUnequal).with("positive", digits(positive));
+        remarks.push(remark.with("negative", digits(negative)));
     }
     remarks
 }

@@ -1,6 +1,8 @@
 //! The working: formula, numbers put in, result, line by line.
 
 use super::answer::{basis_name, ln_q, quotient_word, reacting};
+use super::blocks::Block;
+use super::participants::Participant;
 use super::question::KSource;
 use super::report::StepReport;
 use super::run::{Findings, ReadingFindings};
@@ -9,7 +11,7 @@ use crate::constant::{Constant, FormulaTerm};
 use crate::equilibrium::{Hold, Quotient, RestOutcome};
 use crate::problem::words::{Language, step};
 use crate::problem::{Step, StepCode};
-use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference, STANDARD_PRESSURE_PA};
+use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference};
 use crate::quantity::{show_like, show_number};
 use crate::reaction::Phase;
 
@@ -121,21 +123,58 @@ fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
     if let Some(water) = reading.setting.added_water_fraction {
         lines.push(("q", Step::new(StepCode::WetGas).with("water", shown::significant(water, 5))));
     }
-    let Some(pressure_pa) = reading.setting.pressure_pa else { return lines };
-    let rows = found.participants.iter().zip(&reading.amounts_mol);
-    for (participant, amount) in rows {
-        if participant.nu == 0.0 || participant.phase != Phase::Gas || *amount <= 0.0 {
-            continue;
-        }
-        let fraction = amount / reading.setting.gas_mol;
-        let line = Step::new(StepCode::Activity)
-            .with("species", participant.species.text())
-            .with("fraction", shown::significant(fraction, 5))
-            .with("pressure_bar", shown::significant(pressure_pa / 1e5, 6))
-            .with("activity", shown::significant(fraction * pressure_pa / STANDARD_PRESSURE_PA, 5));
+    lines.extend(activity_lines(found, reading));
+    lines
+}
+
+/// How each activity of the reacting species comes about.
+fn activity_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
+    let mut lines = Vec::new();
+    let Some(activities) = &reading.activities else { return lines };
+    if let Some(solution) = &activities.solution {
+        let line = Step::new(StepCode::IonicStrength)
+            .with("strength", shown::significant(solution.ionic_strength_mol_per_kg, 5));
+        lines.push(("q", line));
+    }
+    let rows = found.participants.iter().zip(&reading.setting.blocks).enumerate();
+    for (i, (participant, block)) in rows {
+        let (amount, ln_activity) = (reading.amounts_mol[i], activities.ln_activities[i]);
+        let Some(ln_activity) = ln_activity.filter(|_| participant.nu != 0.0) else { continue };
+        let digits = |value: f64| shown::significant(value, 5);
+        let begin = |code| {
+            Step::new(code)
+                .with("species", participant.species.text())
+                .with("activity", digits(libm::exp(ln_activity)))
+        };
+        let gamma = libm::exp(activities.ln_coefficients[i]);
+        let line = match (block, reading.setting.pressure_pa) {
+            (Block::Gas, Some(pressure_pa)) => begin(StepCode::Activity)
+                .with("fraction", digits(amount / reading.setting.gas_mol))
+                .with("pressure_bar", shown::significant(pressure_pa / 1e5, 6)),
+            (Block::Liquid, _) => begin(StepCode::LiquidActivity),
+            (Block::Solution, _) => {
+                let water_kg = reading.setting.hold.water_kg().unwrap_or(1.0);
+                begin(StepCode::SoluteActivity)
+                    .with("coefficient", digits(gamma))
+                    .with("molality", digits(amount / water_kg))
+            }
+            (Block::Solvent, _) => begin(StepCode::SolventActivity),
+            (Block::Gas, None) | (Block::Pure, _) => continue,
+        };
         lines.push(("q", line));
     }
     lines
+}
+
+/// Whether a liquid of the reaction has an activity of its own to show: in a mixture, or the water of
+/// a solution.
+fn is_mixed_liquid(found: &Findings, participant: &Participant) -> bool {
+    let Some(reading) = &found.reading else { return false };
+    let rows = found.participants.iter().zip(&reading.setting.blocks);
+    let mixed = |block: &Block| matches!(block, Block::Liquid | Block::Solvent);
+    rows.filter(|(_, block)| mixed(block)).any(|(one, _)| {
+        one.phase == participant.phase && one.species.same_substance(&participant.species)
+    })
 }
 
 /// Q as a product: `a(CO2) a(H2) / (a(CO) a(H2O))`; pure phases are left out, their a is 1.
@@ -143,7 +182,10 @@ fn quotient_formula(found: &Findings) -> String {
     let side = |sign: f64| -> Vec<String> {
         reacting(found)
             .filter(|participant| participant.nu * sign > 0.0)
-            .filter(|participant| matches!(participant.phase, Phase::Gas | Phase::Aqueous))
+            .filter(|participant| {
+                matches!(participant.phase, Phase::Gas | Phase::Aqueous)
+                    || is_mixed_liquid(found, participant)
+            })
             .map(|participant| {
                 let power = participant.nu.abs();
                 let species = participant.species.formula.text();

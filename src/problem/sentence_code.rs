@@ -34,6 +34,11 @@ codes! {
         MissingFound = "missing-found",
         OneKilogramOfWater = "one-kilogram-of-water",
         ByDensityOfWater = "by-density-of-water",
+        IdealSolution = "ideal-solution",
+        BeyondModel = "beyond-model",
+        ChargesUnequal = "charges-unequal",
+        IdealLiquid = "ideal-liquid",
+        NoCommonBasis = "no-common-basis",
         MissingSeveral = "missing-several",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
@@ -60,6 +65,10 @@ codes! {
         RestCheck = "rest-check",
         Formula = "formula",
         KOfReading = "k-of-reading",
+        IonicStrength = "ionic-strength",
+        SoluteActivity = "solute-activity",
+        LiquidActivity = "liquid-activity",
+        SolventActivity = "solvent-activity",
     }
 }
 

@@ -107,6 +107,25 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Conversion,
             "Volumes of solution are turned into water by the density of water; the room that the solutes take is neglected.",
         ),
+        C::IdealSolution => (
+            Warning,
+            "The solution is taken as ideal; at an ionic strength of {strength} mol/kg activity coefficients matter. Choose the Davies model.",
+        ),
+        C::BeyondModel => (
+            Warning,
+            "The ionic strength, {strength} mol/kg, is beyond the {limit} mol/kg to which the model of the solution is trusted.",
+        ),
+        C::ChargesUnequal => (
+            Warning,
+            "The charges of the solution do not balance: {positive} against {negative} equivalents per kilogram of water. An ion is missing or misread.",
+        ),
+        C::IdealLiquid => {
+            (Warning, "The liquid is taken as an ideal mixture: a = x. Many liquids are not.")
+        }
+        C::NoCommonBasis => (
+            Assumption,
+            "The gas is given in fractions, so that the amounts at rest are those of one mole of gas beside the liquid; Q and the verdict do not depend on it.",
+        ),
         C::NoReading => (
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",

@@ -30,6 +30,12 @@ pub(in crate::problem::words) fn template(code: C) -> &'static str {
         C::Activity => {
             "a({species}) = y P/p° = {fraction} × {pressure_bar} bar / 1 bar = {activity}"
         }
+        C::IonicStrength => "Ionic strength I = ½ Σ m z² = {strength} mol/kg",
+        C::SoluteActivity => "a({species}) = γ m/m° = {coefficient} × {molality} = {activity}",
+        C::LiquidActivity => "a({species}) = x = {activity}",
+        C::SolventActivity => {
+            "a({species}) = {activity}, the water of the solution, from its solutes"
+        }
         C::Quotient => "Q = {formula} = {q}, ln Q = {ln_q}",
         C::OpenQuotient => "Q = {formula} is {q}",
         C::Gibbs => "ΔG = RT ln(Q/K) = {rt} kJ/mol × ({ln_q} − {ln_k}) = {gibbs} kJ/mol",
