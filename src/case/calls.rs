@@ -183,14 +183,21 @@ pub fn species(text: &str) -> SpeciesAnswer {
     SpeciesAnswer { ok: true, species, near }
 }
 
-/// Records by formula, with its phase and form if written, else by name or CAS number.
+/// So many species are offered for what is half typed.
+const OFFERED_AT_MOST: usize = 24;
+
+/// Records by formula, with its phase and form if written, else by name or CAS number, else those
+/// that begin so.
 fn matching(text: &str) -> Vec<&'static Record> {
     let by_formula = reaction::parse_species(text).map(|species| {
         library::find(species.formula.text(), species.phase, species.form.as_deref())
     });
     match by_formula {
         Ok(records) if !records.is_empty() => records,
-        _ => library::named(text),
+        _ => {
+            let named = library::named(text);
+            if named.is_empty() { library::beginning(text, OFFERED_AT_MOST) } else { named }
+        }
     }
 }
 

@@ -80,6 +80,41 @@ pub fn named(text: &str) -> Vec<&'static Record> {
     table::entries().iter().filter(is_named).filter_map(table::Entry::record).collect()
 }
 
+/// Records whose formula, or a word of whose name, begins with this text, at most so many: first those
+/// whose formula does, then those whose name does, then those with a later word. Capital letters do
+/// not matter in names. Fewer than two letters find nothing.
+///
+/// ```
+/// use shiftgauge::library;
+/// let found = library::beginning("ammo", 8);
+/// assert!(found.iter().any(|record| record.formula == "NH3"));
+/// ```
+#[must_use]
+pub fn beginning(text: &str, most: usize) -> Vec<&'static Record> {
+    let wanted = text.trim();
+    if wanted.chars().count() < 2 {
+        return Vec::new();
+    }
+    let starts = |part: &str| {
+        part.get(..wanted.len()).is_some_and(|start| start.eq_ignore_ascii_case(wanted))
+    };
+    let rank = |entry: &table::Entry| {
+        let names = entry.line.split('\t').nth(4).unwrap_or_default();
+        let later = |name: &str| name.split([' ', '-']).any(starts);
+        if entry.formula.starts_with(wanted) {
+            Some(0)
+        } else if names.split(';').any(starts) {
+            Some(1)
+        } else {
+            names.split(';').any(later).then_some(2)
+        }
+    };
+    let ranked =
+        |wanted: u8| table::entries().iter().filter(move |entry| rank(entry) == Some(wanted));
+    let all = (0..3).flat_map(ranked).take(most);
+    all.filter_map(table::Entry::record).collect()
+}
+
 /// Every record, in the order of the table.
 pub fn all() -> impl Iterator<Item = &'static Record> {
     table::entries().iter().filter_map(table::Entry::record)
