@@ -27,5 +27,7 @@ mod quantity_show;
 mod quantity_units;
 mod rational;
 mod rest;
+mod rest_solution;
 mod rooms;
 mod saturation;
+mod solution;
