@@ -19,6 +19,7 @@ mod laws_constant;
 mod laws_quantity;
 mod laws_reaction;
 mod laws_rest;
+mod laws_solution;
 mod library;
 mod library_constants;
 mod mistakes;
