@@ -1,6 +1,7 @@
-//! What is held, changed.
+//! What a state holds: sums of amounts, a gas's volume or pressure, a solution diluted.
 
 use crate::equilibrium::Hold;
+use crate::equilibrium::Kind;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// The volume in m3 of an ideal gas at a pressure in Pa, or its pressure in a volume: n R T over
@@ -16,4 +17,10 @@ pub(super) fn diluted(hold: Hold, times: f64) -> Option<Hold> {
         Hold::Volume { volume_m3 } => Some(Hold::Volume { volume_m3: volume_m3 * times }),
         _ => None,
     }
+}
+
+/// The sum over all species of a kind.
+pub(super) fn amount_of(kinds: &[Kind], kind: Kind, amounts_mol: &[f64]) -> f64 {
+    let of_kind = kinds.iter().zip(amounts_mol).filter(|(other, _)| **other == kind);
+    of_kind.map(|(_, amount)| amount).sum()
 }

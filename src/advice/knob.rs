@@ -1,6 +1,6 @@
 //! A plant with its knobs: the state of rest with some of them set to a value.
 
-use super::held::{diluted, volume_of_gas};
+use super::held::{amount_of, diluted, volume_of_gas};
 use crate::constant::Constant;
 use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
@@ -299,10 +299,4 @@ impl<'a> Knobs<'a> {
     pub fn started_mol(&self) -> &[f64] {
         &self.turned_mol
     }
-}
-
-/// The amount of all species of a kind.
-pub(super) fn amount_of(kinds: &[Kind], kind: Kind, amounts_mol: &[f64]) -> f64 {
-    let of_kind = kinds.iter().zip(amounts_mol).filter(|(other, _)| **other == kind);
-    of_kind.map(|(_, amount)| amount).sum()
 }

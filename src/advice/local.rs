@@ -21,16 +21,18 @@
 //! Thermodynamics, 1954, chapter 17 (from memory). The line for n_j at constant pressure is the one
 //! that Le Chatelier's rule, said without care, gets wrong.
 
-use super::held::diluted;
+use super::held::{amount_of, diluted};
 use super::knob::Knob;
-use super::knob::amount_of;
 use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::System;
 
-/// Where a species' own effect on Q and its thinning of the others cancel to this share, the rest of
-/// it is the rounding of the amounts.
+/// Where two effects cancel to this share of one of them, what is left is rounding.
 const ROUNDING: f64 = 1e-14;
+
+fn cancelled(sum: f64, part: f64) -> f64 {
+    if sum.abs() <= ROUNDING * part.abs() { 0.0 } else { sum }
+}
 
 /// A state of rest, to be differentiated.
 #[derive(Debug, Clone, Copy)]
@@ -95,7 +97,8 @@ impl Local<'_> {
                     Hold::Volume { .. } => gas() / self.temperature_k,
                     _ => 0.0,
                 };
-                self.ln_k_per_k? - spread
+                let heat = self.ln_k_per_k?;
+                cancelled(heat - spread, heat)
             }
             Knob::Pressure => match self.hold {
                 Hold::Pressure { pressure_pa } => -gas() / pressure_pa,
@@ -113,8 +116,7 @@ impl Local<'_> {
                 let (nu, amount) =
                     (*self.system.nu().get(species)?, *self.amounts_mol.get(species)?);
                 let own = if nu == 0.0 { 0.0 } else { nu / amount };
-                let drive = self.dilution(kind) - own;
-                if drive.abs() <= ROUNDING * own.abs() { 0.0 } else { drive }
+                cancelled(self.dilution(kind) - own, own)
             }
             Knob::InertAtPressure => self.dilution(Kind::Gas),
             Knob::InertAtVolume => 0.0,

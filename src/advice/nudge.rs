@@ -1,6 +1,7 @@
 //! One small change of one knob, and what it does to rest.
 
-use super::knob::{Knob, Knobs, Plant, amount_of};
+use super::held::amount_of;
+use super::knob::{Knob, Knobs, Plant};
 use super::local::Local;
 use super::moved::{extent_change, is_idle, slope};
 use super::reason::{Reason, Turned, reason};
@@ -94,6 +95,26 @@ impl Nudge {
 ///
 /// # Errors
 /// As [`Knobs::new`].
+///
+/// ```
+/// use shiftgauge::advice::{Direction, Plant, nudges};
+/// use shiftgauge::constant::{Constant, StatedConstant};
+/// use shiftgauge::equilibrium::{Hold, Kind, State, System};
+/// // N2O4 = 2 NO2 takes up heat and makes gas.
+/// let system = System::new(&[Kind::Gas; 2], &[-1.0, 2.0]).unwrap();
+/// let hold = Hold::Pressure { pressure_pa: 100_000.0 };
+/// let state = State { temperature_k: 330.0, hold, amounts_mol: &[1.0, 0.0] };
+/// let constant = Constant::Stated(StatedConstant {
+///     ln_k: 0.0, u_ln_k: None, at_k: Some(330.0), enthalpy_j_per_mol: Some(57_000.0),
+///     heat_capacity_j_per_mol_k: None,
+/// });
+/// let plant = Plant { system: &system, state, constant: &constant, approach_k: 0.0 };
+/// let found = nudges(plant).unwrap();
+/// let way = |name| found.iter().find(|nudge| nudge.name() == name).unwrap().direction;
+/// assert_eq!(way("temperature"), Some(Direction::Forward));
+/// assert_eq!(way("pressure"), Some(Direction::Reverse));
+/// assert_eq!(way("inert at constant volume"), None);
+/// ```
 pub fn nudges(plant: Plant) -> Outcome<Vec<Nudge>> {
     let mut knobs = Knobs::new(plant)?;
     let mut found = Vec::with_capacity(2 * plant.system.nu().len() + 5);
@@ -184,7 +205,10 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
         amounts_mol: &now_mol,
     };
     let idle = is_idle(&local, knob, step);
-    let unknown = knob == Knob::Temperature && !plant.constant.knows_temperature();
+    // Where nothing can move K does not matter.
+    let unknown = knob == Knob::Temperature
+        && !plant.constant.knows_temperature()
+        && before.outcome != RestOutcome::NothingCanMove;
     let no_rest = before.outcome == RestOutcome::HasNoLimit;
     let after = if idle || unknown || no_rest {
         None

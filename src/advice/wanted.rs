@@ -1,6 +1,7 @@
 //! What a chart shows and a target reaches: one number of a state of rest.
 
-use super::knob::{Knob, Knobs, amount_of};
+use super::held::amount_of;
+use super::knob::{Knob, Knobs};
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 
