@@ -37,6 +37,32 @@ pub fn constant(reaction: &str, temperature: &str) -> JsValue {
     give(&case::constant(reaction, temperature))
 }
 
+/// Works out a chart of a case.
+#[wasm_bindgen(unchecked_return_type = "SweepAnswer")]
+pub fn sweep(
+    #[wasm_bindgen(unchecked_param_type = "Case")] question: JsValue,
+    #[wasm_bindgen(unchecked_param_type = "SweepRequest")] request: JsValue,
+    #[wasm_bindgen(unchecked_param_type = "Options")] _options: JsValue,
+) -> JsValue {
+    give(&case::sweep(&tree(question), &tree(request)))
+}
+
+/// Looks for the settings of one knob that reach a goal.
+#[wasm_bindgen(unchecked_return_type = "TargetAnswer")]
+pub fn target(
+    #[wasm_bindgen(unchecked_param_type = "Case")] question: JsValue,
+    #[wasm_bindgen(unchecked_param_type = "Goal")] goal: JsValue,
+    #[wasm_bindgen(unchecked_param_type = "Options")] _options: JsValue,
+) -> JsValue {
+    give(&case::target(&tree(question), &tree(goal)))
+}
+
+/// Turns a number called K into every other form.
+#[wasm_bindgen(unchecked_return_type = "ConvertAnswer")]
+pub fn convert(#[wasm_bindgen(unchecked_param_type = "StatedNumber")] number: JsValue) -> JsValue {
+    give(&case::convert(&tree(number)))
+}
+
 /// Finds species of the library.
 #[wasm_bindgen(unchecked_return_type = "SpeciesAnswer")]
 pub fn species(text: &str) -> JsValue {

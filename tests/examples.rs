@@ -7,10 +7,15 @@ use serde_json::Value as Json;
 use shiftgauge::case::{self, Value};
 
 /// (file, verdict, least and greatest shortfall in K, species that forms on the way to rest)
-const EXAMPLES: [(&str, &str, f64, f64, &str); 2] = [
+const EXAMPLES: [(&str, &str, f64, f64, &str); 4] = [
     ("low-temperature-shift.json", "forward", 1.0, 40.0, "H2(g)"),
     ("chlorine-recovery.json", "forward", 1.0, 60.0, "Cl2(g)"),
+    ("ammonia-converter.json", "forward", 1.0, 40.0, "NH3(g)"),
+    ("lime-kiln.json", "forward", 10.0, 90.0, "CO2(g)"),
 ];
+
+/// Examples whose kind of reading is not judged yet; they move up once it is.
+const WAITING: [&str; 1] = ["scrubber-sump.json"];
 
 fn folder() -> std::path::PathBuf {
     Path::new(env!("CARGO_MANIFEST_DIR")).join("www/examples")
@@ -44,7 +49,7 @@ fn every_example_is_marked_as_invented_and_none_is_left_out() {
         .map(|entry| entry.unwrap().file_name().to_string_lossy().into_owned())
         .collect();
     files.sort();
-    let mut listed: Vec<&str> = EXAMPLES.iter().map(|row| row.0).collect();
+    let mut listed: Vec<&str> = EXAMPLES.iter().map(|row| row.0).chain(WAITING).collect();
     listed.sort_unstable();
     assert_eq!(files, listed);
     for file in files {

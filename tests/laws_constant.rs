@@ -199,10 +199,11 @@ fn points(log10_k: [&str; 3], at: &str) -> Json {
 fn points_give_the_straight_line_that_fits_them_best() {
     // log10 K = 10000/T − 9 at 1/T = 0.0010, 0.00125 and 0.0015: 1, 3.5 and 6. Moving them by +d, −2d
     // and +d leaves the line where it is, for these are orthogonal to a shift and to a tilt; then
-    // s² = 6 d² with one degree of freedom and u = s/√3 at the middle (d = 0.01: u = 0.014142).
+    // s² = 6 d² with one degree of freedom and s/√3 at the middle (d = 0.01: 0.014142), widened by
+    // half of Student's t for one degree of freedom, 12.706/2.
     let slope = 10_000.0 * std::f64::consts::LN_10;
     for (log10_k, u_log10_k) in
-        [(["1", "3.5", "6"], 0.0), (["1.01", "3.48", "6.01"], 0.014_142_135_6)]
+        [(["1", "3.5", "6"], 0.0), (["1.01", "3.48", "6.01"], 0.014_142_135_6 * 6.353)]
     {
         let found = points(log10_k, "800 K");
         let of = |name: &str| found[name].as_f64().unwrap();

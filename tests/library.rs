@@ -79,8 +79,26 @@ fn enthalpy_and_entropy_at_298_kelvin_are_those_of_the_table() {
 
 #[test]
 fn elements_in_their_reference_states_have_no_enthalpy_at_298_kelvin() {
-    let elements =
-        ["H2.g", "O2.g", "N2.g", "Cl2.g", "Ar.g", "He.g", "C.s.graphite", "S.s.rhombic", "Fe.s"];
+    let elements = [
+        "H2.g",
+        "O2.g",
+        "N2.g",
+        "Cl2.g",
+        "Ar.g",
+        "He.g",
+        "C.s.graphite",
+        "S.s.rhombic",
+        "Fe.s",
+        "F2.g",
+        "Br2.l",
+        "I2.s",
+        "Hg.l",
+        "Zn.s",
+        "Cu.s",
+        "Ni.s",
+        "Al.s",
+        "Si.s",
+    ];
     for id in elements {
         let at = record(id).properties(Temperature::standard());
         assert!(at.enthalpy_j_per_mol.abs() < 1e-6, "{id}: {}", at.enthalpy_j_per_mol);
@@ -96,9 +114,25 @@ fn gibbs_energy_is_continuous_everywhere_and_the_rest_but_at_transitions() {
         ("Fe.s", 1184.0, 900.0),
         ("Fe.s", 1665.0, 837.0),
         ("Fe2O3.s", 950.0, 669.0),
+        ("FeS.s.troilite", 411.0, 1666.0),
+        ("FeS.s.troilite", 598.0, 397.0),
+        ("Na2CO3.s", 723.15, 690.0),
+        ("NaOH.s", 572.0, 7209.0),
+        ("SiO2.s.quartz", 847.0, 728.0),
+        ("V2O4.s", 340.0, 8995.0),
+        ("ZnSO4.s", 540.0, 5021.0),
     ];
     // At the peak of a lambda transition Cp alone steps.
-    let lambda = [("Fe.s", 1042.0), ("Fe3O4.s", 900.0), ("Fe2O3.s", 1050.0), ("S.l", 432.02)];
+    let lambda = [
+        ("Fe.s", 1042.0),
+        ("Fe3O4.s", 900.0),
+        ("Fe2O3.s", 1050.0),
+        ("S.l", 432.02),
+        ("Ni.s", 631.0),
+        ("NiO.s", 525.0),
+        ("NiO.s", 565.0),
+        ("Zn.l", 440.0), // JANAF's undercooled zinc turns to glass here
+    ];
     let (mut seen, mut worst_cp) = (0, ("", 0.0, 0.0));
     for record in library::all() {
         for joint_k in record.joints_k() {
@@ -146,11 +180,18 @@ fn enthalpy_and_entropy_are_the_integrals_of_the_heat_capacity() {
                 let slope = (above.enthalpy_j_per_mol - below.enthalpy_j_per_mol) / (2.0 * step);
                 let minus_s = (above.gibbs_j_per_mol - below.gibbs_j_per_mol) / (2.0 * step);
                 let cp = at.heat_capacity_j_per_mol_k;
-                assert!((slope / cp - 1.0).abs() < 1e-3, "{} at {t}: {slope}, {cp}", record.id);
+                // A dissolved species may have no heat capacity, or a negative one or entropy.
+                let near = 1e-3 * cp.abs() + 1e-6;
+                assert!((slope - cp).abs() < near, "{} at {t}: {slope}, {cp}", record.id);
                 let s = at.entropy_j_per_mol_k;
-                assert!((minus_s / s + 1.0).abs() < 1e-3, "{} at {t}: {minus_s}, {s}", record.id);
+                let near = 1e-3 * s.abs() + 1e-3;
+                assert!((minus_s + s).abs() < near, "{} at {t}: {minus_s}, {s}", record.id);
                 let g = at.enthalpy_j_per_mol - t * s - at.gibbs_j_per_mol;
-                assert!(g.abs() < 1e-8 * t * s, "{} at {t}: G° is not H° − T S° by {g}", record.id);
+                assert!(
+                    g.abs() < 1e-8 * t * (s.abs() + 1.0),
+                    "{} at {t}: G° is not H° − T S° by {g}",
+                    record.id
+                );
             }
             t += 37.0;
         }

@@ -52,6 +52,7 @@ impl Row {
             u_ln_k: None,
             at_k: Some(self.kelvin),
             enthalpy_j_per_mol: self.enthalpy.map(|kilojoule| kilojoule * 1e3),
+            u_enthalpy_j_per_mol: None,
             heat_capacity_j_per_mol_k: None,
         });
         let state =

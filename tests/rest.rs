@@ -38,12 +38,23 @@ fn read(line: &str) -> Row {
         'p' => Kind::Pure,
         'a' => Kind::Ample,
         's' => Kind::Solute,
+        'l' => Kind::Liquid,
         _ => panic!("no kind {letter}"),
     };
     let kinds: Vec<Kind> = kinds.chars().map(kind).collect();
-    let hold = match hold.split_once('=').unwrap() {
-        ("P", pressure) => Hold::Pressure { pressure_pa: pressure.parse().unwrap() },
-        (_, volume) => Hold::Volume { volume_m3: volume.parse().unwrap() },
+    let held = |letter: &str| -> Option<f64> {
+        let mut parts = hold.split(';').filter_map(|part| part.split_once('='));
+        parts.find(|(name, _)| *name == letter).map(|(_, number)| number.parse().unwrap())
+    };
+    let hold = match (held("P"), held("V"), held("W")) {
+        (Some(pressure_pa), None, None) => Hold::Pressure { pressure_pa },
+        (None, Some(volume_m3), None) => Hold::Volume { volume_m3 },
+        (None, None, Some(water_kg)) => Hold::Solvent { water_kg },
+        (Some(pressure_pa), None, Some(water_kg)) => {
+            Hold::PressureAndSolvent { pressure_pa, water_kg }
+        }
+        (None, Some(volume_m3), Some(water_kg)) => Hold::VolumeAndSolvent { volume_m3, water_kg },
+        _ => panic!("no hold {hold}"),
     };
     Row {
         title: title.to_owned(),

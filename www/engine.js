@@ -2,7 +2,7 @@
 
 import * as glue from './shiftgauge.js';
 
-/** @import { BalanceAnswer, Case, CheckAnswer } from './shiftgauge.js' */
+/** @import { BalanceAnswer, Case, CheckAnswer, SpeciesMatch } from './shiftgauge.js' */
 
 /** @type {WebAssembly.Module | null} */
 let compiled = null;
@@ -67,8 +67,34 @@ export function balance(equation) {
  * @param {string} name
  */
 function onlyPhase(name) {
-  const phases = [...new Set(glue.species(name).species.map(({ phase }) => phase))];
+  const phases = [...new Set(lookUp(name).species.map(({ phase }) => phase))];
   return phases.length > 1 && phases.includes('g') ? null : phases[0] ?? null;
+}
+
+/**
+ * The species of the library that a formula, a name or a CAS number stands for; where it stands for none,
+ * those of the formula that is nearest.
+ * @param {string} text
+ * @returns {SpeciesMatch[]}
+ */
+export function findSpecies(text) {
+  if (text.trim() === '') return [];
+  const { species, near } = lookUp(text);
+  return species.length === 0 && near !== null ? lookUp(near).species : species;
+}
+
+/**
+ * Help with typing is not worth a dead page: after a trap a new instance takes over, and nothing is found.
+ * @param {string} text
+ */
+function lookUp(text) {
+  try {
+    return glue.species(text);
+  } catch (thrown) {
+    console.error(thrown);
+    restartEngine();
+    return { species: [], near: null };
+  }
 }
 
 /** The program's and the tables' versions as one line. */

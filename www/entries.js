@@ -5,7 +5,11 @@
 
 import { copyTemplate, part } from './dom.js';
 import { formula } from './format.js';
+import { suggest } from './suggest.js';
 import { withoutPhase } from './understood.js';
+import { attach, nameChooser } from './units.js';
+
+/** @import { SpeciesMatch } from './shiftgauge.js' */
 
 /**
  * @typedef {object} Row
@@ -22,8 +26,9 @@ let serial = 0;
  * @param {HTMLElement} list       where the rows stand
  * @param {string} template        the id of the row's template
  * @param {(row: Row) => void} [prepare]   what else a new row needs
+ * @param {(row: Row, match: SpeciesMatch) => void} [picked]   a species of the library was taken
  */
-export function createEntries(list, template, prepare = () => {}) {
+export function createEntries(list, template, prepare = () => {}, picked = () => {}) {
   /** @type {Row[]} */
   let rows = [];
   const tellForm = () => list.dispatchEvent(new Event('input', { bubbles: true }));
@@ -58,6 +63,8 @@ export function createEntries(list, template, prepare = () => {}) {
     row.value.value = value;
     row.value.addEventListener('input', () => { row.offered = false; });
     part(root, 'remove', HTMLButtonElement).addEventListener('click', () => remove(row));
+    attach(row.value);
+    suggest(row.species, (match) => picked(row, match));
     prepare(row);
     rows.push(row);
     list.append(root);
@@ -89,8 +96,8 @@ export function createEntries(list, template, prepare = () => {}) {
       rows = [];
       list.replaceChildren();
     },
-    /** The rows that belong to the reading: all but the offers that nobody took up. */
-    given: () => rows.filter((row) => !row.offered),
+    /** The rows that belong to the reading: all but the offers that nobody took up, and rows still empty. */
+    given: () => rows.filter(({ offered, species, value }) => !offered && (species.value + value.value).trim() !== ''),
     all: () => rows,
   };
 }
@@ -103,9 +110,10 @@ function nameRow(row, inReaction) {
   const species = row.species.value.trim();
   const asName = inReaction && document.activeElement !== row.species;
   row.name.hidden = !asName;
-  row.species.hidden = asName;
+  row.species.closest('.combobox')?.toggleAttribute('hidden', asName);
   row.name.textContent = formula(species);
   row.value.setAttribute('aria-label', species === '' ? 'Value' : `${formula(species)}, value`);
+  nameChooser(row.value);
   part(row.root, 'remove', HTMLButtonElement).setAttribute('aria-label', species === '' ? 'Remove this row' : `Remove ${formula(species)}`);
 }
 

@@ -10,10 +10,15 @@ const MARK = '#case=';
  * @returns {Promise<string>}   the part of the link from `#` on
  */
 export async function hashOf(text) {
-  const plain = new TextEncoder().encode(text);
-  if (typeof CompressionStream !== 'function') return `${MARK}j${toBase64Url(plain)}`;
-  return `${MARK}z${toBase64Url(await through(plain, new CompressionStream('deflate-raw')))}`;
+  if (typeof CompressionStream !== 'function') return plainHashOf(text);
+  return `${MARK}z${toBase64Url(await through(new TextEncoder().encode(text), new CompressionStream('deflate-raw')))}`;
 }
+
+/**
+ * The same without deflating: longer, but at once.
+ * @param {string} text
+ */
+export const plainHashOf = (text) => `${MARK}j${toBase64Url(new TextEncoder().encode(text))}`;
 
 /**
  * @param {string} hash

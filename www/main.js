@@ -3,24 +3,36 @@
 import { balance, check, isSupported, restartEngine, startEngine, versionLine } from './engine.js';
 import { byId } from './dom.js';
 import { listen } from './events.js';
+import { firstCase } from './examples.js';
+import { foldAll } from './folds.js';
+import { createMemory } from './memory.js';
 import { forget, keep, recall } from './recall.js';
 import { textFromHash } from './link.js';
 import { keepOffline } from './offline/keep.js';
 import { render } from './render.js';
 import { caseFromText, caseToText, createState, withoutField } from './state.js';
+import { attachAll } from './units.js';
 import * as cases from './views/cases.js';
 import * as conditions from './views/conditions.js';
+import * as constant from './views/constant.js';
+import * as feed from './views/feed.js';
 import * as gas from './views/gas.js';
 import * as heading from './views/heading.js';
+import * as kept from './views/kept.js';
 import * as keys from './views/keys.js';
 import * as ledger from './views/ledger.js';
 import * as notes from './views/notes.js';
+import * as paste from './views/paste.js';
 import * as problems from './views/problems.js';
 import * as reaction from './views/reaction.js';
+import * as record from './views/record.js';
 import * as solids from './views/solids.js';
+import * as solution from './views/solution.js';
 import * as sources from './views/sources.js';
 import * as spoken from './views/spoken.js';
+import * as standing from './views/standing.js';
 import * as strip from './views/strip.js';
+import * as undo from './views/undo.js';
 import * as valley from './views/valley.js';
 import * as verdict from './views/verdict.js';
 import * as working from './views/working.js';
@@ -28,12 +40,12 @@ import * as working from './views/working.js';
 /** @import { Case } from './shiftgauge.js' */
 /** @import { State } from './state.js' */
 
-const inputs = [heading, reaction, conditions, gas, solids];
-const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, keys, strip];
+const inputs = [heading, reaction, constant, conditions, gas, solids, solution, feed];
+const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
 const notice = byId('notice', HTMLElement);
 
 const state = createState(
-  /** @type {State} */ ({ question: cases.firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
+  /** @type {State} */ ({ question: firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
   (changed) => {
     byId('results', HTMLElement).hidden = changed.report === null;
     byId('results', HTMLElement).classList.toggle('is-old', !changed.current);
@@ -64,6 +76,8 @@ function readForm() {
 /** The case that was tried last, as text. */
 let tried = '';
 
+const memory = createMemory(tell);
+
 /** Answers the case as the form reads now. */
 function answer() {
   const question = readForm();
@@ -74,7 +88,7 @@ function answer() {
     return;
   }
   tried = text;
-  keep('case', text);
+  memory.keepCase(text);
   if (text === state.get().trapped) {
     state.set({ question, current: false, problems: [] });
     return;
@@ -119,6 +133,7 @@ function stopped(question, text, thrown) {
 const actions = {
   current: readForm,
   open(question, said) {
+    foldAll();
     state.set({ question, report: null, answered: null, current: false, problems: [] });
     fill(question);
     tried = '';
@@ -128,12 +143,27 @@ const actions = {
   tell,
 };
 
-/** @param {string} field   the path of something that this page has no field for */
-function takeOut(field) {
-  const question = withoutField(readForm(), field);
+/**
+ * Takes a case over that came from this one: the old answer stays in sight until the new one is there.
+ * @param {Case} question
+ */
+function change(question) {
   state.set({ question });
   fill(question);
   answer();
+}
+
+/** @param {string | null} text   a step of the history */
+function step(text) {
+  const found = caseFromText(text ?? '');
+  if (!found.ok) return;
+  tell('');
+  change(found.question);
+}
+
+/** @param {string} field   the path of something that this page has no field for */
+function takeOut(field) {
+  change(withoutField(readForm(), field));
   byId('sentence', HTMLElement).focus();
 }
 
@@ -150,17 +180,25 @@ async function openLink(hash) {
 }
 
 async function start() {
+  attachAll();
   if (!isSupported()) throw new Error('WebAssembly is off in this browser');
   await startEngine();
   byId('version', HTMLElement).textContent = versionLine();
   const saved = caseFromText(recall('case') ?? '');
-  const question = saved.ok ? saved.question : cases.firstCase();
+  const question = saved.ok ? saved.question : firstCase();
   state.set({ question });
   fill(question);
   answer();
   if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
   cases.connect(actions);
   problems.connect({ takeOut });
+  kept.connect({ current: readForm, openText: (text, said) => cases.openText(text, said, actions) });
+  paste.connect({ current: readForm, change: (question, said) => { change(question); tell(said); } });
+  undo.connect({
+    ...memory.history,
+    back: () => step(memory.history.back()),
+    forward: () => step(memory.history.forward()),
+  });
   listen({
     changed() {
       tell('');
@@ -169,21 +207,7 @@ async function start() {
     linked: (hash) => void openLink(hash),
   });
   await openLink(window.location.hash);
-  void keepOffline(tellOffline);
-}
-
-/**
- * @param {'ready' | 'update'} standing
- * @param {() => void} [takeOver]
- */
-function tellOffline(standing, takeOver) {
-  if (standing === 'ready') {
-    byId('offline', HTMLElement).textContent = 'Kept in this browser: works without a network.';
-    return;
-  }
-  const update = byId('update', HTMLButtonElement);
-  update.hidden = false;
-  update.addEventListener('click', () => takeOver?.(), { once: true });
+  void keepOffline(standing.tell);
 }
 
 start().catch((thrown) => {

@@ -1,11 +1,15 @@
 /**
- * What stays in this browser: the case in hand, the one before it, and a case that stopped the
- * engine. Each tab comes back to its own; a new tab to the last one written.
+ * What stays in this browser: the case in hand, the one before it, a case that stopped the engine, and
+ * the steps that can be undone. Each tab comes back to its own; a new tab to the last case written.
  */
 
 const PREFIX = 'shiftgauge.';
 
-/** @typedef {'case' | 'before' | 'stopped'} Slot */
+/** @typedef {'case' | 'before' | 'stopped' | 'steps'} Slot */
+
+/** Steps belong to their tab alone. */
+/** @type {readonly Slot[]} */
+const OF_THE_TAB = ['steps'];
 
 /**
  * @param {Slot} slot
@@ -13,7 +17,8 @@ const PREFIX = 'shiftgauge.';
  */
 export function recall(slot) {
   try {
-    return window.sessionStorage.getItem(PREFIX + slot) ?? window.localStorage.getItem(PREFIX + slot);
+    const own = window.sessionStorage.getItem(PREFIX + slot);
+    return OF_THE_TAB.includes(slot) ? own : own ?? window.localStorage.getItem(PREFIX + slot);
   } catch {
     return null;
   }
@@ -27,7 +32,7 @@ export function recall(slot) {
 export function keep(slot, text) {
   try {
     window.sessionStorage.setItem(PREFIX + slot, text);
-    window.localStorage.setItem(PREFIX + slot, text);
+    if (!OF_THE_TAB.includes(slot)) window.localStorage.setItem(PREFIX + slot, text);
     return true;
   } catch {
     return false;

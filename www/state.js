@@ -32,6 +32,8 @@ export function createState(initial, changed) {
 
 export const FORMAT = 'shiftgauge 1';
 const LONGEST_TEXT = 1_000_000;
+/** A case is nested six deep; this much more cannot trouble whatever walks it. */
+const DEEPEST = 32;
 
 /** @returns {Case} */
 export function emptyCase() {
@@ -61,6 +63,7 @@ export function caseFromText(text) {
   } catch {
     return { ok: false, message: 'This is not a case: its text is not JSON. Nothing was changed.' };
   }
+  if (isDeeper(found, DEEPEST)) return { ok: false, message: 'This is not a case: it is nested far deeper than one can be. Nothing was changed.' };
   if (!isRecord(found) || typeof found.format !== 'string' || !found.format.startsWith('shiftgauge ')) {
     return { ok: false, message: `This is not a case: it does not say "format": "${FORMAT}". Nothing was changed.` };
   }
@@ -71,6 +74,16 @@ export function caseFromText(text) {
   const reactions = Array.isArray(found.reactions) && isRecord(found.reactions[0]) ? found.reactions : base.reactions;
   const reading = isRecord(found.reading) ? { ...base.reading, gas: null, ...found.reading } : base.reading;
   return { ok: true, question: /** @type {Case} */ ({ ...base, ...found, reactions, reading }) };
+}
+
+/**
+ * @param {unknown} value
+ * @param {number} levels
+ * @returns {boolean}
+ */
+function isDeeper(value, levels) {
+  if (!isContainer(value)) return false;
+  return levels === 0 || Object.values(value).some((inner) => isDeeper(inner, levels - 1));
 }
 
 /**
@@ -124,3 +137,10 @@ export function asText(value) {
 export function isRecord(value) {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
+
+/**
+ * The fields of whatever should be an object; none where it is something else.
+ * @param {unknown} value
+ * @returns {Record<string, unknown>}
+ */
+export const fieldsOf = (value) => (isRecord(value) ? value : {});

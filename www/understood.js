@@ -8,6 +8,9 @@
  */
 export const withoutPhase = (text) => text.trim().replace(/\((?:g|l|s|aq)\)$/, '');
 
+/** An ion is not a gas here, whether or not the library has it. */
+const CHARGED = /[+-]\)?$/;
+
 /**
  * As the engine understood this equation when it last answered, else as they are written; a phase that is
  * not known yet is null.
@@ -22,5 +25,5 @@ export function understoodSpecies({ balance, report, answered, question }) {
     }));
   }
   if (balance?.ok !== true) return null;
-  return balance.terms.map(({ species, phase }) => ({ species: withoutPhase(species), phase }));
+  return balance.terms.map(({ species, phase }) => ({ species: withoutPhase(species), phase: phase ?? (CHARGED.test(species) ? 'aq' : null) }));
 }

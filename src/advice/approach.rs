@@ -3,6 +3,7 @@
 use crate::constant::Constant;
 use crate::library::Temperature;
 use crate::numeric::{RootOutcome, root_between};
+use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// T* and the approach.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -71,6 +72,28 @@ pub fn approach(
     let exothermic = enthalpy.is_some_and(|enthalpy| enthalpy < 0.0);
     let shortfall_k = if exothermic { -approach_k } else { approach_k };
     Ok(Approach { t_star_k, approach_k, shortfall_k, others: found.len() - 1 })
+}
+
+/// T* once more after a small change of K or Q, by Newton's method from where it was: ln K(T) is so
+/// nearly straight in 1/T that three steps are usual. None where it does not settle nearby.
+#[must_use]
+pub fn follow(constant: &Constant, ln_q: f64, from_k: f64) -> Option<f64> {
+    const STEPS_AT_MOST: u32 = 12;
+    let mut per_k = 1.0 / from_k;
+    for _ in 0..STEPS_AT_MOST {
+        let at = constant.at(Temperature::new(1.0 / per_k).ok()?);
+        // d ln K/d(1/T) = −ΔH°/R.
+        let slope = -at.enthalpy_j_per_mol? / GAS_CONSTANT_J_PER_MOL_K;
+        let step = (ln_q - at.ln_k) / slope;
+        if !step.is_finite() || step.abs() > 0.3 * per_k {
+            return None;
+        }
+        per_k += step;
+        if step.abs() <= 1e-11 * per_k {
+            return Some(1.0 / per_k);
+        }
+    }
+    None
 }
 
 fn roots(distance: impl Fn(f64) -> f64, from_k: f64, to_k: f64) -> Vec<f64> {

@@ -95,7 +95,7 @@ const REACHED: f64 = 1e-9;
 /// # let state = State { temperature_k: 330.0, hold, amounts_mol: &[1.0, 0.0] };
 /// # let constant = Constant::Stated(StatedConstant {
 /// #     ln_k: 0.0, u_ln_k: None, at_k: Some(330.0), enthalpy_j_per_mol: Some(57_000.0),
-/// #     heat_capacity_j_per_mol_k: None,
+/// #     u_enthalpy_j_per_mol: None, heat_capacity_j_per_mol_k: None,
 /// # });
 /// # let plant = Plant { system: &system, state, constant: &constant, approach_k: 0.0 };
 /// // N2O4 = 2 NO2 with K = 1: half of it is split at 3/4 bar, since K = 4 α² P/(1 − α²).

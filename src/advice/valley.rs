@@ -1,6 +1,6 @@
 //! The valley: the energy that falls until the mixture is at rest, drawn against the extent.
 
-use crate::equilibrium::{Affinity, Hold, Kind, State, System, affinity};
+use crate::equilibrium::{Affinity, Kind, State, System, affinity};
 use crate::quantity::{
     GAS_CONSTANT_J_PER_MOL_K, STANDARD_CONCENTRATION_MOL_PER_M3, STANDARD_PRESSURE_PA,
 };
@@ -52,22 +52,23 @@ const NEAR_POINTS: u16 = 48;
 /// A closer look is worth it when now and rest are nearer than this share of the whole.
 const NEAR_SHARE: f64 = 0.12;
 
-/// Draws the valley between two extents; nothing if they are not apart.
+/// Draws the valley between two extents; nothing if they are not apart, or if activity coefficients
+/// come in.
 ///
-/// At constant pressure G(ξ)/RT = Σ n_i ln a_i − ξ ln K over the gases (pure phases have ln a = 0);
-/// at constant volume A(ξ)/RT = Σ n_i (ln a_i − 1) − ξ ln K over gases or solutes. Up to a constant
-/// these are the energies whose slope is −A/RT. The closer look integrates the affinity instead, so
+/// The energy over RT is Σ n_i ln a_i − ξ ln K over what follows fractions (a gas at constant
+/// pressure, a liquid mixture) and Σ n_i (ln a_i − 1) − ξ ln K over what follows amounts (a gas at
+/// constant volume, solutes); pure phases have ln a = 0. Up to a constant its slope is −A/RT. The closer look integrates the affinity instead, so
 /// that nothing cancels when now is nearly at rest.
 #[must_use]
 pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Option<Valley> {
     let Stretch { from_mol, to_mol, rest_mol } = stretch;
     let width = to_mol - from_mol;
-    if !(width > 0.0 && width.is_finite()) {
+    if !(width > 0.0 && width.is_finite()) || system.is_corrected() {
         return None;
     }
-    let energy = match state.hold {
-        Hold::Pressure { .. } => Energy::Gibbs,
-        Hold::Volume { .. } => Energy::Helmholtz,
+    let energy = match state.hold.volume_m3() {
+        Some(_) => Energy::Helmholtz,
+        None => Energy::Gibbs,
     };
     let at = |extent: f64| energy_over_rt(system, state, ln_k, extent);
     let place = |i: u16| match i {
@@ -107,26 +108,40 @@ fn moved(system: &System, state: &State, extent_mol: f64) -> Vec<f64> {
 
 fn energy_over_rt(system: &System, state: &State, ln_k: f64, extent_mol: f64) -> f64 {
     let amounts = moved(system, state, extent_mol);
-    let mixed = system.kinds().iter().zip(&amounts);
-    let mixed = mixed.filter(|(kind, _)| matches!(kind, Kind::Gas | Kind::Solute));
-    let mixed: Vec<f64> = mixed.map(|(_, amount)| *amount).filter(|amount| *amount > 0.0).collect();
-    let total: f64 = mixed.iter().sum();
-    let solutes = system.kinds().contains(&Kind::Solute);
-    let (ln_unit, minus) = match state.hold {
-        Hold::Pressure { pressure_pa } if total > 0.0 => {
-            (libm::log(pressure_pa / STANDARD_PRESSURE_PA / total), 0.0)
-        }
-        Hold::Pressure { .. } => (0.0, 0.0),
-        Hold::Volume { volume_m3 } if solutes => {
+    let mixing: f64 = [Kind::Gas, Kind::Solute, Kind::Liquid]
+        .into_iter()
+        .map(|mixture| {
+            let each = system.kinds().iter().zip(&amounts);
+            let here = each.filter(|(kind, amount)| **kind == mixture && **amount > 0.0);
+            let here: Vec<f64> = here.map(|(_, amount)| *amount).collect();
+            let (ln_unit, minus) = unit(mixture, state, here.iter().sum());
+            here.iter().map(|n| n * (libm::log(*n) + ln_unit - minus)).sum::<f64>()
+        })
+        .sum();
+    mixing - extent_mol * ln_k
+}
+
+/// ln(a/n) of a species of a mixture, and what its total takes off: 1 where activities go by
+/// amounts, 0 where they go by fractions.
+fn unit(mixture: Kind, state: &State, total: f64) -> (f64, f64) {
+    if total <= 0.0 {
+        return (0.0, 0.0);
+    }
+    match (mixture, state.hold.pressure_pa(), state.hold.volume_m3(), state.hold.water_kg()) {
+        (Kind::Liquid, ..) => (-libm::log(total), 0.0),
+        (Kind::Solute, _, _, Some(water_kg)) => (-libm::log(water_kg), 1.0),
+        (Kind::Solute, _, Some(volume_m3), None) => {
             (-libm::log(volume_m3 * STANDARD_CONCENTRATION_MOL_PER_M3), 1.0)
         }
-        Hold::Volume { volume_m3 } => {
+        (Kind::Gas, Some(pressure_pa), ..) => {
+            (libm::log(pressure_pa / STANDARD_PRESSURE_PA / total), 0.0)
+        }
+        (Kind::Gas, None, Some(volume_m3), _) => {
             let rt = GAS_CONSTANT_J_PER_MOL_K * state.temperature_k;
             (libm::log(rt / (volume_m3 * STANDARD_PRESSURE_PA)), 1.0)
         }
-    };
-    let mixing: f64 = mixed.iter().map(|n| n * (libm::log(*n) + ln_unit - minus)).sum();
-    mixing - extent_mol * ln_k
+        _ => (0.0, 0.0),
+    }
 }
 
 /// The closer look: minus the integral of the affinity from rest, by Simpson's rule.

@@ -1,13 +1,15 @@
 //! The report, written from the findings.
 
 use super::constant_of::k_report;
-use super::report::{ReactionReport, RecordReport, Report, SourceReport, TermReport};
+use super::report::{
+    FitPoint, FitReport, ReactionReport, RecordReport, Report, SourceReport, TermReport,
+};
+use super::report_amounts::MissingReport;
 use super::run::Findings;
-use super::{amounts, notes, steps};
-use crate::advice::{Direction, Verdict};
+use super::setting::Basis;
+use super::{amounts, notes, nudges, steps, verdict};
 use crate::constant::Constant;
-use crate::equilibrium::{Affinity, Quotient};
-use crate::mixture::AmountBasis;
+use crate::equilibrium::{Affinity, Quotient, RestOutcome};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// Writes the report.
@@ -15,29 +17,45 @@ pub(super) fn report(found: &Findings) -> Report {
     let reading = found.reading.as_ref();
     let temperature_k = found.question.temperature.value_si;
     let pressure_pa =
-        reading.map_or(found.question.pressure_pa, |reading| reading.setting.pressure_pa);
+        reading.map_or(found.question.pressure_pa(), |reading| reading.setting.pressure_pa);
+    let activities = reading.and_then(|reading| reading.activities.as_ref());
+    let dissolved = activities.and_then(|activities| activities.solution);
     Report {
         temperature_k,
         pressure_pa,
         volume_m3: reading.and_then(|reading| reading.setting.volume_m3),
-        ionic_strength_mol_per_kg: None,
+        ionic_strength_mol_per_kg: dissolved.map(|found| found.ionic_strength_mol_per_kg),
+        charge_balance: reading.and_then(amounts::charges),
+        water_activity: dissolved.map(|found| libm::exp(found.ln_water_activity)),
+        saturation: reading.map_or_else(Vec::new, |reading| amounts::saturation(found, reading)),
         reactions: vec![reaction(found, pressure_pa)],
-        basis_mol: reading.map_or(0.0, |reading| reading.setting.gas_mol),
+        basis_mol: reading.map_or(0.0, |reading| reading.setting.basis_mol()),
         basis: reading.map_or("none", |reading| basis_name(reading.setting.basis)),
         species: reading.map_or_else(Vec::new, |reading| amounts::species(found, reading)),
         rest: reading.map(|reading| amounts::rest(found, reading)),
         conversions: reading.map_or_else(Vec::new, |reading| amounts::conversions(found, reading)),
+        missing: found.missing.as_ref().zip(reading).map(|(missing, reading)| MissingReport {
+            species: missing.species.clone(),
+            value: missing.value,
+            is_fraction: reading.setting.is_by_fraction(),
+            u_value: missing.value * missing.u_ln_value(reading),
+        }),
+        balance: reading.and_then(amounts::balance),
         valley: reading.and_then(|reading| amounts::valley(found, reading)),
+        nudges: reading.map_or_else(Vec::new, |reading| nudges::nudges(found, reading)),
         steps: steps::steps(found),
         notes: notes::notes(found),
     }
 }
 
-pub(super) fn basis_name(basis: AmountBasis) -> &'static str {
+pub(super) fn basis_name(basis: Basis) -> &'static str {
     match basis {
-        AmountBasis::OneMole => "one mole of wet gas",
-        AmountBasis::Amounts => "the amounts given",
-        AmountBasis::Flows => "the flow of one second",
+        Basis::OneMoleOfGas => "one mole of wet gas",
+        Basis::OneMoleOfLiquid => "one mole of liquid",
+        Basis::Amounts => "the amounts given",
+        Basis::Flows => "the flow of one second",
+        Basis::OneKilogramOfWater => "one kilogram of water",
+        Basis::Solution => "the solution given",
     }
 }
 
@@ -51,7 +69,6 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
     });
     let approach = reading.and_then(|reading| reading.approach.ok());
     let rest = reading.map(|reading| &reading.rest.summary);
-    let (verdict, leaning) = reading.map_or((None, None), |reading| words(reading.verdict));
     ReactionReport {
         equation: found.equation.text(),
         terms: TermReport::list(&found.participants),
@@ -64,23 +81,18 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         ),
         q: reading.map_or("undetermined", |reading| quotient_word(reading.quotient)),
         ln_q: reading.and_then(|reading| ln_q(reading.quotient)),
-        u_ln_q: None,
         affinity_over_rt: affinity,
-        u_affinity_over_rt: None,
         gibbs_j_per_mol: affinity.map(|over_rt| -over_rt * rt),
-        u_gibbs_j_per_mol: None,
-        verdict,
-        leaning,
-        why: notes::why(found),
+        judgement: verdict::report(found),
         t_star_k: approach.map(|approach| approach.t_star_k),
         approach_k: approach.map(|approach| approach.approach_k),
-        u_approach_k: None,
         shortfall_k: approach.map(|approach| approach.shortfall_k),
         approach_note: reading.and_then(notes::approach_note),
-        extent_mol: rest.map(|rest| rest.extent_mol),
+        extent_mol: rest
+            .filter(|rest| rest.outcome != RestOutcome::HasNoLimit)
+            .map(|rest| rest.extent_mol),
         extent_min_mol: rest.and_then(|rest| rest.extent_min_mol),
         extent_max_mol: rest.and_then(|rest| rest.extent_max_mol),
-        budget: Vec::new(),
         source: source(found),
     }
 }
@@ -108,15 +120,6 @@ pub(super) fn quotient_word(quotient: Quotient) -> &'static str {
     }
 }
 
-fn words(verdict: Verdict) -> (Option<&'static str>, Option<&'static str>) {
-    match verdict {
-        Verdict::Moves(direction) => (Some(direction.word()), Some(direction.word())),
-        Verdict::AtRest => (Some("at rest"), None),
-        Verdict::Spent(direction) => (Some("at rest"), Some(Direction::word(direction))),
-        Verdict::CannotTell => (Some("cannot tell"), None),
-    }
-}
-
 fn source(found: &Findings) -> SourceReport {
     let records = found.participants.iter().filter_map(|participant| {
         participant.record.map(|record| RecordReport {
@@ -133,8 +136,14 @@ fn source(found: &Findings) -> SourceReport {
             format!("The library, from the records of {} species", records.len())
         }
         Constant::Stated(_) => "A value that was entered in the case".to_owned(),
+        Constant::Formula(formula) => {
+            format!("A formula of {} terms that was entered in the case", formula.terms.len())
+        }
         Constant::Points(line) => {
-            format!("A straight line through {} points that were entered in the case", line.points)
+            format!(
+                "A straight line through {} points that were entered in the case",
+                line.points.len()
+            )
         }
     };
     SourceReport {
@@ -142,5 +151,22 @@ fn source(found: &Findings) -> SourceReport {
         range_k: found.constant.range_k().map(Into::into),
         extrapolated_by_k: found.at.extrapolated_by_k,
         records,
+        fit: match &found.constant {
+            Constant::Points(line) => Some(FitReport {
+                points: line
+                    .points
+                    .iter()
+                    .map(|point| FitPoint {
+                        temperature_k: point.temperature_k,
+                        ln_k: point.ln_k,
+                        residual: point.ln_k - line.ln_k(point.temperature_k),
+                    })
+                    .collect(),
+                enthalpy_j_per_mol: line.enthalpy_j_per_mol,
+                u_enthalpy_j_per_mol: line.u_enthalpy_j_per_mol,
+                bends: line.bends,
+            }),
+            _ => None,
+        },
     }
 }

@@ -1,20 +1,30 @@
 //! Where K comes from, as the case asks for it.
 
+use super::answer::quotient_word;
 use super::participants::Participant;
-use super::question::{KSource, KindOfK, Question, StatedK};
+use super::question::{KSource, KindOfK, Question, StatedFormula, StatedK};
 use super::report::{FormReport, KReport};
 use super::run::{EQUATION, at_field};
 use crate::constant::{
-    Constant, ConstantAt, Form, FormValue, PRESSURE_UNITS, Point, StatedConstant, all_forms,
-    line_through,
+    Constant, ConstantAt, Form, FormValue, FormulaConstant, FormulaTerm, PRESSURE_UNITS, Point,
+    StatedConstant, all_forms, line_through,
 };
+use crate::equilibrium::Quotient;
 use crate::library::{Combination, Record, Temperature};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::Equation;
 use std::f64::consts::LN_10;
 
-/// The constant of the reaction as written.
+/// What a number of K is read beside: the temperature it is taken at unless it has its own, and the
+/// pressure that a Kx needs.
+#[derive(Debug, Clone, Copy)]
+pub(super) struct Beside {
+    pub temperature_k: f64,
+    pub pressure_pa: Option<f64>,
+}
+
+/// The constant of the reaction as written; none where the reading itself is to give it.
 ///
 /// # Errors
 /// A number that belongs to another reaction; a Kx without a pressure.
@@ -23,7 +33,7 @@ pub(super) fn constant_of(
     equation: &Equation,
     participants: &[Participant],
     delta_nu_gas: f64,
-) -> Outcome<Constant> {
+) -> Outcome<Option<Constant>> {
     let factor = match &question.reaction.constant_for {
         None => 1.0,
         Some(other) => match equation.multiple_of(&with_phases(other, participants)) {
@@ -34,43 +44,62 @@ pub(super) fn constant_of(
             }
         },
     };
-    match &question.reaction.source {
+    let temperature_k = question.temperature.value_si;
+    let beside = Beside { temperature_k, pressure_pa: question.pressure_pa() };
+    // A number belongs to the other equation, whose Δν is ours over the factor.
+    let own_delta_nu = delta_nu_gas / factor;
+    Ok(Some(match &question.reaction.source {
         KSource::Library => {
             let rows = participants.iter().filter_map(|participant| {
                 participant.record.map(|record| (record, participant.nu))
             });
             let rows: Vec<(&Record, f64)> = rows.collect();
             let combination = Combination::new(&rows);
-            Ok(Constant::Library(combination.map_err(|found| at_field(found, EQUATION))?))
+            Constant::Library(combination.map_err(|found| at_field(found, EQUATION))?)
         }
         KSource::Points(stated) => {
             let points: Outcome<Vec<Point>> = stated
                 .iter()
                 .map(|one| {
-                    let one = stated_constant(question, one, delta_nu_gas / factor)?;
+                    let one = stated_constant(one, beside, own_delta_nu)?.times(factor);
                     Ok(Point {
-                        temperature_k: one.at_k.unwrap_or(question.temperature.value_si),
-                        ln_k: one.ln_k * factor,
-                        u_ln_k: one.u_ln_k.map(|u| u * factor.abs()),
+                        temperature_k: one.at_k.unwrap_or(temperature_k),
+                        ln_k: one.ln_k,
+                        u_ln_k: one.u_ln_k,
                     })
                 })
                 .collect();
             let line = line_through(&points?);
             let line = line.map_err(|found| at_field(found, "reactions[0].constant.points"))?;
-            Ok(Constant::Points(line))
+            Constant::Points(line)
         }
         KSource::Value(stated) => {
-            // The number belongs to the other equation, whose Δν is ours over the factor.
-            let stated = stated_constant(question, stated, delta_nu_gas / factor)?;
-            Ok(Constant::Stated(StatedConstant {
-                ln_k: stated.ln_k * factor,
-                u_ln_k: stated.u_ln_k.map(|u| u * factor.abs()),
-                at_k: stated.at_k,
-                enthalpy_j_per_mol: stated.enthalpy_j_per_mol.map(|h| h * factor),
-                heat_capacity_j_per_mol_k: stated.heat_capacity_j_per_mol_k.map(|c| c * factor),
-            }))
+            Constant::Stated(stated_constant(stated, beside, own_delta_nu)?.times(factor))
         }
+        KSource::Formula(stated) => {
+            Constant::Formula(formula_constant(stated, own_delta_nu, factor))
+        }
+        KSource::Reading(_) => return Ok(None),
+    }))
+}
+
+/// The formula as one of ln K for the reaction as written and p° = 1 bar.
+fn formula_constant(stated: &StatedFormula, own_delta_nu: f64, factor: f64) -> FormulaConstant {
+    let per_unit = if stated.is_log10 { LN_10 } else { 1.0 };
+    let scale = |(coefficient, term): &(f64, FormulaTerm)| (coefficient * per_unit * factor, *term);
+    let mut terms: Vec<(f64, FormulaTerm)> = stated.terms.iter().map(scale).collect();
+    // Kp over K does not depend on the temperature, so any will do.
+    let unit = kp(stated.pressure_unit).ln_factor(own_delta_nu, 1.0);
+    if unit != 0.0 {
+        terms.push((-unit * factor, FormulaTerm::One));
     }
+    let u_ln_k = stated.tolerance.map(|tolerance| 0.5 * tolerance * per_unit * factor.abs());
+    FormulaConstant { terms, range_k: stated.range_k, u_ln_k }
+}
+
+fn kp(symbol: Option<&'static str>) -> Form {
+    let unit = PRESSURE_UNITS.into_iter().find(|unit| Some(unit.symbol) == symbol);
+    unit.map_or(Form::K, Form::Kp)
 }
 
 /// The equation of a stated number, its phases filled in from the reaction's own.
@@ -84,27 +113,28 @@ fn with_phases(other: &Equation, participants: &[Participant]) -> Equation {
     })
 }
 
-fn stated_constant(
-    question: &Question,
+/// A stated number as ln K of the equation that it belongs to; a logarithm with a pressure unit is
+/// that of a Kp.
+///
+/// # Errors
+/// `pressure-needed` for a Kx beside no pressure.
+pub(super) fn stated_constant(
     stated: &StatedK,
+    beside: Beside,
     delta_nu_gas: f64,
 ) -> Outcome<StatedConstant> {
     let at_k = stated.at.as_ref().map(|at| at.value_si);
-    let temperature_k = at_k.unwrap_or(question.temperature.value_si);
+    let temperature_k = at_k.unwrap_or(beside.temperature_k);
     let value = stated.value.value_si;
     let u = stated.value.standard_uncertainty_si;
     let form = match stated.kind {
-        KindOfK::Kp => {
-            let symbol = stated.pressure_unit.unwrap_or("bar");
-            let unit = PRESSURE_UNITS.into_iter().find(|unit| unit.symbol == symbol);
-            unit.map_or(Form::K, Form::Kp)
-        }
         KindOfK::Kc => Form::Kc,
-        KindOfK::Kx => match question.pressure_pa {
+        KindOfK::Kx => match beside.pressure_pa {
             Some(pressure_pa) => Form::Kx { pressure_pa },
             None => return Err(Problem::new(CaseCode::PressureNeeded).at("pressure").into()),
         },
-        _ => Form::K,
+        KindOfK::K | KindOfK::Gibbs => Form::K,
+        KindOfK::Kp | KindOfK::Log10K | KindOfK::LnK | KindOfK::PK => kp(stated.pressure_unit),
     };
     let rt = GAS_CONSTANT_J_PER_MOL_K * temperature_k;
     let (ln, u_ln) = match stated.kind {
@@ -121,9 +151,41 @@ fn stated_constant(
         u_ln_k: u_ln,
         at_k,
         enthalpy_j_per_mol: stated.enthalpy.as_ref().map(|enthalpy| enthalpy.value_si),
+        u_enthalpy_j_per_mol: stated.enthalpy.and_then(|enthalpy| enthalpy.standard_uncertainty_si),
         heat_capacity_j_per_mol_k: stated.heat_capacity.as_ref().map(|heat| heat.value_si),
     })
 }
+
+/// K of a reading that is taken to be at equilibrium: K = Q.
+///
+/// # Errors
+/// No reading, or one whose Q is not finite.
+pub(super) fn constant_of_reading(
+    question: &Question,
+    quotient: Option<Quotient>,
+) -> Outcome<Constant> {
+    let KSource::Reading(enthalpy) = &question.reaction.source else {
+        return Err(Problem::new(CaseCode::KFromNoReading).at(FROM).into());
+    };
+    let ln_k = match quotient {
+        Some(Quotient::Finite(ln_q)) => ln_q,
+        Some(open) => {
+            let problem = Problem::new(CaseCode::KFromOpenReading);
+            return Err(problem.with("found", quotient_word(open)).at(FROM).into());
+        }
+        None => return Err(Problem::new(CaseCode::KFromNoReading).at(FROM).into()),
+    };
+    Ok(Constant::Stated(StatedConstant {
+        ln_k,
+        u_ln_k: None,
+        at_k: Some(question.temperature.value_si),
+        enthalpy_j_per_mol: enthalpy.map(|enthalpy| enthalpy.value_si),
+        u_enthalpy_j_per_mol: enthalpy.and_then(|enthalpy| enthalpy.standard_uncertainty_si),
+        heat_capacity_j_per_mol_k: None,
+    }))
+}
+
+const FROM: &str = "reactions[0].constant.from";
 
 /// The temperature at which K is taken: T* = T − approach.
 ///

@@ -1,11 +1,14 @@
 //! Notes beside the report, and the sentence of the verdict.
 
+use super::inputs::without_tolerance;
+use super::missing::Missing;
+use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
-use crate::advice::{Direction, NoApproach, Verdict};
+use crate::advice::NoApproach;
 use crate::constant::Constant;
-use crate::problem::words::{Language, note};
+use crate::problem::words::{Language, input, note};
 use crate::problem::{NoteCode, Remark};
 use crate::quantity::PressureReference;
 
@@ -21,8 +24,12 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
     remarks.extend(constant_remarks(found));
     if found.reading.is_none() {
         remarks.push(Remark::new(NoteCode::NoReading));
-    } else if found.question.tolerances {
-        remarks.push(Remark::new(NoteCode::TolerancesNotCarried));
+    }
+    if let (Some(missing), Some(reading)) = (&found.missing, &found.reading) {
+        remarks.extend(missing_remarks(missing, reading));
+    }
+    if let Some(reading) = &found.reading {
+        remarks.extend(tolerance_remarks(found, reading));
     }
     remarks.push(Remark::new(NoteCode::Equilibrium));
     let say = |remark: &Remark| {
@@ -30,6 +37,42 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
         NoteReport { level: level.as_str(), code: remark.code.as_str(), text }
     };
     remarks.iter().map(say).collect()
+}
+
+fn missing_remarks(missing: &Missing, reading: &ReadingFindings) -> Vec<Remark> {
+    let u_ln = missing.u_ln_value(reading);
+    let value = if reading.setting.is_by_fraction() {
+        format!("{} %", shown::significant(missing.value * 100.0, 5))
+    } else {
+        format!("{} mol", shown::significant(missing.value, 5))
+    };
+    let species = missing.species.as_str();
+    let found = Remark::new(NoteCode::MissingFound).with("species", species).with("value", value);
+    let mut remarks = vec![found.with("u_per_cent", shown::significant(u_ln * 100.0, 2))];
+    if missing.others > 0 {
+        let several = Remark::new(NoteCode::MissingSeveral).with("species", species);
+        remarks.push(several.with("others", missing.others.to_string()));
+    }
+    remarks
+}
+
+/// What is worth knowing of the verdict's uncertainty.
+fn tolerance_remarks(found: &Findings, reading: &ReadingFindings) -> Vec<Remark> {
+    let judgement = &reading.judgement;
+    let mut remarks = Vec::new();
+    let names = without_tolerance(&found.question);
+    if !names.is_empty() {
+        let names = names.iter().map(|name| input(name, Language::En)).collect::<Vec<_>>();
+        remarks.push(Remark::new(NoteCode::NoTolerance).with("names", names.join(", ")));
+    }
+    if judgement.band_is_conversion_by_need {
+        remarks.push(Remark::new(NoteCode::ConversionBand));
+    }
+    let bent = [&judgement.affinity, &judgement.approach];
+    if bent.into_iter().flatten().any(|budget| !budget.is_linear) {
+        remarks.push(Remark::new(NoteCode::NotLinear));
+    }
+    remarks
 }
 
 fn equation_remarks(found: &Findings) -> Vec<Remark> {
@@ -42,15 +85,15 @@ fn equation_remarks(found: &Findings) -> Vec<Remark> {
 fn pressure_remarks(found: &Findings) -> Vec<Remark> {
     let mut remarks = Vec::new();
     let question = &found.question;
-    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa) {
+    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa()) {
         if typed.pressure_reference == PressureReference::Gauge {
-            if !question.atmosphere_stated {
+            if question.atmosphere.is_none() {
                 remarks.push(Remark::new(NoteCode::StandardAtmosphere));
             }
             remarks.push(
                 Remark::new(NoteCode::GaugeToAbsolute)
                     .with("gauge", shown::pressure(typed.value_si))
-                    .with("atmosphere", shown::pressure(question.atmosphere_pa))
+                    .with("atmosphere", shown::pressure(question.atmosphere_pa()))
                     .with("absolute", shown::pressure(absolute_pa)),
             );
         }
@@ -69,61 +112,22 @@ fn constant_remarks(found: &Findings) -> Vec<Remark> {
         let remark = Remark::new(NoteCode::ApproachTaken);
         remarks.push(remark.with("temperature", shown::temperature(found.k_temperature.kelvin())));
     }
+    if matches!(&found.constant, Constant::Points(line) if line.bends) {
+        remarks.push(Remark::new(NoteCode::PointsBend));
+    }
+    if matches!(found.question.reaction.source, KSource::Reading(_)) {
+        remarks.push(Remark::new(NoteCode::KFromReading));
+    }
     if let Some(by_k) = found.at.extrapolated_by_k {
         let code = match found.constant {
             Constant::Library(_) => NoteCode::Extrapolated,
             Constant::Points(_) => NoteCode::LineExtended,
+            Constant::Formula(_) => NoteCode::FormulaExtended,
             Constant::Stated(_) => NoteCode::KNotCarried,
         };
         remarks.push(Remark::new(code).with("by_k", shown::number(by_k)));
     }
     remarks
-}
-
-/// The verdict in one sentence.
-pub(super) fn why(found: &Findings) -> String {
-    let Some(reading) = &found.reading else {
-        return "No reading is given, so there is only K.".to_owned();
-    };
-    let names = |sign: f64| {
-        let rows = found.participants.iter().zip(&reading.amounts_mol);
-        let gone =
-            rows.filter(|(participant, amount)| participant.nu * sign > 0.0 && **amount == 0.0);
-        gone.map(|(participant, _)| participant.species.text()).collect::<Vec<_>>().join(", ")
-    };
-    match reading.verdict {
-        Verdict::Moves(Direction::Forward) => moving(reading, "forward"),
-        Verdict::Moves(Direction::Reverse) => moving(reading, "in reverse"),
-        Verdict::AtRest => "Q equals K: nothing moves.".to_owned(),
-        Verdict::Spent(direction) => {
-            let sign = if direction == Direction::Forward { -1.0 } else { 1.0 };
-            let gone = names(sign);
-            format!("The affinity points {}, but there is no {gone} to use up.", direction.word())
-        }
-        Verdict::CannotTell => format!(
-            "Species are absent from both sides ({}; {}), so Q is undetermined.",
-            names(-1.0),
-            names(1.0)
-        ),
-    }
-}
-
-fn moving(reading: &ReadingFindings, word: &str) -> String {
-    match reading.approach {
-        Ok(approach) if approach.shortfall_k > 0.0 => {
-            format!(
-                "The mixture moves {word}; it is {} K short of equilibrium.",
-                shown::kelvins(approach.shortfall_k)
-            )
-        }
-        Ok(approach) => {
-            format!(
-                "The mixture moves {word}; it is {} K past equilibrium.",
-                shown::kelvins(-approach.shortfall_k)
-            )
-        }
-        Err(_) => format!("The mixture moves {word}."),
-    }
 }
 
 /// Why there is no T*, or that it is not the only one.

@@ -27,15 +27,18 @@ pub(super) struct Participants {
 
 /// Which species a reading names in which phase; empty where there is no reading.
 pub(super) fn named_in(question: &Question) -> Vec<Species> {
-    let gas = question.gas.iter().flat_map(|gas| &gas.entries).map(|entry| &entry.species);
-    let pure = question.pure.iter().map(|entry| &entry.species);
-    gas.chain(pure).cloned().collect()
+    let gas = question.gas.iter().flat_map(|gas| &gas.entries);
+    let liquid = question.liquid.iter().flat_map(|liquid| &liquid.entries);
+    let solution = question.solution.iter().flat_map(|solution| &solution.entries);
+    let all = gas.chain(liquid).chain(solution).chain(&question.pure);
+    all.map(|entry| entry.species.clone()).collect()
 }
 
 /// Gives every species of the equation its phase and, if `from_library`, its record.
 ///
 /// A phase that is not written is the one under which the reading names the species, else the only
 /// one that the library has; where several are left, gas if all other species can be gases too.
+/// Dissolved forms of the library count only beside an ion or a species written as dissolved.
 ///
 /// # Errors
 /// Every species that the library does not have, and every phase that stays unclear, each with its
@@ -47,9 +50,10 @@ pub(super) fn participants(
 ) -> Outcome<Participants> {
     let mut list = Vec::with_capacity(equation.terms.len());
     let (mut remarks, mut problems) = (Vec::new(), Vec::new());
-    let all_can_be_gas = equation.terms.iter().all(|term| can_be_gas(term, reading));
+    let in_water = equation.terms.iter().any(is_dissolved);
+    let all_can_be_gas = equation.terms.iter().all(|term| can_be_gas(term, reading, in_water));
     for term in &equation.terms {
-        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas) {
+        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas, in_water) {
             Ok(found) => found,
             Err(problem) => {
                 problems.push(problem.span(term.span));
@@ -78,31 +82,43 @@ pub(super) fn participants(
     Ok(Participants { list, equation, remarks })
 }
 
+fn is_dissolved(term: &Term) -> bool {
+    term.species.formula.charge() != 0 || term.species.phase == Some(Phase::Aqueous)
+}
+
 /// The phases in which the library has this substance, or the reading names it.
-fn phases_known(term: &Term, reading: &[Species]) -> Vec<Phase> {
+fn phases_known(term: &Term, reading: &[Species], in_water: bool) -> Vec<Phase> {
     let named = reading.iter().filter(|species| species.same_substance(&term.species));
     let mut found: Vec<Phase> = named.filter_map(|species| species.phase).collect();
     if found.is_empty() {
         let records =
             library::find(term.species.formula.text(), None, term.species.form.as_deref());
         found.extend(records.iter().map(|record| record.phase));
+        if !in_water && found.iter().any(|phase| *phase != Phase::Aqueous) {
+            found.retain(|phase| *phase != Phase::Aqueous);
+        }
     }
     Phase::ALL.into_iter().filter(|phase| found.contains(phase)).collect()
 }
 
-fn can_be_gas(term: &Term, reading: &[Species]) -> bool {
+fn can_be_gas(term: &Term, reading: &[Species], in_water: bool) -> bool {
     match term.species.phase {
         Some(phase) => phase == Phase::Gas,
-        None => phases_known(term, reading).contains(&Phase::Gas),
+        None => phases_known(term, reading, in_water).contains(&Phase::Gas),
     }
 }
 
 /// The phase of a term, and whether it had to be assumed.
-fn phase_of(term: &Term, reading: &[Species], all_gas: bool) -> Result<(Phase, bool), Problem> {
+fn phase_of(
+    term: &Term,
+    reading: &[Species],
+    all_gas: bool,
+    in_water: bool,
+) -> Result<(Phase, bool), Problem> {
     if let Some(phase) = term.species.phase {
         return Ok((phase, false));
     }
-    match phases_known(term, reading)[..] {
+    match phases_known(term, reading, in_water)[..] {
         // A species that nobody knows: a gas if it is one of the others' kind; where K comes from
         // the library, its absence there is reported next.
         [] => Ok((Phase::Gas, true)),

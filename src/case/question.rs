@@ -1,7 +1,11 @@
 //! A case with all its texts read: what the run needs, in the rooms' own types.
 
-use crate::mixture::{Entry, GasReading};
-use crate::quantity::Quantity;
+use crate::advice::Band;
+use crate::constant::FormulaTerm;
+use crate::mixture::{
+    Around, Entry, GasReading, SolutionModel, SolutionReading, absolute_pressure_pa,
+};
+use crate::quantity::{Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::Equation;
 
 /// What is held while the mixture comes to rest.
@@ -35,6 +39,20 @@ pub(super) struct StatedK {
     pub heat_capacity: Option<Quantity>,
 }
 
+/// A formula in T as a user states it.
+#[derive(Debug, Clone)]
+pub(super) struct StatedFormula {
+    /// The coefficients as written, of ln K or of log10 K.
+    pub terms: Vec<(f64, FormulaTerm)>,
+    /// Whether they are of log10 K.
+    pub is_log10: bool,
+    /// The unit of the Kp that they give; none where they give K itself.
+    pub pressure_unit: Option<&'static str>,
+    pub range_k: Option<(f64, f64)>,
+    /// The 95 % half-width of what the formula gives.
+    pub tolerance: Option<f64>,
+}
+
 /// Where K comes from.
 #[derive(Debug, Clone)]
 pub(super) enum KSource {
@@ -42,6 +60,10 @@ pub(super) enum KSource {
     Value(Box<StatedK>),
     /// Numbers at several temperatures, which stand in `at` of each.
     Points(Vec<StatedK>),
+    /// A formula in T.
+    Formula(StatedFormula),
+    /// The reading itself, taken as at equilibrium, with an enthalpy where one is stated.
+    Reading(Option<Quantity>),
 }
 
 /// What is asked of one reaction.
@@ -62,14 +84,58 @@ pub(super) struct Question {
     pub reaction: ReactionQuestion,
     pub temperature: Quantity,
     pub pressure: Option<Quantity>,
-    pub pressure_pa: Option<f64>,
-    pub atmosphere_pa: f64,
-    pub atmosphere_stated: bool,
+    pub atmosphere: Option<Quantity>,
     pub hold: Held,
-    pub volume_m3: Option<f64>,
+    pub volume: Option<Quantity>,
+    /// How near to rest counts as at rest, where the case says.
+    pub band: Option<Band>,
     pub gas: Option<GasReading>,
+    /// The gas that went in.
+    pub feed: Option<GasReading>,
+    /// A liquid of several components.
+    pub liquid: Option<LiquidReading>,
+    /// A solution in water.
+    pub solution: Option<SolutionReading>,
+    /// How activities in the solution are found.
+    pub solution_model: SolutionModel,
     /// The solids and the liquid, each its own phase.
     pub pure: Vec<Entry>,
-    /// Whether a tolerance was stated anywhere.
-    pub tolerances: bool,
+}
+
+/// A liquid mixture as read.
+#[derive(Debug, Clone)]
+pub(super) struct LiquidReading {
+    pub entries: Vec<Entry>,
+    /// The entry that takes what is missing from one, once that is known.
+    pub closed_by: Option<usize>,
+}
+
+impl Question {
+    /// Whether anything is read.
+    pub fn has_reading(&self) -> bool {
+        self.gas.is_some()
+            || self.liquid.is_some()
+            || self.solution.is_some()
+            || !self.pure.is_empty()
+    }
+
+    /// The atmosphere: as stated, else the standard one.
+    pub fn atmosphere_pa(&self) -> f64 {
+        self.atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |atmosphere| atmosphere.value_si)
+    }
+
+    /// The absolute pressure, where one is stated (and anything is left of it).
+    pub fn pressure_pa(&self) -> Option<f64> {
+        absolute_pressure_pa(self.pressure.as_ref()?, self.atmosphere_pa()).ok()
+    }
+
+    /// The volume, where one is stated.
+    pub fn volume_m3(&self) -> Option<f64> {
+        self.volume.map(|volume| volume.value_si)
+    }
+
+    /// What a gas analysis is laid beside.
+    pub fn around(&self) -> Around {
+        Around { pressure_pa: self.pressure_pa(), atmosphere_pa: self.atmosphere_pa() }
+    }
 }

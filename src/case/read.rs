@@ -1,11 +1,12 @@
 //! The case, walked by hand: every mistake in it is found in one go.
 
 use super::node::{Node, Reader};
-use super::question::{Held, KSource, Question, ReactionQuestion};
-use super::read_constant::{read_points, read_stated};
-use super::read_reading::{read_gas, read_pure};
+use super::question::{Held, KSource, LiquidReading, Question, ReactionQuestion};
+use super::read_constant::{read_formula, read_points, read_stated};
+use super::read_reading::{read_gas, read_liquid, read_pure, read_solution};
 use super::value::Value;
-use crate::mixture::{Entry, GasReading, absolute_pressure_pa};
+use crate::advice::Band;
+use crate::mixture::{Entry, GasReading, SolutionModel, SolutionReading, absolute_pressure_pa};
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::{Measure, PressureReference, Quantity, STANDARD_ATMOSPHERE_PA};
 use crate::reaction::{Balanced, Phase, balance};
@@ -44,55 +45,45 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     for name in ["title", "note"] {
         reader.text(&root.field(name));
     }
-    refuse_what_is_not_done(&mut reader, &root);
+    let solution_model = read_models(&mut reader, &root).unwrap_or_default();
     let reaction = read_reaction(&mut reader, &root.field("reactions"));
     let temperature = reader.needed_quantity(&root.field("temperature"), &[Measure::Temperature]);
     let atmosphere = read_atmosphere(&mut reader, &root.field("atmosphere"));
-    let atmosphere_pa = atmosphere.unwrap_or(STANDARD_ATMOSPHERE_PA);
+    let atmosphere_pa = atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |stated| stated.value_si);
     let pressure_node = root.field("pressure");
     let pressure = reader.quantity(&pressure_node, &[Measure::Pressure]);
-    let pressure_pa = pressure.as_ref().and_then(|pressure| {
+    if let Some(pressure) = &pressure {
         let absolute = absolute_pressure_pa(pressure, atmosphere_pa);
-        reader.keep(&pressure_node, absolute.map_err(Vec::from))
-    });
+        reader.keep(&pressure_node, absolute.map_err(Vec::from));
+    }
     let words = [("pressure", Held::Pressure), ("volume", Held::Volume)];
     let hold = reader.choice(&root.field("hold"), &words);
     let volume = reader.quantity(&root.field("volume"), &[Measure::Volume]);
     let reading = root.field("reading");
-    let (gas, pure) = read_blocks(&mut reader, &reading, atmosphere_pa);
+    let Reading { gas, liquid, solution, pure } = read_blocks(&mut reader, &reading);
+    let feed = read_feed(&mut reader, &root.field("feed"));
+    let band = read_band(&mut reader, &root.field("band"));
     let (Some(reaction), Some(temperature), Some(hold)) = (reaction, temperature, hold) else {
         return Err(reader.problems);
     };
     if !reader.problems.is_empty() {
         return Err(reader.problems);
     }
-    let volume_m3 = volume.map(|volume| volume.value_si);
-    let tolerances = text_anywhere(case, "±") || text_anywhere(case, "+/-");
-    let atmosphere_stated = atmosphere.is_some();
     Ok(Question {
         reaction,
         temperature,
         pressure,
-        pressure_pa,
-        atmosphere_pa,
-        atmosphere_stated,
+        atmosphere,
         hold,
-        volume_m3,
+        volume,
+        band,
         gas,
+        feed,
+        liquid,
+        solution,
+        solution_model,
         pure,
-        tolerances,
     })
-}
-
-fn text_anywhere(value: &Value, piece: &str) -> bool {
-    match value {
-        Value::Text(text) => text.contains(piece),
-        Value::List(items) => items.iter().any(|item| text_anywhere(item, piece)),
-        Value::Object(fields) => fields
-            .iter()
-            .any(|(name, value)| name != "title" && name != "note" && text_anywhere(value, piece)),
-        _ => false,
-    }
 }
 
 fn read_format(reader: &mut Reader, node: &Node) {
@@ -105,62 +96,93 @@ fn read_format(reader: &mut Reader, node: &Node) {
     }
 }
 
-/// What the format has and this version does not do yet: each is refused, none is ignored.
-fn refuse_what_is_not_done(reader: &mut Reader, root: &Node) {
+/// The models; what the format has and this version does not do yet is refused, none is ignored.
+fn read_models(reader: &mut Reader, root: &Node) -> Option<SolutionModel> {
     let heat = root.field("heat");
     let words = [("isothermal", false), ("adiabatic", true)];
     if reader.choice(&heat, &words) == Some(true) {
         reader.not_yet(&heat, "an adiabatic rest");
     }
-    let feed = root.field("feed");
-    if !feed.is_null() {
-        reader.not_yet(&feed, "a feed reading");
-    }
-    reader.quantity(&root.field("band"), &[Measure::TemperatureDifference]);
     let models = root.field("models");
-    if reader.object(&models, &["gas", "liquid", "solution"]) {
-        let gas = models.field("gas");
-        let words = [("ideal", false), ("SRK", true), ("PR", true)];
-        if reader.choice(&gas, &words) == Some(true) {
-            reader.not_yet(&gas, "a real gas");
-        }
-        reader.choice(&models.field("liquid"), &[("ideal", ())]);
-        let solution = models.field("solution");
-        let words = [("ideal", false), ("Davies", true), ("Debye-Hückel", true)];
-        if reader.choice(&solution, &words) == Some(true) {
-            reader.not_yet(&solution, "activity coefficients in solution");
-        }
+    if !reader.object(&models, &["gas", "liquid", "solution"]) {
+        return None;
     }
+    let gas = models.field("gas");
+    let words = [("ideal", false), ("SRK", true), ("PR", true)];
+    if reader.choice(&gas, &words) == Some(true) {
+        reader.not_yet(&gas, "a real gas");
+    }
+    reader.choice(&models.field("liquid"), &[("ideal", ())]);
+    let words = [
+        ("ideal", SolutionModel::Ideal),
+        ("Davies", SolutionModel::Davies),
+        ("Debye-Hückel", SolutionModel::DebyeHueckel),
+    ];
+    reader.choice(&models.field("solution"), &words)
 }
 
-fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<f64> {
+/// A temperature difference, or a share of missing conversion.
+fn read_band(reader: &mut Reader, node: &Node) -> Option<Band> {
+    let measures = [Measure::TemperatureDifference, Measure::Fraction];
+    let stated = reader.quantity(node, &measures)?;
+    if stated.value_si < 0.0 {
+        reader.problems.push(node.problem(CaseCode::BandNegative));
+        return None;
+    }
+    Some(match stated.measure {
+        Measure::Fraction => Band::Conversion { half_width: stated.value_si },
+        _ => Band::Temperature { half_width_k: stated.value_si },
+    })
+}
+
+fn read_atmosphere(reader: &mut Reader, node: &Node) -> Option<Quantity> {
     let atmosphere: Quantity = reader.quantity(node, &[Measure::Pressure])?;
     if atmosphere.pressure_reference == PressureReference::Gauge {
         reader.problems.push(node.problem(CaseCode::GaugeAtmosphere));
         return None;
     }
-    Some(atmosphere.value_si)
+    Some(atmosphere)
 }
 
-type Blocks = (Option<GasReading>, Vec<Entry>);
+/// The blocks of a reading.
+#[derive(Default)]
+struct Reading {
+    gas: Option<GasReading>,
+    liquid: Option<LiquidReading>,
+    solution: Option<SolutionReading>,
+    pure: Vec<Entry>,
+}
 
-fn read_blocks(reader: &mut Reader, reading: &Node, atmosphere_pa: f64) -> Blocks {
+fn read_blocks(reader: &mut Reader, reading: &Node) -> Reading {
     if !reader.object(reading, &["gas", "liquid", "solution", "solids"]) {
-        return (None, Vec::new());
+        return Reading::default();
     }
-    let gas = read_gas(reader, &reading.field("gas"), atmosphere_pa);
+    let gas = read_gas(reader, &reading.field("gas"));
     let mut pure = read_pure(reader, &reading.field("solids"), Phase::Solid);
-    let liquid = reading.field("liquid");
-    let liquids = read_pure(reader, &liquid, Phase::Liquid);
-    if liquids.len() > 1 {
-        reader.not_yet(&liquid, "a liquid mixture");
+    let entries = read_liquid(reader, &reading.field("liquid"));
+    // One liquid alone is a phase of its own.
+    let liquid = if entries.len() > 1 {
+        Some(LiquidReading { entries, closed_by: None })
+    } else {
+        pure.extend(entries);
+        None
+    };
+    let solution = read_solution(reader, &reading.field("solution"));
+    Reading { gas, liquid, solution, pure }
+}
+
+/// The gas that goes in.
+fn read_feed(reader: &mut Reader, node: &Node) -> Option<GasReading> {
+    if !reader.object(node, &["gas", "liquid", "solution", "solids"]) {
+        return None;
     }
-    pure.extend(liquids);
-    let solution = reading.field("solution");
-    if !solution.is_null() {
-        reader.not_yet(&solution, "a reading of a solution");
+    for name in ["liquid", "solution", "solids"] {
+        let block = node.field(name);
+        if !block.is_null() {
+            reader.not_yet(&block, "a feed that is not a gas");
+        }
     }
-    (gas, pure)
+    read_gas(reader, &node.field("gas"))
 }
 
 fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
@@ -188,14 +210,15 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     let constant = first.field("constant");
     reader.object(&constant, &CONSTANT_FIELDS);
     let from = constant.field("from");
-    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3)];
+    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3), ("reading", 4)];
     let source = match reader.choice(&from, &words)? {
         0 => Some(KSource::Library),
         1 => read_stated(reader, &constant).map(|stated| KSource::Value(Box::new(stated))),
         2 => read_points(reader, &constant).map(KSource::Points),
+        3 => read_formula(reader, &constant).map(KSource::Formula),
         _ => {
-            reader.not_yet(&from, "K from a formula");
-            None
+            let enthalpy = constant.field("enthalpy");
+            Some(KSource::Reading(reader.quantity(&enthalpy, &[Measure::MolarEnergy])))
         }
     };
     let constant_for = read_equation(reader, &constant.field("for"), false);
@@ -208,7 +231,7 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     Some(ReactionQuestion { equation, already_balanced, source, constant_for, approach_k })
 }
 
-const CONSTANT_FIELDS: [&str; 11] = [
+const CONSTANT_FIELDS: [&str; 13] = [
     "from",
     "value",
     "kind",
@@ -220,6 +243,8 @@ const CONSTANT_FIELDS: [&str; 11] = [
     "approach",
     "points",
     "terms",
+    "range",
+    "tolerance",
 ];
 
 fn read_equation(reader: &mut Reader, node: &Node, needed: bool) -> Option<Balanced> {

@@ -1,8 +1,8 @@
-//! K as a user states it: one value, or points.
+//! K as a user states it: one value, points, or a formula.
 
 use super::node::{Node, Reader};
-use super::question::{KindOfK, StatedK};
-use crate::constant::PRESSURE_UNITS;
+use super::question::{KindOfK, StatedFormula, StatedK};
+use crate::constant::{FormulaTerm, PRESSURE_UNITS};
 use crate::problem::{CaseCode, Problem};
 use crate::quantity::{Measure, Quantity};
 
@@ -53,6 +53,52 @@ pub(super) fn read_points(reader: &mut Reader, node: &Node) -> Option<Vec<Stated
     kind.map(|_| points)
 }
 
+/// Reads a formula: its terms, what they give, and the range they were made for.
+pub(super) fn read_formula(reader: &mut Reader, node: &Node) -> Option<StatedFormula> {
+    let words = [("ln K", false), ("log10 K", true)];
+    let is_log10 = reader.choice(&node.field("kind"), &words);
+    let pressure_unit = read_pressure_unit(reader, &node.field("pressure_unit"));
+    let terms_node = node.field("terms");
+    let names = FormulaTerm::ALL.map(|(name, _)| name);
+    let mut terms = Vec::new();
+    if reader.object(&terms_node, &names) {
+        for (name, term) in FormulaTerm::ALL {
+            let number = reader.quantity(&terms_node.field(name), &[Measure::Number]);
+            terms.extend(number.map(|number| (number.value_si, term)));
+        }
+    }
+    if terms.is_empty() && reader.problems.is_empty() {
+        reader.problems.push(terms_node.problem(CaseCode::FormulaWithoutTerms));
+    }
+    let range_k = read_range(reader, &node.field("range"));
+    let tolerance = reader.quantity(&node.field("tolerance"), &[Measure::Number]);
+    let tolerance = tolerance.map(|tolerance| tolerance.value_si.abs());
+    Some(StatedFormula { terms, is_log10: is_log10?, pressure_unit, range_k, tolerance })
+}
+
+/// Two temperatures, the lower first.
+fn read_range(reader: &mut Reader, node: &Node) -> Option<(f64, f64)> {
+    let items = reader.items(node);
+    let [low, high] = &items[..] else {
+        if !node.is_null() {
+            reader.problems.push(node.problem(CaseCode::NotARange));
+        }
+        return None;
+    };
+    let low = reader.needed_quantity(low, &[Measure::Temperature])?.value_si;
+    let high = reader.needed_quantity(high, &[Measure::Temperature])?.value_si;
+    if low >= high {
+        reader.problems.push(node.problem(CaseCode::NotARange));
+        return None;
+    }
+    Some((low, high))
+}
+
+fn read_pressure_unit(reader: &mut Reader, node: &Node) -> Option<&'static str> {
+    let units = PRESSURE_UNITS.map(|unit| (unit.symbol, unit.symbol));
+    if node.is_null() { None } else { reader.choice(node, &units) }
+}
+
 fn read_kind(reader: &mut Reader, node: &Node) -> Option<Kind> {
     let words = [
         ("K", KindOfK::K),
@@ -66,8 +112,7 @@ fn read_kind(reader: &mut Reader, node: &Node) -> Option<Kind> {
     ];
     let kind = reader.choice(&node.field("kind"), &words);
     let unit_node = node.field("pressure_unit");
-    let units = PRESSURE_UNITS.map(|unit| (unit.symbol, unit.symbol));
-    let pressure_unit = if unit_node.is_null() { None } else { reader.choice(&unit_node, &units) };
+    let pressure_unit = read_pressure_unit(reader, &unit_node);
     if kind == Some(KindOfK::Kp) && unit_node.is_null() {
         reader.problems.push(unit_node.problem(CaseCode::KpNeedsUnit));
     }

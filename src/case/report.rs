@@ -2,7 +2,13 @@
 
 use serde::Serialize;
 
+use super::judgement_report::JudgementReport;
+use super::nudges::NudgeReport;
 use super::participants::Participant;
+use super::report_amounts::{
+    BalanceReport, ChargeReport, Conversion, MissingReport, RestReport, SaturationReport,
+    SpeciesReport, ValleyReport,
+};
 
 /// Everything that is known of one case.
 #[derive(Debug, Clone, Serialize)]
@@ -13,8 +19,14 @@ pub struct Report {
     pub pressure_pa: Option<f64>,
     /// The volume of the gas on the basis below, where one is known.
     pub volume_m3: Option<f64>,
-    /// The ionic strength; null while no solution is read.
+    /// The ionic strength; null where no solution is read.
     pub ionic_strength_mol_per_kg: Option<f64>,
+    /// The charges of the solution; null where none is read.
+    pub charge_balance: Option<ChargeReport>,
+    /// The activity of the water in the solution; null where none is read.
+    pub water_activity: Option<f64>,
+    /// How far the solution is from being saturated with a solid of the reaction.
+    pub saturation: Vec<SaturationReport>,
     /// One for each reaction.
     pub reactions: Vec<ReactionReport>,
     /// The total amount that the amounts below stand for.
@@ -27,8 +39,14 @@ pub struct Report {
     pub rest: Option<RestReport>,
     /// How much of each reactant is converted on the way to rest.
     pub conversions: Vec<Conversion>,
+    /// The entry that was found from K; null where none was missing.
+    pub missing: Option<MissingReport>,
+    /// What the feed says of the gas; null without a feed.
+    pub balance: Option<BalanceReport>,
     /// G along the reaction; null where it has no drawing.
     pub valley: Option<ValleyReport>,
+    /// One small change of each knob, and what it does to rest.
+    pub nudges: Vec<NudgeReport>,
     /// The working, line by line.
     pub steps: Vec<StepReport>,
     /// What was assumed, converted or extrapolated, and cautions.
@@ -51,28 +69,17 @@ pub struct ReactionReport {
     pub q: &'static str,
     /// ln Q where Q is finite.
     pub ln_q: Option<f64>,
-    /// Standard uncertainty of ln Q; null while tolerances are not carried through.
-    pub u_ln_q: Option<f64>,
     /// A/RT = ln K − ln Q.
     pub affinity_over_rt: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_affinity_over_rt: Option<f64>,
     /// ΔG = −A.
     pub gibbs_j_per_mol: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_gibbs_j_per_mol: Option<f64>,
-    /// `forward`, `reverse`, `at rest` or `cannot tell`; null where there is no reading.
-    pub verdict: Option<&'static str>,
-    /// The direction it leans to when the verdict is another.
-    pub leaning: Option<&'static str>,
-    /// The verdict in one sentence.
-    pub why: String,
+    /// The verdict and what the tolerances make of it, as fields of their own.
+    #[serde(flatten)]
+    pub judgement: JudgementReport,
     /// The temperature where K equals Q.
     pub t_star_k: Option<f64>,
     /// T − T*.
     pub approach_k: Option<f64>,
-    /// Its standard uncertainty; null while tolerances are not carried through.
-    pub u_approach_k: Option<f64>,
     /// Positive when the bed falls short.
     pub shortfall_k: Option<f64>,
     /// Why there is no T*, or that there are several.
@@ -83,8 +90,6 @@ pub struct ReactionReport {
     pub extent_min_mol: Option<f64>,
     /// The greatest extent that the amounts allow; null where nothing limits it.
     pub extent_max_mol: Option<f64>,
-    /// The shares of each input in the variance; empty while tolerances are not carried through.
-    pub budget: Vec<BudgetRow>,
     /// Where K comes from.
     pub source: SourceReport,
 }
@@ -141,24 +146,6 @@ pub struct FormReport {
     pub value: Option<f64>,
 }
 
-/// One end of the extent.
-#[derive(Debug, Clone, Serialize)]
-pub struct Limit {
-    /// `min` or `max`.
-    pub side: &'static str,
-    /// What runs out there.
-    pub species: Vec<String>,
-}
-
-/// An input's share of the variance.
-#[derive(Debug, Clone, Serialize)]
-pub struct BudgetRow {
-    /// The input's field.
-    pub input: String,
-    /// Its share, 0 to 1.
-    pub share_of_variance: f64,
-}
-
 /// Where K comes from.
 #[derive(Debug, Clone, Serialize)]
 pub struct SourceReport {
@@ -170,6 +157,32 @@ pub struct SourceReport {
     pub extrapolated_by_k: Option<f64>,
     /// One for each species that the library gave.
     pub records: Vec<RecordReport>,
+    /// The line through points, where K is from points.
+    pub fit: Option<FitReport>,
+}
+
+/// A straight line of ln K against 1/T through points.
+#[derive(Debug, Clone, Serialize)]
+pub struct FitReport {
+    /// The points, for the reaction as written and p° = 1 bar.
+    pub points: Vec<FitPoint>,
+    /// ΔH° of the line.
+    pub enthalpy_j_per_mol: f64,
+    /// Its standard uncertainty; null for two points without tolerances.
+    pub u_enthalpy_j_per_mol: Option<f64>,
+    /// Whether the points bend away from a straight line: ΔH° is then not constant.
+    pub bends: bool,
+}
+
+/// A point of K.
+#[derive(Debug, Clone, Serialize)]
+pub struct FitPoint {
+    /// Its temperature.
+    pub temperature_k: f64,
+    /// ln K.
+    pub ln_k: f64,
+    /// ln K less that of the line.
+    pub residual: f64,
 }
 
 /// A record of the library, as cited.
@@ -185,105 +198,6 @@ pub struct RecordReport {
     pub range_k: [f64; 2],
     /// Standard uncertainty of ΔfG° at 298.15 K.
     pub u_gibbs_j_per_mol: f64,
-}
-
-/// A species now and at rest.
-#[derive(Debug, Clone, Serialize)]
-pub struct SpeciesReport {
-    /// The species with its phase.
-    pub species: String,
-    /// `g`, `l`, `s` or `aq`.
-    pub phase: &'static str,
-    /// Its stoichiometric number, zero for an inert.
-    pub nu: f64,
-    /// The amount now; null for an ample phase.
-    pub now_mol: Option<f64>,
-    /// The amount at rest; null for an ample phase, or where nothing was solved.
-    pub rest_mol: Option<f64>,
-    /// ln of the amount at rest, also where the amount itself underflows.
-    pub rest_ln_mol: Option<f64>,
-    /// Rest minus now.
-    pub change_mol: Option<f64>,
-    /// The fraction of its phase now.
-    pub now_fraction: Option<f64>,
-    /// The fraction of its phase at rest.
-    pub rest_fraction: Option<f64>,
-    /// ln of the activity now.
-    pub now_ln_activity: Option<f64>,
-    /// ln of the activity at rest.
-    pub rest_ln_activity: Option<f64>,
-    /// φ or γ: 1 for an ideal mixture.
-    pub activity_coefficient: f64,
-    /// The partial pressure now, for a gas.
-    pub partial_pressure_pa: Option<f64>,
-    /// Whether it is used up at rest.
-    pub exhausted: bool,
-}
-
-/// How the state of rest was found.
-#[derive(Debug, Clone, Serialize)]
-pub struct RestReport {
-    /// Its temperature.
-    pub temperature_k: f64,
-    /// Its pressure.
-    pub pressure_pa: Option<f64>,
-    /// Its volume.
-    pub volume_m3: Option<f64>,
-    /// How the search ended.
-    pub outcome: &'static str,
-    /// The steps it took.
-    pub iterations: u32,
-    /// The affinity over RT that is left; zero at an exhausted phase.
-    pub residual: f64,
-}
-
-/// How much of a reactant is converted.
-#[derive(Debug, Clone, Serialize)]
-pub struct Conversion {
-    /// The reactant.
-    pub species: String,
-    /// From the feed to now; null without a feed.
-    pub feed_to_now: Option<f64>,
-    /// From now to rest.
-    pub now_to_rest: Option<f64>,
-    /// From the feed to rest; null without a feed.
-    pub feed_to_rest: Option<f64>,
-}
-
-/// The energy along the extent, from one limit to the other.
-#[derive(Debug, Clone, Serialize)]
-pub struct ValleyReport {
-    /// `G` at constant pressure, `A` (Helmholtz energy) at constant volume.
-    pub energy: &'static str,
-    /// Where the mixture is now; always zero.
-    pub extent_now_mol: f64,
-    /// The left end of the drawing.
-    pub extent_min_mol: f64,
-    /// The right end of the drawing.
-    pub extent_max_mol: f64,
-    /// What runs out at each end.
-    pub limits: Vec<Limit>,
-    /// Extents on the basis, rising.
-    pub extent_mol: Vec<f64>,
-    /// The energy above its lowest value, over RT, on the same basis.
-    pub gibbs_over_rt: Vec<f64>,
-    /// A closer look around now and rest, where they are near each other.
-    pub near: Option<CurveReport>,
-}
-
-/// Points of a curve.
-#[derive(Debug, Clone, Serialize)]
-pub struct CurveReport {
-    /// Extents on the basis, rising.
-    pub extent_mol: Vec<f64>,
-    /// The energy above its value at rest, over RT.
-    pub gibbs_over_rt: Vec<f64>,
-}
-
-impl From<crate::advice::Curve> for CurveReport {
-    fn from(curve: crate::advice::Curve) -> Self {
-        Self { extent_mol: curve.extent_mol, gibbs_over_rt: curve.energy_over_rt }
-    }
 }
 
 /// A line of the working.

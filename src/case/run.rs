@@ -1,17 +1,24 @@
 //! The run from a case to its report: each room is asked once, in the order of the rooms.
 
-use super::constant_of::{constant_of, k_temperature};
+use super::asker::missing_conversion;
+use super::blocks::ion;
+use super::constant_of::{constant_of, constant_of_reading, k_temperature};
+use super::judgement::{Judgement, judgement};
+use super::missing::{Missing, find_missing};
 use super::participants::{Participant, named_in, participants};
-use super::question::Question;
+use super::question::{KSource, Question};
 use super::report::Report;
 use super::setting::{Setting, setting};
 use super::value::Value;
 use super::{answer, read};
-use crate::advice::{Approach, NoApproach, Verdict, approach, judge};
+use crate::advice::{Approach, Judged, NoApproach, approach};
 use crate::constant::{Constant, ConstantAt};
-use crate::equilibrium::{Affinity, Kind, Quotient, Rest, State, System, affinity, quotient, rest};
+use crate::equilibrium::{
+    Activities, Affinity, Quotient, Rest, RestOutcome, State, System, activities, affinity,
+    quotient, rest,
+};
 use crate::library::Temperature;
-use crate::mixture::Held;
+use crate::mixture::Ion;
 use crate::problem::{Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase};
 
@@ -20,14 +27,38 @@ pub(super) struct Findings {
     pub question: Question,
     /// The equation with its phases.
     pub equation: Equation,
+    /// The species of the reaction, then the inerts of the reading.
     pub participants: Vec<Participant>,
-    pub constant: Constant,
     /// Where K was taken: the reading's temperature, less a stated approach.
     pub k_temperature: Temperature,
     pub at: ConstantAt,
     pub delta_nu_gas: f64,
+    pub constant: Constant,
     pub reading: Option<ReadingFindings>,
+    /// The entry that was found from K.
+    pub missing: Option<Missing>,
     pub remarks: Vec<Remark>,
+}
+
+/// What stays as it is while the numbers of a case are moved.
+pub(super) struct Ground<'a> {
+    pub equation: &'a Equation,
+    /// The species of the reaction.
+    pub reacting: &'a [Participant],
+    pub constant: &'a Constant,
+    pub at: &'a ConstantAt,
+    pub delta_nu_gas: f64,
+    pub system: &'a System,
+    pub setting: &'a Setting,
+    /// What became of the mixture as read.
+    pub outcome: RestOutcome,
+}
+
+impl Ground<'_> {
+    /// ΔH° where it is known, else zero.
+    pub fn enthalpy_j_per_mol(&self) -> f64 {
+        self.at.enthalpy_j_per_mol.unwrap_or(0.0)
+    }
 }
 
 /// What a reading adds.
@@ -37,13 +68,20 @@ pub(super) struct ReadingFindings {
     /// Amounts in mol as the engine sees them; an ample phase has a nominal one.
     pub amounts_mol: Vec<f64>,
     pub quotient: Quotient,
+    /// The activities as read.
+    pub activities: Option<Activities>,
     pub affinity: Affinity,
     pub rest: Rest,
-    pub verdict: Verdict,
     pub approach: Result<Approach, NoApproach>,
+    pub judgement: Judgement,
 }
 
 impl ReadingFindings {
+    /// Whether the reaction comes to rest anywhere.
+    pub fn has_rest(&self) -> bool {
+        self.rest.summary.outcome != RestOutcome::HasNoLimit
+    }
+
     /// The state as read, or with other amounts.
     pub fn state<'a>(&self, temperature_k: f64, amounts_mol: &'a [f64]) -> State<'a> {
         State { temperature_k, hold: self.setting.hold, amounts_mol }
@@ -59,38 +97,46 @@ pub fn check(case: &Value) -> Outcome<Report> {
     Ok(answer::report(&find(question)?))
 }
 
-fn find(question: Question) -> Outcome<Findings> {
+/// All that is found out about a question.
+pub(super) fn find(mut question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
-    let from_library = matches!(question.reaction.source, super::question::KSource::Library);
+    let from_library = matches!(question.reaction.source, KSource::Library);
     let found = participants(&question.reaction.equation, &reading, from_library);
     let found = found.map_err(|problems| at_field(problems, EQUATION))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
-    let at = constant.at(k_temperature);
-    let mut remarks = found.remarks;
-    let no_reading = question.gas.is_none() && question.pure.is_empty();
-    let reading = if no_reading {
-        None
-    } else {
-        let mut setting = setting(&question, found.list.clone())?;
-        remarks.append(&mut setting.remarks);
-        Some(judge_reading(&question, setting, &constant, at.ln_k)?)
+    let ln_k = constant.as_ref().map(|constant| constant.ln_k(k_temperature));
+    let missing = find_missing(&mut question, &found.list, ln_k)?;
+    let has_reading = question.has_reading();
+    let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
+    let constant = match constant {
+        Some(constant) => constant,
+        None => constant_of_reading(&question, laid.as_ref().map(|laid| laid.quotient))?,
     };
-    let participants =
-        reading.as_ref().map_or(found.list, |reading| reading.setting.participants.clone());
-    Ok(Findings {
+    let mut findings = Findings {
+        at: constant.at(k_temperature),
         question,
         equation,
-        participants,
+        participants: found.list,
         constant,
         k_temperature,
-        at,
         delta_nu_gas,
-        reading,
-        remarks,
-    })
+        reading: None,
+        missing,
+        remarks: found.remarks,
+    };
+    if let Some(laid) = laid {
+        let reading = judge_reading(&findings, laid)?;
+        if matches!(findings.question.reaction.source, KSource::Reading(_)) {
+            findings.at.u_ln_k = reading.judgement.ln_q.as_ref().map(|budget| budget.u);
+        }
+        findings.remarks.extend(reading.setting.remarks.iter().cloned());
+        findings.participants.clone_from(&reading.setting.participants);
+        findings.reading = Some(reading);
+    }
+    Ok(findings)
 }
 
 /// The field of the equation.
@@ -106,54 +152,69 @@ pub(super) fn delta_nu_gas(participants: &[Participant]) -> f64 {
     gases.map(|participant| participant.nu).sum()
 }
 
-fn judge_reading(
-    question: &Question,
-    setting: Setting,
-    constant: &Constant,
-    ln_k: f64,
-) -> Outcome<ReadingFindings> {
-    let temperature_k = question.temperature.value_si;
-    let held = setting.participants.iter().zip(&setting.held);
-    let kinds: Vec<Kind> = held.map(|(participant, held)| kind(participant.phase, *held)).collect();
+/// A reading laid on the reaction, before K is asked for.
+pub(super) struct Laid {
+    pub setting: Setting,
+    pub system: System,
+    pub amounts_mol: Vec<f64>,
+    pub quotient: Quotient,
+}
+
+pub(super) fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid> {
+    let setting = setting(question, reacting.to_vec())?;
+    let kinds = setting.kinds();
     let nu: Vec<f64> = setting.participants.iter().map(|participant| participant.nu).collect();
-    let amounts_mol: Vec<f64> = setting
-        .held
-        .iter()
-        .map(|held| match held {
-            Held::Mol(amount) => *amount,
-            Held::Ample => 1.0,
-        })
-        .collect();
+    let amounts_mol = setting.amounts_mol();
     let at_equation = |found| at_field(found, EQUATION);
-    let at_constant = |found| at_field(found, "reactions[0].constant");
-    let system = System::new(&kinds, &nu).map_err(at_equation)?;
+    let ions: Vec<Ion> = setting.participants.iter().map(|one| ion(&one.species)).collect();
+    let system = System::new(&kinds, &nu)
+        .and_then(|system| system.with_solution(question.solution_model, &ions))
+        .map_err(at_equation)?;
+    let temperature_k = question.temperature.value_si;
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let quotient = quotient(&system, &state).map_err(at_equation)?;
+    Ok(Laid { setting, system, amounts_mol, quotient })
+}
+
+fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
+    let Findings { question, constant, .. } = found;
+    let Laid { setting, system, amounts_mol, quotient } = laid;
+    let ln_k = found.at.ln_k;
+    let temperature_k = question.temperature.value_si;
+    let at_constant = |found| at_field(found, "reactions[0].constant");
+    let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
     let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
-    let verdict = judge(affinity, rest.summary.outcome);
-    let ln_q = match quotient {
-        Quotient::Finite(ln_q) => Some(ln_q),
-        _ => None,
-    };
+    let activities = activities(&system, &state).ok();
+    let ln_q = answer::ln_q(quotient);
     let approach = approach(constant, ln_q, temperature_k);
+    let now = Judged {
+        affinity,
+        ln_q,
+        approach_k: approach.ok().map(|approach| approach.approach_k),
+        missing_conversion: missing_conversion(&rest.summary),
+        temperature_k,
+    };
+    let ground = Ground {
+        equation: &found.equation,
+        reacting: &found.participants,
+        constant,
+        at: &found.at,
+        delta_nu_gas: found.delta_nu_gas,
+        system: &system,
+        setting: &setting,
+        outcome: rest.summary.outcome,
+    };
+    let judgement = judgement(question, &ground, now, found.missing.is_some());
     Ok(ReadingFindings {
         setting,
         system,
         quotient,
+        activities,
         affinity,
         rest,
-        verdict,
         approach,
+        judgement,
         amounts_mol,
     })
-}
-
-fn kind(phase: Phase, held: Held) -> Kind {
-    match (phase, held) {
-        (Phase::Gas, _) => Kind::Gas,
-        (Phase::Aqueous, _) => Kind::Solute,
-        (_, Held::Ample) => Kind::Ample,
-        (_, Held::Mol(_)) => Kind::Pure,
-    }
 }

@@ -1,188 +1,186 @@
 //! The reading laid on the participants: amounts, pressure and volume.
 
+use super::blocks::{Block, Blocks};
 use super::participants::Participant;
 use super::question::{self, Question};
-use crate::equilibrium::Hold;
-use crate::mixture::{AmountBasis, Closing, GasMixture, Held, gas_mixture, pure_phases};
-use crate::problem::{CaseCode, NoteCode, Outcome, Problem, Remark};
-use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
-use crate::reaction::{Phase, Species};
+use super::reading_remarks::remarks_of;
+use crate::equilibrium::{Hold, Kind};
+use crate::mixture::{AmountBasis, Closing, ElementBalance, Feed, Held};
+use crate::problem::{CaseCode, Outcome, Problem, Remark};
+use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, STANDARD_PRESSURE_PA};
+use crate::reaction::Phase;
 
 /// A stated pressure and the one that amounts make in a stated volume are the same within this
 /// share: the digits of a gauge. Common practice, no source.
 const PRESSURE_AGREEMENT: f64 = 0.002;
 
+/// What the amounts of a report stand for.
+#[derive(Debug, Clone, Copy, PartialEq, Eq)]
+pub(super) enum Basis {
+    OneMoleOfGas,
+    OneMoleOfLiquid,
+    Amounts,
+    Flows,
+    OneKilogramOfWater,
+    Solution,
+}
+
 /// The state as read.
 #[derive(Debug, Clone)]
 pub(super) struct Setting {
     pub participants: Vec<Participant>,
+    /// Where each participant stands.
+    pub blocks: Vec<Block>,
     /// What is held of each participant.
     pub held: Vec<Held>,
     pub hold: Hold,
     pub pressure_pa: Option<f64>,
     pub volume_m3: Option<f64>,
-    pub basis: AmountBasis,
+    pub basis: Basis,
     pub gas_mol: f64,
     /// The fraction of water that was added to a dry analysis.
     pub added_water_fraction: Option<f64>,
+    /// The gas that went in.
+    pub feed: Option<Feed>,
+    /// What the feed says of the gas behind it.
+    pub balance: Option<ElementBalance>,
+    /// How the fractions of the gas were closed.
+    pub closing: Option<Closing>,
+    /// How the fractions of the liquid were closed.
+    pub liquid_closing: Option<Closing>,
     pub remarks: Vec<Remark>,
+}
+
+impl Setting {
+    /// Whether the gas, or the liquid where there is no gas, was given in fractions.
+    pub fn is_by_fraction(&self) -> bool {
+        matches!(self.basis, Basis::OneMoleOfGas | Basis::OneMoleOfLiquid)
+    }
+
+    /// Amounts as the engine sees them; an ample phase has a nominal one.
+    pub fn amounts_mol(&self) -> Vec<f64> {
+        let amount = |held: &Held| match held {
+            Held::Mol(amount) => *amount,
+            Held::Ample => 1.0,
+        };
+        self.held.iter().map(amount).collect()
+    }
+
+    /// The kinds of the participants, as the engine knows them.
+    pub fn kinds(&self) -> Vec<Kind> {
+        let kind = |(block, held): (&Block, &Held)| match (block, held) {
+            (Block::Gas, _) => Kind::Gas,
+            (Block::Liquid, _) => Kind::Liquid,
+            (Block::Solution, _) => Kind::Solute,
+            (Block::Solvent, _) => Kind::Solvent,
+            (Block::Pure, Held::Ample) => Kind::Ample,
+            (Block::Pure, Held::Mol(_)) => Kind::Pure,
+        };
+        self.blocks.iter().zip(&self.held).map(kind).collect()
+    }
+
+    /// The total of what the basis counts.
+    pub fn basis_mol(&self) -> f64 {
+        let counted = match self.basis {
+            Basis::OneMoleOfLiquid => Block::Liquid,
+            Basis::OneKilogramOfWater | Basis::Solution => Block::Solution,
+            _ if self.gas_mol > 0.0 => return self.gas_mol,
+            _ => Block::Liquid,
+        };
+        let rows = self.blocks.iter().zip(&self.held).filter(|(block, _)| **block == counted);
+        let amount = |(_, held): (&Block, &Held)| match held {
+            Held::Mol(amount) => *amount,
+            Held::Ample => 0.0,
+        };
+        rows.map(amount).sum()
+    }
 }
 
 /// Lays the reading on the participants; the inerts of the reading join them at the end.
 ///
 /// # Errors
-/// All problems of the gas and of the pure phases at once, then those of pressure and volume.
+/// All problems of all blocks at once, then those of pressure and volume.
 pub(super) fn setting(question: &Question, mut participants: Vec<Participant>) -> Outcome<Setting> {
-    let mut problems = Vec::new();
-    let gas = match &question.gas {
-        None => None,
-        Some(reading) => match gas_mixture(reading, question.pressure_pa) {
-            Ok(gas) => Some(gas),
-            Err(found) => {
-                problems.extend(found.into_iter().map(|problem| in_block(problem, "reading.gas")));
-                None
-            }
-        },
-    };
-    let gas_basis = gas.as_ref().map(|gas| gas.basis);
-    // With the volume known as well, even fractions stand for amounts.
-    let measured = if question.volume_m3.is_some() { None } else { gas_basis };
-    let pure = pure_phases(&question.pure, measured).unwrap_or_else(|found| {
-        problems.extend(found);
-        Vec::new()
-    });
-    if !problems.is_empty() {
-        return Err(problems);
+    let laid = Blocks::new(question, &participants)?;
+    let mut remarks = remarks_of(question, &participants, &laid);
+    let places = participants.iter().map(|participant| laid.place(participant, &mut remarks));
+    let (mut blocks, mut held): (Vec<Block>, Vec<Held>) = places.unzip();
+    for (inert, block, amount) in laid.inerts(&participants) {
+        participants.push(inert);
+        blocks.push(block);
+        held.push(amount);
     }
-    let mut remarks = remarks_of(question, gas.as_ref());
-    let pure: Vec<(&Species, Held)> =
-        question.pure.iter().map(|entry| &entry.species).zip(pure).collect();
-    let mut held = held_of(&participants, gas.as_ref(), &pure, &mut remarks);
-    add_inerts(&mut participants, &mut held, gas.as_ref(), &pure);
     let any_gas = participants.iter().any(|participant| participant.phase == Phase::Gas);
-    let basis = gas_basis.unwrap_or(AmountBasis::Amounts);
+    let gas_reacts = participants
+        .iter()
+        .any(|participant| participant.phase == Phase::Gas && participant.nu != 0.0);
+    let water_kg = laid.solution.as_ref().map(|solution| solution.water_kg);
     let mut setting = Setting {
         participants,
+        blocks,
         held,
-        hold: Hold::Pressure { pressure_pa: question.pressure_pa.unwrap_or(1e5) },
-        pressure_pa: question.pressure_pa,
+        hold: match water_kg {
+            Some(water_kg) => Hold::Solvent { water_kg },
+            None => Hold::Pressure {
+                pressure_pa: question.pressure_pa().unwrap_or(STANDARD_PRESSURE_PA),
+            },
+        },
+        pressure_pa: question.pressure_pa(),
         volume_m3: None,
-        basis,
-        gas_mol: gas.as_ref().map_or(0.0, |gas| gas.total_mol),
-        added_water_fraction: gas.as_ref().and_then(|gas| gas.added_water_fraction),
+        basis: basis_of(&laid),
+        gas_mol: laid.gas.as_ref().map_or(0.0, |gas| gas.total_mol),
+        added_water_fraction: laid.gas.as_ref().and_then(|gas| gas.added_water_fraction),
+        balance: laid.gas.as_ref().and_then(|gas| gas.balance.clone()),
+        closing: laid.gas.map(|gas| gas.closing),
+        liquid_closing: laid.liquid.map(|liquid| liquid.closing),
+        feed: laid.feed,
         remarks,
     };
-    if any_gas {
-        set_pressure_and_volume(question, &mut setting)?;
+    if gas_reacts || any_gas && water_kg.is_none() {
+        set_pressure_and_volume(question, &mut setting, water_kg)?;
     }
     Ok(setting)
 }
 
-/// Puts a block's path before a field that is inside the block, and leaves a whole path as it is.
-fn in_block(problem: Problem, block: &str) -> Problem {
-    if problem.field.starts_with(block) { problem } else { problem.at(block) }
-}
-
-fn remarks_of(question: &Question, gas: Option<&GasMixture>) -> Vec<Remark> {
-    let (Some(gas), Some(reading)) = (gas, &question.gas) else { return Vec::new() };
-    let mut remarks = Vec::new();
-    let name = |entry: usize| reading.entries[entry].species.formula.text();
-    let per_cent = |fraction: f64| format!("{:.3}", fraction * 100.0);
-    match gas.closing {
-        Closing::ByRemainder { entry, fraction } => {
-            let remark = Remark::new(NoteCode::ClosedByRemainder).with("species", name(entry));
-            remarks.push(remark.with("per_cent", per_cent(fraction)));
-        }
-        Closing::ByLargest { entry, difference } => {
-            let remark = Remark::new(NoteCode::ClosedByLargest).with("species", name(entry));
-            remarks.push(remark.with("per_cent", per_cent(difference)));
-        }
-        Closing::Exact | Closing::NotNeeded => {}
-    }
-    match (&reading.basis, gas.added_water_fraction) {
-        (crate::mixture::Basis::Dry(_), None) => {
-            remarks.push(Remark::new(NoteCode::DryTakenAsFree))
-        }
-        (_, Some(fraction)) => {
-            remarks.push(Remark::new(NoteCode::WaterAdded).with("per_cent", per_cent(fraction)));
-        }
-        _ => {}
-    }
-    for field in &gas.bounds {
-        remarks.push(Remark::new(NoteCode::TakenAtBound).with("field", field.clone()));
-    }
-    remarks
-}
-
-fn held_of(
-    participants: &[Participant],
-    gas: Option<&GasMixture>,
-    pure: &[(&Species, Held)],
-    remarks: &mut Vec<Remark>,
-) -> Vec<Held> {
-    let mut held = Vec::with_capacity(participants.len());
-    for participant in participants {
-        let species = &participant.species;
-        let (found, code) = if participant.phase == Phase::Gas {
-            let row = gas.and_then(|gas| {
-                gas.amounts_mol.iter().find(|(name, _)| name.same_substance(species))
-            });
-            (row.map(|(_, amount)| Held::Mol(*amount)), NoteCode::NotInAnalysis)
-        } else if participant.phase == Phase::Aqueous {
-            (None, NoteCode::NotInAnalysis)
-        } else {
-            let row = pure.iter().find(|(name, _)| {
-                name.phase == Some(participant.phase) && name.same_substance(species)
-            });
-            (row.map(|(_, held)| *held), NoteCode::PhaseTakenAsPresent)
-        };
-        held.push(found.unwrap_or_else(|| {
-            remarks.push(Remark::new(code).with("species", species.text()));
-            if code == NoteCode::PhaseTakenAsPresent { Held::Ample } else { Held::Mol(0.0) }
-        }));
-    }
-    held
-}
-
-/// The species of the reading that the reaction does not name.
-fn add_inerts(
-    participants: &mut Vec<Participant>,
-    held: &mut Vec<Held>,
-    gas: Option<&GasMixture>,
-    pure: &[(&Species, Held)],
-) {
-    let gases = gas.iter().flat_map(|gas| &gas.amounts_mol);
-    let gases = gases.map(|(species, amount)| (species, Held::Mol(*amount)));
-    for (species, amount) in gases.chain(pure.iter().copied()) {
-        let phase = species.phase.unwrap_or(Phase::Gas);
-        let known = participants.iter().any(|participant| {
-            participant.phase == phase && participant.species.same_substance(species)
-        });
-        if !known {
-            let species = species.clone();
-            participants.push(Participant { species, phase, nu: 0.0, record: None });
-            held.push(amount);
-        }
+fn basis_of(laid: &Blocks) -> Basis {
+    match (&laid.gas, &laid.liquid, &laid.solution) {
+        (Some(gas), ..) => match gas.basis {
+            AmountBasis::OneMole => Basis::OneMoleOfGas,
+            AmountBasis::Amounts => Basis::Amounts,
+            AmountBasis::Flows => Basis::Flows,
+        },
+        (None, Some(liquid), _) => match liquid.basis {
+            AmountBasis::OneMole => Basis::OneMoleOfLiquid,
+            AmountBasis::Amounts => Basis::Amounts,
+            AmountBasis::Flows => Basis::Flows,
+        },
+        (None, None, Some(solution)) if solution.is_stated => Basis::Solution,
+        (None, None, Some(_)) => Basis::OneKilogramOfWater,
+        (None, None, None) => Basis::Amounts,
     }
 }
 
 /// Finds the pressure and the volume, and what is held: P V = n R T ties them.
-fn set_pressure_and_volume(question: &Question, setting: &mut Setting) -> Outcome<()> {
+fn set_pressure_and_volume(
+    question: &Question,
+    setting: &mut Setting,
+    water_kg: Option<f64>,
+) -> Outcome<()> {
     let rt = GAS_CONSTANT_J_PER_MOL_K * question.temperature.value_si;
     let held_volume = question.hold == question::Held::Volume;
-    if (held_volume || question.volume_m3.is_some()) && setting.basis == AmountBasis::Flows {
+    if (held_volume || question.volume_m3().is_some()) && setting.basis == Basis::Flows {
         return Err(Problem::new(CaseCode::FlowsInVolume).at("hold").into());
     }
-    if let Some(volume_m3) = question.volume_m3 {
+    if let Some(volume_m3) = question.volume_m3() {
         if setting.gas_mol <= 0.0 {
             return Err(Problem::new(CaseCode::VolumeNeedsGas).at("volume").into());
         }
-        if setting.basis == AmountBasis::OneMole {
+        if setting.basis == Basis::OneMoleOfGas {
             let Some(pressure_pa) = setting.pressure_pa else { return Err(pressure_needed()) };
             scale_gas(setting, pressure_pa * volume_m3 / rt);
         }
         let made_pa = setting.gas_mol * rt / volume_m3;
-        if let Some(stated_pa) = question.pressure_pa {
+        if let Some(stated_pa) = question.pressure_pa() {
             if (made_pa / stated_pa - 1.0).abs() > PRESSURE_AGREEMENT {
                 return Err(Problem::new(CaseCode::VolumeAndPressure)
                     .with("found", format!("{:.5}", made_pa / 1e5))
@@ -198,12 +196,16 @@ fn set_pressure_and_volume(question: &Question, setting: &mut Setting) -> Outcom
     if setting.gas_mol > 0.0 {
         setting.volume_m3 = Some(setting.gas_mol * rt / pressure_pa);
     }
-    setting.hold = match setting.volume_m3 {
-        Some(volume_m3) if held_volume => Hold::Volume { volume_m3 },
-        None if held_volume => {
+    setting.hold = match (setting.volume_m3, water_kg) {
+        (Some(volume_m3), None) if held_volume => Hold::Volume { volume_m3 },
+        (Some(volume_m3), Some(water_kg)) if held_volume => {
+            Hold::VolumeAndSolvent { volume_m3, water_kg }
+        }
+        (None, _) if held_volume => {
             return Err(Problem::new(CaseCode::VolumeNeedsGas).at("hold").into());
         }
-        _ => Hold::Pressure { pressure_pa },
+        (_, None) => Hold::Pressure { pressure_pa },
+        (_, Some(water_kg)) => Hold::PressureAndSolvent { pressure_pa, water_kg },
     };
     Ok(())
 }
@@ -221,5 +223,5 @@ fn scale_gas(setting: &mut Setting, total_mol: f64) {
         }
     }
     setting.gas_mol = total_mol;
-    setting.basis = AmountBasis::Amounts;
+    setting.basis = Basis::Amounts;
 }

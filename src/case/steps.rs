@@ -1,10 +1,11 @@
 //! The working: formula, numbers put in, result, line by line.
 
 use super::answer::{basis_name, ln_q, quotient_word, reacting};
+use super::question::KSource;
 use super::report::StepReport;
 use super::run::{Findings, ReadingFindings};
 use super::shown;
-use crate::constant::Constant;
+use crate::constant::{Constant, FormulaTerm};
 use crate::equilibrium::{Hold, Quotient, RestOutcome};
 use crate::problem::words::{Language, step};
 use crate::problem::{Step, StepCode};
@@ -61,27 +62,29 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
         Constant::Points(line) => lines.push((
             "k",
             Step::new(StepCode::Line)
-                .with("points", line.points.to_string())
+                .with("points", line.points.len().to_string())
                 .with("enthalpy", shown::kilojoule(line.enthalpy_j_per_mol))
                 .with("residual", show_number(line.largest_residual, 2))
                 .with("ln_k", shown::number(at.ln_k))
                 .with("temperature_k", kelvin(found)),
         )),
-        Constant::Stated(_) => {
-            let stated = match &found.question.reaction.source {
-                super::question::KSource::Value(stated) => show_like(&stated.value),
-                super::question::KSource::Library | super::question::KSource::Points(_) => {
-                    String::new()
-                }
+        Constant::Formula(formula) => {
+            let term = |(coefficient, term): &(f64, FormulaTerm)| {
+                let name = FormulaTerm::ALL.into_iter().find(|(_, one)| one == term);
+                let name = name.map_or("", |(name, _)| name);
+                let number = shown::significant(*coefficient, 8);
+                if *term == FormulaTerm::One { number } else { format!("{number} × {name}") }
             };
+            let terms: Vec<String> = formula.terms.iter().map(term).collect();
             lines.push((
                 "k",
-                Step::new(StepCode::StatedK)
-                    .with("stated", stated)
+                Step::new(StepCode::Formula)
+                    .with("terms", terms.join(" + "))
                     .with("ln_k", shown::number(at.ln_k))
                     .with("temperature_k", kelvin(found)),
             ));
         }
+        Constant::Stated(_) => lines.push(("k", stated_line(found))),
     }
     lines.push((
         "k",
@@ -93,14 +96,24 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
     lines
 }
 
+fn stated_line(found: &Findings) -> Step {
+    let step = match &found.question.reaction.source {
+        KSource::Value(stated) => {
+            Step::new(StepCode::StatedK).with("stated", show_like(&stated.value))
+        }
+        _ => Step::new(StepCode::KOfReading),
+    };
+    step.with("ln_k", shown::number(found.at.ln_k)).with("temperature_k", kelvin(found))
+}
+
 fn reading_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
     let mut lines = Vec::new();
     let question = &found.question;
-    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa) {
+    if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa()) {
         if typed.pressure_reference == PressureReference::Gauge {
             let line = Step::new(StepCode::Absolute)
                 .with("gauge", show_like(typed))
-                .with("atmosphere", shown::pressure(question.atmosphere_pa))
+                .with("atmosphere", shown::pressure(question.atmosphere_pa()))
                 .with("absolute", shown::pressure(absolute_pa));
             lines.push(("q", line));
         }
@@ -194,8 +207,9 @@ fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
         return Vec::new();
     }
     let held = match reading.setting.hold {
-        Hold::Pressure { .. } => "temperature and pressure",
-        Hold::Volume { .. } => "temperature and volume",
+        Hold::Pressure { .. } | Hold::PressureAndSolvent { .. } => "temperature and pressure",
+        Hold::Volume { .. } | Hold::VolumeAndSolvent { .. } => "temperature and volume",
+        Hold::Solvent { .. } => "temperature",
     };
     let mut lines = vec![(
         "rest",

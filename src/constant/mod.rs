@@ -1,10 +1,12 @@
 //! K of a reaction at a temperature, where it comes from, and the numbers people call K.
 
 mod forms;
+mod formula;
 mod points;
 mod stated;
 
 pub use forms::{Form, FormValue, PRESSURE_UNITS, PressureUnit, all_forms};
+pub use formula::{FormulaAt, FormulaConstant, FormulaTerm};
 pub use points::{Point, PointsLine, line_through};
 pub use stated::{Carried, StatedConstant};
 
@@ -20,6 +22,8 @@ pub enum Constant {
     Stated(StatedConstant),
     /// From a straight line of ln K against 1/T through points.
     Points(PointsLine),
+    /// From a formula in T.
+    Formula(FormulaConstant),
 }
 
 /// K at one temperature, with what goes with it.
@@ -80,12 +84,28 @@ impl Constant {
                     extrapolated_by_k: (outside > 0.0).then_some(outside),
                 }
             }
+            Constant::Formula(formula) => {
+                let found = formula.at(temperature_k);
+                let enthalpy = found.enthalpy_j_per_mol;
+                let outside = formula
+                    .range_k
+                    .map_or(0.0, |(low, high)| (low - temperature_k).max(temperature_k - high));
+                ConstantAt {
+                    ln_k: found.ln_k,
+                    u_ln_k: formula.u_ln_k,
+                    gibbs_j_per_mol: -rt * found.ln_k,
+                    enthalpy_j_per_mol: Some(enthalpy),
+                    entropy_j_per_mol_k: Some((enthalpy + rt * found.ln_k) / temperature_k),
+                    heat_capacity_j_per_mol_k: Some(found.heat_capacity_j_per_mol_k),
+                    extrapolated_by_k: (outside > 0.0).then_some(outside),
+                }
+            }
             Constant::Stated(stated) => {
                 let carried = stated.carried_to(temperature_k);
                 let gibbs = -rt * carried.ln_k;
                 ConstantAt {
                     ln_k: carried.ln_k,
-                    u_ln_k: stated.u_ln_k,
+                    u_ln_k: stated.u_ln_k_at(temperature_k),
                     gibbs_j_per_mol: gibbs,
                     enthalpy_j_per_mol: carried.enthalpy_j_per_mol,
                     entropy_j_per_mol_k: carried
@@ -105,6 +125,7 @@ impl Constant {
             Constant::Library(combination) => combination.ln_k(temperature),
             Constant::Stated(stated) => stated.carried_to(temperature.kelvin()).ln_k,
             Constant::Points(line) => line.ln_k(temperature.kelvin()),
+            Constant::Formula(formula) => formula.at(temperature.kelvin()).ln_k,
         }
     }
 
@@ -112,7 +133,7 @@ impl Constant {
     #[must_use]
     pub fn knows_temperature(&self) -> bool {
         match self {
-            Constant::Library(_) | Constant::Points(_) => true,
+            Constant::Library(_) | Constant::Points(_) | Constant::Formula(_) => true,
             Constant::Stated(stated) => stated.enthalpy_j_per_mol.is_some(),
         }
     }
@@ -124,6 +145,7 @@ impl Constant {
             Constant::Library(combination) => combination.range_k(),
             Constant::Stated(_) => None,
             Constant::Points(line) => Some(line.range_k),
+            Constant::Formula(formula) => formula.range_k,
         }
     }
 }

@@ -17,6 +17,15 @@ pub const AMOUNT_MAX_MOL: f64 = 1e300;
 /// The largest ln K, without sign: K from 1e−43429 to 1e43429.
 pub const LN_K_MAX: f64 = 1e5;
 
+/// The largest charge of a solute, without sign.
+pub const CHARGE_MAX: i32 = 9;
+
+/// The smallest size of an ion in pm.
+pub const ION_SIZE_MIN_PM: f64 = 10.0;
+
+/// The largest size of an ion in pm.
+pub const ION_SIZE_MAX_PM: f64 = 10_000.0;
+
 /// The most species of one problem.
 pub const SPECIES_MAX: usize = 1000;
 

@@ -2,7 +2,7 @@
 
 use super::quotient::Affinity;
 use super::side::Term;
-use super::system::{Kind, System};
+use super::system::System;
 use super::walls::Way;
 use serde::{Serialize, Serializer};
 
@@ -104,7 +104,7 @@ impl Workspace {
     pub fn ln_amount(&self, system: &System, species: usize) -> Option<f64> {
         let (&kind, &nu) = (system.kinds.get(species)?, system.nu.get(species)?);
         let &amount = self.amounts_mol.get(species)?;
-        if kind == Kind::Ample {
+        if kind.is_ample() {
             return None;
         }
         if amount > 1e-290 || amount > 0.0 && nu == 0.0 {

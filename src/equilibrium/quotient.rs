@@ -1,8 +1,10 @@
 //! The reaction quotient and the affinity, with names for their open ends.
 
-use super::side::inert_gas;
+use super::nonideal;
+use super::several;
+use super::side::inert;
 use super::state::State;
-use super::system::System;
+use super::system::{Mixed, Part, System};
 use crate::numeric::{LN_2_TAIL, Scaled, difference_of_products, split, two_product};
 use crate::problem::Outcome;
 use serde::Serialize;
@@ -102,6 +104,23 @@ pub fn affinity(system: &System, state: &State, ln_k: f64) -> Outcome<Affinity> 
 
 /// ln K − ln Q of a state that has been checked.
 pub(super) fn less(system: &System, state: &State, ln_k: f64) -> Affinity {
+    if system.plain {
+        return ideal(system, state, ln_k);
+    }
+    match ideal(system, state, ln_k) {
+        Affinity::Finite(value) => {
+            Affinity::Finite(value - nonideal::correction(system, state, state.amounts_mol))
+        }
+        open => open,
+    }
+}
+
+/// As [`less`], with γ = 1 and the solvent left out.
+#[inline(always)]
+pub(super) fn ideal(system: &System, state: &State, ln_k: f64) -> Affinity {
+    if system.parts.len() > 1 {
+        return several::less(system, state, ln_k);
+    }
     let amounts = state.amounts_mol;
     if constant_quotient(system, state, amounts) {
         return Affinity::Finite(constant_affinity(system, state, ln_k));
@@ -115,13 +134,13 @@ pub(super) fn less(system: &System, state: &State, ln_k: f64) -> Affinity {
         (false, true) => return Affinity::OpenForward,
         (false, false) => {}
     }
-    let mut factors = Factors::new(system, state);
+    let mut factors = Factors::with_unit(system, state);
     for mixed in &system.mixed {
         factors.put(amounts[mixed.species], mixed.nu, mixed.power);
     }
-    if state.by_fraction(system) && system.delta_nu != 0.0 {
+    if state.by_fraction(system.mixture) && system.delta_nu != 0.0 {
         let total: f64 = system.mixed.iter().map(|mixed| amounts[mixed.species]).sum();
-        let total = total + inert_gas(system, amounts);
+        let total = total + inert(system, system.mixture, amounts);
         factors.put(total, -system.delta_nu, -system.delta_power);
     }
     Affinity::Finite(factors.ln_k_less(ln_k))
@@ -130,16 +149,39 @@ pub(super) fn less(system: &System, state: &State, ln_k: f64) -> Affinity {
 /// Whether Q is the same at every extent: nothing but pure phases reacts, or pressure is held and
 /// all the gas there is reacts on one side in exact proportion (or there is no gas yet).
 pub(super) fn constant_quotient(system: &System, state: &State, amounts: &[f64]) -> bool {
+    if system.parts.len() > 1 {
+        return several::constant_quotient(system, state, amounts);
+    }
     let Some(first) = system.mixed.first() else { return true };
-    if !state.by_fraction(system) || inert_gas(system, amounts) > 0.0 {
+    if !state.by_fraction(system.mixture) || inert(system, system.mixture, amounts) > 0.0 {
         return false;
     }
-    let amount = amounts[first.species];
-    system.mixed.iter().all(|mixed| {
-        let other = amounts[mixed.species];
-        let far = other > FAR * amount || amount > FAR * other;
-        mixed.nu * first.nu > 0.0 && !far && in_proportion(amount, first.nu, other, mixed.nu)
-    })
+    system.mixed.iter().all(|mixed| alike(first, mixed, amounts))
+}
+
+/// Whether one of several mixtures keeps its composition whatever the extent: it follows fractions,
+/// nothing in it is inert, and it reacts on one side in exact proportion (or there is none yet).
+pub(super) fn in_proportion_throughout(
+    system: &System,
+    state: &State,
+    amounts: &[f64],
+    place: usize,
+) -> bool {
+    let part = &system.parts[place];
+    if !state.by_fraction(part.kind) || inert(system, part.kind, amounts) > 0.0 {
+        return false;
+    }
+    let mut here = system.mixed.iter().filter(|mixed| mixed.part == place);
+    let Some(first) = here.next() else { return true };
+    here.all(|mixed| alike(first, mixed, amounts))
+}
+
+/// Whether two species react on the same side and are there in exact proportion.
+#[inline(always)]
+fn alike(first: &Mixed, mixed: &Mixed, amounts: &[f64]) -> bool {
+    let (amount, other) = (amounts[first.species], amounts[mixed.species]);
+    let far = other > FAR * amount || amount > FAR * other;
+    mixed.nu * first.nu > 0.0 && !far && in_proportion(amount, first.nu, other, mixed.nu)
 }
 
 /// Above the largest ratio of two stoichiometric numbers.
@@ -158,10 +200,13 @@ fn in_proportion(a: f64, a_nu: f64, b: f64, b_nu: f64) -> bool {
 
 /// ln K − ln Q where Q is the same at every extent, for y_i = ν_i/Δν.
 pub(super) fn constant_affinity(system: &System, state: &State, ln_k: f64) -> f64 {
+    if system.parts.len() > 1 {
+        return several::constant_affinity(system, state, ln_k);
+    }
     if system.mixed.is_empty() {
         return ln_k;
     }
-    let mut factors = Factors::new(system, state);
+    let mut factors = Factors::with_unit(system, state);
     for mixed in &system.mixed {
         factors.put(mixed.nu.abs(), mixed.nu, mixed.power);
     }
@@ -170,7 +215,7 @@ pub(super) fn constant_affinity(system: &System, state: &State, ln_k: f64) -> f6
 }
 
 /// The factors of Q, as whole powers where they are, otherwise as logarithms.
-struct Factors {
+pub(super) struct Factors {
     multiple: f64,
     product: Scaled,
     twos: f64,
@@ -178,19 +223,32 @@ struct Factors {
 }
 
 impl Factors {
-    fn new(system: &System, state: &State) -> Factors {
-        let mut factors =
-            Factors { multiple: system.multiple, product: Scaled::ONE, twos: 0.0, small: 0.0 };
+    pub fn new(system: &System) -> Factors {
+        Factors { multiple: system.multiple, product: Scaled::ONE, twos: 0.0, small: 0.0 }
+    }
+
+    /// With the unit of activity of the one mixture that reacts.
+    fn with_unit(system: &System, state: &State) -> Factors {
+        let mut factors = Factors::new(system);
         if system.multiple > 0.0 {
-            factors.product = state.activity_unit(system, system.delta_power);
+            factors.product = state.activity_unit(system.mixture, system.delta_power);
         } else {
-            let unit = state.activity_unit(system, 1);
+            let unit = state.activity_unit(system.mixture, 1);
             factors.small = system.delta_nu * unit.ln_less(0.0);
         }
         factors
     }
 
-    fn put(&mut self, x: f64, nu: f64, power: i32) {
+    /// Puts in the unit of activity of a mixture.
+    pub fn unit(&mut self, state: &State, part: &Part) {
+        if self.multiple > 0.0 {
+            self.product = self.product.and(state.activity_unit(part.kind, part.delta_power));
+        } else {
+            self.small += part.delta_nu * state.activity_unit(part.kind, 1).ln_less(0.0);
+        }
+    }
+
+    pub fn put(&mut self, x: f64, nu: f64, power: i32) {
         if self.multiple > 0.0 {
             self.product = self.product.times(x, power);
         } else {
@@ -200,7 +258,7 @@ impl Factors {
         }
     }
 
-    fn ln_k_less(&self, ln_k: f64) -> f64 {
+    pub fn ln_k_less(&self, ln_k: f64) -> f64 {
         if self.multiple > 0.0 {
             return -self.product.ln_less(ln_k * self.multiple) / self.multiple;
         }

@@ -1,12 +1,14 @@
 //! The state where the reaction stops.
 
 use super::limits::{AMOUNT_MAX_MOL, check_ln_k};
+use super::nonideal;
 use super::outcome::{Rest, RestOutcome, Summary, Workspace};
-use super::quotient::{Affinity, constant_affinity, constant_quotient, less};
-use super::side::{Point, Side, Term};
-use super::solve::{Zero, solve};
+use super::quotient::{Affinity, constant_affinity, constant_quotient, ideal};
+use super::several::Several;
+use super::side::{Point, Side};
+use super::solve::{Seen, Zero, solve};
 use super::state::State;
-use super::system::{Kind, System};
+use super::system::System;
 use super::walls::{Wall, Way};
 use crate::numeric::{split, times_power_of_two};
 use crate::problem::Outcome;
@@ -55,7 +57,20 @@ pub fn rest_into(
 ) -> Outcome<Summary> {
     check_ln_k(ln_k)?;
     state.check(system)?;
-    Ok(Search::begin(system, state, ln_k, workspace).run())
+    if system.plain {
+        return Ok(Search::begin(system, state, ln_k, workspace).run());
+    }
+    Ok(nonideal::rest(system, state, ln_k, workspace))
+}
+
+/// The state of rest with γ = 1 and the solvent left out, for a state that has been checked.
+pub(super) fn ideal_rest(
+    system: &System,
+    state: &State,
+    ln_k: f64,
+    workspace: &mut Workspace,
+) -> Summary {
+    Search::begin(system, state, ln_k, workspace).run()
 }
 
 /// One search.
@@ -96,42 +111,43 @@ impl<'a> Search<'a> {
         if constant_quotient(self.system, self.state, self.state.amounts_mol) {
             return self.run_to_limit();
         }
+        if self.system.parts.len() > 1 { self.search::<Several>() } else { self.search::<Side>() }
+    }
+
+    fn search<S: Seen>(&mut self) -> Summary {
         let far = match (self.forward, self.reverse) {
-            (Some(forward), Some(reverse)) => return self.between(forward, reverse),
+            (Some(forward), Some(reverse)) => return self.between::<S>(forward, reverse),
             (Some(wall), None) | (None, Some(wall)) => wall,
             (None, None) => return self.stay(RestOutcome::HasNoLimit),
         };
-        self.with_one_wall(far)
+        self.with_one_wall::<S>(far)
     }
 
     /// Both walls are there: the sign of the affinity in the middle says which is nearer.
-    fn between(&mut self, forward: Wall, reverse: Wall) -> Summary {
+    fn between<S: Seen>(&mut self, forward: Wall, reverse: Wall) -> Summary {
         let middle = 0.5 * (forward.distance + reverse.distance);
-        let mut terms = std::mem::take(&mut self.workspace.terms);
         // A wrong guess costs setting up the other side.
         let tends_forward = self.ln_k > self.system.delta_nu * self.state.rough_ln_pressure();
         let (guess, other) = if tends_forward { (forward, reverse) } else { (reverse, forward) };
-        let side = self.side(&guess, &mut terms);
+        let side: S = self.side(&guess);
         let point = side.point(middle);
-        let summary = if point.value >= 0.0 {
-            self.near(&guess, &side, middle, point, middle)
-        } else {
-            // The same point seen from the other wall.
-            let point = Point {
-                value: -point.value,
-                slope: point.slope,
-                curvature: 2.0 * point.slope - point.curvature,
-            };
-            let side = self.side(&other, &mut terms);
-            self.near(&other, &side, middle, point, middle)
+        if point.value >= 0.0 {
+            return self.near(&guess, side, middle, point, middle);
+        }
+        // The same point seen from the other wall.
+        let point = Point {
+            value: -point.value,
+            slope: point.slope,
+            curvature: 2.0 * point.slope - point.curvature,
         };
-        self.workspace.terms = terms;
-        summary
+        self.workspace.terms = side.into_terms();
+        let side: S = self.side(&other);
+        self.near(&other, side, middle, point, middle)
     }
 
     /// There is no wall the other way.
-    fn with_one_wall(&mut self, wall: Wall) -> Summary {
-        if self.state.by_fraction(self.system) {
+    fn with_one_wall<S: Seen>(&mut self, wall: Wall) -> Summary {
+        if self.system.parts.iter().all(|part| self.state.by_fraction(part.kind)) {
             let towards_wall = match wall.way {
                 Way::Forward => 1.0,
                 Way::Reverse => -1.0,
@@ -140,35 +156,50 @@ impl<'a> Search<'a> {
                 return self.stay(RestOutcome::HasNoLimit);
             }
         }
-        let mut terms = std::mem::take(&mut self.workspace.terms);
-        let side = self.side(&wall, &mut terms);
+        let side: S = self.side(&wall);
         let order = side.order();
         let start = if order > 0.0 {
             libm::exp((-side.intercept() / order).clamp(-690.0, 690.0))
         } else {
-            let reach = side.terms.iter().map(|term| term.at_wall / term.slope);
-            reach.fold(f64::MAX, f64::min).clamp(1e-299, 1e299)
+            side.reach().clamp(1e-299, 1e299)
         };
         let point = side.point(start);
-        let summary = self.near(&wall, &side, start, point, f64::INFINITY);
-        self.workspace.terms = terms;
+        self.near(&wall, side, start, point, f64::INFINITY)
+    }
+
+    fn side<S: Seen>(&mut self, wall: &Wall) -> S {
+        S::new(self.system, self.state, self.ln_k, wall, self.workspace)
+    }
+
+    fn near<S: Seen>(
+        &mut self,
+        wall: &Wall,
+        side: S,
+        start: f64,
+        first: Point,
+        high: f64,
+    ) -> Summary {
+        let summary = self.seen_from(wall, &side, start, first, high);
+        self.workspace.terms = side.into_terms();
         summary
     }
 
-    fn side<'t>(&self, wall: &Wall, terms: &'t mut Vec<Term>) -> Side<'t> {
-        let Workspace { scaled, shift, .. } = &*self.workspace;
-        Side::new(self.system, self.state, self.ln_k, wall, scaled, *shift, terms)
-    }
-
     /// Rest is on this wall's side of `high`, or at the wall.
-    fn near(&mut self, wall: &Wall, side: &Side, start: f64, first: Point, high: f64) -> Summary {
+    fn seen_from<S: Seen>(
+        &mut self,
+        wall: &Wall,
+        side: &S,
+        start: f64,
+        first: Point,
+        high: f64,
+    ) -> Summary {
         let order = side.order();
         let away = match wall.way {
             Way::Forward => 1.0,
             Way::Reverse => -1.0,
         };
         if order == 0.0 {
-            let at_wall = side.value(0.0);
+            let at_wall = side.intercept();
             if at_wall >= 0.0 {
                 let outcome =
                     if at_wall == 0.0 { RestOutcome::Rest } else { RestOutcome::PhaseExhausted };
@@ -196,7 +227,7 @@ impl<'a> Search<'a> {
         let (left, condition) = if distance > 0.0 {
             (side.value(distance), self.condition(distance, slope))
         } else {
-            (0.0, 1.0 / order)
+            (0.0, if order > 0.0 { 1.0 / order } else { f64::MAX })
         };
         let extent = away * (wall.distance - distance);
         let summary = self.summary(RestOutcome::Rest, extent, Affinity::Finite(away * left + 0.0));
@@ -209,7 +240,7 @@ impl<'a> Search<'a> {
         let (mut most, mut of) = (0.0, 1.0);
         let each = self.system.nu.iter().zip(&self.system.kinds).zip(&self.workspace.scaled);
         for ((&nu, &kind), &amount) in each {
-            if kind != Kind::Ample && amount > 0.0 && nu.abs() * of > most * amount {
+            if !kind.is_ample() && amount > 0.0 && nu.abs() * of > most * amount {
                 (most, of) = (nu.abs(), amount);
             }
         }
@@ -236,7 +267,7 @@ impl<'a> Search<'a> {
     fn move_to(&mut self, wall: &Wall, distance: f64) {
         let Workspace { amounts_mol, scaled, shift, .. } = &mut *self.workspace;
         for (species, (&nu, &kind)) in self.system.nu.iter().zip(&self.system.kinds).enumerate() {
-            if nu == 0.0 || kind == Kind::Ample {
+            if nu == 0.0 || kind.is_ample() {
                 continue;
             }
             scaled[species] = wall.amount_of(nu, scaled[species]) + wall.slope_of(nu) * distance;
@@ -252,7 +283,7 @@ impl<'a> Search<'a> {
         self.workspace.scaled.clear();
         let amounts = self.state.amounts_mol.iter();
         self.workspace.scaled.extend(amounts.map(|&x| times_power_of_two(x, shift)));
-        let affinity = less(self.system, self.state, self.ln_k);
+        let affinity = ideal(self.system, self.state, self.ln_k);
         self.summary(outcome, 0.0, affinity)
     }
 
@@ -276,10 +307,9 @@ impl<'a> Search<'a> {
 /// and traces of 1e-590 of it can still be worked with. Without a wall one way the distance may
 /// become large, so nothing is scaled.
 fn shift(system: &System, state: &State) -> i32 {
-    let by_fraction = state.by_fraction(system);
     let (mut largest, mut used_up, mut made) = (0.0_f64, false, false);
     for ((&kind, &nu), &amount) in system.kinds.iter().zip(&system.nu).zip(state.amounts_mol) {
-        if kind != Kind::Ample && (nu != 0.0 || by_fraction && kind == Kind::Gas) {
+        if !kind.is_ample() && (nu != 0.0 || state.by_fraction(kind) && system.reacts(kind)) {
             largest = largest.max(amount);
             used_up |= nu < 0.0;
             made |= nu > 0.0;

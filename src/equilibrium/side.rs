@@ -6,12 +6,15 @@
 //!
 //! With the sign that makes it rise with d,
 //! h(d) = Σ w_i ln a_i ∓ ln K, and in u = ln d
-//! dh/du = Σ (d/n_i)(w_i − D y_i)² over all gases, inert ones too,
-//! where D = Σ w_i over gases at constant pressure and D = 0 at constant volume.
+//! dh/du = Σ (d/n_i)(w_i − D y_i)² over the whole mixture, inert species too,
+//! where D = Σ w_i where activities follow fractions and D = 0 otherwise.
+//! This file sees the one mixture that reacts; `several` sees any number of them.
 //! The bracket is formed as w_i R/n_t − D r_i/n_t with R = Σ r_i, because d drops out of it.
 
+use super::outcome::Workspace;
+use super::solve::Seen;
 use super::state::State;
-use super::system::System;
+use super::system::{Kind, System};
 use super::walls::{Wall, Way};
 use crate::numeric::{LN_2_TAIL, Scaled, split, two_product, two_sum};
 
@@ -24,13 +27,15 @@ pub(super) struct Term {
     pub slope: f64,
     /// w times the system's multiple, where that is whole.
     pub power: i32,
+    /// The place of its mixture among those that react.
+    pub part: u32,
 }
 
 /// The affinity seen from one wall. Amounts are scaled by 2^`shift`.
 #[derive(Debug)]
-pub(super) struct Side<'a> {
-    pub terms: &'a [Term],
-    /// R and the amount of inert gas in it; 1 and 0 where fractions do not matter.
+pub(super) struct Side {
+    terms: Vec<Term>,
+    /// R and the amount of inert species in it; 1 and 0 where fractions do not matter.
     total: f64,
     inert: f64,
     /// D, and D times the multiple.
@@ -55,34 +60,60 @@ pub(super) struct Point {
     pub curvature: f64,
 }
 
-impl<'a> Side<'a> {
-    /// Sets up the terms and the constants for one wall.
-    pub fn new(
+impl Side {
+    /// h where some ν is no multiple of an eighth: a logarithm for each mantissa, and the powers of
+    /// two added with their rounding errors. The scaling is taken off first, since Σν and the ν
+    /// may not add up to the last digit.
+    #[inline(never)]
+    fn by_logarithms(&self, amount: impl Fn(&Term) -> f64, total: f64) -> f64 {
+        let (mut twos, mut twos_error, mut small) = (0.0, 0.0, 0.0);
+        let mut add = |x: f64, power: f64| {
+            let (mantissa, exponent) = split(x);
+            small += power * libm::log(mantissa);
+            let (product, product_error) = two_product(power, f64::from(exponent - self.shift));
+            let (sum, sum_error) = two_sum(twos, product);
+            twos = sum;
+            twos_error += sum_error + product_error;
+        };
+        for term in &self.terms {
+            add(amount(term), term.slope);
+        }
+        if self.total_slope != 0.0 {
+            add(total, -self.total_slope);
+        }
+        let ln_2 = std::f64::consts::LN_2;
+        let (large, large_error) = two_product(twos, ln_2);
+        (large - self.target) + (large_error + twos * LN_2_TAIL + twos_error * ln_2 + small)
+    }
+}
+
+impl Seen for Side {
+    fn new(
         system: &System,
         state: &State,
         ln_k: f64,
         wall: &Wall,
-        scaled: &[f64],
-        shift: i32,
-        terms: &'a mut Vec<Term>,
-    ) -> Side<'a> {
+        workspace: &mut Workspace,
+    ) -> Side {
         let sign = match wall.way {
             Way::Forward => -1,
             Way::Reverse => 1,
         };
+        let mut terms = std::mem::take(&mut workspace.terms);
+        let (scaled, shift) = (&workspace.scaled, workspace.shift);
         terms.clear();
         let mut total = 0.0;
         for mixed in &system.mixed {
             let at_wall = wall.amount_of(mixed.nu, scaled[mixed.species]);
             total += at_wall;
             let slope = wall.slope_of(mixed.nu);
-            terms.push(Term { at_wall, slope, power: sign * mixed.power });
+            terms.push(Term { at_wall, slope, power: sign * mixed.power, part: 0 });
         }
-        let by_fraction = state.by_fraction(system);
-        let mut inert = 0.0;
+        let by_fraction = state.by_fraction(system.mixture);
+        let mut still = 0.0;
         if by_fraction {
-            inert = inert_gas(system, scaled);
-            total += inert;
+            still = inert(system, system.mixture, scaled);
+            total += still;
         } else {
             total = 1.0;
         }
@@ -95,7 +126,7 @@ impl<'a> Side<'a> {
         let mut side = Side {
             terms,
             total,
-            inert,
+            inert: still,
             total_slope: delta,
             total_power: -delta_power,
             fixed: Scaled::ONE,
@@ -106,28 +137,31 @@ impl<'a> Side<'a> {
         };
         if system.multiple > 0.0 {
             let power = sign * system.delta_power;
-            side.fixed = state.activity_unit(system, power);
+            side.fixed = state.activity_unit(system.mixture, power);
             // Fractions do not see how amounts are scaled.
             if !by_fraction {
                 side.fixed = side.fixed.times_two_to(-i64::from(shift) * i64::from(power));
             }
             side.target *= system.multiple;
         } else {
-            let unit = state.activity_unit(system, 1);
+            let unit = state.activity_unit(system.mixture, 1);
             side.target -= signed * system.delta_nu * unit.ln_less(0.0);
         }
         side
     }
 
-    /// h at a distance.
+    fn into_terms(self) -> Vec<Term> {
+        self.terms
+    }
+
     #[inline(never)]
-    pub fn value(&self, d: f64) -> f64 {
+    fn value(&self, d: f64) -> f64 {
         let total = self.total + self.total_slope * d;
         if self.multiple == 0.0 {
             return self.by_logarithms(|term| term.at_wall + term.slope * d, total);
         }
         let mut product = self.fixed;
-        for term in self.terms {
+        for term in &self.terms {
             product = product.times(term.at_wall + term.slope * d, term.power);
         }
         if self.total_power != 0 {
@@ -136,9 +170,8 @@ impl<'a> Side<'a> {
         product.ln_less(self.target) * self.per_multiple
     }
 
-    /// h and its derivatives at a distance.
     #[inline(never)]
-    pub fn point(&self, d: f64) -> Point {
+    fn point(&self, d: f64) -> Point {
         let total = self.total + self.total_slope * d;
         let per_total = 1.0 / total;
         let wall_share = self.total * per_total;
@@ -146,7 +179,7 @@ impl<'a> Side<'a> {
         let delta_per_total = self.total_slope * per_total;
         let mut product = self.fixed;
         let (mut slope, mut curvature) = (0.0, 0.0);
-        for term in self.terms {
+        for term in &self.terms {
             let amount = term.at_wall + term.slope * d;
             let reach = d / amount;
             let bracket = term.slope * wall_share - delta_per_total * term.at_wall;
@@ -169,46 +202,18 @@ impl<'a> Side<'a> {
         Point { value, slope, curvature }
     }
 
-    /// h where some ν is no multiple of an eighth: a logarithm for each mantissa, and the powers of
-    /// two added with their rounding errors. The scaling is taken off first, since Σν and the ν
-    /// may not add up to the last digit.
-    #[inline(never)]
-    fn by_logarithms(&self, amount: impl Fn(&Term) -> f64, total: f64) -> f64 {
-        let (mut twos, mut twos_error, mut small) = (0.0, 0.0, 0.0);
-        let mut add = |x: f64, power: f64| {
-            let (mantissa, exponent) = split(x);
-            small += power * libm::log(mantissa);
-            let (product, product_error) = two_product(power, f64::from(exponent - self.shift));
-            let (sum, sum_error) = two_sum(twos, product);
-            twos = sum;
-            twos_error += sum_error + product_error;
-        };
-        for term in self.terms {
-            add(amount(term), term.slope);
-        }
-        if self.total_slope != 0.0 {
-            add(total, -self.total_slope);
-        }
-        let ln_2 = std::f64::consts::LN_2;
-        let (large, large_error) = two_product(twos, ln_2);
-        (large - self.target) + (large_error + twos * LN_2_TAIL + twos_error * ln_2 + small)
-    }
-
-    /// The sum of w over the mixture's species that are used up at this wall: h goes as
-    /// λ ln d there, or to a finite value when λ is zero and only pure phases are used up.
-    pub fn order(&self) -> f64 {
+    fn order(&self) -> f64 {
         self.terms.iter().filter(|term| term.at_wall == 0.0).map(|term| term.slope).sum()
     }
 
-    /// h − λ ln d as d goes to zero.
     #[inline(never)]
-    pub fn intercept(&self) -> f64 {
+    fn intercept(&self) -> f64 {
         let factor = |term: &Term| if term.at_wall == 0.0 { term.slope } else { term.at_wall };
         if self.multiple == 0.0 {
             return self.by_logarithms(factor, self.total);
         }
         let mut product = self.fixed;
-        for term in self.terms {
+        for term in &self.terms {
             product = product.times(factor(term), term.power);
         }
         if self.total_power != 0 {
@@ -216,13 +221,18 @@ impl<'a> Side<'a> {
         }
         product.ln_less(self.target) * self.per_multiple
     }
+
+    fn reach(&self) -> f64 {
+        let reach = self.terms.iter().map(|term| term.at_wall / term.slope);
+        reach.fold(f64::MAX, f64::min)
+    }
 }
 
-/// The amount of gas that takes no part.
-pub(super) fn inert_gas(system: &System, amounts: &[f64]) -> f64 {
+/// The amount of a mixture that takes no part.
+pub(super) fn inert(system: &System, mixture: Kind, amounts: &[f64]) -> f64 {
     let mut sum = 0.0;
     for ((&kind, &nu), &amount) in system.kinds.iter().zip(&system.nu).zip(amounts) {
-        if kind == super::Kind::Gas && nu == 0.0 {
+        if kind == mixture && nu == 0.0 {
             sum += amount;
         }
     }

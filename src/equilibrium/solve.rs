@@ -1,6 +1,10 @@
 //! The zero of the affinity between one wall and a point that is known to lie beyond it.
 
-use super::side::{Point, Side};
+use super::outcome::Workspace;
+use super::side::{Point, Term};
+use super::state::State;
+use super::system::System;
+use super::walls::Wall;
 use crate::numeric::{growth, step_in_power};
 
 /// The most steps; the usual number is three or four.
@@ -19,6 +23,31 @@ const FLOOR: f64 = f64::from_bits((1023 - 1000) << 52);
 const CEILING: f64 = f64::from_bits((1023 + 1000) << 52);
 const LN_FLOOR: f64 = -693.147_180_559_945_3;
 
+/// The affinity seen from one wall: h as a function of the distance d, rising in ln d.
+pub(super) trait Seen: Sized {
+    /// Sets up the terms, in the room that the workspace has for them, and the constants.
+    fn new(
+        system: &System,
+        state: &State,
+        ln_k: f64,
+        wall: &Wall,
+        workspace: &mut Workspace,
+    ) -> Self;
+    /// Gives the room back.
+    fn into_terms(self) -> Vec<Term>;
+    /// h at a distance.
+    fn value(&self, d: f64) -> f64;
+    /// h and its derivatives at a distance.
+    fn point(&self, d: f64) -> Point;
+    /// λ: the sum of w over the species that are used up at this wall and leave their mixture. h
+    /// goes as λ ln d there, or to a finite value when λ is zero and whole phases are used up.
+    fn order(&self) -> f64;
+    /// h − λ ln d as d goes to zero.
+    fn intercept(&self) -> f64;
+    /// The distance at which the amounts have changed by themselves.
+    fn reach(&self) -> f64;
+}
+
 /// Where the affinity vanishes.
 #[derive(Debug, Clone, Copy)]
 pub(super) enum Zero {
@@ -35,8 +64,9 @@ pub(super) enum Zero {
 /// `high` is infinite where there is no other wall. `order` is the side's λ, zero where h is finite
 /// at the wall (and has been found negative there). Gives the zero, the slope of h in ln d next to
 /// it, and the steps taken.
-pub(super) fn solve(
-    side: &Side,
+#[inline(never)]
+pub(super) fn solve<S: Seen>(
+    side: &S,
     order: f64,
     start: f64,
     first: Point,

@@ -1,6 +1,6 @@
 //! The walls: how far a reaction can run each way before a species is used up.
 
-use super::system::{Kind, System};
+use super::system::System;
 use crate::numeric::difference_of_products;
 
 /// A way a reaction can run.
@@ -40,7 +40,7 @@ impl Wall {
         let sign = way.used_up();
         let mut wall: Option<Wall> = None;
         for ((&kind, &nu), &amount) in system.kinds.iter().zip(&system.nu).zip(amounts) {
-            if nu * sign <= 0.0 || kind == Kind::Ample {
+            if nu * sign <= 0.0 || kind.is_ample() {
                 continue;
             }
             let distance = amount / nu.abs();

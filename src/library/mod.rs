@@ -8,6 +8,16 @@
 //! reference state is one for all temperatures (rhombic sulfur, graphite, iron), so tables that
 //! change it, as some do for sulfur above 882 K, agree for balanced reactions only.
 //!
+//! Dissolved species, `(aq)`: the standard state is the ideal solution of 1 mol/kg. Δ_fG°, S° and
+//! C°p of the hydrogen ion are zero. Key values of CODATA come first; other ions have Δ_fG° and S°
+//! of the CRC table, from which Δ_fH° follows; neutral molecules have Henry's constants with the
+//! gas, or the NBS tables. Where a measured constant tells more than tables of single species do
+//! (ammonium, sulfite, hydrogen fluoride, witherite), the record is formed by that constant, and
+//! its sources say so. C°p is constant: the range is 0 to 100 °C where it is published and 15 to
+//! 35 °C where it is not, and there it is zero or that of the reaction's other side. Carbonic acid
+//! is CO2(aq), ammonium hydroxide NH3(aq), sulfurous acid SO2(aq): one molecule, one record. There
+//! is no S^2-(aq), as no sound constant for it exists.
+//!
 //! NASA TM-4513 was made with R = 8.314510 J/(mol K). C°p/R and S°/R follow from spectra and do
 //! not depend on R, so they are kept; H° is known in J/mol, so its constant is set anew for the
 //! exact R. The rest differs by 6e−6 relative.
@@ -17,6 +27,7 @@
 //! use shiftgauge::reaction::Phase;
 //! assert_eq!(library::find("S", Some(Phase::Solid), None).len(), 2); // rhombic and monoclinic
 //! assert_eq!(library::named("quicklime")[0].formula, "CaO");
+//! assert_eq!(library::find("SO4^2-", None, None)[0].id, "SO4^2-.aq");
 //! ```
 
 mod combination;

@@ -12,8 +12,11 @@ const CLOSING_TOLERANCE: f64 = 0.003;
 pub enum Closing {
     /// Amounts or flows: nothing to close.
     NotNeeded,
-    /// They add up to one as written.
-    Exact,
+    /// They add up to one as written, to rounding.
+    Exact {
+        /// The place of the largest, which took the rounding; none without entries.
+        entry: Option<usize>,
+    },
     /// One entry was stated as the remainder and takes this fraction.
     ByRemainder {
         /// Its place among the entries.
@@ -30,16 +33,44 @@ pub enum Closing {
     },
 }
 
-/// Brings fractions to a sum of one, in place: by the entry stated as remainder, or by the largest
+/// Brings fractions to a sum of one, in place; a species found from K is laid on top where nothing is
+/// stated as the remainder. The others are closed
+/// by the entry stated as remainder, or by the largest
 /// where the sum is one within the tolerances (their half-widths added up, at least 0.3 %).
 ///
 /// # Errors
 /// A sum above one beside a remainder, or a sum that is not one within tolerance.
-pub(super) fn close(entries: &[Entry], fractions: &mut [f64]) -> Outcome<Closing> {
+pub(super) fn close(
+    entries: &[Entry],
+    closed_by: Option<usize>,
+    fractions: &mut [f64],
+) -> Outcome<Closing> {
+    let missing = entries.iter().position(|e| matches!(e.stated, Stated::Missing { .. }));
+    let has_remainder = entries.iter().any(|e| matches!(e.stated, Stated::Remainder));
+    if let Some(missing) = missing.filter(|_| !has_remainder) {
+        // The others are an analysis of the gas without the missing species.
+        let value = std::mem::take(&mut fractions[missing]);
+        let closing = close_all(entries, closed_by, fractions)?;
+        fractions.iter_mut().for_each(|fraction| *fraction *= 1.0 - value);
+        fractions[missing] = value;
+        return Ok(closing);
+    }
+    close_all(entries, closed_by, fractions)
+}
+
+fn close_all(
+    entries: &[Entry],
+    closed_by: Option<usize>,
+    fractions: &mut [f64],
+) -> Outcome<Closing> {
+    if let Some(fraction) = closed_by.and_then(|entry| fractions.get_mut(entry)) {
+        *fraction = 0.0;
+    }
     let sum: f64 = fractions.iter().sum();
     let rest = 1.0 - sum;
     let per_cent = |fraction: f64| format!("{:.4}", fraction * 100.0);
-    if let Some(entry) = entries.iter().position(|e| matches!(e.stated, Stated::Remainder)) {
+    let remainder = || entries.iter().position(|e| matches!(e.stated, Stated::Remainder));
+    if let Some(entry) = closed_by.or_else(remainder) {
         // A sum that exceeds one by rounding alone (0.1 + 0.9 …) leaves nothing for the remainder.
         if rest < -1e-12 {
             let problem = Problem::new(MixtureCode::RemainderNegative).with("sum", per_cent(sum));
@@ -63,9 +94,9 @@ pub(super) fn close(entries: &[Entry], fractions: &mut [f64]) -> Outcome<Closing
         }
         Some(entry) => {
             fractions[entry] += rest;
-            Ok(Closing::Exact)
+            Ok(Closing::Exact { entry: Some(entry) })
         }
-        None => Ok(Closing::Exact),
+        None => Ok(Closing::Exact { entry: None }),
     }
 }
 

@@ -1,6 +1,7 @@
 //! Solids and liquids, each its own pure phase, to amounts.
 
-use super::gas::{AmountBasis, no_molar_mass};
+use super::gas::AmountBasis;
+use super::gas_form::no_molar_mass;
 use super::reading::{Entry, Stated};
 use crate::problem::{MixtureCode, Outcome, Problem};
 use crate::quantity::Measure;
@@ -41,7 +42,9 @@ fn held_of(entry: &Entry, gas: Option<AmountBasis>) -> Result<Held, Problem> {
     let quantity = match &entry.stated {
         Stated::Present => return Ok(Held::Ample),
         Stated::Absent => return Ok(Held::Mol(0.0)),
-        Stated::Remainder => return Err(Problem::new(MixtureCode::RemainderOfPurePhase)),
+        Stated::Remainder | Stated::Missing { .. } => {
+            return Err(Problem::new(MixtureCode::RemainderOfPurePhase));
+        }
         Stated::Quantity(quantity) => quantity,
     };
     let (flow, mass) = match quantity.measure {

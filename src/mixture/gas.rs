@@ -1,10 +1,11 @@
 //! A gas reading to amounts of each species in the wet gas.
 
 use super::closing::{Closing, close};
-use super::reading::{Basis, Entry, GasReading, Stated};
+use super::element_balance::{ElementBalance, Feed, Sought, balance};
+use super::gas_form::{Form, common_basis, form_of, refuse_repeats};
+use super::reading::{Around, Basis, Entry, GasReading, Stated, Water};
 use super::water::water_fraction;
 use crate::problem::{MixtureCode, Outcome, Problem};
-use crate::quantity::{FractionBasis, Measure, PressureReference, Quantity};
 use crate::reaction::{Species, parse_species};
 
 /// What the amounts of a gas stand for.
@@ -33,19 +34,26 @@ pub struct GasMixture {
     pub closing: Closing,
     /// The fields whose value was a bound, taken at the bound.
     pub bounds: Vec<String>,
+    /// What the feed says of this gas, where there is one.
+    pub balance: Option<ElementBalance>,
 }
 
 /// Turns a gas reading into amounts of each species in the wet gas.
 ///
 /// Fractions (by amount, also mg/Nm3 through the molar mass, and partial pressures over the total
 /// pressure) give one mole of wet gas; amounts and flows give themselves. A dry analysis is made
-/// wet by y_i = y_i,dry (1 − y_w).
+/// wet by y_i = y_i,dry (1 − y_w). Behind a feed the elements tie the two gases together, and what
+/// the sample lost, the steam, and argon counted as oxygen follow from them.
 ///
 /// # Errors
 /// All problems of the block at once: kinds that do not go together, fractions that do not add up,
 /// a negative remainder, a species twice, water named in a dry analysis, a water content that is no
 /// fraction.
-pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<GasMixture> {
+pub fn gas_mixture(
+    reading: &GasReading,
+    around: Around,
+    feed: Option<&Feed>,
+) -> Outcome<GasMixture> {
     let water_species = parse_species("H2O(g)")?;
     let mut problems = Vec::new();
     if reading.entries.is_empty() {
@@ -57,7 +65,7 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
     let stated: Vec<Option<(Form, f64)>> = reading
         .entries
         .iter()
-        .map(|entry| match form_of(entry, dry, pressure_pa) {
+        .map(|entry| match form_of(entry, dry, around.pressure_pa) {
             Ok(stated) => Some(stated),
             Err(problem) => {
                 problems.push(problem.at(&entry.field));
@@ -67,7 +75,10 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
         .collect();
     let water = match &reading.basis {
         Basis::Wet => Ok(None),
-        Basis::Dry(water) => water_fraction(water, pressure_pa),
+        Basis::Dry(Water::FromFeed) if feed.is_none() => {
+            Err(Problem::new(MixtureCode::WaterNeedsFeed).at("water"))
+        }
+        Basis::Dry(water) => water_fraction(water, around),
     };
     let water = water.unwrap_or_else(|problem| {
         problems.push(problem);
@@ -80,121 +91,96 @@ pub fn gas_mixture(reading: &GasReading, pressure_pa: Option<f64>) -> Outcome<Ga
     let basis = common_basis(&reading.entries, &stated)?;
     let mut values: Vec<f64> = stated.iter().map(|(_, value)| *value).collect();
     let closing = if basis == AmountBasis::OneMole {
-        close(&reading.entries, &mut values)?
+        close(&reading.entries, reading.closed_by, &mut values)?
     } else {
         Closing::NotNeeded
     };
     let mut amounts_mol: Vec<(Species, f64)> =
         reading.entries.iter().map(|entry| entry.species.clone()).zip(values).collect();
     if let Some(fraction) = water {
-        let dry_mol: f64 = amounts_mol.iter().map(|(_, amount)| amount).sum();
-        let water_mol = if basis == AmountBasis::OneMole {
-            amounts_mol.iter_mut().for_each(|(_, amount)| *amount *= 1.0 - fraction);
-            fraction
-        } else {
-            dry_mol * fraction / (1.0 - fraction)
-        };
-        amounts_mol.push((water_species, water_mol));
+        add_water(&mut amounts_mol, water_species.clone(), fraction, basis);
+    }
+    let mut sought = Vec::new();
+    if matches!(reading.basis, Basis::Dry(Water::FromFeed)) {
+        sought.push(Sought { species: water_species, within: None });
+    }
+    if feed.is_some() {
+        let lost = reading.lost.iter().cloned();
+        sought.extend(lost.map(|species| Sought { species, within: None }));
+    }
+    take_out_what_is_counted_within(reading, &mut amounts_mol, feed, &mut sought)?;
+    let balance = feed.map(|feed| balance(feed, &amounts_mol, &sought)).transpose()?;
+    if let Some(balance) = &balance {
+        let names = amounts_mol.iter().map(|(species, _)| species.clone());
+        let names = names.chain(sought.into_iter().map(|sought| sought.species));
+        // One mole of gas again, or the amounts as they were measured.
+        let per = if basis == AmountBasis::OneMole { balance.reading_mol } else { balance.scale };
+        amounts_mol = names.zip(balance.amounts_mol.iter().map(|amount| amount / per)).collect();
     }
     let total_mol = amounts_mol.iter().map(|(_, amount)| amount).sum();
     let bounds = reading.entries.iter().filter(|entry| is_bound(entry));
     let bounds = bounds.map(|entry| entry.field.clone()).collect();
-    Ok(GasMixture { amounts_mol, total_mol, basis, added_water_fraction: water, closing, bounds })
+    let added_water_fraction = water;
+    Ok(GasMixture { amounts_mol, total_mol, basis, added_water_fraction, closing, bounds, balance })
+}
+
+/// Makes a dry analysis wet: y = y(dry) (1 − y_w), or adds the water to amounts.
+fn add_water(
+    amounts_mol: &mut Vec<(Species, f64)>,
+    water_species: Species,
+    fraction: f64,
+    basis: AmountBasis,
+) {
+    let dry_mol: f64 = amounts_mol.iter().map(|(_, amount)| amount).sum();
+    let water_mol = if basis == AmountBasis::OneMole {
+        amounts_mol.iter_mut().for_each(|(_, amount)| *amount *= 1.0 - fraction);
+        fraction
+    } else {
+        dry_mol * fraction / (1.0 - fraction)
+    };
+    amounts_mol.push((water_species, water_mol));
+}
+
+/// Argon over nitrogen in dry air: 0.934 % and 78.084 %. Source: ISO 2533:1975, table 1.
+const ARGON_PER_NITROGEN_IN_AIR: f64 = 0.934 / 78.084;
+
+/// An analyser that counts one species with another: with a feed that has it the balance finds how
+/// much; without one argon is taken to come with the nitrogen, as in air.
+fn take_out_what_is_counted_within(
+    reading: &GasReading,
+    amounts_mol: &mut Vec<(Species, f64)>,
+    feed: Option<&Feed>,
+    sought: &mut Vec<Sought>,
+) -> Outcome<()> {
+    for (i, entry) in reading.entries.iter().enumerate() {
+        let Some(counted) = &entry.includes else { continue };
+        let in_feed = feed.is_some_and(|feed| {
+            feed.amounts_mol.iter().any(|(species, _)| species.same_substance(counted))
+        });
+        if in_feed {
+            sought.push(Sought { species: counted.clone(), within: Some(i) });
+            continue;
+        }
+        let nitrogen = amounts_mol.iter().find(|(species, _)| species.formula.text() == "N2");
+        let Some((_, nitrogen_mol)) = nitrogen.filter(|_| counted.formula.text() == "Ar") else {
+            let problem = Problem::new(MixtureCode::CountedWithUnknown)
+                .with("counted", counted.formula.text())
+                .with("species", entry.species.formula.text());
+            return Err(problem.at(&entry.field).into());
+        };
+        let argon_mol = nitrogen_mol * ARGON_PER_NITROGEN_IN_AIR;
+        if argon_mol > amounts_mol[i].1 {
+            let problem = Problem::new(MixtureCode::CountedMoreThanAll)
+                .with("counted", counted.formula.text())
+                .with("species", entry.species.formula.text());
+            return Err(problem.at(&entry.field).into());
+        }
+        amounts_mol[i].1 -= argon_mol;
+        amounts_mol.push((counted.clone(), argon_mol));
+    }
+    Ok(())
 }
 
 fn is_bound(entry: &Entry) -> bool {
     matches!(&entry.stated, Stated::Quantity(quantity) if quantity.is_bound)
-}
-
-/// The kinds of statement that can stand together in one block.
-#[derive(Debug, Clone, Copy, PartialEq, Eq)]
-enum Form {
-    Fraction,
-    Amount,
-    Flow,
-    Remainder,
-}
-
-fn form_of(entry: &Entry, dry: bool, pressure_pa: Option<f64>) -> Result<(Form, f64), Problem> {
-    let quantity = match &entry.stated {
-        Stated::Quantity(quantity) => quantity,
-        Stated::Remainder => return Ok((Form::Remainder, 0.0)),
-        Stated::Present | Stated::Absent => return Err(Problem::new(MixtureCode::PresenceInGas)),
-    };
-    match quantity.measure {
-        Measure::Fraction if quantity.fraction_basis == FractionBasis::Mass => {
-            Err(Problem::new(MixtureCode::MassFractionInGas))
-        }
-        Measure::Fraction | Measure::Number => Ok((Form::Fraction, quantity.value_si)),
-        Measure::MassPerAmount => match entry.species.formula.molar_mass_kg_per_mol() {
-            Some(molar_mass) => Ok((Form::Fraction, quantity.value_si / molar_mass)),
-            None => Err(no_molar_mass(&entry.species)),
-        },
-        Measure::Pressure => partial_pressure(quantity, dry, pressure_pa),
-        Measure::Amount => Ok((Form::Amount, quantity.value_si)),
-        _ => Ok((Form::Flow, quantity.value_si)),
-    }
-}
-
-pub(super) fn no_molar_mass(species: &Species) -> Problem {
-    Problem::new(MixtureCode::NoMolarMass).with("species", species.text())
-}
-
-fn partial_pressure(
-    quantity: &Quantity,
-    dry: bool,
-    pressure_pa: Option<f64>,
-) -> Result<(Form, f64), Problem> {
-    if quantity.pressure_reference == PressureReference::Gauge {
-        return Err(Problem::new(MixtureCode::GaugePartialPressure));
-    }
-    if dry {
-        return Err(Problem::new(MixtureCode::PartialPressureInDry));
-    }
-    match pressure_pa {
-        Some(total) => Ok((Form::Fraction, quantity.value_si / total)),
-        None => Err(Problem::new(MixtureCode::PartialPressureNeedsTotal)),
-    }
-}
-
-/// A species may stand in one line only, and the water of a dry analysis, stated apart, in none.
-fn refuse_repeats(entries: &[Entry], apart: Option<&Species>, problems: &mut Vec<Problem>) {
-    for (i, entry) in entries.iter().enumerate() {
-        if entries[..i].iter().any(|earlier| earlier.species.same_substance(&entry.species)) {
-            let problem =
-                Problem::new(MixtureCode::SpeciesTwice).with("species", entry.species.text());
-            problems.push(problem.at(&entry.field));
-        }
-        if apart.is_some_and(|apart| apart.same_substance(&entry.species)) {
-            problems.push(Problem::new(MixtureCode::WaterInDry).at(&entry.field));
-        }
-    }
-    let remainders = entries.iter().filter(|entry| matches!(entry.stated, Stated::Remainder));
-    for entry in remainders.skip(1) {
-        problems.push(Problem::new(MixtureCode::SecondRemainder).at(&entry.field));
-    }
-}
-
-/// The basis all entries share; the first that does not go with the others is the problem.
-fn common_basis(entries: &[Entry], stated: &[(Form, f64)]) -> Outcome<AmountBasis> {
-    let first = stated.iter().map(|(form, _)| *form).find(|form| *form != Form::Remainder);
-    let mut problems = Vec::new();
-    for (entry, (form, _)) in entries.iter().zip(stated) {
-        let code = match (first, form) {
-            (Some(Form::Amount | Form::Flow), Form::Remainder) => MixtureCode::RemainderOfAmounts,
-            (Some(first), form) if first != *form && *form != Form::Remainder => {
-                MixtureCode::MixedForms
-            }
-            _ => continue,
-        };
-        problems.push(Problem::new(code).at(&entry.field));
-    }
-    if !problems.is_empty() {
-        return Err(problems);
-    }
-    Ok(match first {
-        Some(Form::Amount) => AmountBasis::Amounts,
-        Some(Form::Flow) => AmountBasis::Flows,
-        _ => AmountBasis::OneMole,
-    })
 }

@@ -10,6 +10,8 @@ pub struct Entry {
     pub species: Species,
     /// What is stated.
     pub stated: Stated,
+    /// Another species that the instrument counts with this one.
+    pub includes: Option<Species>,
     /// The path of the entry's value, for problems.
     pub field: String,
 }
@@ -21,6 +23,12 @@ pub enum Stated {
     Quantity(Quantity),
     /// What is missing from one.
     Remainder,
+    /// Found from K and the others: a fraction of the gas as analysed, or an amount like those of the
+    /// other lines.
+    Missing {
+        /// The value that is tried.
+        value: f64,
+    },
     /// A pure phase that is there, in ample amount.
     Present,
     /// A pure phase that is not there.
@@ -32,6 +40,8 @@ pub enum Stated {
 pub enum Water {
     /// Nothing is stated: the gas is taken as free of water.
     None,
+    /// Found from the feed by the balance of the elements.
+    FromFeed,
     /// The fraction of water in the wet gas.
     Fraction(Quantity),
     /// Water for each unit of dry gas, by amount.
@@ -40,8 +50,8 @@ pub enum Water {
     DewPoint {
         /// The dew point.
         temperature: Quantity,
-        /// The absolute pressure where the dew point was read, if not the case's.
-        pressure_pa: Option<f64>,
+        /// The pressure where the dew point was read, if not the case's.
+        pressure: Option<Quantity>,
     },
 }
 
@@ -61,4 +71,18 @@ pub struct GasReading {
     pub basis: Basis,
     /// Its lines.
     pub entries: Vec<Entry>,
+    /// What the sample lost when it was cooled.
+    pub lost: Vec<Species>,
+    /// The entry that takes what is missing from one, whatever that is; without it the entry
+    /// stated as remainder does, else the largest, if the sum is one within tolerance.
+    pub closed_by: Option<usize>,
+}
+
+/// What a gas analysis is laid beside.
+#[derive(Debug, Clone, Copy, PartialEq)]
+pub struct Around {
+    /// The absolute pressure of the gas, where it is known.
+    pub pressure_pa: Option<f64>,
+    /// The atmosphere that gauge readings count from.
+    pub atmosphere_pa: f64,
 }

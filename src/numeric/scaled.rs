@@ -88,6 +88,15 @@ impl Scaled {
         self
     }
 
+    /// Multiplies by another product.
+    #[must_use]
+    pub fn and(mut self, other: Scaled) -> Scaled {
+        self.over *= other.over;
+        self.under *= other.under;
+        self.exponent += other.exponent;
+        self
+    }
+
     /// Multiplies by a whole power of two.
     #[inline(always)]
     #[must_use]

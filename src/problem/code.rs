@@ -1,6 +1,7 @@
 //! The codes of all problems, one enum for each room that finds them.
 
-/// Declares one room's codes with their names at the border, and puts them into [`Code`].
+/// Declares one room's codes with their names at the border, and puts them into [`Code`]; codes
+/// `in Beside` are of sentences and stay out of it.
 macro_rules! codes {
     ($(#[$doc:meta])* $group:ident in $variant:ident { $($name:ident = $text:literal),+ $(,)? }) => {
         $(#[$doc])*
@@ -28,6 +29,8 @@ macro_rules! codes {
         }
     };
 }
+
+pub(super) use codes;
 
 codes! {
     /// Mistakes in a number, a unit or a tolerance.
@@ -156,6 +159,19 @@ codes! {
         FractionOfPurePhase = "fraction-of-pure-phase",
         NoCommonMeasure = "no-common-measure",
         VacuumTooDeep = "vacuum-too-deep",
+        WaterNeedsFeed = "water-needs-feed",
+        FeedOpen = "feed-open",
+        FeedContradicts = "feed-contradicts",
+        CountedWithUnknown = "counted-with-unknown",
+        CountedMoreThanAll = "counted-more-than-all",
+        SecondMissing = "second-missing",
+        PresenceInMixture = "presence-in-mixture",
+        FractionOfWhat = "fraction-of-what",
+        VolumeAndWater = "volume-and-water",
+        NoLiquidWater = "no-liquid-water",
+        RemainderOfSolution = "remainder-of-solution",
+        PhOfAnother = "ph-of-another",
+        TemperatureOutsideSolution = "temperature-outside-solution",
     }
 }
 
@@ -177,6 +193,12 @@ codes! {
         SolutesHoldPressure = "solutes-hold-pressure",
         NoReaction = "no-reaction",
         ManyReactions = "many-reactions",
+        LiquidWithSolutes = "liquid-with-solutes",
+        GasHoldsSolvent = "gas-holds-solvent",
+        WaterNotPositive = "water-not-positive",
+        ModelNeedsWater = "model-needs-water",
+        ChargeOutOfRange = "charge-out-of-range",
+        IonSizeOutOfRange = "ion-size-out-of-range",
     }
 }
 
@@ -207,52 +229,20 @@ codes! {
         VolumeNeedsGas = "volume-needs-gas",
         FlowsInVolume = "flows-in-volume",
         ApproachTooLarge = "approach-too-large",
-    }
-}
-
-codes! {
-    /// What is worth knowing beside a result.
-    NoteCode in Beside {
-        PhaseAssumed = "phase-assumed",
-        FormAssumed = "form-assumed",
-        NotInAnalysis = "not-in-analysis",
-        PhaseTakenAsPresent = "phase-taken-as-present",
-        ClosedByRemainder = "closed-by-remainder",
-        ClosedByLargest = "closed-by-largest",
-        DryTakenAsFree = "dry-taken-as-free",
-        WaterAdded = "water-added",
-        TakenAtBound = "taken-at-bound",
-        GaugeToAbsolute = "gauge-to-absolute",
-        StandardAtmosphere = "standard-atmosphere",
-        Balanced = "balanced",
-        Extrapolated = "extrapolated",
-        LineExtended = "line-extended",
-        KNotCarried = "k-not-carried",
-        ApproachTaken = "approach-taken",
-        TolerancesNotCarried = "tolerances-not-carried",
-        IdealGas = "ideal-gas",
-        NoReading = "no-reading",
-        Equilibrium = "equilibrium-is-not-rate",
-    }
-}
-
-codes! {
-    /// A line of the working.
-    StepCode in Beside {
-        SpeciesGibbs = "species-gibbs",
-        ReactionGibbs = "reaction-gibbs",
-        StatedK = "stated-k",
-        Line = "line",
-        K = "k",
-        Absolute = "absolute",
-        WetGas = "wet-gas",
-        Activity = "activity",
-        Quotient = "quotient",
-        OpenQuotient = "open-quotient",
-        Gibbs = "gibbs",
-        TStar = "t-star",
-        Rest = "rest",
-        RestCheck = "rest-check",
+        BandNegative = "band-negative",
+        FormulaWithoutTerms = "formula-without-terms",
+        NotARange = "not-a-range",
+        KFromOpenReading = "k-from-open-reading",
+        KFromNoReading = "k-from-no-reading",
+        LostNeedsFeed = "lost-needs-feed",
+        ReadingNeeded = "reading-needed",
+        SpeciesNotHere = "species-not-here",
+        KnobNotHere = "knob-not-here",
+        SweepCount = "sweep-count",
+        SweepLines = "sweep-lines",
+        MissingTakesNoPart = "missing-takes-no-part",
+        MissingWithoutK = "missing-without-k",
+        MissingNotFound = "missing-not-found",
     }
 }
 
@@ -288,56 +278,5 @@ impl Code {
             Code::Equilibrium(code) => code.as_str(),
             Code::Case(code) => code.as_str(),
         }
-    }
-}
-
-codes! {
-    /// Why a nudge does what it does.
-    WhyCode in Beside {
-        HeatTaken = "heat-taken-up",
-        HeatGiven = "heat-given-off",
-        HeatNone = "heat-nearly-none",
-        HeatBalanced = "heat-balanced-by-pressure",
-        HeatUnknown = "heat-unknown",
-        WarmVolumeForward = "warmed-volume-forward",
-        WarmVolumeReverse = "warmed-volume-reverse",
-        PressureForward = "pressure-forward",
-        PressureReverse = "pressure-reverse",
-        PressureNone = "pressure-cancels",
-        VolumeForward = "volume-forward",
-        VolumeReverse = "volume-reverse",
-        VolumeNone = "volume-cancels",
-        InertForward = "inert-forward",
-        InertReverse = "inert-reverse",
-        InertNone = "inert-cancels",
-        InertInVolume = "inert-in-fixed-volume",
-        DilutionForward = "dilution-forward",
-        DilutionReverse = "dilution-reverse",
-        DilutionNone = "dilution-cancels",
-        ReactantAdded = "reactant-added",
-        ReactantAddedBack = "reactant-added-moves-back",
-        ReactantRemoved = "reactant-removed",
-        ReactantRemovedForward = "reactant-removed-moves-forward",
-        ProductAdded = "product-added",
-        ProductAddedForward = "product-added-moves-forward",
-        ProductRemoved = "product-removed",
-        ProductRemovedBack = "product-removed-moves-back",
-        ShareBalanced = "share-balanced",
-        BystanderForward = "bystander-forward",
-        BystanderReverse = "bystander-reverse",
-        BystanderNone = "bystander-none",
-        PureAdded = "pure-phase-added",
-        PureRemoved = "pure-phase-removed",
-        Needed = "used-up-phase-added",
-        UsedUp = "phase-used-up",
-        UsedUpUntil = "phase-used-up-until",
-        CrossesForward = "crosses-forward",
-        CrossesReverse = "crosses-reverse",
-        Opens = "reaction-opens",
-        NothingCanMove = "why-nothing-can-move",
-        AnyExtent = "why-any-extent",
-        RanToLimit = "why-ran-to-limit",
-        NoLimit = "why-no-limit",
-        OutOfRange = "step-out-of-range",
     }
 }

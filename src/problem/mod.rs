@@ -6,14 +6,18 @@
 
 mod code;
 mod remark;
+mod sentence_code;
 mod span;
 pub mod words;
 
 pub use code::{
-    CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, NoteCode,
-    QuantityCode, ReactionCode, StepCode, WhyCode,
+    CaseCode, Code, ConstantCode, EquilibriumCode, LibraryCode, MixtureCode, QuantityCode,
+    ReactionCode,
 };
 pub use remark::{Level, Remark, Step, Why};
+pub use sentence_code::{
+    InputCode, NoteCode, StepCode, TargetCode, TurnCode, VerdictCode, WhyCode,
+};
 pub use span::Span;
 
 /// One mistake in what the user gave: a code, its arguments, the field and the span in its text.

@@ -1,6 +1,6 @@
 //! Notes and lines of the working: data too, said by the same catalogue as problems.
 
-use super::code::{NoteCode, StepCode, WhyCode};
+use super::sentence_code::{NoteCode, StepCode, WhyCode};
 
 /// How much a note matters.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]

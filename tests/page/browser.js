@@ -11,7 +11,7 @@ import { startServer } from '../../www/build/serve.mjs';
 /** @type {Way[]} */
 export const WAYS = ['served', 'one file'];
 
-const DIST = new URL('../../dist/', import.meta.url);
+export const DIST = new URL('../../dist/', import.meta.url);
 
 const FLAGS = [
   '--no-sandbox',
@@ -45,6 +45,7 @@ after(async () => (await launched)?.close());
  *
  * @typedef {object} Options
  * @property {string} [hash] what follows the address, with its '#'
+ * @property {string} [folder] served in the place of dist/
  * @property {RegExp} [expected] faults that this visit provokes on purpose
  * @property {import('playwright-core').BrowserContextOptions} [context] viewport, touch, colours
  */
@@ -56,8 +57,8 @@ after(async () => (await launched)?.close());
  * @param {Way} way
  * @param {Options} [options]
  */
-async function open(way, { hash = '', expected, context: settings } = {}) {
-  const server = way === 'served' ? await startServer({ folder: fileURLToPath(DIST) }) : null;
+async function open(way, { hash = '', folder = fileURLToPath(DIST), expected, context: settings } = {}) {
+  const server = way === 'served' ? await startServer({ folder }) : null;
   const address = server?.address ?? new URL('shiftgauge.html', DIST).href;
   const context = await (await browser()).newContext(settings);
   const page = await context.newPage();

@@ -81,6 +81,9 @@ const NOT_CASES = [
   { name: 'no JSON', text: 'a,b,c\n1,2,3' },
   { name: 'another JSON', text: '{"a": 1}' },
   { name: 'a list', text: '[1, 2]' },
+  { name: 'bytes', text: '\u0000\u0001PK\u0003\uffff' },
+  { name: 'far too large', text: `{"format": "shiftgauge 1", "note": "${'x'.repeat(1_000_001)}"}` },
+  { name: 'nested without end', text: `{"format": "shiftgauge 1", "note": ${'['.repeat(4000)}${']'.repeat(4000)}}` },
   { name: 'a later format', text: '{"format": "shiftgauge 99"}' },
 ];
 for (const { name, text } of NOT_CASES) {

@@ -23,6 +23,44 @@ test('the shift example leads, is marked as invented, and does not mind the pres
   }
 });
 
+/** [example, what is shown of its title, species that forms on the way to rest] */
+const FURTHER = [
+  ['ammonia-converter', 'ammonia converter', 'NH3'],
+  ['lime-kiln', 'kiln', 'CO2'],
+];
+for (const [example = '', title = '', forms = ''] of FURTHER) {
+  test(`the example opens, is marked as invented and is judged: ${example}`, async () => {
+    const { page, close } = await openPage({ from: 'disk', viewport });
+    try {
+      await answered(page);
+      await openExample(page, example);
+      const shown = await page.inputValue('#title');
+      assert.ok(shown.includes(title) && shown.includes('invented'), shown);
+      assert.match(await page.inputValue('#note'), /[Ii]nvented/);
+      assert.equal(await direction(page), 'forward');
+      assert.equal(await page.locator('.problem').count(), 0);
+      const [now, rest] = await ledger(page, forms);
+      assert.ok(rest > now, `${forms}: ${now} % to ${rest} %`);
+    } finally {
+      await close();
+    }
+  });
+}
+
+test('the sump of the scrubber opens with its solution unfolded', async () => {
+  const { page, close } = await openPage({ from: 'disk', viewport });
+  try {
+    await answered(page);
+    await page.click('#cases-button');
+    await page.click('[data-example="scrubber-sump"]');
+    assert.match(await page.inputValue('#title'), /scrubber.*invented/);
+    assert.equal(await page.getByRole('textbox', { name: 'Ca²⁺, value' }).inputValue(), '760 ± 20 mg/L');
+    assert.equal(await page.isVisible('#solution-size'), true);
+  } finally {
+    await close();
+  }
+});
+
 test('the chlorine example is marked as invented, and more pressure drives it further', async () => {
   const { page, close } = await openPage({ from: 'served', viewport });
   try {

@@ -34,4 +34,5 @@ test('the served page fetches the engine from beside itself', () =>
 test('the page in one file asks for nothing but itself', () =>
   visit('one file', async (page, { requests, address }) => {
     assert.deepEqual(requests.filter((url) => !url.startsWith('data:')), [address]);
+    assert.match((await page.textContent('#offline')) ?? '', /in this file: works without a network/);
   }));

@@ -55,6 +55,31 @@ export function gasField(page, name) {
 }
 
 /**
+ * The case as the page keeps it.
+ * @param {Page} page
+ * @returns {Promise<any>}
+ */
+export async function caseOf(page) {
+  return page.evaluate(() => JSON.parse(window.sessionStorage.getItem('shiftgauge.case') ?? 'null'));
+}
+
+/**
+ * Opens a case as a file would hold it; what it leaves out is that of an empty case.
+ * @param {Page} page
+ * @param {object} question
+ */
+export async function openCase(page, question) {
+  await page.setInputFiles('#case-open', { name: 'case.json', mimeType: 'application/json', buffer: Buffer.from(JSON.stringify({ format: 'shiftgauge 1', ...question })) });
+  await page.waitForSelector('#notice:has-text("Opened case.json")');
+}
+
+/** A visit with nothing but a finger, from a file on disk, with the network off. */
+export const BY_TOUCH = { context: { offline: true, hasTouch: true, isMobile: true, viewport: { width: 390, height: 844 } } };
+
+/** A visit at a desk, from a file on disk, with the network off. */
+export const AT_DESK = { context: { offline: true, viewport: { width: 1280, height: 800 } } };
+
+/**
  * Opens one of the page's own examples through the panel of cases.
  * @param {Page} page
  * @param {string} name

@@ -47,6 +47,36 @@ test('after a trap the case is still there, the user is told, and the engine run
   }
 });
 
+/** Makes `species` trap, always. */
+function trapOnSpecies() {
+  const Real = WebAssembly.Instance;
+  /** @param {[WebAssembly.Module, WebAssembly.Imports?]} args */
+  function Trapping(...args) {
+    const exports = { ...new Real(...args).exports };
+    exports.species = () => { throw new WebAssembly.RuntimeError('unreachable'); };
+    return { exports };
+  }
+  Reflect.set(WebAssembly, 'Instance', Trapping);
+}
+
+test('a trap while species are looked up costs the suggestions and nothing else', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /unreachable/ });
+  try {
+    await page.addInitScript(trapOnSpecies);
+    await page.reload();
+    await answered(page);
+    await page.click('#gas-add');
+    await page.keyboard.type('argon');
+    assert.equal(await page.locator('[role="option"]:visible').count(), 0);
+    await page.fill('#temperature', '268 °C');
+    await page.getByRole('button', { name: 'Remove argon' }).click();
+    assert.equal(await direction(page), 'reverse');
+    assert.equal(await page.isHidden('#out-of-date'), true);
+  } finally {
+    await close();
+  }
+});
+
 test('without WebAssembly the page says what it needs', async () => {
   const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /WebAssembly is off/ });
   try {

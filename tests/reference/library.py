@@ -5,13 +5,16 @@ python3 tests/reference/library.py --write    makes src/library/tables/*.tsv ane
 """
 
 import sys
-from math import log, sqrt
+from math import sqrt
 from pathlib import Path
 
+import library_solution as solution
 import library_sources as published
-from library_pieces import POWERS, Piece, fit, fit_heat_capacity, join
+from library_citations import SOURCES
+from library_figures import SPECIES, built
+from library_pieces import POWERS
 from library_sources import R_EXACT, T0
-from library_species import ATCT_LIMIT, CODATA, KEY_VALUES, SECOND_LIMITS, SOURCES, SPECIES
+from library_species import CODATA, SECOND_LIMITS
 
 ROOT = Path(__file__).resolve().parents[2]
 TABLES = ROOT / "src" / "library" / "tables"
@@ -27,99 +30,35 @@ HEADS = {
 }
 
 
-def build(species):
-    """The figures of one species: ΔfH°298, S°298, pieces, source ids, worst errors of a fit."""
-    how, cas, phase = species.how, species.cas, species.phase
-    sources, worst, transitions = [], [], ()
-    if how[0] == "tm4513":
-        limits, coefficients, h, _ = published.tm4513(how[1])
-        h = round(h, 3)
-        low = T0 if 298.15 < limits[0] <= 300 else limits[0]
-        bounds = [low, *limits[1:]]
-        pieces = []
-        for a, b, c in zip(bounds, bounds[1:], coefficients):
-            piece = Piece(a, b, [0, 0, *c[:5]], "tm4513")
-            piece.b_s = c[6]
-            pieces.append(piece)
-        s = pieces[0].s(T0)
-        sources.append("tm4513")
-    elif how[0] == "janaf":
-        row = next(row for row in published.janaf(how[1]) if row[0] == T0)
-        h, s = row[4], row[2]
-        pieces, transitions, worst = fit(how[1], how[2], "janaf", species.blunt)
-        pieces[0].low = species.low or pieces[0].low
-        if species.crc:
-            h, s = published.crc(cas, phase)
-            sources.append("crc")
-        sources.append("janaf")
-    elif how[0] == "poling":
-        h, s = published.crc(cas, phase)
-        powers, low, high = published.poling_gas(cas)
-        pieces = [Piece(low, high, [0, 0, *powers], "poling")]
-        sources += ["crc", "poling"]
-    elif how[0] == "perry":
-        h, s = published.crc(cas, phase)
-        (const, linear, inverse), _, high = published.perry(cas)
-        a = [inverse / R_EXACT, 0, const / R_EXACT, linear / R_EXACT, 0, 0, 0]
-        pieces = [Piece(how[1], high, [float(f"{v:.10g}") for v in a], "perry")]
-        sources += ["crc", "perry"]
-    elif how[0] == "calcite":
-        h, s = published.crc(cas, phase)
-        pieces = [Piece(T0, 1200, fit_heat_capacity(calcite_heat_capacity, T0, 1200), "jacobs")]
-        perry_figures, low, high = published.perry(cas)
-        for t in range(300, 1033, 20):
-            perry = perry_figures[0] + perry_figures[1] * t + perry_figures[2] / t**2
-            worst_cp = max(abs(pieces[0].cp(t) / perry - 1), 0)
-            assert worst_cp < 0.03, f"calcite at {t} K leaves Perry's Cp by {worst_cp:.1%}"
-        sources += ["crc", "jacobs"]
-    elif how[0] == "methanol":
-        # The liquid is tied to the vapour by its vapour pressure, the vapour taken as ideal.
-        vapour = build(next(s for s in SPECIES if s.id == "CH3OH.g"))
-        _, s = published.crc(cas, phase)
-        g = -R_EXACT * T0 * log(published.antoine_pa(cas, T0) / 1e5) / 1000
-        h = round(vapour["h"] - g - T0 * (vapour["s"] - s) / 1000, 2)
-        pieces = [Piece(low, high, [0, 0, *(float(f"{v:.10g}") for v in powers), 0], "zabransky")
-                  for low, high, powers in published.zabransky(cas)]
-        sources += ["crc", "poling", "zabransky"]
-    if species.element:
-        h = 0.0
-    better = published.atct(cas, phase)
-    if better and not species.element and abs(better[0] - h) > ATCT_LIMIT and how[0] != "methanol":
-        h = round(better[0], 3)
-        sources.append("atct")
-    if species.id in KEY_VALUES:
-        h, s = KEY_VALUES[species.id]
-        sources.append("codata")
-    join(pieces, h, s, transitions)
-    return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": worst}
-
-
-def calcite_heat_capacity(t):
-    """Jacobs, Kerrick and Krupka (1981), J/(mol K)."""
-    return -184.79 + 0.32322 * t - 3_688_200 / t**2 - 1.2974e-4 * t**2 + 3883.5 / sqrt(t)
-
-
 def second_figures(species):
     """(name, ΔfH°, S°) of every other source that knows the species."""
     found = []
     if species.janaf and (species.how[0] != "janaf" or species.crc):
         row = next(row for row in published.janaf(species.janaf) if row[0] == T0)
         found.append(("JANAF", row[4], row[2]))
+    if species.phase == "aq":
+        row = published.aqueous_ion(species.cas)
+        return [("CRC", row[0], row[2])] if row and species.how[0] != "formed" else []
     h, s = published.crc(species.cas, species.phase)
     if species.form == "monoclinic":
         h = s = None
     if h is not None or s is not None:
         found.append(("CRC", h, s))
+    if species.how[0] == "trc":
+        found.append(("Yaws", *published.yaws(species.cas)))
     return found
 
 
 def uncertainty(species, made):
     """u of ΔfG°298 in kJ/mol and how it was got."""
+    if species.phase == "aq":
+        return solution.uncertainty(species, made)
     if species.element:
         return 0.0, "element"
     h, s = made["h"], made["s"]
     better = published.atct(species.cas, species.phase)
-    half_s = max([abs(s - s2) / 2 for _, _, s2 in second_figures(species) if s2] + [0.0])
+    others = [row for row in second_figures(species) if row[0] not in species.outliers]
+    half_s = max([abs(s - s2) / 2 for _, _, s2 in others if s2] + [0.0])
     of_entropy = T0 * half_s / 1000
     if "atct" in made["sources"]:
         return sqrt((better[1] / 2) ** 2 + of_entropy**2), "atct"
@@ -128,7 +67,7 @@ def uncertainty(species, made):
         kind = "atct" if better[1] >= abs(h - better[0]) else "sources"
         return sqrt(of_h**2 + of_entropy**2), kind
     apart = [0.0]
-    for _, h2, s2 in second_figures(species):
+    for _, h2, s2 in others:
         difference = (h - h2 if h2 is not None else 0) - T0 * (s - s2 if s2 else 0) / 1000
         apart.append(abs(difference) / 2)
     if species.id in CODATA and CODATA[species.id] / 2 >= max(apart):
@@ -147,7 +86,7 @@ def make():
     rows, report = {"species": [], "heat": [], "sources": []}, []
     used = set()
     for species in sorted(SPECIES, key=lambda one: one.id.encode()):
-        made = build(species)
+        made = built(species.id)
         u, kind = uncertainty(species, made)
         ids = list(made["sources"]) + [kind] * (kind in ("atct", "codata"))
         ids = list(dict.fromkeys(ids))
@@ -188,6 +127,8 @@ def problems_of(report):
     """Where a record leaves a second source without a reason, or a fit its limits."""
     found = []
     for species, made, u, kind in report:
+        if u == 0 and kind != "element":
+            found.append(f"{species.id} has no uncertainty")
         line = f"{species.id:22} ΔfH {made['h']:10.3f}  S {made['s']:8.3f}  u {u:.2g} ({kind})"
         for name, h2, s2 in second_figures(species):
             dh = made["h"] - h2 if h2 is not None else 0.0
@@ -199,6 +140,13 @@ def problems_of(report):
             line += f"\n    {low:g} to {high:g} K: Cp {cp:.2%}, H {h:.4f} kJ/mol, S {s:.4f} J/(mol K), between rows {swing:.2%}"
             if cp > 0.003 or h > 0.012 or s > 0.012 or swing > 0.02:
                 found.append(f"the fit of {species.id} from {low} to {high} K is poor")
+        g = gibbs_apart(species, made)
+        if g is not None and abs(g) > SECOND_LIMITS[0] and not species.apart:
+            found.append(f"{species.id}: ΔfG° leaves the CRC table's by {g:.2f} kJ/mol")
+        if species.phase == "aq":
+            more, wrong = solution.problems_of_dissolved(species, made, built)
+            line += "\n" + more
+            found += wrong
         published_cp = published.crc_heat_capacity(species.cas, species.phase)
         if published_cp and species.form != "monoclinic":
             cp = piece_at(made, T0).cp(T0)
@@ -212,6 +160,39 @@ def problems_of(report):
                 found.append(f"{species.id}: the Gibbs function leaves JANAF's by {worst:.3f} at {at} K")
         print(line)
     return found
+
+
+def gibbs_apart(species, made):
+    """ΔfG° from ΔfH° and S° here less that of the CRC table, kJ/mol, or None."""
+    g = published.crc_gibbs(species.cas, species.phase)
+    if g is None or species.form == "monoclinic":
+        return None
+    return solution.formation_gibbs(species, made) - g
+
+
+def compared_with(report):
+    """For each second source the worst differences, and the species that have none."""
+    worst, alone = {}, []
+    for species, made, _, _ in report:
+        others = second_figures(species)
+        better = published.atct(species.cas, species.phase)
+        others += [("ATcT", better[0], None)] if better else []
+        own = {key.upper() for key in made["sources"]}
+        others = [row for row in others if row[0].upper() not in own]
+        if not others and not species.element and species.phase != "aq":
+            alone.append(species.id)
+        g = gibbs_apart(species, made)
+        if g is not None and not species.apart:
+            worst.setdefault(("CRC", "ΔfG°"), []).append((abs(g), species.id))
+        for name, h, s in others:
+            for what, here, there in (("ΔfH°", made["h"], h), ("S°", made["s"], s)):
+                if there is not None and not species.apart:
+                    rows = worst.setdefault((name, what), [])
+                    rows.append((abs(here - there), species.id))
+    for (name, what), rows in sorted(worst.items()):
+        text = ", ".join(f"{ident} {apart:.2f}" for apart, ident in sorted(rows)[-3:][::-1])
+        print(f"{name} {what}: {len(rows)} compared and not set apart, the worst: {text}")
+    print(f"no second source: {', '.join(alone)}")
 
 
 def read(name):
@@ -237,7 +218,7 @@ def check_tables(rows):
             found.append(f"{name}.tsv has another shape: write it anew")
             continue
         for old, new in zip(have, wanted):
-            equal = same if old[-1] in ("janaf", "jacobs") else (lambda a, b: a == b)
+            equal = same if old[-1] in ("janaf", "jacobs", "trc") else (lambda a, b: a == b)
             if len(old) != len(new) or not all(equal(a, b) for a, b in zip(old, new)):
                 found.append(f"{name}.tsv differs:\n  committed {old}\n  published {new}")
     return found
@@ -277,6 +258,7 @@ def main():
     found += check_tables(rows)
     if LOG_KF.read_text().splitlines() != log_kf_lines():
         found.append("janaf_log_kf.tsv differs from the published tables")
+    compared_with(report)
     for line in found:
         print("WRONG:", line)
     print(f"{len(rows['species'])} species, {len(rows['heat'])} pieces, {len(found)} problems")

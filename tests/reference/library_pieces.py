@@ -29,6 +29,7 @@ class Piece:
         self.low, self.high, self.source = low, high, source
         self.a = [float(value) for value in coefficients]
         self.b_h = self.b_s = 0.0
+        self.alone = False
 
     def cp(self, t):
         return R_EXACT * sum(a * t**p for a, p in zip(self.a, POWERS))
@@ -42,12 +43,27 @@ class Piece:
 
     def anchor(self, t, h, s):
         """Sets the constants so that H(t) is h kJ/mol and S(t) is s J/(mol K)."""
-        self.b_h = rounded(self.b_h + (h - self.h(t)) * 1000 / R_EXACT)
-        self.b_s = rounded(self.b_s + (s - self.s(t)) / R_EXACT)
+        self.b_h += (h - self.h(t)) * 1000 / R_EXACT
+        self.b_s += (s - self.s(t)) / R_EXACT
+        # A piece alone needs no more digits than its figures have.
+        self.b_h = round(self.b_h, 5) if self.alone else rounded(self.b_h)
+        self.b_s = round(self.b_s, 6) if self.alone else rounded(self.b_s)
 
 
 def rounded(value):
     return float(f"{value:.14g}")
+
+
+def written(value):
+    return float(f"{value:.10g}")
+
+
+def constant_piece(low, high, heat_capacity, source):
+    """The one piece of a species whose Cp is constant."""
+    powers = [0, 0, float(f"{heat_capacity / R_EXACT:.7g}"), 0, 0, 0, 0]
+    piece = Piece(low, high, powers, source)
+    piece.alone = True
+    return piece
 
 
 def join(pieces, h298, s298, transitions=()):
@@ -136,8 +152,8 @@ def constrained(rows, basis, blunt=()):
     return [by_power.get(p, 0.0) for p in POWERS]
 
 
-def fit_heat_capacity(formula, low, high):
-    """Coefficients of Cp/R that follow another formula of Cp within 0.01 %."""
+def fit_heat_capacity(formula, low, high, within=1e-4):
+    """Coefficients of Cp/R that follow another formula of Cp."""
     grid = np.linspace(low, high, 200)
     scale = [1 / 1000.0**p for p in POWERS]
     matrix = np.array([[t**p * s for p, s in zip(POWERS, scale)] for t in grid])
@@ -145,7 +161,7 @@ def fit_heat_capacity(formula, low, high):
     coefficients = [float(f"{value * s:.10g}") for value, s in zip(solution, scale)]
     piece = Piece(low, high, coefficients, "")
     worst = max(abs(piece.cp(t) / formula(t) - 1) for t in grid)
-    assert worst < 1e-4, f"the fit leaves the formula by {worst:.2%}"
+    assert worst < within, f"the fit leaves the formula by {worst:.2%}"
     return coefficients
 
 

@@ -4,6 +4,7 @@ import csv
 import importlib.util
 import json
 from functools import lru_cache
+from math import exp, log
 from pathlib import Path
 
 R_EXACT = 8.31446261815324  # J/(mol K), exact: the product of k and N_A in the SI
@@ -82,12 +83,19 @@ def crc(cas, phase):
 
 def crc_heat_capacity(cas, phase):
     row = one("Heat Capacity/CRC Standard Thermodynamic Properties of Chemical Substances.tsv", cas)
-    return number(row[f"Cp{phase}"]) if row else None
+    return number(row[f"Cp{phase}"]) if row and phase != "aq" else None
+
+
+def crc_gibbs(cas, phase):
+    """ΔfG° in kJ/mol of the CRC table, None where it has none."""
+    row = one("Heat Capacity/CRC Standard Thermodynamic Properties of Chemical Substances.tsv", cas)
+    g = number(row[f"Gf{phase}"]) if row and phase != "aq" else None
+    return None if g is None else g / 1000
 
 
 def atct(cas, phase):
     """ΔfH° and its 95 % half-width in kJ/mol, from version 1.112 of the ATcT, or None."""
-    if phase == "s":
+    if phase not in ("g", "l"):
         return None
     row = one(f"Reactions/ATcT 1.112 ({phase}).tsv", cas)
     if row is None:
@@ -96,11 +104,11 @@ def atct(cas, phase):
 
 
 def perry(cas):
-    """Cp of a solid in J/(mol K): constant, per K, times K², and its range."""
+    """Cp of a solid in J/(mol K): constant, per K, times K², per K², and its range."""
     data = json.loads((folder("chemicals") / "Heat Capacity/Perrys Table 2-151.json").read_text())
     row = data[cas]["c"]
     calorie = 4.184
-    return [row[key] * calorie for key in ("Const", "Lin", "Quadinv")], row["Tmin"], row["Tmax"]
+    return [row[key] * calorie for key in ("Const", "Lin", "Quadinv", "Quad")], row["Tmin"], row["Tmax"]
 
 
 def poling_gas(cas):
@@ -109,6 +117,82 @@ def poling_gas(cas):
     cells = list(row.values())
     numbers = [float(cell) for cell in cells[2:9]]
     return numbers[2:], numbers[0], numbers[1]
+
+
+TRC = "Heat Capacity/TRC Thermodynamics of Organic Compounds in the Gas State.tsv"
+
+
+@lru_cache(maxsize=None)
+def trc(cas):
+    """Lowest and highest T in K, a0 to a7, and the constant J of S°/R."""
+    row = one(TRC, cas)
+    return tuple(float(row[key]) for key in ("Tmin", "Tmax", *(f"a{i}" for i in range(8)), "J"))
+
+
+def trc_rising(cas, t):
+    """The part of Cp/R that grows with y = (T - a7)/(T + a6)."""
+    a = trc(cas)[2:10]
+    y = max((t - a[7]) / (t + a[6]), 0.0)
+    return a[3] * y**2 + (a[4] * y**2 - a[5] / (t + a[6]) ** 2) * y**6
+
+
+def trc_heat_capacity(cas, t):
+    """Cp in J/(mol K): a0 + (a1/T²) exp(-a2/T) + a3 y² + (a4 - a5/(T - a7)²) y^8, times R."""
+    a = trc(cas)[2:10]
+    return R_EXACT * (a[0] + a[1] / t**2 * exp(-a[2] / t) + trc_rising(cas, t))
+
+
+def trc_entropy(cas, t, steps=2000):
+    """S° in J/(mol K): the integral of Cp/T with its constant J; Simpson's rule for the y part."""
+    a, constant = trc(cas)[2:10], trc(cas)[10]
+    width = (t - a[7]) / steps
+    total = 0.0
+    for i in range(steps + 1):
+        at, weight = a[7] + i * width, 1 if i in (0, steps) else 4 if i % 2 else 2
+        total += weight * trc_rising(cas, at) / at
+    vibration = a[1] / a[2] ** 2 * (1 + a[2] / t) * exp(-a[2] / t)
+    return R_EXACT * (constant + a[0] * log(t) + vibration + total * width / 3)
+
+
+def yaws(cas):
+    """ΔfH° in kJ/mol and S° in J/(mol K) of an ideal gas of Yaws' handbook, None where blank."""
+    row = one("Reactions/Yaws Hf S0 (g).tsv", cas)
+    if row is None:
+        return None, None
+    h, s = number(row["Hfg"]), number(row["S0g"])
+    return (None if h is None else h / 1000), s
+
+
+def aqueous_ion(cas):
+    """ΔfH° and ΔfG° in kJ/mol, S° and Cp in J/(mol K) of the CRC table of aqueous ions."""
+    row = one("Electrolytes/CRC Thermodynamic Properties of Aqueous Ions.tsv", cas)
+    if row is None:
+        return None
+    figures = [number(row[key]) for key in ("Hf(aq)", "Gf(aq)", "S(aq)", "Cp(aq)")]
+    return [None if f is None else f / scale for f, scale in zip(figures, (1000, 1000, 1, 1))]
+
+
+WATER_MOL_PER_KG = 1000 / 18.01528
+
+
+@lru_cache(maxsize=None)
+def henry_fit(cas, file):
+    """A and B of ln(H/Pa) = A + B/T, H the pressure over the amount fraction in water."""
+    path = folder("thermo") / "Interaction Parameters" / f"Sander_henry_{file}.json"
+    row = json.loads(path.read_text())["data"].get(f"{cas} 7732-18-5")
+    return (row["A"], row["B"]) if row else None
+
+
+def henry(cas):
+    """Henry's constant in mol/(kg bar) at 298.15 K and the enthalpy of dissolution in kJ/mol."""
+    a, b = henry_fit(cas, "T_dep")
+    return WATER_MOL_PER_KG * 1e5 / exp(a + b / T0), R_EXACT * b / 1000
+
+
+def henry_averages(cas):
+    """The one or two averages of Henry's constant in mol/(kg bar) at 298.15 K."""
+    fits = [henry_fit(cas, file) for file in ("T_dep", "const")]
+    return [WATER_MOL_PER_KG * 1e5 / exp(fit[0] + fit[1] / T0) for fit in fits if fit]
 
 
 def zabransky(cas):

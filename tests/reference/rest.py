@@ -1,4 +1,4 @@
-"""The state of rest of one reaction to sixty digits and more, for the doubles of each problem.
+"""The state of rest of one ideal reaction to sixty digits and more, for the doubles of each problem.
 
 Writes rest_answers.tsv, which tests/rest.rs reads. Needs Python 3.9 or later and mpmath.
 
@@ -35,23 +35,42 @@ def number(x):
 
 
 class Problem:
-    """kinds: a string of g (gas), p (pure), a (ample), s (solute); one letter a species."""
+    """kinds: a string of g (gas), p (pure), a (ample), s (solute), l (liquid mixture); one letter a
+    species. The hold is a pressure or a volume, and a mass of water beside it or alone."""
 
-    def __init__(self, title, kinds, nu, amounts, ln_k, pressure=None, volume=None, kelvin=500.0):
+    def __init__(
+        self, title, kinds, nu, amounts, ln_k, pressure=None, volume=None, water=None, kelvin=500.0
+    ):
         self.title, self.kinds, self.nu, self.amounts = title, kinds, nu, amounts
-        self.ln_k, self.pressure, self.volume, self.kelvin = ln_k, pressure, volume, kelvin
+        self.ln_k, self.kelvin = ln_k, kelvin
+        self.pressure, self.volume, self.water = pressure, volume, water
         self.exact = [Fraction(n) for n in amounts]
         self.exact_nu = [Fraction(n) for n in nu]
-        self.mixed = [i for i, k in enumerate(kinds) if k in "gs" and nu[i] != 0]
-        self.by_fraction = pressure is not None and "g" in kinds
-        self.delta = sum((self.exact_nu[i] for i in self.mixed), Fraction(0))
+        self.mixed = [i for i, k in enumerate(kinds) if k in "gsl" and nu[i] != 0]
+        self.mixtures = sorted({kinds[i] for i in self.mixed})
+        self.delta = {
+            letter: sum((self.exact_nu[i] for i in self.of(letter)), Fraction(0))
+            for letter in self.mixtures
+        }
 
-    def unit(self):
+    def of(self, letter):
+        """The reacting species of one mixture."""
+        return [i for i in self.mixed if self.kinds[i] == letter]
+
+    def by_fraction(self, letter):
+        """Whether the activities of a mixture follow amount fractions."""
+        return letter == "l" or letter == "g" and self.pressure is not None
+
+    def unit(self, letter):
         """What turns an amount or an amount fraction into an activity."""
+        if letter == "l":
+            return Fraction(1)
+        if letter == "s" and self.water is not None:
+            return 1 / Fraction(self.water)
+        if letter == "s":
+            return 1 / (Fraction(self.volume) * STANDARD_CONCENTRATION)
         if self.pressure is not None:
             return Fraction(self.pressure) / STANDARD_PRESSURE
-        if "s" in self.kinds:
-            return 1 / (Fraction(self.volume) * STANDARD_CONCENTRATION)
         return GAS_CONSTANT * Fraction(self.kelvin) / (Fraction(self.volume) * STANDARD_PRESSURE)
 
     def limit(self, sign):
@@ -63,26 +82,27 @@ class Problem:
         ]
         return min(found) if found else None
 
+    def steady(self, letter):
+        """Whether a mixture keeps its composition at every extent."""
+        if not self.by_fraction(letter):
+            return False
+        inert = sum(n for n, v, k in zip(self.exact, self.nu, self.kinds) if k == letter and v == 0)
+        if inert or len({self.nu[i] > 0 for i in self.of(letter)}) > 1:
+            return False
+        return len({self.exact[i] / abs(self.exact_nu[i]) for i in self.of(letter)}) == 1
+
     def constant(self):
         """Whether Q is the same at every extent."""
-        if not self.mixed:
-            return True
-        if not self.by_fraction:
-            return False
-        gases = [i for i, k in enumerate(self.kinds) if k == "g"]
-        inert = sum(self.exact[i] for i in gases if self.nu[i] == 0)
-        if inert or len({v > 0 for v in (self.nu[i] for i in self.mixed)}) > 1:
-            return False
-        return len({self.exact[i] / abs(self.exact_nu[i]) for i in self.mixed}) == 1
+        return all(self.steady(letter) for letter in self.mixtures)
 
     def constant_affinity(self):
-        """ln K - ln Q for gas made in the proportion of nu."""
-        if not self.mixed:
-            return number(self.ln_k)
-        ln_q = number(self.delta) * mp.log(number(self.unit()))
-        for i in self.mixed:
-            share = self.exact_nu[i] / self.delta
-            ln_q += number(self.exact_nu[i]) * mp.log(number(share))
+        """ln K - ln Q for mixtures made in the proportion of nu."""
+        ln_q = mpf(0)
+        for letter in self.mixtures:
+            delta = self.delta[letter]
+            ln_q += number(delta) * mp.log(number(self.unit(letter)))
+            for i in self.of(letter):
+                ln_q += number(self.exact_nu[i]) * mp.log(number(self.exact_nu[i] / delta))
         return number(self.ln_k) - ln_q
 
 
@@ -100,18 +120,33 @@ class Seen:
         self.r = [number(x) for x in self.at_limit]
         self.w = [number(x) for x in self.slope]
         self.nu = [number(v) for v in problem.exact_nu]
-        self.ln_unit = number(problem.delta) * mp.log(number(problem.unit()))
+        self.ln_unit = sum(
+            number(problem.delta[letter]) * mp.log(number(problem.unit(letter)))
+            for letter in problem.mixtures
+        )
         self.ln_k = number(problem.ln_k)
 
     def amounts(self, d):
         return [r + w * d for r, w in zip(self.r, self.w)]
 
+    def whole(self, letter, amounts):
+        """The amount of a mixture, inert species too."""
+        return sum(x for x, k in zip(amounts, self.problem.kinds) if k == letter)
+
+    def vanishes(self, letter):
+        """Whether a mixture that follows fractions is used up as a whole at the limit."""
+        return self.problem.by_fraction(letter) and self.whole(letter, self.at_limit) == 0
+
     def affinity(self, d):
         n = self.amounts(d)
-        ln_q = self.ln_unit + sum(self.nu[i] * mp.log(n[i]) for i in self.problem.mixed)
-        if self.problem.by_fraction:
-            total = sum(x for x, k in zip(n, self.problem.kinds) if k == "g")
-            ln_q -= number(self.problem.delta) * mp.log(total)
+        ln_q = self.ln_unit
+        for letter in self.problem.mixtures:
+            # A mixture that is used up as a whole has the same composition at every distance.
+            here = self.amounts(mpf(1)) if self.vanishes(letter) else n
+            ln_q += sum(self.nu[i] * mp.log(here[i]) for i in self.problem.of(letter))
+            if self.problem.by_fraction(letter):
+                total = mp.log(self.whole(letter, here))
+                ln_q -= number(self.problem.delta[letter]) * total
         return self.ln_k - ln_q
 
     def rising(self, u):
@@ -119,8 +154,10 @@ class Seen:
         return self.way * self.affinity(mp.exp(u))
 
     def hard(self):
-        """Whether only pure phases are used up at the limit."""
-        return all(self.at_limit[i] != 0 for i in self.problem.mixed)
+        """Whether only whole phases are used up at the limit."""
+        kinds = self.problem.kinds
+        open_ones = [i for i in self.problem.mixed if not self.vanishes(kinds[i])]
+        return all(self.at_limit[i] != 0 for i in open_ones)
 
 
 def zero(function, low, high):
@@ -150,10 +187,10 @@ def conditions(problem, seen, d):
     """The worst relative change of each amount for a relative change of ln K, P, V or T."""
     n = seen.amounts(d)
     slope = sum(seen.nu[i] ** 2 / n[i] for i in problem.mixed)
-    if problem.by_fraction:
-        total = sum(x for x, k in zip(n, problem.kinds) if k == "g")
-        slope -= number(problem.delta) ** 2 / total
-    worst_input = max(abs(seen.ln_k), abs(number(problem.delta)))
+    for letter in problem.mixtures:
+        if problem.by_fraction(letter):
+            slope -= number(problem.delta[letter]) ** 2 / seen.whole(letter, n)
+    worst_input = max([abs(seen.ln_k)] + [abs(number(v)) for v in problem.delta.values()])
     return [abs(v) / x / slope * worst_input if x > 0 else mpf(0) for v, x in zip(seen.nu, n)]
 
 
@@ -182,14 +219,15 @@ def solve(problem):
         high = mp.log(middle)
     else:
         way = 1 if forward is not None else -1
-        if problem.by_fraction and problem.constant_affinity() * way <= 0:
+        if all(map(problem.by_fraction, problem.mixtures)) and problem.constant_affinity() * way <= 0:
             return stay("has no limit")
         high = mpf(8000)
     seen = Seen(problem, way)
     if seen.hard():
         at_limit = way * seen.affinity(mpf(0))
         # Where a few roundings of the inputs change the outcome, both are right.
-        room = 8 * EPSILON * max(1.0, abs(problem.ln_k), abs(float(problem.delta)))
+        delta = sum(abs(float(v)) for v in problem.delta.values())
+        room = 8 * EPSILON * max(1.0, abs(problem.ln_k), delta)
         outcomes = ["phase exhausted" if at_limit > 0 else "rest"]
         if abs(at_limit) < room:
             outcomes = ["phase exhausted", "rest"]
@@ -209,7 +247,8 @@ def row(problem):
     """One line of the table."""
     outcomes, amounts, condition = solve(problem)
     show = lambda values: ",".join(repr(float(v)) for v in values)
-    hold = f"P={problem.pressure!r}" if problem.pressure is not None else f"V={problem.volume!r}"
+    held = [("P", problem.pressure), ("V", problem.volume), ("W", problem.water)]
+    hold = ";".join(f"{letter}={x!r}" for letter, x in held if x is not None)
     logs = [
         "-" if n == 0 or k == "a" else mp.nstr(mp.log(n), 22, strip_zeros=False)
         for n, k in zip(amounts, problem.kinds)

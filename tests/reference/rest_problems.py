@@ -71,6 +71,9 @@ def problems(problem, rng, math):
     yield from dissolved(problem, log_uniform, ln_k, rng)
     yield from condensed(problem, log_uniform, uniform, hold, rng, math)
     yield from without_change(problem, math)
+    from mixture_problems import mixtures
+
+    yield from mixtures(problem, log_uniform, uniform, rng, math)
 
 
 def dissolved(problem, log_uniform, ln_k, rng):

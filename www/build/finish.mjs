@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import { env } from 'node:process';
 import { bundle } from './bundle.mjs';
 import { addReset, optimise } from './engine.mjs';
-import { servedPage } from './html.mjs';
+import { servedPage, withParts } from './html.mjs';
 import { copyOffline, writeServiceWorker } from './offline.mjs';
 import { writeOneFile } from './one-file.mjs';
 import { printSizes } from './sizes.mjs';
@@ -19,7 +19,7 @@ await addReset(folder);
 await copyFile(join(source, 'shiftgauge.d.ts'), join(folder, 'shiftgauge.d.ts'));
 await copyOffline(source, folder);
 await bundle(source, folder);
-await writeFile(page, servedPage(await readFile(page, 'utf8')));
+await writeFile(page, servedPage(await withParts(await readFile(page, 'utf8'), source)));
 await writeOneFile(folder);
 await writeServiceWorker(source, folder);
 // Says to Node that the engine's loader is a module, so that it can be imported from this folder.

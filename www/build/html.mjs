@@ -1,5 +1,8 @@
 // The changes that the build makes to index.html. Each takes the text and gives it back changed.
 
+import { readFile } from 'node:fs/promises';
+import { join } from 'node:path';
+
 /** As a worker's engine Trunk builds it but puts no script into the page. */
 export const ENGINE_LINK =
   '<link data-trunk rel="rust" href="../Cargo.toml" data-type="worker" data-bindgen-target="web">';
@@ -19,6 +22,7 @@ const SERVED_POLICY = [
 ].join('; ');
 
 const POLICY_TAG = /[ \t]*<meta http-equiv="Content-Security-Policy"[^>]*>\n?/gi;
+const PART = /^([ \t]*)<!-- part: ([a-z-]+) -->\n/gm;
 const CHARSET_TAG = /<meta charset="utf-8"\s*\/?>/i;
 
 /** @param {string} html */
@@ -36,6 +40,19 @@ export function replaceOnce(html, piece, replacement) {
   const parts = html.split(piece);
   if (parts.length !== 2) throw new Error(`index.html has to contain ${piece} once`);
   return parts.join(replacement);
+}
+
+/**
+ * Puts each part of the page, a file of parts/, in the place of its name.
+ * @param {string} html
+ * @param {string} source the folder of index.html
+ */
+export async function withParts(html, source) {
+  /** @type {Map<string, string>} */
+  const parts = new Map();
+  for (const [, , name = ''] of html.matchAll(PART)) parts.set(name, await readFile(join(source, 'parts', `${name}.html`), 'utf8'));
+  if (parts.size === 0) throw new Error('index.html no longer names its parts');
+  return html.replace(PART, (_, indent, name) => (parts.get(name) ?? '').replace(/^(?=.)/gm, indent));
 }
 
 /**

@@ -2,13 +2,13 @@
 
 /**
  * Tells 'ready' once the page works without a network, and 'update' with a function that changes
- * to the new version when a newer one has been fetched. Does nothing where the page is one file,
- * which needs no keeping, and where the browser allows no service worker.
- * @param {(state: 'ready' | 'update', take_over?: () => void) => void} tell
+ * to the new version when a newer one has been fetched. A page in one file needs no keeping: 'file'.
+ * Does nothing where the browser allows no service worker.
+ * @param {(state: 'file' | 'ready' | 'update', take_over?: () => void) => void} tell
  */
 export async function keepOffline(tell) {
-  if (document.getElementById('engine-bytes') || !navigator.serviceWorker) return;
-  const first = !navigator.serviceWorker.controller;
+  if (document.getElementById('engine-bytes')) return tell('file');
+  if (!navigator.serviceWorker) return undefined;
   try {
     const registration = await navigator.serviceWorker.register('./service-worker.js');
     if (registration.waiting) offer(registration.waiting, tell);
@@ -19,11 +19,12 @@ export async function keepOffline(tell) {
       });
     });
     await navigator.serviceWorker.ready;
-    if (first) tell('ready');
+    tell('ready');
   } catch (error) {
     // The page works all the same while there is a network.
     console.info('Shiftgauge is not kept for offline use:', error);
   }
+  return undefined;
 }
 
 /**

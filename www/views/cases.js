@@ -1,10 +1,9 @@
-/** Cases kept and sent: examples, files, links, and the case before this one. */
+/** Cases opened and sent: examples, files, links, and the case before this one. */
 
-import shift from '../examples/low-temperature-shift.json' with { type: 'json' };
-import chlorine from '../examples/chlorine-recovery.json' with { type: 'json' };
 import { byId, create } from '../dom.js';
-import { keep, recall } from '../recall.js';
+import { EXAMPLES } from '../examples.js';
 import { hashOf } from '../link.js';
+import { keep, recall } from '../recall.js';
 import { caseFromText, caseToText, emptyCase } from '../state.js';
 
 /** @import { Case } from '../shiftgauge.js' */
@@ -12,18 +11,6 @@ import { caseFromText, caseToText, emptyCase } from '../state.js';
 const button = byId('cases-button', HTMLButtonElement);
 const panel = byId('cases', HTMLElement);
 const linkText = byId('case-link-text', HTMLInputElement);
-
-/** @type {Record<string, () => Case>} */
-const STARTS = {
-  'low-temperature-shift': () => /** @type {Case} */ (/** @type {unknown} */ (structuredClone(shift))),
-  'chlorine-recovery': () => /** @type {Case} */ (/** @type {unknown} */ (structuredClone(chlorine))),
-  empty: emptyCase,
-};
-
-/** The case that a new visitor sees. */
-export function firstCase() {
-  return /** @type {Case} */ (/** @type {unknown} */ (structuredClone(shift)));
-}
 
 /**
  * What this view asks of whoever runs the page.
@@ -44,8 +31,8 @@ export function connect(actions) {
   for (const start of document.querySelectorAll('[data-example]')) {
     if (!(start instanceof HTMLButtonElement)) continue;
     start.addEventListener('click', () => {
-      const make = STARTS[start.dataset.example ?? ''];
-      if (make) replace(make(), `Opened: ${start.textContent?.trim() ?? ''}.`, actions);
+      const question = start.dataset.example === 'empty' ? emptyCase() : EXAMPLES[start.dataset.example ?? ''];
+      if (question) replace(structuredClone(question), `Opened: ${start.textContent?.trim() ?? ''}.`, actions);
     });
   }
   byId('case-save', HTMLButtonElement).addEventListener('click', () => save(actions));
@@ -93,7 +80,11 @@ function replace(question, said, actions) {
  * @param {Actions} actions
  */
 async function openFile(file, actions) {
-  openText(file.size > 1e6 ? ' '.repeat(1_000_001) : await file.text(), `Opened ${file.name}.`, actions);
+  try {
+    openText(file.size > 1e6 ? ' '.repeat(1_000_001) : await file.text(), `Opened ${file.name}.`, actions);
+  } catch {
+    actions.tell(`${file.name} could not be read: perhaps it is a folder. Nothing was changed.`, true);
+  }
 }
 
 /**

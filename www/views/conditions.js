@@ -1,7 +1,8 @@
 /** Temperature, pressure, atmosphere, and what is held constant. */
 
 import { byId } from '../dom.js';
-import { asText } from '../state.js';
+import { unfold } from '../folds.js';
+import { asText, emptyCase } from '../state.js';
 
 /** @import { Case } from '../shiftgauge.js' */
 
@@ -10,6 +11,8 @@ const pressure = byId('pressure', HTMLInputElement);
 const atmosphere = byId('atmosphere', HTMLInputElement);
 const hold = byId('hold', HTMLSelectElement);
 const volume = byId('volume', HTMLInputElement);
+const band = byId('band', HTMLInputElement);
+const USUAL_BAND = emptyCase().band;
 
 /** @param {Case} question */
 export function fill(question) {
@@ -18,6 +21,8 @@ export function fill(question) {
   atmosphere.value = asText(question.atmosphere);
   hold.value = question.hold === 'volume' ? 'volume' : 'pressure';
   volume.value = asText(question.volume);
+  band.value = question.band === null ? '' : asText(question.band);
+  unfold('band-fold', band.value !== '' && band.value !== USUAL_BAND);
 }
 
 /**
@@ -35,9 +40,11 @@ export function read(question) {
     atmosphere: atmosphere.value,
     hold: atVolume ? 'volume' : 'pressure',
     volume: atVolume && volume.value.trim() !== '' ? volume.value : null,
+    band: band.value.trim() === '' ? USUAL_BAND : band.value,
   };
 }
 
 export function render() {
   byId('volume-row', HTMLElement).hidden = hold.value !== 'volume';
+  byId('band-shown', HTMLElement).textContent = band.value.trim() || USUAL_BAND;
 }

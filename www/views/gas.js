@@ -1,59 +1,25 @@
-/** The gas analysis: wet or dry, how the water is known, and one row a species. */
+/** The gas of the reading, with what the analyser counts in and what the sample lost. */
 
-import { byId, chosen, choose, part } from '../dom.js';
-import { createEntries, placeRow } from '../entries.js';
-import { asText, isRecord } from '../state.js';
-import { understoodSpecies } from '../understood.js';
+import { byId } from '../dom.js';
+import { unfold } from '../folds.js';
+import { createGasBlock } from '../gas-block.js';
+import { fieldsOf, isRecord } from '../state.js';
 
-/** @import { Case, GasBlock, Water } from '../shiftgauge.js' */
-/** @import { Row } from '../entries.js' */
+/** @import { Case } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
 
-const REMAINDER = 'remainder';
-const waterKind = byId('water-kind', HTMLSelectElement);
-const perDry = byId('water-per-dry', HTMLInputElement);
-const fraction = byId('water-fraction', HTMLInputElement);
-const dewPoint = byId('water-dew-point', HTMLInputElement);
-const waterPressure = byId('water-pressure', HTMLInputElement);
-const entries = createEntries(byId('gas-rows', HTMLElement), 'gas-row-template', prepareRow);
-
-byId('gas-add', HTMLButtonElement).addEventListener('click', () => entries.add('', '').species.focus());
-
-/** @param {Row} row */
-function prepareRow(row) {
-  /** What stood in the field before it became the remainder, to be put back. */
-  let before = '';
-  const button = part(row.root, 'remainder', HTMLButtonElement);
-  button.addEventListener('click', () => {
-    const becomes = row.value.value.trim() !== REMAINDER;
-    if (becomes) {
-      for (const other of entries.all()) if (other.value.value.trim() === REMAINDER) other.value.value = '';
-      before = row.value.value;
-    }
-    row.value.value = becomes ? REMAINDER : before;
-    row.value.dispatchEvent(new Event('input', { bubbles: true }));
-    if (!becomes) row.value.focus();
-  });
-}
+const block = createGasBlock('gas', 'reading.gas');
+const includesArgon = byId('gas-includes-argon', HTMLInputElement);
+const lost = byId('gas-lost', HTMLInputElement);
+const ARGON = { includes: 'Ar' };
 
 /** @param {Case} question */
 export function fill(question) {
-  const gas = isRecord(question.reading.gas) ? question.reading.gas : null;
-  const water = gas?.water;
-  choose('gas-basis', gas?.basis === 'wet' ? 'wet' : 'dry');
-  waterKind.querySelector('option[value="from_feed"]')?.remove();
-  if (water === 'from_feed') waterKind.append(new Option('the feed in the file', 'from_feed'));
-  /** @type {Record<string, unknown>} */
-  const known = isRecord(water) ? water : {};
-  waterKind.value = water === 'from_feed' ? water : ['per_dry', 'fraction', 'dew_point'].find((kind) => kind in known) ?? 'none';
-  perDry.value = asText(known.per_dry);
-  fraction.value = asText(known.fraction);
-  dewPoint.value = asText(known.dew_point);
-  waterPressure.value = asText(known.pressure);
-  entries.clear();
-  for (const entry of Array.isArray(gas?.entries) ? gas.entries : []) {
-    if (isRecord(entry)) entries.add(asText(entry.species), asText(entry.value));
-  }
+  const gas = fieldsOf(question.reading.gas);
+  block.fill(gas);
+  includesArgon.checked = Array.isArray(gas.entries) && gas.entries.some((entry) => isRecord(entry) && entry.includes === 'Ar');
+  lost.value = Array.isArray(gas.lost) ? gas.lost.filter((species) => typeof species === 'string').join(', ') : '';
+  unfold('gas-more', includesArgon.checked || lost.value !== '');
 }
 
 /**
@@ -61,42 +27,14 @@ export function fill(question) {
  * @returns {Case}
  */
 export function read(question) {
-  const rows = entries.given();
-  rows.forEach((row, index) => placeRow(row, `reading.gas.entries[${index}]`));
-  const basis = chosen('gas-basis') === 'wet' ? 'wet' : 'dry';
-  const water = basis === 'dry' ? readWater() : null;
-  const was = isRecord(question.reading.gas) ? question.reading.gas : {};
-  /** @type {GasBlock | null} */
-  const gas = rows.length === 0 && water === null ? null : {
-    ...was, basis, water,
-    entries: rows.map((row) => ({ species: row.species.value.trim(), value: row.value.value })),
-  };
-  return { ...question, reading: { ...question.reading, gas } };
-}
-
-/** @returns {Water | null} */
-function readWater() {
-  switch (waterKind.value) {
-    case 'per_dry': return { per_dry: perDry.value };
-    case 'fraction': return { fraction: fraction.value };
-    case 'dew_point': return { dew_point: dewPoint.value, pressure: waterPressure.value };
-    case 'from_feed': return 'from_feed';
-    default: return null;
-  }
+  const species = lost.value.split(/[\s,;]+/).filter((name) => name !== '');
+  const was = { ...fieldsOf(question.reading.gas) };
+  delete was.lost;
+  const gas = block.read(was, (name) => (name === 'O2' && includesArgon.checked ? ARGON : {}));
+  return { ...question, reading: { ...question.reading, gas: gas === null || species.length === 0 ? gas : { ...gas, lost: species } } };
 }
 
 /** @param {State} state */
 export function render(state) {
-  const dry = chosen('gas-basis') === 'dry';
-  byId('water-rows', HTMLElement).hidden = !dry;
-  for (const row of document.querySelectorAll('[data-water]')) {
-    if (row instanceof HTMLElement) row.hidden = row.dataset.water !== waterKind.value;
-  }
-  const gases = understoodSpecies(state)?.filter(({ phase }) => phase === null || phase === 'g').map(({ species }) => species);
-  if (gases !== undefined) entries.offer(gases.filter((species) => !(dry && species === 'H2O')));
-  for (const row of entries.all()) {
-    const pressed = row.value.value.trim() === REMAINDER;
-    part(row.root, 'remainder', HTMLButtonElement).setAttribute('aria-pressed', String(pressed));
-    row.root.classList.toggle('is-offered', row.offered);
-  }
+  block.render(state);
 }

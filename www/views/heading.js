@@ -29,8 +29,9 @@ export function render({ question }) {
   document.title = question.title === '' ? 'Shiftgauge' : `${question.title} · Shiftgauge`;
   const parts = [
     question.reactions.length > 1 && 'further reactions',
-    question.reading.solution && 'a solution',
-    question.feed && 'a feed',
+    question.feed?.liquid && 'a liquid feed',
+    question.feed?.solids && 'solids in the feed',
+    question.feed?.solution && 'a dissolved feed',
     question.heat === 'adiabatic' && 'adiabatic operation',
   ].filter((part) => typeof part === 'string');
   unseen.hidden = parts.length === 0;

@@ -1,27 +1,52 @@
 /** Signs and units that a screen's keyboard hides, offered under the field in hand. */
 
 import { byId, create } from '../dom.js';
+import { withUnit } from '../unit-text.js';
 
 const bar = byId('keys', HTMLElement);
 /** Only where fingers type; a keyboard on the desk has what it needs, and `+/-` reads as ±. */
 const byFinger = window.matchMedia('(pointer: coarse)');
 
+/** What was pressed elsewhere must not move away under the finger: the bar leaves after it is pressed. */
+const LEAVE_MS = 350;
+let leaving = 0;
+
 document.addEventListener('focusin', ({ target }) => {
-  if (!(target instanceof HTMLInputElement) || target.dataset.keys === undefined || !byFinger.matches) {
-    if (!(target instanceof Node && bar.contains(target))) bar.hidden = true;
+  window.clearTimeout(leaving);
+  const keys = target instanceof HTMLInputElement && byFinger.matches ? keysOf(target) : [];
+  if (!(target instanceof HTMLInputElement) || keys.length === 0) {
+    if (!(target instanceof Node && bar.contains(target))) leaving = window.setTimeout(() => { bar.hidden = true; }, LEAVE_MS);
     return;
   }
-  const keys = target.dataset.keys.split(' ').map((sign) => {
-    const key = create('button', { type: 'button', tabindex: '-1' }, sign);
-    // The field keeps the focus, so the keyboard on the screen stays.
-    key.addEventListener('pointerdown', (event) => event.preventDefault());
-    key.addEventListener('click', () => insert(target, sign));
-    return key;
-  });
   bar.replaceChildren(...keys);
   (target.closest('.row, .entry') ?? target).after(bar);
   bar.hidden = false;
 });
+
+/** @param {HTMLInputElement} field */
+function keysOf(field) {
+  const units = field.dataset.units?.split('|') ?? [];
+  const signs = units.length > 0 || field.dataset.keys === '±' ? ['±'] : [];
+  return [
+    ...signs.map((sign) => key(sign, () => insert(field, sign))),
+    ...units.map((unit) => key(unit, () => {
+      field.value = withUnit(field.value, unit, units);
+      field.dispatchEvent(new Event('input', { bubbles: true }));
+    })),
+  ];
+}
+
+/**
+ * @param {string} label
+ * @param {() => void} pressed
+ */
+function key(label, pressed) {
+  const button = create('button', { type: 'button', tabindex: '-1' }, label);
+  // The field keeps the focus, so the keyboard on the screen stays.
+  button.addEventListener('pointerdown', (event) => event.preventDefault());
+  button.addEventListener('click', pressed);
+  return button;
+}
 
 /**
  * @param {HTMLInputElement} field
@@ -30,10 +55,7 @@ document.addEventListener('focusin', ({ target }) => {
 function insert(field, sign) {
   const [start, end] = [field.selectionStart ?? field.value.length, field.selectionEnd ?? field.value.length];
   const before = field.value.slice(0, start);
-  const gap = before === '' || before.endsWith(' ') ? '' : ' ';
-  const wholeWord = sign === 'present' || sign === 'absent';
-  if (wholeWord) field.value = sign;
-  else field.setRangeText(gap + sign + (sign === '±' ? ' ' : ''), start, end, 'end');
+  field.setRangeText(`${before === '' || before.endsWith(' ') ? '' : ' '}${sign} `, start, end, 'end');
   field.dispatchEvent(new Event('input', { bubbles: true }));
 }
 

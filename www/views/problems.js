@@ -1,6 +1,7 @@
 /** Problems at their fields, with a list of all of them at the answer. */
 
 import { byId, create } from '../dom.js';
+import { reveal } from '../folds.js';
 
 /** @import { Problem } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -54,9 +55,10 @@ function place(problem, index) {
   const field = findField(problem.field);
   if (field === null) return null;
   const id = `problem-${index}`;
-  const message = create('p', { class: 'problem', id }, create('strong', {}, problem.message), ' ', problem.hint);
+  const message = create('p', { class: 'problem', id }, create('strong', {}, lineOf(problem, field) + problem.message), ' ', problem.hint);
+  reveal(field.querySelector('summary') ?? field);
   if (isControl(field)) {
-    if (problem.span !== null) message.append(' ', goButton('Show', problem, field));
+    if (problem.span !== null && field instanceof HTMLInputElement) message.append(' ', goButton('Show', problem, field));
     field.setAttribute('aria-invalid', 'true');
     field.setAttribute('aria-describedby', `${field.getAttribute('aria-describedby') ?? ''} ${id}`.trim());
     const row = field.closest('.row, .entry') ?? field;
@@ -64,9 +66,19 @@ function place(problem, index) {
     while (after.nextElementSibling?.classList.contains('problem')) after = after.nextElementSibling;
     after.after(message);
   } else {
-    (field.querySelector(':scope > h2, :scope > legend') ?? field).after(message);
+    (field.querySelector(':scope > h2, :scope > legend, :scope > details > summary') ?? field).after(message);
   }
   return field;
+}
+
+/**
+ * Where a field holds many lines, the line that is meant.
+ * @param {Problem} problem
+ * @param {HTMLElement} field
+ */
+function lineOf({ field: path }, field) {
+  const line = field instanceof HTMLTextAreaElement ? /\[(\d+)\](?:\[\d+\])?$/.exec(path)?.[1] : undefined;
+  return line === undefined ? '' : `Line ${Number(line) + 1}: `;
 }
 
 /**
@@ -76,7 +88,7 @@ function place(problem, index) {
  */
 function findField(path) {
   for (let at = path; at !== ''; at = at.replace(/(?:^|\.)[^.[\]]+$|\[\d+\]$/, '')) {
-    for (const found of document.querySelectorAll(`[data-field~="${CSS.escape(at)}"]`)) {
+    for (const found of document.querySelectorAll(`[data-field~="${CSS.escape(at.replaceAll(' ', '_'))}"]`)) {
       if (found instanceof HTMLElement && found.closest('[hidden]') === null) return found;
     }
   }
@@ -132,6 +144,7 @@ function nameOf(field) {
 function goButton(label, problem, field) {
   const button = create('button', { type: 'button', class: 'go' }, label);
   button.addEventListener('click', () => {
+    reveal(field);
     field.focus();
     field.scrollIntoView({ block: 'nearest' });
     if (field instanceof HTMLInputElement && problem.span !== null) field.setSelectionRange(problem.span.start, problem.span.end);

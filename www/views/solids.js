@@ -12,7 +12,9 @@ import { understoodSpecies } from '../understood.js';
 /** @typedef {'solids' | 'liquid'} BlockName */
 /** @type {readonly { block: BlockName, phase: string }[]} */
 const BLOCKS = [{ block: 'solids', phase: 's' }, { block: 'liquid', phase: 'l' }];
-const entries = createEntries(byId('pure-rows', HTMLElement), 'pure-row-template');
+const entries = createEntries(byId('pure-rows', HTMLElement), 'pure-row-template', () => {}, (row, { phase }) => {
+  phaseOf(row).value = phase;
+});
 
 byId('pure-add', HTMLButtonElement).addEventListener('click', () => entries.add('', '').species.focus());
 
@@ -59,4 +61,5 @@ export function render(state) {
   }
   for (const row of entries.all()) row.root.classList.toggle('is-offered', row.offered);
   byId('pure-hint', HTMLElement).hidden = entries.all().length > 0;
+  byId('mixture-hint', HTMLElement).hidden = entries.given().filter((row) => phaseOf(row).value === 'l').length < 2;
 }

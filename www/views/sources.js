@@ -8,19 +8,9 @@ import { NO_BREAK, fixed, fromLog10, molarEnergy, significant, speciesName, unit
 
 const forms = byId('constant-forms', HTMLElement);
 const source = byId('source-text', HTMLElement);
-const records = byId('records', HTMLDetailsElement);
+const records = byId('records', HTMLElement);
 const rows = byId('record-rows', HTMLElement);
 const citations = byId('citations', HTMLElement);
-
-// On paper nothing can be unfolded, and the record must show where its figures come from.
-let openedForPaper = false;
-window.addEventListener('beforeprint', () => {
-  openedForPaper = !records.open;
-  records.open = true;
-});
-window.addEventListener('afterprint', () => {
-  if (openedForPaper) records.open = false;
-});
 
 /** @param {State} state */
 export function render({ report }) {

@@ -2,7 +2,7 @@
 
 mod en;
 
-use super::{Level, Problem, Remark, Step, Why};
+use super::{InputCode, Level, Problem, Remark, Step, TargetCode, TurnCode, VerdictCode, Why};
 
 /// The two sentences of a problem: what was found and what is allowed, and one thing to try.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -55,6 +55,24 @@ pub fn step(step: &Step, language: Language) -> String {
     fill(template, &step.arguments)
 }
 
+/// Says what an input is called, in the middle of a sentence.
+#[must_use]
+pub fn input(name: &Remark<InputCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::input(name.code),
+    };
+    fill(template, &name.arguments)
+}
+
+/// Says the verdict, or what would settle it.
+#[must_use]
+pub fn verdict(sentence: &Remark<VerdictCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::verdict(sentence.code),
+    };
+    fill(template, &sentence.arguments)
+}
+
 /// Says why a nudge does what it does.
 #[must_use]
 pub fn why(why: &Why, language: Language) -> String {
@@ -62,6 +80,24 @@ pub fn why(why: &Why, language: Language) -> String {
         Language::En => en::why(why.code),
     };
     fill(template, &why.arguments)
+}
+
+/// Says what a nudge does.
+#[must_use]
+pub fn turn(turn: &Remark<TurnCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::turn(turn.code),
+    };
+    fill(template, &turn.arguments)
+}
+
+/// Says what a target found.
+#[must_use]
+pub fn target(sentence: &Remark<TargetCode>, language: Language) -> String {
+    let template = match language {
+        Language::En => en::target(sentence.code),
+    };
+    fill(template, &sentence.arguments)
 }
 
 fn fill(template: &str, arguments: &[(&'static str, String)]) -> String {

@@ -89,5 +89,59 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "With this approach K would be taken at {found} K, which is no temperature.",
             "Check the approach.",
         ),
+        C::FormulaWithoutTerms => (
+            "A formula of K needs at least one term with a number.",
+            "Fill in a term, such as 1/T.",
+        ),
+        C::NotARange => (
+            "A range is two temperatures, the lower first.",
+            "Write both, such as 400 °C and 600 °C.",
+        ),
+        C::KFromOpenReading => (
+            "K cannot be taken from this reading: a species is absent, so that Q is {found}.",
+            "Enter every species of the reaction, or take K from the library.",
+        ),
+        C::KFromNoReading => (
+            "K is to be taken from the reading, but there is none.",
+            "Enter the reading, or take K from the library.",
+        ),
+        C::LostNeedsFeed => (
+            "{species} was lost from the sample and takes part in the reaction; without a feed nothing tells how much there was.",
+            "Enter the feed gas, or the measured {species}.",
+        ),
+        C::MissingTakesNoPart => (
+            "{species} takes no part in the reaction, so K does not tell how much there is.",
+            "Enter its value, or make it the remainder.",
+        ),
+        C::MissingWithoutK => (
+            "{species} is to be found from K, but K is to be taken from this reading.",
+            "Take K from elsewhere, or enter the value of {species}.",
+        ),
+        C::MissingNotFound => (
+            "No amount of {species} brings this reading to equilibrium.",
+            "Check the other lines, the temperature and the pressure.",
+        ),
+        C::ReadingNeeded => (
+            "A chart and a target start from a reading, and there is none.",
+            "Enter the reading, or what is fed.",
+        ),
+        C::SpeciesNotHere => (
+            "{species} is neither in the reaction nor in the reading.",
+            "Choose a species of the ledger.",
+        ),
+        C::KnobNotHere => {
+            ("There is no gas, so the {knob} changes nothing here.", "Choose another knob.")
+        }
+        C::SweepCount => {
+            ("{found} is no number of points; 2 to {most} are allowed.", "Take 200 points.")
+        }
+        C::SweepLines => (
+            "{found} lines are asked for; 1 to {most} are allowed.",
+            "Name a few settings of the other knob.",
+        ),
+        C::BandNegative => (
+            "A band is a width and cannot be negative.",
+            "Write it without its sign, such as 10 K.",
+        ),
     }
 }

@@ -47,12 +47,12 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "Give the volume of the gas or of the solution in cubic metres: 1 L is 0.001 m3.",
         ),
         C::SolutesWithGas => (
-            "Solutes and gases are given together; a problem holds one or the other.",
-            "Leave out the gas, or solve the gas and the solution as two problems.",
+            "Solutes and gases react together, and the water of the solution is not given.",
+            "Give the mass of the water, or solve the gas and the solution as two problems.",
         ),
         C::SolutesHoldPressure => (
-            "Solutes are given with a pressure held; a solution needs a volume.",
-            "Hold the volume, and give that of the solution.",
+            "Solutes are given with a pressure held; a solution needs a volume or a mass of water.",
+            "Hold the volume and give that of the solution, or give the mass of its water.",
         ),
         C::NoReaction => (
             "No reaction is given; one is needed.",
@@ -61,6 +61,30 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
         C::ManyReactions => (
             "{found} reactions are given; many reactions are not solved by this version.",
             "Solve for one reaction, the one that is fast on this catalyst.",
+        ),
+        C::LiquidWithSolutes => (
+            "A liquid mixture and a solution in water are given together; a problem holds one.",
+            "Leave out the solution, or give the liquid as pure phases.",
+        ),
+        C::GasHoldsSolvent => (
+            "A gas reacts, and only the water of the solution is given.",
+            "Give the pressure or the volume of the gas too.",
+        ),
+        C::WaterNotPositive => (
+            "The mass of water is {found} kg; it must be above 0 kg.",
+            "Give the mass of the water in the solution, not that of the solutes.",
+        ),
+        C::ModelNeedsWater => (
+            "Activity coefficients go by moles per kilogram of water, and no mass of water is given.",
+            "Give the mass of the water, or take the solution as ideal.",
+        ),
+        C::ChargeOutOfRange => (
+            "The charge {found} is out of range; −{most} to +{most} is allowed.",
+            "Give the charge of one ion, in elementary charges.",
+        ),
+        C::IonSizeOutOfRange => (
+            "The size of an ion, {found} pm, is out of range; {least} to {most} pm is allowed.",
+            "Give the distance of closest approach in picometres: 400 is usual.",
         ),
     }
 }

@@ -84,5 +84,55 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "The gauge reading is below zero by more than the atmosphere; nothing would be left.",
             "Check the reading and the atmosphere, or write an absolute pressure with (a).",
         ),
+        C::SecondMissing => {
+            ("Only one line can be found from K.", "Enter a value here, or in the other line.")
+        }
+        C::PresenceInMixture => (
+            "Present and absent are words for solids; this species is dissolved or mixed.",
+            "Write how much of it there is.",
+        ),
+        C::FractionOfWhat => (
+            "In a liquid a per cent says nothing without its kind: by amount or by mass.",
+            "Write mol % or wt %.",
+        ),
+        C::VolumeAndWater => {
+            ("The solution is stated by its volume and by its water as well.", "Keep one of them.")
+        }
+        C::NoLiquidWater => (
+            "At this temperature there is no liquid water for a solution; 0 °C to 374 °C is allowed.",
+            "Check the temperature.",
+        ),
+        C::RemainderOfSolution => (
+            "A solution has no remainder: what is left is water.",
+            "Write a value, or missing to find it from K.",
+        ),
+        C::PhOfAnother => (
+            "A pH tells the activity of H+, not that of another species.",
+            "Put it in a line of H+.",
+        ),
+        C::WaterNeedsFeed => (
+            "The water is to be found from the feed, but no feed is given.",
+            "Enter the feed, or state the water here.",
+        ),
+        C::FeedOpen => (
+            "The elements of the feed do not fix the gas behind it: too few of them are measured on both sides.",
+            "Add a species that passes unchanged, such as N2, to the feed and to the reading.",
+        ),
+        C::FeedContradicts => (
+            "By the elements of the feed {species} would be {per_cent} % of the gas, which cannot be.",
+            "Check the feed against the reading; one of them is off.",
+        ),
+        C::CountedWithUnknown => (
+            "Nothing tells how much of {species} is {counted}: it is not in the feed, and only argon can be taken from the nitrogen of air.",
+            "Enter {counted} in the feed, or N2 in this reading, or {counted} in a line of its own.",
+        ),
+        C::CountedMoreThanAll => (
+            "The {counted} that comes with the nitrogen is more than all that was read as {species}.",
+            "Take the mark off if the gas does not come from air, or check the reading.",
+        ),
+        C::TemperatureOutsideSolution => (
+            "At {found} °C there is no model of the solution; it holds from {low} °C to {high} °C.",
+            "Check the temperature, or take the solution as ideal.",
+        ),
     }
 }

@@ -9,11 +9,16 @@ mod note;
 mod quantity;
 mod reaction;
 mod step;
+mod target;
+mod verdict;
 mod why;
 
 pub(super) use note::template as note;
 pub(super) use step::template as step;
+pub(super) use target::template as target;
+pub(super) use verdict::{input, verdict};
 pub(super) use why::template as why;
+pub(super) use why::turn;
 
 use super::super::Code;
 

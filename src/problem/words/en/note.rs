@@ -51,13 +51,61 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             "K is stated {by_k} K away from this temperature and no enthalpy is given, so it is used unchanged.",
         ),
         C::ApproachTaken => (Conversion, "With the stated approach K is taken at {temperature}."),
-        C::TolerancesNotCarried => (
+        C::NotLinear => (
             Warning,
-            "The tolerances are not yet carried through to the verdict; it rests on the values alone.",
+            "Within the tolerances the result does not change in proportion to the inputs, so that an interval of twice the standard uncertainty is a rough one.",
+        ),
+        C::NoTolerance => (
+            Assumption,
+            "No tolerance is stated for {names}; the verdict takes each of these values as exact.",
+        ),
+        C::ConversionBand => (
+            Assumption,
+            "The heat of reaction is too small for a temperature approach to mean anything; the band is on the missing conversion.",
         ),
         C::IdealGas => (
             Warning,
             "The gas is taken as ideal; at {pressure} that can matter. No real-gas correction is made.",
+        ),
+        C::FormulaExtended => {
+            (Warning, "The temperature is {by_k} K outside the range of the formula of K.")
+        }
+        C::PointsBend => (
+            Warning,
+            "The points of K bend away from a straight line of ln K against 1/T, so ΔH° is not constant; the line is a compromise and its ΔH° a mean.",
+        ),
+        C::KFromReading => (
+            Assumption,
+            "K is taken from this reading, which is said to be at equilibrium; the reading therefore judges nothing. Carry this K to other readings.",
+        ),
+        C::FoundFromFeed => (
+            Conversion,
+            "By the balance of the elements with the feed, {species} is {per_cent} % of the wet gas.",
+        ),
+        C::FeedDoesNotClose => {
+            (Warning, "The feed and the reading do not agree: an element differs by {per_cent} %.")
+        }
+        C::LostNotRestored => {
+            (Warning, "{species} was lost from the sample; the reading is judged without it.")
+        }
+        C::CondensesInSample => (
+            Warning,
+            "{species} does not pass a cooled sample line, so that a dry analysis does not show it; mark it as lost and enter the feed to have it restored.",
+        ),
+        C::MissingFound => (
+            Assumption,
+            "{species} is found from K as if the reading were at equilibrium: {value}, with a standard uncertainty of {u_per_cent} % of it. The reading therefore judges nothing.",
+        ),
+        C::MissingSeveral => {
+            (Warning, "{others} more amounts of {species} would do as well; this is the smallest.")
+        }
+        C::OneKilogramOfWater => (
+            Assumption,
+            "Neither the volume nor the water of the solution is stated: the amounts are for one kilogram of water.",
+        ),
+        C::ByDensityOfWater => (
+            Conversion,
+            "Volumes of solution are turned into water by the density of water; the room that the solutes take is neglected.",
         ),
         C::NoReading => (
             Assumption,

@@ -16,6 +16,12 @@ pub(in crate::problem::words) fn template(code: C) -> &'static str {
         C::Line => {
             "A straight line of ln K against 1/T through {points} points: ΔH° = {enthalpy} kJ/mol, no point further from it than {residual} in ln K; ln K = {ln_k} at {temperature_k} K"
         }
+        C::Formula => {
+            "By the formula, for the reaction as written and p° = 1 bar: ln K = {terms} = {ln_k} at {temperature_k} K"
+        }
+        C::KOfReading => {
+            "K = Q of this reading, taken as at equilibrium: ln K = {ln_k} at {temperature_k} K"
+        }
         C::K => {
             "K = exp(−ΔG°/RT) = exp({ln_k}) = {k}, with R = 8.314462618 J/(mol K), T = {temperature_k} K, p° = 1 bar"
         }

@@ -1,6 +1,21 @@
 //! Sentences: why a nudge moves rest, or does not.
 
+use crate::problem::TurnCode;
 use crate::problem::WhyCode as C;
+
+/// What a nudge does, as the head of its line.
+pub(in crate::problem::words) fn turn(code: TurnCode) -> &'static str {
+    match code {
+        TurnCode::Temperature => "Temperature up by {step}",
+        TurnCode::Pressure => "Pressure up by {step}",
+        TurnCode::Volume => "Volume up by {step}",
+        TurnCode::Water => "Water added, {step} of what there is",
+        TurnCode::InertAtPressure => "Inert gas added at constant pressure, {step}",
+        TurnCode::InertAtVolume => "Inert gas added at constant volume, {step}",
+        TurnCode::Add => "{species} added, {step}",
+        TurnCode::Remove => "{species} taken away, {step}",
+    }
+}
 
 pub(in crate::problem::words) fn template(code: C) -> &'static str {
     match code {

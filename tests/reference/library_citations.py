@@ -1,0 +1,58 @@
+"""The sources of the library in full."""
+
+SOURCES = {
+    "tm4513": "McBride, Gordon and Reno, Coefficients for Calculating Thermodynamic and Transport "
+    "Properties of Individual Species, NASA Technical Memorandum 4513, 1993. Cp/R and S/R as "
+    "published; H set so that ΔfH°298 in J/mol is as published, whatever R it was made with; "
+    "the upper piece joined to the lower so that H and S are continuous.",
+    "janaf": "Chase, NIST-JANAF Thermochemical Tables, 4th edition, Journal of Physical and Chemical "
+    "Reference Data Monograph 9, 1998. Cp fitted piece by piece; H and S exact at 298.15 K "
+    "and at the ends of the pieces.",
+    "atct": "Ruscic and Bross, Active Thermochemical Tables, version 1.112. Its ΔfH°298 replaces the "
+    "older one where they differ by more than 0.15 kJ/mol, and its uncertainty is used (95 % "
+    "half-width, halved).",
+    "crc": "CRC Handbook of Chemistry and Physics, Standard Thermodynamic Properties of Chemical "
+    "Substances.",
+    "poling": "Poling, Prausnitz and O'Connell, The Properties of Gases and Liquids, 5th edition, "
+    "McGraw-Hill, 2001: Cp of ideal gases; Antoine constants.",
+    "zabransky": "Zábranský, Růžička, Majer and Domalski, Heat Capacity of Liquids, Journal of Physical "
+    "and Chemical Reference Data Monograph 6, 1996.",
+    "perry": "Perry's Chemical Engineers' Handbook, table 2-151, Heat Capacities of Inorganic "
+    "Compounds.",
+    "jacobs": "Jacobs, Kerrick and Krupka, The high-temperature heat capacity of natural calcite, "
+    "Physics and Chemistry of Minerals 7 (1981) 55: Cp = -184.79 + 0.32322 T - 3688200/T^2 - "
+    "1.2974e-4 T^2 + 3883.5/T^0.5 J/(mol K), to 1200 K. Recalled from memory; it gives 83.47 "
+    "at 298.15 K (CRC table 83.5) and agrees with Perry's table 2-151 within its 3 %. Written "
+    "here in powers of T.",
+    "codata": "Cox, Wagman and Medvedev, CODATA Key Values for Thermodynamics, Hemisphere, 1989: 95 % "
+    "half-widths, and the figures of ions, recalled from memory; u is half of them.",
+    "trc": "Frenkel, Kabo, Marsh, Roganov and Wilhoit, Thermodynamics of Organic Compounds in the Gas "
+    "State, Thermodynamics Research Center, 1994: Cp and S of ideal gases, Cp written here in powers "
+    "of T within 0.2 %.",
+    "crc_ions": "CRC Handbook of Chemistry and Physics, Thermodynamic Properties of Aqueous Ions: "
+    "ΔfG and S as published, ΔfH from them; rounded to 0.1 kJ/mol.",
+    "nbs": "Wagman et al., The NBS Tables of Chemical Thermodynamic Properties, Journal of Physical and "
+    "Chemical Reference Data 11, supplement 2, 1982. Recalled from memory.",
+    "robie": "Robie and Hemingway, Thermodynamic Properties of Minerals, U.S. Geological Survey Bulletin "
+    "2131, 1995. Recalled from memory.",
+    "sander": "Sander, Compilation of Henry's law constants for water as solvent, Atmospheric Chemistry "
+    "and Physics 15 (2015) 4399: averages over the entries, with the gas of this library.",
+    "shock": "Shock, Helgeson and Sverjensky, Geochimica et Cosmochimica Acta 52 (1988) 2009, 53 (1989) "
+    "2157 and 54 (1990) 915: Cp of dissolved species at 25 °C. Recalled from memory.",
+    "bates": "Bates and Pinching, Journal of Research of the National Bureau of Standards 42 (1949) 419: "
+    "pKa of the ammonium ion, 9.245 at 25 °C, and 52.21 kJ/mol. Recalled from memory.",
+    "clegg": "Clegg and Brimblecombe, Journal of Physical Chemistry 93 (1989) 7237: Henry's constant of "
+    "ammonia, 60 mol/(kg bar) at 25 °C, and -34.2 kJ/mol. Recalled from memory.",
+    "broene": "Broene and De Vries, Journal of the American Chemical Society 69 (1947) 1644: pKa of "
+    "hydrogen fluoride, 3.17 at 25 °C; enthalpy of the NBS tables. Recalled from memory.",
+    "wilhelm": "Wilhelm, Battino and Wilcock, Chemical Reviews 77 (1977) 219: solubility of methane, "
+    "0.0014 mol/(kg bar) at 25 °C, and -13.8 kJ/mol. Recalled from memory.",
+    "goldberg": "Goldberg and Parker, Journal of Research of the National Bureau of Standards 90 (1985) 341: "
+    "pK1 1.857 and pK2 7.172 of sulfur dioxide, -17.80 and -3.65 kJ/mol. Recalled from memory.",
+    "palmer": "Palmer and Wesolowski, Geochimica et Cosmochimica Acta 56 (1992) 1093: gibbsite in acid, "
+    "log K 7.74 at 25 °C and -105 kJ/mol. Recalled from memory.",
+    "busenberg": "Busenberg, Plummer and Parker, Geochimica et Cosmochimica Acta 48 (1984) 2021, and "
+    "Busenberg and Plummer, 50 (1986) 2225: log Ksp of strontianite -9.271 and witherite -8.562, -1.67 "
+    "and 2.94 kJ/mol. Recalled from memory.",
+    "handbook": "Common practice: Cp of liquid sulfur trioxide is near 258 J/(mol K). From memory.",
+}

@@ -1,0 +1,183 @@
+"""Builds the figures of one species from its sources: ΔfH°298, S°298 and the pieces of Cp."""
+
+from functools import lru_cache
+from math import log, sqrt
+
+import library_sources as published
+from library_condensed import CONDENSED
+from library_dissolved import DISSOLVED
+from library_gases import GASES
+from library_pieces import Piece, constant_piece, fit, fit_heat_capacity, join, written
+from library_solution import build_dissolved, formation_entropy, formed
+from library_sources import R_EXACT, T0
+from library_species import ATCT_LIMIT, KEY_VALUES
+
+SPECIES = GASES + CONDENSED + DISSOLVED
+
+
+def species_of(ident):
+    return next(species for species in SPECIES if species.id == ident)
+
+
+@lru_cache(maxsize=None)
+def built(ident):
+    return build(species_of(ident))
+
+
+def recalled_pieces(pieces, source):
+    """Pieces of Cp = a + b T + c/T² in J/(mol K)."""
+    found = []
+    for low, high, (a, b, c) in ((low, high, (*terms, 0, 0)[:3]) for low, high, terms in pieces):
+        powers = [c / R_EXACT, 0, a / R_EXACT, b / R_EXACT, 0, 0, 0]
+        found.append(Piece(low, high, [written(v) for v in powers], source))
+    return found
+
+
+def build(species):
+    """The figures of one species: ΔfH°298, S°298, pieces, source ids, worst errors of a fit."""
+    how, cas, phase = species.how, species.cas, species.phase
+    if phase == "aq":
+        return build_dissolved(species, built)
+    sources, worst, transitions, tied = [], [], (), False
+    if how[0] == "tm4513":
+        h, s, pieces = gas_pieces(how[1])
+        sources.append("tm4513")
+    elif how[0] == "janaf":
+        row = next(row for row in published.janaf(how[1]) if row[0] == T0)
+        h, s = row[4], row[2]
+        pieces, transitions, worst = fit(how[1], how[2], "janaf", species.blunt)
+        pieces[0].low = species.low or pieces[0].low
+        if species.crc:
+            h, s = published.crc(cas, phase)
+            sources.append("crc")
+        sources.append("janaf")
+    elif how[0] == "poling":
+        h, s = published.crc(cas, phase)
+        powers, low, high = published.poling_gas(cas)
+        pieces = [Piece(low, high, [0, 0, *powers], "poling")]
+        sources += ["crc", "poling"]
+    elif how[0] == "trc":
+        h, _ = published.crc(cas, phase)
+        s = round(published.trc_entropy(cas, T0), 2)
+        high = min(published.trc(cas)[1], 1500)
+        coefficients = fit_heat_capacity(
+            lambda t: published.trc_heat_capacity(cas, t), T0, high, 2e-3)
+        pieces = [Piece(T0, high, coefficients, "trc")]
+        sources += ["crc", "trc"]
+    elif how[0] == "perry":
+        h, s = published.crc(cas, phase)
+        (const, linear, inverse, square), _, high = published.perry(cas)
+        a = [inverse / R_EXACT, 0, const / R_EXACT, linear / R_EXACT, square / R_EXACT, 0, 0]
+        pieces = [Piece(how[1], high, [written(v) for v in a], "perry")]
+        sources += ["crc", "perry"]
+    elif how[0] in ("constant", "constant_gibbs"):
+        h, s = published.crc(cas, phase)
+        if how[0] == "constant_gibbs":
+            g = published.crc_gibbs(cas, phase)
+            h = round(g + T0 * formation_entropy(species.formula, s), 2)
+        pieces = [constant_piece(how[1], how[2], published.crc_heat_capacity(cas, phase), "crc")]
+        sources.append("crc")
+    elif how[0] == "recalled":
+        h, s = how[1], how[2]
+        pieces = recalled_pieces(how[3], how[4])
+        sources.append(how[4])
+    elif how[0] == "recalled_cp":
+        h, s = published.crc(cas, phase)
+        pieces = recalled_pieces(how[1], how[2])
+        sources += ["crc", how[2]]
+    elif how[0] == "formed":
+        h, s = formed(how[1:4], built)
+        pieces = [constant_piece(288.15, 400, published.crc_heat_capacity(cas, phase), "crc")]
+        sources += [how[4], "crc"]
+    elif how[0] == "calcite":
+        h, s = published.crc(cas, phase)
+        pieces = [Piece(T0, 1200, fit_heat_capacity(calcite_heat_capacity, T0, 1200), "jacobs")]
+        perry_figures, low, high = published.perry(cas)
+        for t in range(300, 1033, 20):
+            perry = perry_figures[0] + perry_figures[1] * t + perry_figures[2] / t**2
+            worst_cp = max(abs(pieces[0].cp(t) / perry - 1), 0)
+            assert worst_cp < 0.03, f"calcite at {t} K leaves Perry's Cp by {worst_cp:.1%}"
+        sources += ["crc", "jacobs"]
+    elif how[0] == "methanol":
+        # The liquid is tied to the vapour by its vapour pressure, the vapour taken as ideal.
+        vapour = built("CH3OH.g")
+        _, s = published.crc(cas, phase)
+        h = round(vapour["h"] - vaporization(cas) - T0 * (vapour["s"] - s) / 1000, 2)
+        pieces = liquid_pieces(cas, phase)
+        sources += ["crc", "poling", pieces[0].source]
+        tied = True
+    elif how[0] == "vapour":
+        # ΔfH° is measured on the liquid; S° is what makes the vapour pressure right.
+        vapour, at_crc = built(how[1]), published.crc(cas, phase)
+        liquid, gaseous = published.atct(cas, phase), published.atct(cas, "g")
+        if liquid:
+            h, from_table = round(liquid[0], 2), "atct"
+        else:
+            # The difference of the two phases is kept where the vapour's enthalpy was replaced.
+            shift = vapour["h"] - published.crc(cas, "g")[0]
+            h, from_table = round(at_crc[0] + (shift if gaseous else 0.0), 2), "crc"
+        s = round(vapour["s"] - 1000 * (vapour["h"] - h - vaporization(cas)) / T0, 2)
+        pieces = liquid_pieces(cas, phase)
+        sources += [from_table, "poling", pieces[0].source]
+        tied = True
+    if species.element:
+        h = 0.0
+    better = published.atct(cas, phase)
+    if better and not species.element and abs(better[0] - h) > ATCT_LIMIT and not tied:
+        h = round(better[0], 3)
+        sources.append("atct")
+    if species.id in KEY_VALUES:
+        h, s = KEY_VALUES[species.id]
+        sources.append("codata")
+    join(pieces, h, s, transitions)
+    return {"h": h, "s": s, "pieces": pieces, "sources": list(dict.fromkeys(sources)),
+            "worst": worst}
+
+
+def gas_pieces(file):
+    """ΔfH°298, S°298 and the two pieces of a gas of TM-4513."""
+    limits, coefficients, h, _ = published.tm4513(file)
+    low = T0 if 298.15 < limits[0] <= 300 else limits[0]
+    bounds = [low, *limits[1:]]
+    pieces = []
+    for a, b, c in zip(bounds, bounds[1:], coefficients):
+        piece = Piece(a, b, [0, 0, *c[:5]], "tm4513")
+        piece.b_s = c[6]
+        pieces.append(piece)
+    return round(h, 3), pieces[0].s(T0), pieces
+
+
+def vaporization(cas):
+    """ΔG of vaporization at 298.15 K in kJ/mol."""
+    return -R_EXACT * T0 * log(published.antoine_pa(cas, T0) / 1e5) / 1000
+
+
+def liquid_pieces(cas, phase):
+    """Cp of a liquid by Zábranský's splines that hold 298.15 K onwards, else the CRC constant."""
+    splines = published.zabransky(cas)
+    joined = [row for row in splines if row[1] > T0 and row[0] < row[1]]
+    if joined and any(low <= T0 <= high for low, high, _ in joined) and chained(joined):
+        return [Piece(low, high, [0, 0, *(written(v) for v in powers), 0], "zabransky")
+                for low, high, powers in joined]
+    low, high = LIQUID_RANGE_K[cas]
+    return [constant_piece(low, high, published.crc_heat_capacity(cas, phase), "crc")]
+
+
+def chained(rows):
+    """Whether the pieces follow one another without gap or overlap."""
+    return all(one[1] == two[0] for one, two in zip(rows, rows[1:]))
+
+
+# Where one constant Cp serves for a liquid, its range: 273.15 K or the freezing point to about
+# the normal boiling point.
+LIQUID_RANGE_K = {
+    "79-20-9": (273.15, 330), "107-31-3": (273.15, 305), "67-64-1": (273.15, 329),
+    "67-63-0": (273.15, 355), "110-82-7": (280, 354), "100-41-4": (273.15, 409),
+    "107-06-2": (273.15, 357), "64-17-5": (273.15, 352), "108-88-3": (273.15, 384),
+    "62-53-3": (273.15, 450), "98-82-8": (273.15, 425),
+}
+
+
+def calcite_heat_capacity(t):
+    """Jacobs, Kerrick and Krupka (1981), J/(mol K)."""
+    return -184.79 + 0.32322 * t - 3_688_200 / t**2 - 1.2974e-4 * t**2 + 3883.5 / sqrt(t)
