@@ -66,11 +66,13 @@ impl Case {
 
 /// A problem of the plant's size: amounts of 1e-6 to 10 mol, K of 1e-9 to 1e9.
 fn usual(draws: &mut Draws) -> Case {
-    let solution = draws.below(5) == 0;
-    let kinds: &[Kind] = if solution {
-        &[Kind::Solute, Kind::Solute, Kind::Pure]
-    } else {
-        &[Kind::Gas, Kind::Gas, Kind::Gas, Kind::Pure, Kind::Ample]
+    let family = draws.below(8);
+    let kinds: &[Kind] = match family {
+        0 | 1 => &[Kind::Solute, Kind::Solute, Kind::Pure],
+        2 => &[Kind::Liquid, Kind::Liquid, Kind::Liquid, Kind::Pure, Kind::Ample],
+        3 => &[Kind::Gas, Kind::Gas, Kind::Solute, Kind::Solute, Kind::Pure, Kind::Ample],
+        4 => &[Kind::Gas, Kind::Gas, Kind::Liquid, Kind::Liquid, Kind::Pure],
+        _ => &[Kind::Gas, Kind::Gas, Kind::Gas, Kind::Pure, Kind::Ample],
     };
     let count = 2 + draws.below(5);
     let kinds: Vec<Kind> = (0..count).map(|_| draws.pick(kinds)).collect();
@@ -81,10 +83,15 @@ fn usual(draws: &mut Draws) -> Case {
     let amounts = (0..count)
         .map(|_| if draws.below(8) == 0 { 0.0 } else { draws.power_of_ten(-6.0, 1.0) })
         .collect();
-    let hold = if solution || draws.below(2) == 0 {
-        Hold::Volume { volume_m3: draws.power_of_ten(-4.0, 1.0) }
-    } else {
-        Hold::Pressure { pressure_pa: draws.power_of_ten(3.0, 7.0) }
+    let pressure_pa = draws.power_of_ten(3.0, 7.0);
+    let volume_m3 = draws.power_of_ten(-4.0, 1.0);
+    let water_kg = draws.power_of_ten(-3.0, 3.0);
+    let hold = match (family, draws.below(2) == 0) {
+        (1, _) => Hold::Solvent { water_kg },
+        (3, true) => Hold::VolumeAndSolvent { volume_m3, water_kg },
+        (3, false) => Hold::PressureAndSolvent { pressure_pa, water_kg },
+        (0, _) | (_, true) => Hold::Volume { volume_m3 },
+        (_, false) => Hold::Pressure { pressure_pa },
     };
     Case {
         kinds,
@@ -93,6 +100,21 @@ fn usual(draws: &mut Draws) -> Case {
         hold,
         amounts,
         ln_k: draws.between(-20.0, 20.0),
+    }
+}
+
+/// So many times the volume and the water.
+fn more_room(hold: Hold, times: f64) -> Hold {
+    match hold {
+        Hold::Pressure { .. } => hold,
+        Hold::Volume { volume_m3 } => Hold::Volume { volume_m3: volume_m3 * times },
+        Hold::Solvent { water_kg } => Hold::Solvent { water_kg: water_kg * times },
+        Hold::PressureAndSolvent { pressure_pa, water_kg } => {
+            Hold::PressureAndSolvent { pressure_pa, water_kg: water_kg * times }
+        }
+        Hold::VolumeAndSolvent { volume_m3, water_kg } => {
+            Hold::VolumeAndSolvent { volume_m3: volume_m3 * times, water_kg: water_kg * times }
+        }
     }
 }
 
@@ -148,7 +170,9 @@ fn an_affinity_that_is_left_has_the_sign_of_the_way_that_is_closed() {
         exhausted += 1;
         let left = end.summary.affinity.finite().unwrap();
         let used_up = case.nu.iter().zip(&case.kinds).enumerate().any(|(i, (nu, kind))| {
-            nu * left < 0.0 && *kind == Kind::Pure && end.amounts_mol[i] == 0.0
+            let phase = case.kinds.iter().zip(&end.amounts_mol).filter(|(other, _)| *other == kind);
+            let gone = *kind == Kind::Pure || phase.map(|(_, amount)| amount).sum::<f64>() == 0.0;
+            nu * left < 0.0 && gone && end.amounts_mol[i] == 0.0
         });
         assert!(used_up, "A/RT = {left:e} and no phase is used up: {case:?}");
     });
@@ -184,10 +208,7 @@ fn a_multiple_of_a_reaction_comes_to_the_same_rest() {
 fn more_of_everything_at_the_same_pressure_is_more_of_the_same() {
     each_usual(5, |case, end| {
         for times in [3.0, 1e-9, 1e40] {
-            let hold = match case.hold {
-                Hold::Volume { volume_m3 } => Hold::Volume { volume_m3: volume_m3 * times },
-                pressure => pressure,
-            };
+            let hold = more_room(case.hold, times);
             let more = Case { hold, ..case.map_amounts(|_, n| n * times) }.solve();
             let back: Vec<f64> = more.amounts_mol.iter().map(|n| n / times).collect();
             same(case, end, &more, &back, "scaled");
@@ -248,14 +269,17 @@ fn a_state_at_rest_stays_there() {
 /// Anything at all: wild kinds, powers, sizes, zeros, and numbers that are not allowed.
 fn wild(draws: &mut Draws) -> Case {
     let count = draws.below(7);
-    let families: [&[Kind]; 4] = [
+    let families: [&[Kind]; 7] = [
         &[Kind::Gas, Kind::Pure, Kind::Ample],
         &[Kind::Gas],
         &[Kind::Solute, Kind::Pure],
         &[Kind::Gas, Kind::Pure, Kind::Ample, Kind::Solute],
+        &[Kind::Liquid, Kind::Pure],
+        &[Kind::Gas, Kind::Gas, Kind::Liquid, Kind::Liquid, Kind::Ample],
+        &[Kind::Gas, Kind::Gas, Kind::Solute, Kind::Solute, Kind::Solvent, Kind::Liquid],
     ];
-    let family = families[draws.below(10).min(3)];
-    let family = if draws.below(3) > 0 { families[draws.below(3)] } else { family };
+    let family = families[draws.below(10).min(6)];
+    let family = if draws.below(3) > 0 { families[draws.below(6)] } else { family };
     let kinds = (0..count).map(|_| draws.pick(family)).collect();
     let whole = draws.below(2) == 0;
     let number = |draws: &mut Draws| match draws.below(400) {
@@ -283,10 +307,13 @@ fn wild(draws: &mut Draws) -> Case {
         1..4 => draws.between(-700.0, 700.0),
         _ => draws.between(-30.0, 30.0),
     };
-    let hold = if draws.below(2) == 0 {
-        Hold::Pressure { pressure_pa: held }
-    } else {
-        Hold::Volume { volume_m3: held }
+    let water_kg = if draws.below(30) == 0 { number(draws) } else { draws.power_of_ten(-3.0, 3.0) };
+    let hold = match draws.below(8) {
+        0..3 => Hold::Pressure { pressure_pa: held },
+        3..5 => Hold::Volume { volume_m3: held },
+        5 => Hold::Solvent { water_kg },
+        6 => Hold::PressureAndSolvent { pressure_pa: held, water_kg },
+        _ => Hold::VolumeAndSolvent { volume_m3: held, water_kg },
     };
     let kelvin = if draws.below(50) == 0 { number(draws) } else { draws.between(200.0, 2000.0) };
     let amounts = (0..count).map(|_| number(draws)).collect();
@@ -324,10 +351,12 @@ fn no_input_panics_or_gives_a_number_that_is_not_finite() {
         }
         assert!(end.amounts_mol.iter().all(|&amount| amount >= 0.0), "{summary:?} {case:?}");
         assert!(summary.residual < 1e-9, "{summary:?} {case:?}");
+        // With the activity of the solvent, rest is found many times over.
+        let most = if system.is_corrected() { 1000 } else { 60 };
+        assert!(summary.iterations <= most, "{summary:?} {case:?}");
         steps = steps.max(summary.iterations);
     }
     println!("{solved} solved in up to {steps} steps: {seen:?}");
-    assert!(steps <= 60, "{steps} steps");
     assert!(solved > 80_000, "only {solved} of 200000 could be solved");
     assert_eq!(seen.len(), 6, "{seen:?}");
 }

@@ -61,8 +61,11 @@ fn with_law(system: &System, law: &SolutionLaw, amounts: &[f64], water_kg: f64) 
     sum
 }
 
-/// Steps outwards that double: from 1e-8 to beyond 2e5.
+/// Steps outwards that double: from 1e-12 to beyond 1e5.
 const WIDENINGS_AT_MOST: u32 = 60;
+
+/// The largest ln K − C that is tried, without sign.
+const EFFECTIVE_MAX: f64 = 2.0 * LN_K_MAX;
 
 /// The state of rest of a system that is not plain, for a state that has been checked.
 pub(super) fn rest(
@@ -76,7 +79,7 @@ pub(super) fn rest(
         return ideal_rest(system, state, ln_k, workspace);
     };
     let now = with_law(system, &law, state.amounts_mol, water_kg);
-    let within = |effective: f64| effective.clamp(-LN_K_MAX, LN_K_MAX);
+    let within = |effective: f64| effective.clamp(-EFFECTIVE_MAX, EFFECTIVE_MAX);
     let first = within(ln_k - now);
     let changes = system.reacts(Kind::Solute)
         && (system.model != SolutionModel::Ideal || system.solvent_nu != 0.0);
@@ -114,7 +117,7 @@ fn zero(mut f: impl FnMut(f64) -> f64, first: f64) -> f64 {
     }
     let (mut near, mut step) = (first, at_first);
     for _ in 0..WIDENINGS_AT_MOST {
-        let next = (near + step).clamp(-LN_K_MAX, LN_K_MAX);
+        let next = (near + step).clamp(-EFFECTIVE_MAX, EFFECTIVE_MAX);
         if next == near {
             return near;
         }

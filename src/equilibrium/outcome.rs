@@ -11,7 +11,7 @@ use serde::{Serialize, Serializer};
 pub enum RestOutcome {
     /// The affinity is zero.
     Rest,
-    /// A pure phase is used up; the affinity keeps its sign.
+    /// A phase is used up, pure or a mixture that goes as a whole; the affinity keeps its sign.
     PhaseExhausted,
     /// Q does not depend on the extent and is not K: something is used up, a pure phase or the gas.
     RanToItsLimit,

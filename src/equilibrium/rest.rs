@@ -18,7 +18,7 @@ use crate::problem::Outcome;
 ///
 /// The amounts minimise G (or A at constant volume) along ξ: ln K = Σ ν_i ln a_i, or a pure phase
 /// is used up first. For ideal mixtures there is one such state. It is sought in the logarithm of
-/// the distance from the nearer limit of ξ, so that traces are as good as main components: on 609
+/// the distance from the nearer limit of ξ, so that traces are as good as main components: on 848
 /// problems with K from 1e-300 to 1e300 no ln n is wrong by more than 1e-12, or by eight times the
 /// change that one unit in the last place of some input makes, if that is more.
 ///

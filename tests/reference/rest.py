@@ -35,8 +35,8 @@ def number(x):
 
 
 class Problem:
-    """kinds: a string of g (gas), p (pure), a (ample), s (solute), l (liquid mixture); one letter a
-    species. The hold is a pressure or a volume, and a mass of water beside it or alone."""
+    """kinds: a string of g (gas), p (pure), a (ample), s (solute), l (liquid mixture), w (the water
+    of the solution); one letter a species. The hold is a pressure or a volume, and a mass of water beside it or alone."""
 
     def __init__(
         self, title, kinds, nu, amounts, ln_k, pressure=None, volume=None, water=None, kelvin=500.0
@@ -78,9 +78,13 @@ class Problem:
         found = [
             n / abs(v)
             for k, v, n in zip(self.kinds, self.exact_nu, self.exact)
-            if v * sign > 0 and k != "a"
+            if v * sign > 0 and k not in "aw"
         ]
         return min(found) if found else None
+
+    def correction(self, amounts):
+        """What activity coefficients add to ln Q: nothing in ideal mixtures."""
+        return mpf(0)
 
     def steady(self, letter):
         """Whether a mixture keeps its composition at every extent."""
@@ -114,7 +118,7 @@ class Seen:
         distance = problem.limit(-way)
         self.at_limit, self.slope = [], []
         for k, v, n in zip(problem.kinds, problem.exact_nu, problem.exact):
-            still = k == "a"
+            still = k in "aw"
             self.at_limit.append(n if still else n + way * v * distance)
             self.slope.append(Fraction(0) if still else -way * v)
         self.r = [number(x) for x in self.at_limit]
@@ -147,7 +151,7 @@ class Seen:
             if self.problem.by_fraction(letter):
                 total = mp.log(self.whole(letter, here))
                 ln_q -= number(self.problem.delta[letter]) * total
-        return self.ln_k - ln_q
+        return self.ln_k - ln_q - self.problem.correction(n)
 
     def rising(self, u):
         """The affinity with the sign that makes it rise with u = ln d."""
@@ -250,7 +254,7 @@ def row(problem):
     held = [("P", problem.pressure), ("V", problem.volume), ("W", problem.water)]
     hold = ";".join(f"{letter}={x!r}" for letter, x in held if x is not None)
     logs = [
-        "-" if n == 0 or k == "a" else mp.nstr(mp.log(n), 22, strip_zeros=False)
+        "-" if n == 0 or k in "aw" else mp.nstr(mp.log(n), 22, strip_zeros=False)
         for n, k in zip(amounts, problem.kinds)
     ]
     condition = condition or [mpf(0)] * len(logs)
