@@ -148,5 +148,11 @@ pub(in crate::problem::words) fn template(code: C) -> &'static str {
             "Q does not reach K at any extent, and what would be used up is not known in amount: there is no state at rest to compare."
         }
         C::OutOfRange => "The step leads outside the range that can be worked with.",
+        C::CoefficientsForward => {
+            "This changes how the ions shield each other, or the activity of the water, and that decides here: the solution moves forward."
+        }
+        C::CoefficientsReverse => {
+            "This changes how the ions shield each other, or the activity of the water, and that decides here: the solution moves back."
+        }
     }
 }
