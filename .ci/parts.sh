@@ -137,5 +137,6 @@ part_reference() {
   check "the element table is the standard's" "$venv/bin/python" tests/reference/elements.py
   check "tolerances by a hundred thousand draws" "$venv/bin/python" tests/reference/monte_carlo.py
   check "the states of rest again in ninety digits" "$venv/bin/python" tests/reference/rest.py --check
+  check "what small changes do to rest, in ninety digits" "$venv/bin/python" tests/reference/nudges.py --check
   check "the solutions again in fifty digits" "$venv/bin/python" tests/reference/solution.py --check
 }

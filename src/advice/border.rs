@@ -3,7 +3,6 @@
 use super::knob::{Knob, Knobs};
 use super::local::Local;
 use crate::equilibrium::Affinity;
-use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 
 /// Steps of the search in T; a curve as smooth as ln K(T) needs three to six.
@@ -19,6 +18,10 @@ const ENOUGH_K: f64 = 1e-9;
 pub(super) fn border(knobs: &mut Knobs, local: &Local, knob: Knob) -> Option<f64> {
     let Affinity::Finite(left) = knobs.now().affinity else { return None };
     let value = knobs.value(knob)?;
+    // Activity coefficients change with temperature and with dilution.
+    if local.system.is_corrected() && matches!(knob, Knob::Temperature | Knob::Dilution) {
+        return None;
+    }
     let found = match knob {
         Knob::Pressure => value * libm::exp(left / local.delta_nu(Kind::Gas)),
         Knob::Volume => value * libm::exp(-left / local.delta_nu(Kind::Gas)),
@@ -39,10 +42,7 @@ pub(super) fn border(knobs: &mut Knobs, local: &Local, knob: Knob) -> Option<f64
 }
 
 fn temperature_k(knobs: &mut Knobs, local: &Local, left: f64) -> Option<f64> {
-    let spread = match local.hold {
-        Hold::Volume { .. } => local.delta_nu(Kind::Gas),
-        _ => 0.0,
-    };
+    let spread = local.hold.volume_m3().map_or(0.0, |_| local.delta_nu(Kind::Gas));
     let now_k = local.temperature_k;
     let ln_k_now = knobs.ln_k(now_k)?;
     let mut slope = local.drive(Knob::Temperature)?;

@@ -1,6 +1,6 @@
 //! A plant with its knobs: the state of rest with some of them set to a value.
 
-use super::held::{diluted, volume_of_gas};
+use super::held::{amount_of, diluted, volume_of_gas, with_pressure, with_volume};
 use crate::constant::Constant;
 use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
@@ -10,6 +10,7 @@ use crate::equilibrium::System;
 use crate::equilibrium::Workspace;
 use crate::equilibrium::{affinity, rest_into};
 use crate::library::{TEMPERATURE_LIMITS_K, Temperature};
+use crate::mixture::Ion;
 use crate::problem::Outcome;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
@@ -98,20 +99,16 @@ impl<'a> Knobs<'a> {
         let mut workspace = Workspace::default();
         let now = rest_into(system, &state, ln_k, &mut workspace)?;
         let has_gas = system.kinds().contains(&Kind::Gas);
-        let (mut kinds, mut nu) = (system.kinds().to_vec(), system.nu().to_vec());
-        if has_gas {
-            kinds.push(Kind::Gas);
-            nu.push(0.0);
-        }
+        let wide = if has_gas { with_inert(system)? } else { system.clone() };
         Ok(Knobs {
             plant,
-            wide: System::new(&kinds, &nu)?,
+            turned_mol: Vec::with_capacity(wide.kinds().len()),
+            wide,
             has_gas,
             has_solute: system.kinds().contains(&Kind::Solute),
             now,
             now_mol: workspace.amounts_mol().to_vec(),
             heat,
-            turned_mol: Vec::with_capacity(kinds.len()),
             workspace,
             last_k: (state.temperature_k, ln_k),
         })
@@ -145,8 +142,9 @@ impl<'a> Knobs<'a> {
     pub fn has(&self, knob: Knob) -> bool {
         match knob {
             Knob::Temperature => true,
-            Knob::Pressure | Knob::Volume => self.has_gas,
-            Knob::InertAtPressure | Knob::InertAtVolume => self.has_gas && !self.has_solute,
+            Knob::Pressure | Knob::Volume | Knob::InertAtPressure | Knob::InertAtVolume => {
+                self.has_gas
+            }
             Knob::Amount(species) => species < self.plant.state.amounts_mol.len(),
             Knob::Dilution => self.has_solute && diluted(self.plant.state.hold, 1.0).is_some(),
         }
@@ -171,23 +169,15 @@ impl<'a> Knobs<'a> {
 
     /// The pressure that is held, or that the gas at rest has in the volume that is held.
     pub(super) fn pressure_pa(&self) -> Option<f64> {
-        match self.plant.state.hold {
-            Hold::Pressure { pressure_pa } => Some(pressure_pa),
-            // n R T/V: the same formula with V in the place of P.
-            Hold::Volume { volume_m3 } => self.gas_at_rest(volume_m3),
-            #[allow(unreachable_patterns, reason = "other things may be held")]
-            _ => None,
-        }
+        let hold = self.plant.state.hold;
+        // n R T/V: the same formula with V in the place of P.
+        hold.pressure_pa().or_else(|| self.gas_at_rest(hold.volume_m3()?))
     }
 
     /// The volume that is held, or that the gas at rest takes at the pressure that is held.
     pub(super) fn volume_m3(&self) -> Option<f64> {
-        match self.plant.state.hold {
-            Hold::Pressure { pressure_pa } => self.gas_at_rest(pressure_pa),
-            Hold::Volume { volume_m3 } => Some(volume_m3),
-            #[allow(unreachable_patterns, reason = "other things may be held")]
-            _ => None,
-        }
+        let hold = self.plant.state.hold;
+        hold.volume_m3().or_else(|| self.gas_at_rest(hold.pressure_pa()?))
     }
 
     fn gas_at_rest(&self, held: f64) -> Option<f64> {
@@ -242,21 +232,20 @@ impl<'a> Knobs<'a> {
             }
             match knob {
                 Knob::Temperature => temperature_k = value,
-                Knob::Pressure => hold = Hold::Pressure { pressure_pa: value },
-                Knob::Volume => hold = Hold::Volume { volume_m3: value },
+                Knob::Pressure => hold = with_pressure(hold, value),
+                Knob::Volume => hold = with_volume(hold, value),
                 Knob::Amount(species) => *self.turned_mol.get_mut(species)? = value,
                 Knob::Dilution => hold = diluted(hold, value)?,
-                Knob::InertAtPressure | Knob::InertAtVolume => {
+                Knob::InertAtPressure => {
                     *self.turned_mol.last_mut()? = value;
-                    let at_pressure = knob == Knob::InertAtPressure;
-                    match hold {
-                        Hold::Pressure { .. } if !at_pressure => {
-                            hold = Hold::Volume { volume_m3: self.volume_m3()? };
-                        }
-                        Hold::Volume { .. } if at_pressure => {
-                            hold = Hold::Pressure { pressure_pa: self.pressure_pa()? };
-                        }
-                        _ => {}
+                    if hold.volume_m3().is_some() {
+                        hold = with_pressure(hold, self.pressure_pa()?);
+                    }
+                }
+                Knob::InertAtVolume => {
+                    *self.turned_mol.last_mut()? = value;
+                    if hold.pressure_pa().is_some() {
+                        hold = with_volume(hold, self.volume_m3()?);
                     }
                 }
             }
@@ -301,8 +290,11 @@ impl<'a> Knobs<'a> {
     }
 }
 
-/// The amount of all species of a kind.
-pub(super) fn amount_of(kinds: &[Kind], kind: Kind, amounts_mol: &[f64]) -> f64 {
-    let of_kind = kinds.iter().zip(amounts_mol).filter(|(other, _)| **other == kind);
-    of_kind.map(|(_, amount)| amount).sum()
+/// The system with one inert gas more at the end.
+fn with_inert(system: &System) -> Outcome<System> {
+    let (mut kinds, mut nu) = (system.kinds().to_vec(), system.nu().to_vec());
+    kinds.push(Kind::Gas);
+    nu.push(0.0);
+    let ions: Vec<Ion> = (0..kinds.len()).map(|species| system.ion(species)).collect();
+    System::new(&kinds, &nu)?.with_solution(system.model(), &ions)
 }

@@ -17,20 +17,25 @@
 //! inert of it too; this is Σ ν²/n − Δν²/n_t without its cancellation), Σ ν²/n where they follow
 //! concentrations. With a stated approach ΔH°/RT² is taken where K is.
 //!
+//! Where activity coefficients or the activity of the water come in, slopes are taken as differences
+//! of two states of rest instead (see [`super::nudge`]).
+//!
 //! Such statements are the theorems of moderation of I. Prigogine and R. Defay, Chemical
 //! Thermodynamics, 1954, chapter 17 (from memory). The line for n_j at constant pressure is the one
 //! that Le Chatelier's rule, said without care, gets wrong.
 
-use super::held::diluted;
+use super::held::{amount_of, diluted, is_pure};
 use super::knob::Knob;
-use super::knob::amount_of;
 use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::System;
 
-/// Where a species' own effect on Q and its thinning of the others cancel to this share, the rest of
-/// it is the rounding of the amounts.
+/// Where two effects cancel to this share of one of them, what is left is rounding.
 const ROUNDING: f64 = 1e-14;
+
+fn cancelled(sum: f64, part: f64) -> f64 {
+    if sum.abs() <= ROUNDING * part.abs() { 0.0 } else { sum }
+}
 
 /// A state of rest, to be differentiated.
 #[derive(Debug, Clone, Copy)]
@@ -48,10 +53,9 @@ impl Local<'_> {
     /// Whether the activities of a kind follow amount fractions.
     fn by_fraction(&self, kind: Kind) -> bool {
         match kind {
-            Kind::Gas => matches!(self.hold, Hold::Pressure { .. }),
-            Kind::Solute | Kind::Pure | Kind::Ample => false,
-            #[allow(unreachable_patterns, reason = "other mixtures follow fractions")]
-            _ => true,
+            Kind::Gas => self.hold.pressure_pa().is_some(),
+            Kind::Liquid => true,
+            Kind::Solute | Kind::Solvent | Kind::Pure | Kind::Ample => false,
         }
     }
 
@@ -72,7 +76,7 @@ impl Local<'_> {
         let mut known: Option<(Kind, f64)> = None;
         let each = self.system.kinds().iter().zip(self.system.nu()).zip(self.amounts_mol);
         for ((&kind, &nu), &amount) in each {
-            if matches!(kind, Kind::Pure | Kind::Ample) || amount == 0.0 && nu == 0.0 {
+            if is_pure(kind) || amount == 0.0 && nu == 0.0 {
                 continue;
             }
             let dilution = match known {
@@ -91,30 +95,24 @@ impl Local<'_> {
         let gas = || self.delta_nu(Kind::Gas);
         Some(match knob {
             Knob::Temperature => {
-                let spread = match self.hold {
-                    Hold::Volume { .. } => gas() / self.temperature_k,
-                    _ => 0.0,
+                let spread = match self.hold.volume_m3() {
+                    Some(_) => gas() / self.temperature_k,
+                    None => 0.0,
                 };
-                self.ln_k_per_k? - spread
+                let heat = self.ln_k_per_k?;
+                cancelled(heat - spread, heat)
             }
-            Knob::Pressure => match self.hold {
-                Hold::Pressure { pressure_pa } => -gas() / pressure_pa,
-                _ => 0.0,
-            },
-            Knob::Volume => match self.hold {
-                Hold::Volume { volume_m3 } => gas() / volume_m3,
-                _ => 0.0,
-            },
+            Knob::Pressure => self.hold.pressure_pa().map_or(0.0, |pascal| -gas() / pascal),
+            Knob::Volume => self.hold.volume_m3().map_or(0.0, |volume| gas() / volume),
             Knob::Amount(species) => {
                 let kind = *self.system.kinds().get(species)?;
-                if matches!(kind, Kind::Pure | Kind::Ample) {
+                if is_pure(kind) {
                     return Some(0.0);
                 }
                 let (nu, amount) =
                     (*self.system.nu().get(species)?, *self.amounts_mol.get(species)?);
                 let own = if nu == 0.0 { 0.0 } else { nu / amount };
-                let drive = self.dilution(kind) - own;
-                if drive.abs() <= ROUNDING * own.abs() { 0.0 } else { drive }
+                cancelled(self.dilution(kind) - own, own)
             }
             Knob::InertAtPressure => self.dilution(Kind::Gas),
             Knob::InertAtVolume => 0.0,

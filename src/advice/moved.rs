@@ -1,6 +1,7 @@
 //! How far rest moved: what never moves it, the slope on either side of a limit, and the finite
 //! difference without cancellation.
 
+use super::held::is_ample;
 use super::knob::Knob;
 use super::local::Local;
 use crate::equilibrium::Affinity;
@@ -22,9 +23,10 @@ pub(super) fn is_idle(local: &Local, knob: Knob, step: f64) -> bool {
         Knob::Temperature => false,
         Knob::Pressure | Knob::Volume | Knob::InertAtPressure => even(Kind::Gas),
         Knob::InertAtVolume => true,
-        Knob::Dilution => even(Kind::Solute),
+        // Activity coefficients change with dilution whatever Δν is.
+        Knob::Dilution => even(Kind::Solute) && !local.system.is_corrected(),
         Knob::Amount(species) => match local.system.kinds().get(species) {
-            Some(Kind::Ample) => true,
+            Some(Kind::Ample | Kind::Solvent) => true,
             Some(Kind::Pure) => step >= 0.0 && local.amounts_mol[species] > 0.0,
             _ => false,
         },
@@ -43,9 +45,7 @@ pub(super) fn slope(
 ) -> Option<f64> {
     let gone = |species: usize| {
         let nu = local.system.nu()[species];
-        nu != 0.0
-            && local.amounts_mol[species] == 0.0
-            && local.system.kinds()[species] != Kind::Ample
+        nu != 0.0 && local.amounts_mol[species] == 0.0 && !is_ample(local.system.kinds()[species])
     };
     let places = || 0..local.amounts_mol.len();
     match outcome {
@@ -67,6 +67,8 @@ pub(super) fn slope(
             match outcome {
                 // Another gas than what Q is made of may leave the proportion in which it is fixed.
                 RestOutcome::RanToItsLimit if !pure => None,
+                // A mixture that goes as a whole goes in proportion.
+                RestOutcome::PhaseExhausted if !pure && limits(species) && !alone => None,
                 // Forward more of a reactant carries ξ up, reverse more of a product down.
                 _ if limits(species) && alone => Some(-1.0 / local.system.nu()[species]),
                 _ => Some(0.0),
@@ -91,7 +93,7 @@ pub(super) fn extent_change(
     let kinds = local.system.kinds();
     let mut scarcest: Option<(f64, f64)> = None;
     for species in 0..local.amounts_mol.len() {
-        if nu[species] == 0.0 || kinds[species] == Kind::Ample || knob == Knob::Amount(species) {
+        if nu[species] == 0.0 || is_ample(kinds[species]) || knob == Knob::Amount(species) {
             continue;
         }
         let (before, after) = (local.amounts_mol[species], after_mol[species]);

@@ -1,6 +1,7 @@
 //! One small change of one knob, and what it does to rest.
 
-use super::knob::{Knob, Knobs, Plant, amount_of};
+use super::held::{amount_of, is_ample, is_pure, with_pressure, with_volume};
+use super::knob::{Knob, Knobs, Plant};
 use super::local::Local;
 use super::moved::{extent_change, is_idle, slope};
 use super::reason::{Reason, Turned, reason};
@@ -94,13 +95,33 @@ impl Nudge {
 ///
 /// # Errors
 /// As [`Knobs::new`].
+///
+/// ```
+/// use shiftgauge::advice::{Direction, Plant, nudges};
+/// use shiftgauge::constant::{Constant, StatedConstant};
+/// use shiftgauge::equilibrium::{Hold, Kind, State, System};
+/// // N2O4 = 2 NO2 takes up heat and makes gas.
+/// let system = System::new(&[Kind::Gas; 2], &[-1.0, 2.0]).unwrap();
+/// let hold = Hold::Pressure { pressure_pa: 100_000.0 };
+/// let state = State { temperature_k: 330.0, hold, amounts_mol: &[1.0, 0.0] };
+/// let constant = Constant::Stated(StatedConstant {
+///     ln_k: 0.0, u_ln_k: None, at_k: Some(330.0), enthalpy_j_per_mol: Some(57_000.0),
+///     u_enthalpy_j_per_mol: None, heat_capacity_j_per_mol_k: None,
+/// });
+/// let plant = Plant { system: &system, state, constant: &constant, approach_k: 0.0 };
+/// let found = nudges(plant).unwrap();
+/// let way = |name| found.iter().find(|nudge| nudge.name() == name).unwrap().direction;
+/// assert_eq!(way("temperature"), Some(Direction::Forward));
+/// assert_eq!(way("pressure"), Some(Direction::Reverse));
+/// assert_eq!(way("inert at constant volume"), None);
+/// ```
 pub fn nudges(plant: Plant) -> Outcome<Vec<Nudge>> {
     let mut knobs = Knobs::new(plant)?;
     let mut found = Vec::with_capacity(2 * plant.system.nu().len() + 5);
     found.push(nudge(&mut knobs, Knob::Temperature, STEP_K));
-    let held = match plant.state.hold {
-        Hold::Pressure { .. } => Knob::Pressure,
-        _ => Knob::Volume,
+    let held = match plant.state.hold.pressure_pa() {
+        Some(_) => Knob::Pressure,
+        None => Knob::Volume,
     };
     if let Some(value) = knobs.value(held) {
         found.push(nudge(&mut knobs, held, STEP_SHARE * value));
@@ -112,14 +133,16 @@ pub fn nudges(plant: Plant) -> Outcome<Vec<Nudge>> {
         let each = plant.system.nu().iter().enumerate();
         each.filter(move |(_, nu)| **nu * sign > 0.0).map(|(species, _)| species)
     };
-    for species in reacting(-1.0).chain(reacting(1.0)) {
+    // More of the solvent is dilution.
+    let dissolves = |species: &usize| plant.system.kinds()[*species] == Kind::Solvent;
+    for species in reacting(-1.0).chain(reacting(1.0)).filter(|species| !dissolves(species)) {
         let step = STEP_SPECIES * basis_mol(&knobs, species);
         found.push(nudge(&mut knobs, Knob::Amount(species), step));
     }
     for species in reacting(1.0) {
         let present = plant.state.amounts_mol[species];
         let amount = if present > 0.0 { present } else { knobs.now_mol()[species] };
-        if amount > 0.0 && plant.system.kinds()[species] != Kind::Ample {
+        if amount > 0.0 && !is_ample(plant.system.kinds()[species]) {
             found.push(nudge(&mut knobs, Knob::Amount(species), -STEP_REMOVED * amount));
         }
     }
@@ -136,7 +159,7 @@ fn basis_mol(knobs: &Knobs, species: usize) -> f64 {
     let Plant { system, state, .. } = knobs.plant();
     let own = match system.kinds()[species] {
         Kind::Gas => gas_mol(knobs),
-        Kind::Pure | Kind::Ample => state.amounts_mol[species],
+        pure if is_pure(pure) => state.amounts_mol[species],
         other => amount_of(system.kinds(), other, state.amounts_mol),
     };
     if own > 0.0 { own } else { all_mol(knobs) }
@@ -154,7 +177,7 @@ fn gas_mol(knobs: &Knobs) -> f64 {
 fn all_mol(knobs: &Knobs) -> f64 {
     let Plant { system, state, .. } = knobs.plant();
     let each = system.kinds().iter().zip(state.amounts_mol);
-    let sum: f64 = each.filter(|(kind, _)| **kind != Kind::Ample).map(|(_, amount)| amount).sum();
+    let sum: f64 = each.filter(|(kind, _)| !is_ample(**kind)).map(|(_, amount)| amount).sum();
     if sum > 0.0 { sum } else { 1.0 }
 }
 
@@ -184,8 +207,19 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
         amounts_mol: &now_mol,
     };
     let idle = is_idle(&local, knob, step);
-    let unknown = knob == Knob::Temperature && !plant.constant.knows_temperature();
+    // Where nothing can move K does not matter.
+    let unknown = knob == Knob::Temperature
+        && !plant.constant.knows_temperature()
+        && before.outcome != RestOutcome::NothingCanMove;
     let no_rest = before.outcome == RestOutcome::HasNoLimit;
+    let corrected = plant.system.is_corrected() && before.outcome == RestOutcome::Rest && !idle;
+    let derivative = if unknown {
+        None
+    } else if corrected {
+        difference(knobs, knob, step)
+    } else {
+        slope(&local, knob, before.outcome, &before.affinity)
+    };
     let after = if idle || unknown || no_rest {
         None
     } else if let (Knob::Amount(species), true) = (knob, from_rest) {
@@ -193,8 +227,6 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
     } else {
         knobs.rest(&[(knob, value + step)])
     };
-    let derivative = slope(&local, knob, before.outcome, &before.affinity);
-    let derivative = if unknown { None } else { derivative };
     let extent_change_mol = if unknown || no_rest {
         None
     } else if idle {
@@ -229,7 +261,7 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
         let added = |species| if knob == Knob::Amount(species) { step } else { 0.0 };
         let each = plant.system.nu().iter().zip(plant.system.kinds()).enumerate();
         change_mol.extend(each.map(|(species, (nu, kind))| {
-            let turnover = if *kind == Kind::Ample { 0.0 } else { nu * extent };
+            let turnover = if is_ample(*kind) { 0.0 } else { nu * extent };
             added(species) + turnover
         }));
         if idle {
@@ -257,13 +289,29 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
 /// What is held while this knob is turned.
 fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
     let hold = knobs.plant().state.hold;
-    match (knob, hold) {
-        (Knob::InertAtPressure, Hold::Volume { .. }) => {
-            knobs.pressure_pa().map_or(hold, |pressure_pa| Hold::Pressure { pressure_pa })
+    match knob {
+        Knob::InertAtPressure if hold.volume_m3().is_some() => {
+            knobs.pressure_pa().map_or(hold, |pressure_pa| with_pressure(hold, pressure_pa))
         }
-        (Knob::InertAtVolume, Hold::Pressure { .. }) => {
-            knobs.volume_m3().map_or(hold, |volume_m3| Hold::Volume { volume_m3 })
+        Knob::InertAtVolume if hold.pressure_pa().is_some() => {
+            knobs.volume_m3().map_or(hold, |volume_m3| with_volume(hold, volume_m3))
         }
         _ => hold,
     }
+}
+
+/// A step for a slope, relative to the knob, or for what is not there yet to its step.
+const NEAR: f64 = 1e-5;
+
+/// dξ/dk as a difference of two states of rest close by, good to about 1e-7: for solutions with
+/// activity coefficients, which know no formula here.
+fn difference(knobs: &mut Knobs, knob: Knob, step: f64) -> Option<f64> {
+    let value = knobs.value(knob)?;
+    let near = NEAR * if value > 0.0 { value } else { step.abs() };
+    let low = if value > 0.0 { value - near } else { value };
+    let mut extent = |value: f64| {
+        let rest = knobs.rest(&[(knob, value)])?;
+        (rest.outcome == RestOutcome::Rest).then_some(rest.extent_mol)
+    };
+    Some((extent(value + near)? - extent(low)?) / (value + near - low))
 }

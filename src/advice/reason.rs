@@ -1,10 +1,10 @@
 //! Why a nudge does what it does: the mechanism, as data.
 
 use super::border::border;
+use super::held::{is_ample, is_pure};
 use super::knob::{Knob, Knobs};
 use super::local::Local;
 use super::verdict::Direction;
-use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 use crate::problem::WhyCode;
@@ -135,7 +135,7 @@ fn spent(local: &Local, forward: bool, knob: Knob) -> Option<usize> {
     let used_up = if forward { -1.0 } else { 1.0 };
     let gone = |species: &usize| {
         local.system.nu()[*species] * used_up > 0.0
-            && local.system.kinds()[*species] != Kind::Ample
+            && !is_ample(local.system.kinds()[*species])
             && local.amounts_mol[*species] == 0.0
     };
     let mut all = (0..local.amounts_mol.len()).filter(gone);
@@ -143,7 +143,31 @@ fn spent(local: &Local, forward: bool, knob: Knob) -> Option<usize> {
     if knob == Knob::Amount(first) { all.next().or(Some(first)) } else { Some(first) }
 }
 
+/// Where activity coefficients, or the activity of the water, move rest another way than the
+/// mechanism of an ideal mixture says, they are the reason.
 fn mechanism(knobs: &Knobs, local: &Local, turned: &Turned) -> Reason {
+    let ideal = ideal_mechanism(knobs, local, turned);
+    let turns_solution = match turned.knob {
+        Knob::Temperature | Knob::Dilution => true,
+        Knob::Amount(species) => local.system.kinds()[species] == Kind::Solute,
+        _ => false,
+    };
+    let drive = local.drive(turned.knob).unwrap_or(0.0) * turned.step;
+    let agrees = match turned.direction {
+        Some(Direction::Forward) => drive > 0.0,
+        Some(Direction::Reverse) => drive < 0.0,
+        None => true,
+    };
+    if agrees || !turns_solution || !local.system.is_corrected() {
+        return ideal;
+    }
+    Reason::new(match turned.direction {
+        Some(Direction::Reverse) => C::CoefficientsReverse,
+        _ => C::CoefficientsForward,
+    })
+}
+
+fn ideal_mechanism(knobs: &Knobs, local: &Local, turned: &Turned) -> Reason {
     let three = |x: f64, codes: [WhyCode; 3]| match x {
         _ if x.abs() < 1e-12 => codes[1],
         x if x > 0.0 => codes[2],
@@ -196,14 +220,14 @@ fn heat(knobs: &Knobs, local: &Local, step: f64) -> Reason {
 fn amount(local: &Local, species: usize, step: f64) -> Reason {
     let (nu, kind) = (local.system.nu()[species], local.system.kinds()[species]);
     let more = step >= 0.0;
-    if matches!(kind, Kind::Pure | Kind::Ample) {
+    if is_pure(kind) {
         return Reason::of(if more { C::PureAdded } else { C::PureRemoved }, species);
     }
     let drive = local.drive(Knob::Amount(species)).filter(|drive| drive.is_finite());
     if nu == 0.0 {
         let drive = drive.unwrap_or(0.0);
-        let code = match local.hold {
-            Hold::Volume { .. } if kind == Kind::Gas => C::InertInVolume,
+        let code = match local.hold.volume_m3() {
+            Some(_) if kind == Kind::Gas => C::InertInVolume,
             _ if drive > 0.0 => C::BystanderForward,
             _ if drive < 0.0 => C::BystanderReverse,
             _ => C::BystanderNone,

@@ -50,7 +50,7 @@ pub struct Sweep {
 /// # let state = State { temperature_k: 330.0, hold, amounts_mol: &[1.0, 0.0] };
 /// # let constant = Constant::Stated(StatedConstant {
 /// #     ln_k: 0.0, u_ln_k: None, at_k: Some(330.0), enthalpy_j_per_mol: Some(57_000.0),
-/// #     heat_capacity_j_per_mol_k: None,
+/// #     u_enthalpy_j_per_mol: None, heat_capacity_j_per_mol_k: None,
 /// # });
 /// # let plant = Plant { system: &system, state, constant: &constant, approach_k: 0.0 };
 /// // The share of NO2 from 290 to 390 K at 1 bar and at 5 bar

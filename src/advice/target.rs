@@ -85,6 +85,27 @@ const REACHED: f64 = 1e-9;
 /// the turning point is found by golden section, so that two settings on either side of a maximum
 /// are both found, as is a maximum that just reaches. Two settings closer together than a
 /// two-hundredth of the range with no turn visible between the samples around them are not seen.
+///
+/// ```
+/// # use shiftgauge::advice::{Goal, Knob, Knobs, Plant, TargetOutcome, Wanted, target};
+/// # use shiftgauge::constant::{Constant, StatedConstant};
+/// # use shiftgauge::equilibrium::{Hold, Kind, State, System};
+/// # let system = System::new(&[Kind::Gas; 2], &[-1.0, 2.0]).unwrap();
+/// # let hold = Hold::Pressure { pressure_pa: 100_000.0 };
+/// # let state = State { temperature_k: 330.0, hold, amounts_mol: &[1.0, 0.0] };
+/// # let constant = Constant::Stated(StatedConstant {
+/// #     ln_k: 0.0, u_ln_k: None, at_k: Some(330.0), enthalpy_j_per_mol: Some(57_000.0),
+/// #     u_enthalpy_j_per_mol: None, heat_capacity_j_per_mol_k: None,
+/// # });
+/// # let plant = Plant { system: &system, state, constant: &constant, approach_k: 0.0 };
+/// // N2O4 = 2 NO2 with K = 1: half of it is split at 3/4 bar, since K = 4 α² P/(1 − α²).
+/// let goal = Goal {
+///     knob: Knob::Pressure, from: 1e4, to: 1e6, reach: Wanted::Conversion(0), value: 0.5,
+/// };
+/// let found = target(&mut Knobs::new(plant).unwrap(), &goal);
+/// assert_eq!(found.outcome, TargetOutcome::One);
+/// assert!((found.settings[0].value - 75_000.0).abs() < 1e-6);
+/// ```
 pub fn target(knobs: &mut Knobs, goal: &Goal) -> Target {
     let Goal { knob, reach, value, .. } = *goal;
     let mut off = |at: f64| {

@@ -1,6 +1,7 @@
 //! What a chart shows and a target reaches: one number of a state of rest.
 
-use super::knob::{Knob, Knobs, amount_of};
+use super::held::{amount_of, is_pure};
+use super::knob::{Knob, Knobs};
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 
@@ -47,7 +48,7 @@ impl Wanted {
             Wanted::Fraction(species) => {
                 let kinds = knobs.plant().system.kinds();
                 let kind = *kinds.get(species)?;
-                if matches!(kind, Kind::Pure | Kind::Ample | Kind::Solute) {
+                if is_pure(kind) || kind == Kind::Solute {
                     return None;
                 }
                 let amounts = knobs.amounts_mol();

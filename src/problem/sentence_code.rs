@@ -169,6 +169,8 @@ codes! {
         RanToLimit = "why-ran-to-limit",
         NoLimit = "why-no-limit",
         OutOfRange = "step-out-of-range",
+        CoefficientsForward = "coefficients-forward",
+        CoefficientsReverse = "coefficients-reverse",
     }
 }
 

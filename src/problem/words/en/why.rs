@@ -83,28 +83,28 @@ pub(in crate::problem::words) fn template(code: C) -> &'static str {
             "{species} is a reactant: more of it lowers Q, and the mixture moves forward."
         }
         C::ReactantAddedBack => {
-            "{species} is a reactant, yet at constant pressure more of it also thins the other reactants. Above a share of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves back."
+            "{species} is a reactant, yet at constant pressure more of it also thins the other reactants. Above a fraction of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves back."
         }
         C::ReactantRemoved => {
             "{species} is a reactant: less of it raises Q, and the mixture moves back."
         }
         C::ReactantRemovedForward => {
-            "{species} is a reactant, yet at constant pressure less of it also leaves more room to the other reactants. Above a share of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves forward."
+            "{species} is a reactant, yet at constant pressure less of it also makes the other reactants denser. Above a fraction of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves forward."
         }
         C::ProductAdded => {
             "{species} is a product: more of it raises Q, and the mixture moves back."
         }
         C::ProductAddedForward => {
-            "{species} is a product, yet at constant pressure more of it also thins the other products. Above a share of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves forward."
+            "{species} is a product, yet at constant pressure more of it also thins the other products. Above a fraction of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves forward."
         }
         C::ProductRemoved => {
             "{species} is a product: less of it lowers Q, and the mixture moves forward."
         }
         C::ProductRemovedBack => {
-            "{species} is a product, yet at constant pressure less of it also leaves more room to the other products. Above a share of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves back."
+            "{species} is a product, yet at constant pressure less of it also makes the other products denser. Above a fraction of {turning} that weighs more, and it stands at {fraction} at rest, so the mixture moves back."
         }
         C::ShareBalanced => {
-            "{species} stands at the share where its own effect on Q and the thinning of the others cancel ({turning}), so a small change of it moves nothing."
+            "{species} stands at the fraction where its own effect on Q and the thinning of the others cancel ({turning}), so a small change of it moves nothing."
         }
         C::BystanderForward => {
             "{species} takes no part, but more of it thins the others, which favours the side with more of them: the mixture moves forward."
@@ -148,5 +148,11 @@ pub(in crate::problem::words) fn template(code: C) -> &'static str {
             "Q does not reach K at any extent, and what would be used up is not known in amount: there is no state at rest to compare."
         }
         C::OutOfRange => "The step leads outside the range that can be worked with.",
+        C::CoefficientsForward => {
+            "This changes how the ions shield each other, or the activity of the water, and that decides here: the solution moves forward."
+        }
+        C::CoefficientsReverse => {
+            "This changes how the ions shield each other, or the activity of the water, and that decides here: the solution moves back."
+        }
     }
 }
