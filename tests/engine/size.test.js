@@ -4,8 +4,12 @@ import { test } from 'node:test';
 import { gzippedLength } from '../../www/build/sizes.mjs';
 import { ENGINE_BYTES } from './engine.js';
 
-/** A little above what the engine takes now; it may only be lowered, or raised with a reason. */
-const CEILING_BYTES = 235_000;
+/**
+ * A little above what the engine takes now; it may only be lowered, or raised with a reason. Raised from
+ * 235,000 when tolerances, feeds, liquids, solutions, nudges, sweeps and targets came in (about 75 kB of
+ * code and sentences) and the library grew from 58 to 254 species (19 kB).
+ */
+const CEILING_BYTES = 335_000;
 
 const TABLES = new URL('../../src/library/tables/', import.meta.url);
 
