@@ -10,10 +10,12 @@ use super::setting::Basis;
 use super::shown;
 use crate::advice::NoApproach;
 use crate::constant::Constant;
+use crate::library;
 use crate::mixture::SolutionModel;
 use crate::problem::words::{Language, input, note};
 use crate::problem::{NoteCode, Remark};
 use crate::quantity::PressureReference;
+use crate::reaction::Phase;
 
 /// Above this pressure the ideal gas is marked: a few per cent in activities of common gases.
 /// Common practice, no source.
@@ -35,6 +37,7 @@ pub(super) fn notes(found: &Findings) -> Vec<NoteReport> {
         remarks.extend(liquid_remarks(found, reading));
         remarks.extend(tolerance_remarks(found, reading));
     }
+    remarks.extend(hazards(found));
     remarks.push(Remark::new(NoteCode::Equilibrium));
     let say = |remark: &Remark| {
         let (level, text) = note(remark, Language::En);
@@ -65,6 +68,22 @@ fn missing_remarks(missing: &Missing, reading: &ReadingFindings) -> Vec<Remark> 
 const IDEAL_SOLUTION_MARK_MOL_PER_KG: f64 = 0.01;
 /// Charges that differ by more than this share of their mean are said. Common practice, no source.
 const CHARGES_AGREE: f64 = 0.05;
+
+/// The species that are known for harm, each once.
+fn hazards(found: &Findings) -> Option<Remark> {
+    let mut list: Vec<String> = Vec::new();
+    for participant in &found.participants {
+        let formula = participant.species.formula.text();
+        let words: Vec<&str> = library::hazards(formula).collect();
+        let line = format!("{formula} ({})", words.join(", "));
+        let dissolved_ion = participant.phase == Phase::Aqueous;
+        if !words.is_empty() && !dissolved_ion && !list.contains(&line) {
+            list.push(line);
+        }
+    }
+    let remark = Remark::new(NoteCode::Hazards).with("list", list.join("; "));
+    (!list.is_empty()).then_some(remark)
+}
 
 /// What weakens a solution or a liquid mixture.
 fn liquid_remarks(found: &Findings, reading: &ReadingFindings) -> Vec<Remark> {

@@ -152,6 +152,16 @@ pub(super) fn delta_nu_gas(participants: &[Participant]) -> f64 {
     gases.map(|participant| participant.nu).sum()
 }
 
+/// Puts what the engine says of a state at the field of the case that it comes from.
+fn at_state(problems: Vec<Problem>) -> Vec<Problem> {
+    let fields = [("temperature_k", "temperature"), ("pressure_pa", "pressure")];
+    let place = |problem: Problem| match fields.iter().find(|(name, _)| problem.field == *name) {
+        Some((_, field)) => Problem { field: (*field).to_owned(), ..problem },
+        None => problem.at(EQUATION),
+    };
+    problems.into_iter().map(place).collect()
+}
+
 /// A reading laid on the reaction, before K is asked for.
 pub(super) struct Laid {
     pub setting: Setting,
@@ -172,7 +182,7 @@ pub(super) fn lay(question: &Question, reacting: &[Participant]) -> Outcome<Laid
         .map_err(at_equation)?;
     let temperature_k = question.temperature.value_si;
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
-    let quotient = quotient(&system, &state).map_err(at_equation)?;
+    let quotient = quotient(&system, &state).map_err(at_state)?;
     Ok(Laid { setting, system, amounts_mol, quotient })
 }
 

@@ -31,6 +31,7 @@
 //! ```
 
 mod combination;
+mod hazard;
 mod polynomial;
 mod record;
 mod table;
@@ -39,6 +40,7 @@ mod temperature;
 pub use combination::Change;
 pub use combination::Combination;
 pub use combination::STOICHIOMETRIC_LIMIT;
+pub use hazard::hazards;
 pub use record::Properties;
 pub use record::Reach;
 pub use record::Record;

@@ -42,6 +42,7 @@ codes! {
         MissingSeveral = "missing-several",
         IdealGas = "ideal-gas",
         NoReading = "no-reading",
+        Hazards = "hazards",
         Equilibrium = "equilibrium-is-not-rate",
     }
 }

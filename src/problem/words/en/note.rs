@@ -130,6 +130,10 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Assumption,
             "No reading is given, so there is K but no Q, no verdict and no state at rest.",
         ),
+        C::Hazards => (
+            Caution,
+            "Known for harm: {list}. The list is short and not complete; the safety data sheets and the site's procedures hold.",
+        ),
         C::Equilibrium => (
             Caution,
             "Equilibrium says where the reaction stops, not how fast. Advice for a qualified person; not an interlock, relief or safety calculation. Site procedures, local codes and licensed practice come first.",
