@@ -3,7 +3,7 @@
 use super::held::{amount_of, is_ample, is_pure, with_pressure, with_volume};
 use super::knob::{Knob, Knobs, Plant};
 use super::local::Local;
-use super::moved::{extent_change, is_idle, slope};
+use super::moved::{difference, extent_change, is_idle, slope};
 use super::reason::{Reason, Turned, reason};
 use super::verdict::Direction;
 use crate::equilibrium::Hold;
@@ -216,7 +216,7 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
     let derivative = if unknown {
         None
     } else if corrected {
-        difference(knobs, knob, step)
+        difference(knobs, &local, knob, step)
     } else {
         slope(&local, knob, before.outcome, &before.affinity)
     };
@@ -298,20 +298,4 @@ fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
         }
         _ => hold,
     }
-}
-
-/// A step for a slope, relative to the knob, or for what is not there yet to its step.
-const NEAR: f64 = 1e-5;
-
-/// dξ/dk as a difference of two states of rest close by, good to about 1e-7: for solutions with
-/// activity coefficients, which know no formula here.
-fn difference(knobs: &mut Knobs, knob: Knob, step: f64) -> Option<f64> {
-    let value = knobs.value(knob)?;
-    let near = NEAR * if value > 0.0 { value } else { step.abs() };
-    let low = if value > 0.0 { value - near } else { value };
-    let mut extent = |value: f64| {
-        let rest = knobs.rest(&[(knob, value)])?;
-        (rest.outcome == RestOutcome::Rest).then_some(rest.extent_mol)
-    };
-    Some((extent(value + near)? - extent(low)?) / (value + near - low))
 }

@@ -177,7 +177,7 @@ fn ideal_mechanism(knobs: &Knobs, local: &Local, turned: &Turned) -> Reason {
         let side = |sign: f64| {
             let each = local.system.nu().iter().zip(local.system.kinds());
             let of_side = each.filter(|(nu, other)| **other == kind && **nu * sign > 0.0);
-            of_side.map(|(nu, _)| nu.abs()).sum::<f64>()
+            of_side.map(|(nu, _)| nu.abs()).fold(0.0, |sum, nu| sum + nu)
         };
         let code = three(local.delta_nu(kind), codes);
         Reason { sides: Some((side(-1.0), side(1.0))), ..Reason::new(code) }
