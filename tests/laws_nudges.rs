@@ -1,8 +1,9 @@
 //! Laws that every nudge keeps, on plants drawn at random.
 
 use crate::laws_rest::Draws;
-use crate::nudges::{Row, at, mirrored, within};
+use crate::nudges::{Row, at, mirrored, sentence, within};
 use shiftgauge::advice::{Direction, Knob, Knobs, Nudge, nudge, nudges};
+use shiftgauge::advice::{Goal, SweepRequest, Wanted, sweep, target};
 use shiftgauge::equilibrium::{Hold, RestOutcome};
 
 /// A reaction of the plant's size with at least one species of each side.
@@ -169,5 +170,50 @@ fn what_was_added_is_kept() {
                 assert!(close(after, now + change, 1e-9, 1.0), "{species} {found:?} {row:?}");
             }
         }
+    });
+}
+
+#[test]
+fn every_number_is_finite_whatever_the_state() {
+    each(16, |row, draws| {
+        let amount = [0.0, 1e-300, 1e-9, 1.0, 1.0, 3.0, 1e200, 1e300];
+        let amounts = row.amounts.iter().map(|_| draws.pick(&amount)).collect();
+        let ln_k = draws.pick(&[-1e5, -700.0, -40.0, 0.0, 1.0, 40.0, 700.0, 1e5]);
+        let kelvin = draws.pick(&[1.0, 300.0, 700.0, 2e4]);
+        let enthalpy = draws.pick(&[None, Some(0.0), Some(-1e4), Some(50.0)]);
+        let wild = Row { amounts, ln_k, kelvin, enthalpy, ..row.clone() };
+        for found in all(&wild) {
+            let numbers =
+                [Some(found.value), Some(found.step), found.extent_change_mol, found.derivative];
+            let all =
+                found.rest_mol.iter().chain(&found.change_mol).chain(numbers.iter().flatten());
+            assert!(all.clone().all(|number| number.is_finite()), "{found:?} {wild:?}");
+            assert!(found.rest_mol.iter().all(|amount| *amount >= 0.0), "{found:?} {wild:?}");
+            assert!(!sentence(&found).contains(['{', '}']), "{found:?} {wild:?}");
+        }
+        let wanted = draws.pick(&[
+            Wanted::Extent,
+            Wanted::Fraction(0),
+            Wanted::Conversion(1),
+            Wanted::Amount(1),
+        ]);
+        let knobs =
+            [Knob::Temperature, Knob::Pressure, Knob::Volume, Knob::Amount(0), Knob::Dilution];
+        let (knob, other) = (draws.pick(&knobs), draws.pick(&knobs));
+        let (from, to) = (draws.pick(&[0.0, 1e-3, 1.0, 1e300]), draws.pick(&[1.0, 900.0, 1e7]));
+        wild.with(|plant| {
+            let mut knobs = Knobs::new(plant).unwrap();
+            let lines = Some((other, &[1.0, 1e3, -1.0, f64::NAN][..]));
+            let request = SweepRequest { x: knob, from, to, count: 9, lines, show: wanted };
+            let chart = sweep(&mut knobs, &request);
+            let numbers = chart.lines.iter().flatten().flatten();
+            assert!(chart.x.iter().chain(numbers).all(|number| number.is_finite()), "{chart:?}");
+            let goal = Goal { knob, from, to, reach: wanted, value: draws.pick(&[0.0, 0.5, 1.0]) };
+            let found = target(&mut knobs, &goal);
+            let settings = found.settings.iter().chain(&found.nearest);
+            let numbers =
+                settings.flat_map(|one| [one.value, one.reached, one.until.unwrap_or(0.0)]);
+            assert!(numbers.chain(found.jumps.iter().copied()).all(f64::is_finite), "{found:?}");
+        });
     });
 }

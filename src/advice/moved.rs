@@ -1,10 +1,11 @@
-//! How far rest moved: what never moves it, the slope on either side of a limit, and the finite
+//! How far rest moved: what is held meanwhile, what never moves it, the slope on either side of a limit, and the finite
 //! difference without cancellation.
 
-use super::held::is_ample;
+use super::held::{is_ample, with_pressure, with_volume};
 use super::knob::{Knob, Knobs};
 use super::local::Local;
 use crate::equilibrium::Affinity;
+use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 
@@ -130,4 +131,18 @@ pub(super) fn difference(knobs: &mut Knobs, local: &Local, knob: Knob, step: f64
     }
     // Below nothing there is no state: a difference from one side, of second order too.
     Some((4.0 * change(near)? - change(2.0 * near)?) / (2.0 * near))
+}
+
+/// What is held while this knob is turned.
+pub(super) fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
+    let hold = knobs.plant().state.hold;
+    match knob {
+        Knob::InertAtPressure if hold.volume_m3().is_some() => {
+            knobs.pressure_pa().map_or(hold, |pressure_pa| with_pressure(hold, pressure_pa))
+        }
+        Knob::InertAtVolume if hold.pressure_pa().is_some() => {
+            knobs.volume_m3().map_or(hold, |volume_m3| with_volume(hold, volume_m3))
+        }
+        _ => hold,
+    }
 }

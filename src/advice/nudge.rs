@@ -1,12 +1,11 @@
 //! One small change of one knob, and what it does to rest.
 
-use super::held::{amount_of, is_ample, is_pure, with_pressure, with_volume};
+use super::held::{amount_of, is_ample, is_pure};
 use super::knob::{Knob, Knobs, Plant};
 use super::local::Local;
-use super::moved::{difference, extent_change, is_idle, slope};
+use super::moved::{difference, extent_change, hold_for, is_idle, slope};
 use super::reason::{Reason, Turned, reason};
 use super::verdict::Direction;
-use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 use crate::problem::Outcome;
@@ -283,19 +282,5 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
         change_mol,
         reason,
         aside,
-    }
-}
-
-/// What is held while this knob is turned.
-fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
-    let hold = knobs.plant().state.hold;
-    match knob {
-        Knob::InertAtPressure if hold.volume_m3().is_some() => {
-            knobs.pressure_pa().map_or(hold, |pressure_pa| with_pressure(hold, pressure_pa))
-        }
-        Knob::InertAtVolume if hold.pressure_pa().is_some() => {
-            knobs.volume_m3().map_or(hold, |volume_m3| with_volume(hold, volume_m3))
-        }
-        _ => hold,
     }
 }
