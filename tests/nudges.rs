@@ -3,6 +3,7 @@
 use shiftgauge::advice::{Direction, Knob, Knobs, Nudge, Plant, Wording, nudge, why};
 use shiftgauge::constant::{Constant, StatedConstant};
 use shiftgauge::equilibrium::{Hold, Kind, State, System};
+use shiftgauge::mixture::{Ion, SolutionModel};
 use shiftgauge::problem::words;
 use shiftgauge::problem::{WhyCode, WhyCode as C};
 
@@ -17,6 +18,8 @@ pub struct Row {
     pub ln_k: f64,
     /// ΔH° in kJ/mol.
     pub enthalpy: Option<f64>,
+    /// With charges, Davies' activity coefficients.
+    pub charges: Vec<i32>,
 }
 
 pub fn at(pressure_bar: f64) -> Hold {
@@ -30,7 +33,8 @@ pub fn within(volume_m3: f64) -> Hold {
 impl Row {
     pub fn new(kinds: &'static str, nu: &[f64], hold: Hold, amounts: &[f64], ln_k: f64) -> Row {
         let (nu, amounts) = (nu.to_vec(), amounts.to_vec());
-        Row { kinds, nu, kelvin: 700.0, hold, amounts, ln_k, enthalpy: Some(-50.0) }
+        let (enthalpy, charges) = (Some(-50.0), Vec::new());
+        Row { kinds, nu, kelvin: 700.0, hold, amounts, ln_k, enthalpy, charges }
     }
 
     pub fn heat(self, kilojoule: f64) -> Row {
@@ -43,10 +47,16 @@ impl Row {
             'g' => Kind::Gas,
             'p' => Kind::Pure,
             'a' => Kind::Ample,
+            'l' => Kind::Liquid,
+            'w' => Kind::Solvent,
             _ => Kind::Solute,
         };
         let kinds: Vec<Kind> = self.kinds.chars().map(kind).collect();
-        let system = System::new(&kinds, &self.nu).unwrap();
+        let mut system = System::new(&kinds, &self.nu).unwrap();
+        if !self.charges.is_empty() {
+            let ions: Vec<Ion> = self.charges.iter().map(|&charge| Ion::new(charge)).collect();
+            system = system.with_solution(SolutionModel::Davies, &ions).unwrap();
+        }
         let constant = Constant::Stated(StatedConstant {
             ln_k: self.ln_k,
             u_ln_k: None,
@@ -241,6 +251,41 @@ fn solutions() -> Vec<Expected> {
     ]
 }
 
+#[rustfmt::skip]
+fn mixtures() -> Vec<Expected> {
+    let usual = &[1.0, 2.0, 0.3, 0.2];
+    let ester = Row::new("llll", &[-1.0, -1.0, 1.0, 1.0], at(1.0), usual, 1.4);
+    let pairs = |amounts| Row::new("lll", &[-2.0, 1.0, 0.0], at(1.0), amounts, 1.0);
+    let molal = |ln_k| Row { hold: Hold::Solvent { water_kg: 1.0 }, ln_k, kelvin: 298.15, ..acid() };
+    let over_pressure = Hold::PressureAndSolvent { pressure_pa: 2e5, water_kg: 10.0 };
+    let over_volume = Hold::VolumeAndSolvent { volume_m3: 0.1, water_kg: 10.0 };
+    let gas = |hold| Row { kelvin: 298.15, ..Row::new("gsg", &[-1.0, 1.0, 0.0], hold, &[1.0, 0.1, 3.0], -3.4).heat(-20.0) };
+    // MX(s) = M(2+) + X(2−) beside a salt of no part in it; HA + B(−) = A(−) + HB by strength alone.
+    let brine = Row { kelvin: 298.15, hold: Hold::Solvent { water_kg: 1.0 }, charges: vec![0, 2, -2, 1, -1], ..Row::new("pssss", &[-1.0, 1.0, 1.0, 0.0, 0.0], at(1.0), &[1.0, 0.01, 0.01, 0.1, 0.1], -10.0).heat(-2.0) };
+    let even = |charges: [i32; 4]| Row { kelvin: 298.15, hold: Hold::Solvent { water_kg: 1.0 }, charges: charges.to_vec(), ..Row::new("ssss", &[-1.0, -1.0, 1.0, 1.0], at(1.0), &[0.02; 4], 0.0) };
+    vec![
+        Expected("more acid makes more ester", ester.clone(), add(0), 0.03, F, F, vec![C::ReactantAdded]),
+        Expected("more water splits ester", ester.clone(), add(3), 0.03, R, R, vec![C::ProductAdded]),
+        Expected("ester taken away is made again", ester, add(2), -0.03, F, F, vec![C::ProductRemoved]),
+        Expected("an inert liquid splits pairs", pairs(&[1.0, 0.1, 1.0]), add(2), 0.02, R, R, vec![C::BystanderReverse]),
+        Expected("water by mass drives an acid apart", molal(-10.9), WATER, 0.1, F, F, vec![C::DilutionForward]),
+        Expected("pressure presses gas into water", gas(over_pressure), P, 1e4, F, F, vec![C::PressureForward]),
+        Expected("more room for the gas draws it out", gas(over_volume), V, 5e-3, R, R, vec![C::VolumeReverse]),
+        Expected("more water takes up more gas", gas(over_pressure), WATER, 0.1, F, F, vec![C::DilutionForward]),
+        Expected("more water takes up more gas from a volume", gas(over_volume), WATER, 0.1, F, F, vec![C::DilutionForward]),
+        Expected("an inert gas at constant pressure draws gas out", gas(over_pressure), INERT_P, 0.2, R, R, vec![C::InertReverse]),
+        Expected("the same where volume is held", gas(over_volume), INERT_P, 0.2, R, R, vec![C::InertReverse]),
+        Expected("an inert gas in a fixed volume does not", gas(over_pressure), INERT_V, 0.2, N, N, vec![C::InertInVolume]),
+        Expected("more of a gas dissolves", gas(over_pressure), add(0), 0.04, F, F, vec![C::ReactantAdded]),
+        Expected("hotter water holds less gas", gas(over_pressure), T, 5.0, R, R, vec![C::HeatGiven]),
+        Expected("a brine dissolves more when diluted", brine.clone(), WATER, 0.1, F, F, vec![C::DilutionForward]),
+        Expected("a salt of no part salts in", brine.clone(), add(3), 0.01, F, F, vec![C::CoefficientsForward]),
+        Expected("its own ion drives it out", brine, add(1), 0.001, R, R, vec![C::ProductAdded]),
+        Expected("dilution takes the shielding off the higher charges", even([1, -1, 2, -2]), WATER, 0.1, R, R, vec![C::CoefficientsReverse]),
+        Expected("dilution takes the shielding off, mirrored", even([2, -2, 1, -1]), WATER, 0.1, F, F, vec![C::CoefficientsForward]),
+    ]
+}
+
 fn judged(rows: Vec<Expected>) -> Vec<WhyCode> {
     let mut said = Vec::new();
     let mut wrong = String::new();
@@ -272,6 +317,7 @@ fn every_case_moves_the_right_way_for_its_own_reason() {
     let mut said = judged(gases());
     said.extend(judged(phases()));
     said.extend(judged(solutions()));
+    said.extend(judged(mixtures()));
     let unsaid: Vec<_> = C::ALL.iter().filter(|code| !said.contains(code)).collect();
     assert!(unsaid.is_empty(), "no row says {unsaid:?}");
 }

@@ -55,5 +55,5 @@ pub(super) fn is_ample(kind: Kind) -> bool {
 /// The sum over all species of a kind.
 pub(super) fn amount_of(kinds: &[Kind], kind: Kind, amounts_mol: &[f64]) -> f64 {
     let of_kind = kinds.iter().zip(amounts_mol).filter(|(other, _)| **other == kind);
-    of_kind.map(|(_, amount)| amount).sum()
+    of_kind.fold(0.0, |sum, (_, amount)| sum + amount)
 }

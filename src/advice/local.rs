@@ -34,7 +34,7 @@ use crate::equilibrium::System;
 const ROUNDING: f64 = 1e-14;
 
 fn cancelled(sum: f64, part: f64) -> f64 {
-    if sum.abs() <= ROUNDING * part.abs() { 0.0 } else { sum }
+    if part.is_finite() && sum.abs() <= ROUNDING * part.abs() { 0.0 } else { sum }
 }
 
 /// A state of rest, to be differentiated.

@@ -1,10 +1,11 @@
-//! How far rest moved: what never moves it, the slope on either side of a limit, and the finite
+//! How far rest moved: what is held meanwhile, what never moves it, the slope on either side of a limit, and the finite
 //! difference without cancellation.
 
-use super::held::is_ample;
-use super::knob::Knob;
+use super::held::{is_ample, with_pressure, with_volume};
+use super::knob::{Knob, Knobs};
 use super::local::Local;
 use crate::equilibrium::Affinity;
+use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 
@@ -108,4 +109,40 @@ pub(super) fn extent_change(
     }
     // Adding zero takes the sign off a zero.
     change + 0.0
+}
+
+/// A step for a slope, relative to the knob, or for what is not there yet to its step.
+const NEAR: f64 = 1e-5;
+
+/// dξ/dk as a difference of two states of rest close by, good to about 1e-7: for solutions with
+/// activity coefficients, which know no formula here.
+pub(super) fn difference(knobs: &mut Knobs, local: &Local, knob: Knob, step: f64) -> Option<f64> {
+    let value = knobs.value(knob)?;
+    let now_mol = knobs.now().extent_mol;
+    let near = NEAR * if value > 0.0 { value } else { step.abs() };
+    let mut change = |by: f64| {
+        let rest = knobs.rest(&[(knob, value + by)])?;
+        let plain = rest.extent_mol - now_mol;
+        let found = extent_change(local, knob, by, knobs.amounts_mol(), plain, None);
+        (rest.outcome == RestOutcome::Rest).then_some(found)
+    };
+    if value > 0.0 {
+        return Some((change(near)? - change(-near)?) / (2.0 * near));
+    }
+    // Below nothing there is no state: a difference from one side, of second order too.
+    Some((4.0 * change(near)? - change(2.0 * near)?) / (2.0 * near))
+}
+
+/// What is held while this knob is turned.
+pub(super) fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
+    let hold = knobs.plant().state.hold;
+    match knob {
+        Knob::InertAtPressure if hold.volume_m3().is_some() => {
+            knobs.pressure_pa().map_or(hold, |pressure_pa| with_pressure(hold, pressure_pa))
+        }
+        Knob::InertAtVolume if hold.pressure_pa().is_some() => {
+            knobs.volume_m3().map_or(hold, |volume_m3| with_volume(hold, volume_m3))
+        }
+        _ => hold,
+    }
 }

@@ -1,12 +1,11 @@
 //! One small change of one knob, and what it does to rest.
 
-use super::held::{amount_of, is_ample, is_pure, with_pressure, with_volume};
+use super::held::{amount_of, is_ample, is_pure};
 use super::knob::{Knob, Knobs, Plant};
 use super::local::Local;
-use super::moved::{extent_change, is_idle, slope};
+use super::moved::{difference, extent_change, hold_for, is_idle, slope};
 use super::reason::{Reason, Turned, reason};
 use super::verdict::Direction;
-use crate::equilibrium::Hold;
 use crate::equilibrium::Kind;
 use crate::equilibrium::RestOutcome;
 use crate::problem::Outcome;
@@ -216,7 +215,7 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
     let derivative = if unknown {
         None
     } else if corrected {
-        difference(knobs, knob, step)
+        difference(knobs, &local, knob, step)
     } else {
         slope(&local, knob, before.outcome, &before.affinity)
     };
@@ -284,34 +283,4 @@ pub fn nudge(knobs: &mut Knobs, knob: Knob, step: f64) -> Nudge {
         reason,
         aside,
     }
-}
-
-/// What is held while this knob is turned.
-fn hold_for(knobs: &Knobs, knob: Knob) -> Hold {
-    let hold = knobs.plant().state.hold;
-    match knob {
-        Knob::InertAtPressure if hold.volume_m3().is_some() => {
-            knobs.pressure_pa().map_or(hold, |pressure_pa| with_pressure(hold, pressure_pa))
-        }
-        Knob::InertAtVolume if hold.pressure_pa().is_some() => {
-            knobs.volume_m3().map_or(hold, |volume_m3| with_volume(hold, volume_m3))
-        }
-        _ => hold,
-    }
-}
-
-/// A step for a slope, relative to the knob, or for what is not there yet to its step.
-const NEAR: f64 = 1e-5;
-
-/// dξ/dk as a difference of two states of rest close by, good to about 1e-7: for solutions with
-/// activity coefficients, which know no formula here.
-fn difference(knobs: &mut Knobs, knob: Knob, step: f64) -> Option<f64> {
-    let value = knobs.value(knob)?;
-    let near = NEAR * if value > 0.0 { value } else { step.abs() };
-    let low = if value > 0.0 { value - near } else { value };
-    let mut extent = |value: f64| {
-        let rest = knobs.rest(&[(knob, value)])?;
-        (rest.outcome == RestOutcome::Rest).then_some(rest.extent_mol)
-    };
-    Some((extent(value + near)? - extent(low)?) / (value + near - low))
 }

@@ -177,7 +177,7 @@ fn ideal_mechanism(knobs: &Knobs, local: &Local, turned: &Turned) -> Reason {
         let side = |sign: f64| {
             let each = local.system.nu().iter().zip(local.system.kinds());
             let of_side = each.filter(|(nu, other)| **other == kind && **nu * sign > 0.0);
-            of_side.map(|(nu, _)| nu.abs()).sum::<f64>()
+            of_side.map(|(nu, _)| nu.abs()).fold(0.0, |sum, nu| sum + nu)
         };
         let code = three(local.delta_nu(kind), codes);
         Reason { sides: Some((side(-1.0), side(1.0))), ..Reason::new(code) }
@@ -236,19 +236,22 @@ fn amount(local: &Local, species: usize, step: f64) -> Reason {
     }
     // The share of the drive that is left of what the species itself does.
     let own = nu.abs() / local.amounts_mol[species];
-    let against = drive.map_or(1.0, |drive| -drive * nu.signum() / own);
+    let against = drive.filter(|_| own.is_finite());
+    let against = against.map_or(1.0, |drive| -drive * nu.signum() / own);
     let codes = match (nu < 0.0, more) {
         (true, true) => [C::ReactantAdded, C::ReactantAddedBack],
         (true, false) => [C::ReactantRemoved, C::ReactantRemovedForward],
         (false, true) => [C::ProductAdded, C::ProductAddedForward],
         (false, false) => [C::ProductRemoved, C::ProductRemovedBack],
     };
+    // Only a fraction above which its thinning of the others weighs more can turn it round.
+    let turning = local.turning_fraction(species);
     let code = match against {
-        share if share.abs() <= BALANCED => C::ShareBalanced,
-        share if share < 0.0 => codes[1],
-        _ => codes[0],
+        share if turning.is_none() || share > BALANCED => codes[0],
+        share if share < -BALANCED => codes[1],
+        _ => C::ShareBalanced,
     };
-    let turning = if code == codes[0] { None } else { local.turning_fraction(species) };
+    let turning = turning.filter(|_| code != codes[0]);
     let fraction = turning.and_then(|_| local.fraction(species));
     Reason { fraction, turning_fraction: turning, ..Reason::of(code, species) }
 }

@@ -20,6 +20,7 @@ from pathlib import Path
 from mpmath import libmp, mp, mpf
 
 from rest import GAS_CONSTANT, Problem, number, solve
+from solution import SolutionProblem
 
 ANSWERS = Path(__file__).with_name("nudges_answers.tsv")
 STEP = Fraction(1, 10**22)
@@ -32,45 +33,48 @@ def exact(x):
 
 
 class Plant:
-    """A problem with dH in J/mol, whose knobs can be turned."""
+    """A problem with dH in J/mol, whose knobs can be turned; with charges, Davies' coefficients, and
+    with the water among the species its activity."""
 
-    def __init__(self, title, kinds, nu, amounts, ln_k, enthalpy, kelvin, pressure, volume):
+    def __init__(self, title, kinds, nu, amounts, ln_k, enthalpy, kelvin, charges=(), **held):
         self.title, self.kinds, self.nu, self.amounts = title, kinds, nu, amounts
         self.ln_k, self.enthalpy, self.kelvin = ln_k, enthalpy, kelvin
-        self.pressure, self.volume = pressure, volume
+        self.charges, self.held = list(charges), held
         self.now = self.rest(None, None)
 
     def rest(self, knob, value):
         """Outcome, extent and amounts at rest with one knob set; an inert stands at the end."""
-        kinds, nu = self.kinds, list(self.nu)
+        kinds, nu, charges = self.kinds, list(self.nu), list(self.charges)
         amounts = [Fraction(n) for n in self.amounts]
         kelvin, ln_k = Fraction(self.kelvin), Fraction(self.ln_k)
-        pressure = None if self.pressure is None else Fraction(self.pressure)
-        volume = None if self.volume is None else Fraction(self.volume)
+        held = {name: Fraction(x) for name, x in self.held.items()}
         if knob == "temperature":
             kelvin = Fraction(value)
             distance = 1 / kelvin - 1 / Fraction(self.kelvin)
             ln_k -= Fraction(self.enthalpy) / GAS_CONSTANT * distance
-        elif knob == "pressure":
-            pressure = Fraction(value)
-        elif knob == "volume":
-            volume = Fraction(value)
+        elif knob in ("pressure", "volume"):
+            held[knob] = Fraction(value)
         elif knob == "dilution":
-            volume *= Fraction(value)
+            held["water" if "water" in held else "volume"] *= Fraction(value)
         elif knob in ("inert at pressure", "inert at volume"):
-            kinds, nu = kinds + "g", nu + [0.0]
+            kinds, nu, charges = kinds + "g", nu + [0.0], charges and charges + [0]
             amounts.append(Fraction(value))
             gas = sum(exact(n) for n, k in zip(self.now[2], self.kinds) if k == "g")
             energy = gas * GAS_CONSTANT * Fraction(self.kelvin)
-            if knob == "inert at pressure" and pressure is None:
-                pressure, volume = energy / volume, None
-            elif knob == "inert at volume" and volume is None:
-                pressure, volume = None, energy / pressure
+            if knob == "inert at pressure" and "volume" in held:
+                held["pressure"] = energy / held.pop("volume")
+            elif knob == "inert at volume" and "pressure" in held:
+                held["volume"] = energy / held.pop("pressure")
         elif knob is not None:
             amounts[int(knob.split()[1])] = Fraction(value)
-        problem = Problem("", kinds, nu, amounts, ln_k, pressure, volume, kelvin)
+        held["kelvin"] = kelvin
+        if charges or "w" in kinds:
+            model, charges = ("davies", charges) if charges else ("ideal", [0] * len(nu))
+            problem = SolutionProblem("", kinds, nu, charges, amounts, ln_k, model, **held)
+        else:
+            problem = Problem("", kinds, nu, amounts, ln_k, **held)
         outcomes, at_rest, _ = solve(problem)
-        i = next(i for i, k in enumerate(kinds) if nu[i] != 0 and k != "a")
+        i = next(i for i, k in enumerate(kinds) if nu[i] != 0 and k not in "aw")
         extent = (at_rest[i] - number(amounts[i])) / number(nu[i])
         return outcomes[0], extent, at_rest
 
@@ -79,17 +83,15 @@ class Plant:
         gas = sum(n for n, k in zip(self.amounts, self.kinds) if k == "g")
         yield "temperature", self.kelvin, 5.0
         if "g" in self.kinds:
-            if self.pressure is not None:
-                yield "pressure", self.pressure, 0.05 * self.pressure
-            else:
-                yield "volume", self.volume, 0.05 * self.volume
+            name = "pressure" if "pressure" in self.held else "volume"
+            yield name, self.held[name], 0.05 * self.held[name]
             yield "inert at pressure", 0.0, 0.05 * gas
             yield "inert at volume", 0.0, 0.05 * gas
         if "s" in self.kinds:
             yield "dilution", 1.0, 0.1
         everything = sum(self.amounts)
         for i, (kind, n) in enumerate(zip(self.kinds, self.amounts)):
-            if kind in "gs":
+            if kind in "gsl":
                 yield f"amount {i}", n, 0.01 * everything
                 if self.nu[i] > 0 and n > 0:
                     yield f"amount {i}", n, -0.1 * n
@@ -110,8 +112,9 @@ class Plant:
 
     def text(self):
         show = lambda values: ",".join(repr(float(v)) for v in values)
-        hold = f"P={self.pressure!r}" if self.pressure is not None else f"V={self.volume!r}"
-        start = [self.title, self.kinds, show(self.nu), repr(self.kelvin), hold]
+        hold = ";".join(f"{name}={x!r}" for name, x in self.held.items())
+        charges = ",".join(map(str, self.charges)) or "-"
+        start = [self.title, self.kinds, charges, show(self.nu), repr(self.kelvin), hold]
         start += [show(self.amounts), repr(self.ln_k), repr(self.enthalpy), self.now[0]]
         for knob, step, slope, outcome, change in self.rows():
             # A difference below 1e-44 is what is left of rounding: it is zero.
@@ -137,27 +140,43 @@ def plants():
         ("acid", "sss", [-1.0, 1.0, 1.0], 4e3),
         ("pairing", "sss", [-2.0, 1.0, 0.0], -20e3),
         ("odd numbers", "ggg", [-0.7, 1.3, 0.3], 12e3),
+        ("ester", "llll", [-1.0, -1.0, 1.0, 1.0], -5e3),
+        ("pairs in a liquid", "lll", [-2.0, 1.0, 0.0], -30e3),
+        ("acid by molality", "sss", [-1.0, 1.0, 1.0], 4e3),
+        ("dissolving gas", "gsg", [-1.0, 1.0, 0.0], -20e3),
+        ("gas that reacts with water", "gwssg", [-1.0, -1.0, 1.0, 1.0, 0.0], -10e3),
+        ("gas beside a liquid", "gllg", [-1.0, -1.0, 1.0, 0.0], -60e3),
     ]
     for title, kinds, nu, enthalpy in reactions:
         for turn in range(5):
             amounts = [rounded(10 ** draw.uniform(-2, 1)) for _ in kinds]
             kelvin = rounded(draw.uniform(300, 1200))
             ln_k = rounded(draw.uniform(-6, 6))
-            pressure, volume = rounded(10 ** draw.uniform(4, 7)), None
-            if "s" in kinds or turn % 2:
-                pressure, volume = None, rounded(10 ** draw.uniform(-3, 0))
-            yield Plant(title, kinds, nu, amounts, ln_k, enthalpy, kelvin, pressure, volume)
+            held = {"pressure": rounded(10 ** draw.uniform(4, 7))}
+            wet = "w" in kinds or "g" in kinds and "s" in kinds or "molality" in title
+            if turn % 2 or kinds.strip("s") == "":
+                held = {"volume": rounded(10 ** draw.uniform(-3, 0))}
+            if wet:
+                kelvin = rounded(draw.uniform(280, 400))
+                held = held if "g" in kinds else {}
+                held["water"] = rounded(10 ** draw.uniform(-1, 1))
+            yield Plant(title, kinds, nu, amounts, ln_k, enthalpy, kelvin, **held)
+    brine = ("acid in brine", "sssss", [-1.0, 1.0, 1.0, 0.0, 0.0])
+    for salt in (0.01, 0.3):
+        amounts = [0.05, 1e-4, 2e-3, salt, salt]
+        charges = [0, 1, -1, 1, -1]
+        yield Plant(*brine, amounts, -10.95, -0.4e3, 298.15, charges, water=1.0)
+    salt = ("salt with its water", "pssw", [-1.0, 1.0, 1.0, 2.0])
+    yield Plant(*salt, [1.0, 1e-3, 2e-3, 0.0], -10.5, -0.5e3, 310.0, [0, 2, -2, 0], water=2.0)
     extreme = dict(kinds="ggg", nu=[-1.0, 1.0, 0.0], enthalpy=-40e3, kelvin=600.0)
     for ln_k in (-60.0, -30.0, 30.0, 60.0):
         amounts = [1.0, 0.5, 2.0]
-        yield Plant(
-            "far to one side", amounts=amounts, ln_k=ln_k, pressure=3e5, volume=None, **extreme
-        )
+        yield Plant("far to one side", amounts=amounts, ln_k=ln_k, pressure=3e5, **extreme)
 
 
 def main():
     lines = [
-        "# title, kinds, nu, T/K, hold, n/mol, ln K, dH/(J/mol), outcome, "
+        "# title, kinds, z, nu, T/K, hold, n/mol, ln K, dH/(J/mol), outcome, "
         "knob, step, dxi/dknob, outcome after, change of xi"
     ]
     for plant in plants():
