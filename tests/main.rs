@@ -23,6 +23,7 @@ mod laws_solution;
 mod library;
 mod library_constants;
 mod mistakes;
+mod mixtures;
 mod quantity;
 mod quantity_show;
 mod quantity_units;

@@ -41,6 +41,7 @@ pub use bare::{BareProblem, BareReaction, BareRest, BareSpecies, BareSpeciesAtRe
 pub use bare::{affinities, rest_of};
 pub use limits::{AMOUNT_MAX_MOL, CHARGE_MAX, ION_SIZE_MAX_PM, ION_SIZE_MIN_PM};
 pub use limits::{LN_K_MAX, NU_MAX, NU_MIN, SPECIES_MAX};
+pub use nonideal::ln_q_correction;
 pub use outcome::{Rest, RestOutcome, Summary, Workspace};
 pub use quotient::{Affinity, Quotient, affinity, quotient};
 pub use rest::{rest, rest_into};
