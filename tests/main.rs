@@ -33,3 +33,4 @@ mod rest_solution;
 mod rooms;
 mod saturation;
 mod solution;
+mod valley_mixtures;
