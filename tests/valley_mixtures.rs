@@ -4,6 +4,9 @@ use shiftgauge::advice::{Stretch, valley};
 use shiftgauge::equilibrium::{Affinity, Hold, Kind, State, System, affinity, rest};
 use shiftgauge::mixture::{Ion, SolutionModel};
 
+/// What it is, kinds, ν, hold, ln K.
+type Row<'a> = (&'a str, &'a [Kind], [f64; 5], Hold, f64);
+
 #[test]
 fn the_slope_of_the_valley_is_minus_the_affinity_and_its_floor_is_rest() {
     use Kind::{Ample, Gas, Liquid, Solute, Solvent};
@@ -15,7 +18,7 @@ fn the_slope_of_the_valley_is_minus_the_affinity_and_its_floor_is_rest() {
     let absorbed = [Gas, Solvent, Solute, Solute, Gas];
     let dissolved = [Ample, Solute, Solute, Solute, Solute];
     let boiling = [Liquid, Gas, Gas, Liquid, Ample];
-    let rows: [(&str, &[Kind], [f64; 5], Hold, f64); 6] = [
+    let rows: [Row; 6] = [
         ("ester", &ester, [-1.0, -1.0, 1.0, 1.0, 0.0], pressure, 1.4),
         ("absorbed", &absorbed, [-1.0, -1.0, 1.0, 1.0, 0.0], both, -3.0),
         ("absorbed from a volume", &absorbed, [-1.0, -1.0, 1.0, 1.0, 0.0], gas_volume, -3.0),

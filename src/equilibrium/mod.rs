@@ -10,6 +10,7 @@
 //! | --- | --- |
 //! | `limits` | the ranges of numbers that are worked with |
 //! | `system` | kinds of species and one reaction among them |
+//! | `system_check` | the mistakes that a system can be given |
 //! | `state` | temperature, hold, amounts |
 //! | `quotient` | Q and the affinity, with names for their open ends |
 //! | `walls` | how far the reaction can run each way |
@@ -34,6 +35,7 @@ mod side;
 mod solve;
 mod state;
 mod system;
+mod system_check;
 mod walls;
 
 pub use activity::{Activities, SolutionState, activities};
