@@ -18,8 +18,9 @@ use crate::problem::Outcome;
 ///
 /// The amounts minimise G (or A at constant volume) along ξ: ln K = Σ ν_i ln a_i, or a pure phase
 /// is used up first. For ideal mixtures there is one such state. With activity coefficients there is
-/// one wherever the solution does not fall into two by its model (charges up to three are safe);
-/// where it does, the one is taken whose Σ ν_i ln γ_i is met first on the way from that of the start.
+/// one unless the solution would fall into two by its model (not with charges up to two and ions of
+/// usual size, nor up to three by Davies' equation below 100 °C); then the one is taken whose
+/// Σ ν_i ln γ_i is met first on the way from that of the start.
 ///
 /// It is sought in the logarithm of
 /// the distance from the nearer limit of ξ, so that traces are as good as main components: on 848
