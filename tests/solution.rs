@@ -45,12 +45,12 @@ fn the_permittivity_of_water_is_the_one_measured() {
 
 /// Source: 0.5091 at 25 °C, R. A. Robinson and R. H. Stokes, Electrolyte Solutions (2nd ed., 1959).
 /// The others from A_φ = 0.3764, 0.3915, 0.4103, 0.4606 of D. G. Archer and P. Wang, J. Phys. Chem.
-/// Ref. Data 19 (1990) 371, from memory, times 3/ln 10; 0.8 % allowed for the memory.
+/// Ref. Data 19 (1990) 371, from memory, times 3/ln 10; 0.002 allowed for the memory.
 #[test]
 fn the_debye_hueckel_slope_is_the_published_one() {
     let a = |t| debye_hueckel(t).unwrap().a_log10;
     compare(&[(25.0, 0.5091)], 0.002, a, "A");
-    compare(&[(0.0, 0.4904), (25.0, 0.5101), (50.0, 0.5346), (100.0, 0.6001)], 0.0045, a, "A");
+    compare(&[(0.0, 0.4904), (25.0, 0.5101), (50.0, 0.5346), (100.0, 0.6001)], 0.002, a, "A");
     // The same book: B = 0.3286 per ångström at 25 °C.
     compare(&[(25.0, 3.286e9)], 0.01e9, |t| debye_hueckel(t).unwrap().b_per_m, "B");
 }

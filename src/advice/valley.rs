@@ -1,6 +1,6 @@
 //! The valley: the energy that falls until the mixture is at rest, drawn against the extent.
 
-use crate::equilibrium::{Affinity, Kind, State, System, affinity};
+use crate::equilibrium::{Affinity, Kind, State, System, affinity, ln_q_correction};
 use crate::quantity::{
     GAS_CONSTANT_J_PER_MOL_K, STANDARD_CONCENTRATION_MOL_PER_M3, STANDARD_PRESSURE_PA,
 };
@@ -52,18 +52,18 @@ const NEAR_POINTS: u16 = 48;
 /// A closer look is worth it when now and rest are nearer than this share of the whole.
 const NEAR_SHARE: f64 = 0.12;
 
-/// Draws the valley between two extents; nothing if they are not apart, or if activity coefficients
-/// come in.
+/// Draws the valley between two extents; nothing if they are not apart.
 ///
 /// The energy over RT is Σ n_i ln a_i − ξ ln K over what follows fractions (a gas at constant
 /// pressure, a liquid mixture) and Σ n_i (ln a_i − 1) − ξ ln K over what follows amounts (a gas at
-/// constant volume, solutes); pure phases have ln a = 0. Up to a constant its slope is −A/RT. The closer look integrates the affinity instead, so
+/// constant volume, solutes); pure phases have ln a = 0. Activity coefficients and the activity of the
+/// solvent add ∫ Σ ν_i ln γ_i dξ. Up to a constant the slope is −A/RT. The closer look integrates the affinity instead, so
 /// that nothing cancels when now is nearly at rest.
 #[must_use]
 pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Option<Valley> {
     let Stretch { from_mol, to_mol, rest_mol } = stretch;
     let width = to_mol - from_mol;
-    if !(width > 0.0 && width.is_finite()) || system.is_corrected() {
+    if !(width > 0.0 && width.is_finite()) {
         return None;
     }
     let energy = match state.hold.volume_m3() {
@@ -84,8 +84,12 @@ pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Op
         }
     }
     extent_mol.dedup();
-    let values: Vec<f64> = extent_mol.iter().map(|extent| at(*extent)).collect();
-    let lowest = values.iter().copied().fold(at(rest_mol), f64::min);
+    let mut values: Vec<f64> = extent_mol.iter().map(|extent| at(*extent)).collect();
+    let mut lowest = values.iter().copied().fold(at(rest_mol), f64::min);
+    if system.is_corrected() {
+        add_corrections(system, state, &extent_mol, &mut values)?;
+        lowest = values.iter().copied().fold(f64::INFINITY, f64::min);
+    }
     let energy_over_rt: Vec<f64> = values.iter().map(|value| value - lowest).collect();
     if !energy_over_rt.iter().all(|value| value.is_finite()) {
         return None;
@@ -93,6 +97,29 @@ pub fn valley(system: &System, state: &State, ln_k: f64, stretch: Stretch) -> Op
     let whole = Curve { extent_mol, energy_over_rt };
     let near = near(system, state, ln_k, stretch);
     Some(Valley { energy, whole, near })
+}
+
+/// Adds the integral of what activity coefficients add to ln Q, by Simpson's rule from point to
+/// point: it is smooth where the energy is not.
+fn add_corrections(
+    system: &System,
+    state: &State,
+    extent_mol: &[f64],
+    values: &mut [f64],
+) -> Option<()> {
+    let at = |extent: f64| {
+        let amounts = moved(system, state, extent);
+        ln_q_correction(system, &State { amounts_mol: &amounts, ..*state }).ok()
+    };
+    let mut sum = 0.0;
+    let mut left = at(*extent_mol.first()?)?;
+    for (place, pair) in extent_mol.windows(2).enumerate() {
+        let (middle, right) = (at(0.5 * (pair[0] + pair[1]))?, at(pair[1])?);
+        sum += (pair[1] - pair[0]) / 6.0 * (left + 4.0 * middle + right);
+        values[place + 1] += sum;
+        left = right;
+    }
+    Some(())
 }
 
 /// Maps 0..1 on itself so that points crowd at both ends, where the curve is steep.

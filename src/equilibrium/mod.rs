@@ -10,6 +10,7 @@
 //! | --- | --- |
 //! | `limits` | the ranges of numbers that are worked with |
 //! | `system` | kinds of species and one reaction among them |
+//! | `system_check` | the mistakes that a system can be given |
 //! | `state` | temperature, hold, amounts |
 //! | `quotient` | Q and the affinity, with names for their open ends |
 //! | `walls` | how far the reaction can run each way |
@@ -34,6 +35,7 @@ mod side;
 mod solve;
 mod state;
 mod system;
+mod system_check;
 mod walls;
 
 pub use activity::{Activities, SolutionState, activities};
@@ -41,6 +43,7 @@ pub use bare::{BareProblem, BareReaction, BareRest, BareSpecies, BareSpeciesAtRe
 pub use bare::{affinities, rest_of};
 pub use limits::{AMOUNT_MAX_MOL, CHARGE_MAX, ION_SIZE_MAX_PM, ION_SIZE_MIN_PM};
 pub use limits::{LN_K_MAX, NU_MAX, NU_MIN, SPECIES_MAX};
+pub use nonideal::ln_q_correction;
 pub use outcome::{Rest, RestOutcome, Summary, Workspace};
 pub use quotient::{Affinity, Quotient, affinity, quotient};
 pub use rest::{rest, rest_into};

@@ -15,6 +15,7 @@ use crate::mixture::SolutionLaw;
 use crate::mixture::SolutionModel;
 use crate::mixture::ionic_strength_mol_per_kg;
 use crate::numeric::root_between;
+use crate::problem::Outcome;
 
 /// Each solute and its molality, inert ones too.
 pub(super) fn molalities(
@@ -32,6 +33,18 @@ const MOLALITY_MOST: f64 = 1e290;
 
 fn molality(amount_mol: f64, water_kg: f64) -> f64 {
     (amount_mol / water_kg).min(MOLALITY_MOST)
+}
+
+/// What activity coefficients and the water's activity add to ln Q of a state:
+/// Σ ν_i ln γ_i + ν_w ln a_w.
+///
+/// Zero for an ideal system without its solvent in the reaction, and where no mass of water is held.
+///
+/// # Errors
+/// As [`State::check`].
+pub fn ln_q_correction(system: &System, state: &State) -> Outcome<f64> {
+    state.check(system)?;
+    Ok(correction(system, state, state.amounts_mol))
 }
 
 /// Σ ν_i ln γ_i + ν_w ln a_w of a state that has been checked; zero where no mass of water is held.

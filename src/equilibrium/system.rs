@@ -1,12 +1,9 @@
 //! The kinds of species, and one reaction among them.
 
-use super::limits::{CHARGE_MAX, ION_SIZE_MAX_PM, ION_SIZE_MIN_PM};
-use super::limits::{NU_MAX, NU_MIN, SPECIES_MAX};
+use super::system_check::{check_ions, check_reaction};
 use crate::mixture::Ion;
 use crate::mixture::SolutionModel;
-use crate::problem::EquilibriumCode;
 use crate::problem::Outcome;
-use crate::problem::Problem;
 
 /// What decides the activity of a species.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, Hash)]
@@ -112,10 +109,10 @@ impl System {
     ///
     /// # Errors
     /// `lengths-differ` unless there are as many numbers as kinds; `too-many-species` above
-    /// [`SPECIES_MAX`]; `number-not-finite`; `nu-out-of-range` unless 0 or
-    /// [`NU_MIN`] ≤ |ν| ≤ [`NU_MAX`]; `nothing-reacts` when every ν is zero; `liquid-with-solutes`.
+    /// [`super::SPECIES_MAX`]; `number-not-finite`; `nu-out-of-range` unless 0 or
+    /// [`super::NU_MIN`] ≤ |ν| ≤ [`super::NU_MAX`]; `nothing-reacts` when every ν is zero; `liquid-with-solutes`.
     pub fn new(kinds: &[Kind], nu: &[f64]) -> Outcome<System> {
-        let problems = check(kinds, nu);
+        let problems = check_reaction(kinds, nu);
         if !problems.is_empty() {
             return Err(problems);
         }
@@ -169,8 +166,8 @@ impl System {
     /// water in the state's hold.
     ///
     /// # Errors
-    /// `lengths-differ`; `charge-out-of-range` unless |z| ≤ [`CHARGE_MAX`];
-    /// `ion-size-out-of-range` unless [`ION_SIZE_MIN_PM`] ≤ å ≤ [`ION_SIZE_MAX_PM`].
+    /// `lengths-differ`; `charge-out-of-range` unless |z| ≤ [`super::CHARGE_MAX`];
+    /// `ion-size-out-of-range` unless [`super::ION_SIZE_MIN_PM`] ≤ å ≤ [`super::ION_SIZE_MAX_PM`].
     ///
     /// ```
     /// use shiftgauge::equilibrium::{Kind, System};
@@ -189,10 +186,7 @@ impl System {
         }
         self.ions = ions.to_vec();
         self.model = model;
-        let solutes = self.parts.iter().any(|part| part.kind == Kind::Solute);
-        self.plain = self.parts.len() < 2
-            && self.solvent_nu == 0.0
-            && (model == SolutionModel::Ideal || !solutes);
+        self.plain = self.parts.len() < 2 && !self.is_corrected();
         Ok(self)
     }
 
@@ -239,86 +233,4 @@ impl System {
     pub(super) fn reacts(&self, kind: Kind) -> bool {
         self.parts.iter().any(|part| part.kind == kind)
     }
-}
-
-fn check(kinds: &[Kind], nu: &[f64]) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    if kinds.len() != nu.len() {
-        problems.push(
-            Problem::new(EquilibriumCode::LengthsDiffer)
-                .with("what", "stoichiometric numbers")
-                .with("found", nu.len().to_string())
-                .with("expected", kinds.len().to_string())
-                .at("nu"),
-        );
-    }
-    if kinds.len() > SPECIES_MAX {
-        problems.push(
-            Problem::new(EquilibriumCode::TooManySpecies)
-                .with("found", kinds.len().to_string())
-                .with("most", SPECIES_MAX.to_string())
-                .at("species"),
-        );
-    }
-    for (place, &nu) in nu.iter().enumerate() {
-        let field = format!("nu[{place}]");
-        if !nu.is_finite() {
-            problems.push(Problem::new(EquilibriumCode::NotFinite).at(&field));
-        } else if nu != 0.0 && !(NU_MIN..=NU_MAX).contains(&nu.abs()) {
-            problems.push(
-                Problem::new(EquilibriumCode::NuOutOfRange)
-                    .with("found", format!("{nu:?}"))
-                    .with("least", format!("{NU_MIN:?}"))
-                    .with("most", format!("{NU_MAX:?}"))
-                    .at(&field),
-            );
-        }
-    }
-    if nu.iter().all(|&nu| nu == 0.0) {
-        problems.push(Problem::new(EquilibriumCode::NothingReacts).at("nu"));
-    }
-    if kinds.contains(&Kind::Liquid) && kinds.iter().any(|kind| in_water(*kind)) {
-        problems.push(Problem::new(EquilibriumCode::LiquidWithSolutes).at("species"));
-    }
-    problems
-}
-
-fn in_water(kind: Kind) -> bool {
-    matches!(kind, Kind::Solute | Kind::Solvent)
-}
-
-fn check_ions(kinds: &[Kind], ions: &[Ion]) -> Vec<Problem> {
-    let mut problems = Vec::new();
-    if kinds.len() != ions.len() {
-        problems.push(
-            Problem::new(EquilibriumCode::LengthsDiffer)
-                .with("what", "ions")
-                .with("found", ions.len().to_string())
-                .with("expected", kinds.len().to_string())
-                .at("ions"),
-        );
-    }
-    for (place, (ion, kind)) in ions.iter().zip(kinds).enumerate() {
-        if *kind != Kind::Solute {
-            continue;
-        }
-        if ion.charge.unsigned_abs() > CHARGE_MAX.unsigned_abs() {
-            problems.push(
-                Problem::new(EquilibriumCode::ChargeOutOfRange)
-                    .with("found", ion.charge.to_string())
-                    .with("most", CHARGE_MAX.to_string())
-                    .at(&format!("ions[{place}].charge")),
-            );
-        }
-        if !(ION_SIZE_MIN_PM..=ION_SIZE_MAX_PM).contains(&ion.size_pm) {
-            problems.push(
-                Problem::new(EquilibriumCode::IonSizeOutOfRange)
-                    .with("found", format!("{:?}", ion.size_pm))
-                    .with("least", format!("{ION_SIZE_MIN_PM:?}"))
-                    .with("most", format!("{ION_SIZE_MAX_PM:?}"))
-                    .at(&format!("ions[{place}].size_pm")),
-            );
-        }
-    }
-    problems
 }
