@@ -2,7 +2,7 @@
 
 import * as glue from './shiftgauge.js';
 
-/** @import { BalanceAnswer, Case, CheckAnswer, SpeciesMatch } from './shiftgauge.js' */
+/** @import { BalanceAnswer, Case, CheckAnswer, ConvertAnswer, Goal, SpeciesMatch, StatedNumber, SweepAnswer, SweepRequest, TargetAnswer } from './shiftgauge.js' */
 
 /** @type {WebAssembly.Module | null} */
 let compiled = null;
@@ -49,6 +49,32 @@ export function restartEngine() {
  */
 export function check(question) {
   return glue.check(question, { language: 'en', units: 'as typed' });
+}
+
+/**
+ * @param {Case} question
+ * @param {SweepRequest} request
+ * @returns {SweepAnswer}
+ */
+export function sweep(question, request) {
+  return glue.sweep(question, request, { language: 'en', units: 'as typed' });
+}
+
+/**
+ * @param {Case} question
+ * @param {Goal} goal
+ * @returns {TargetAnswer}
+ */
+export function target(question, goal) {
+  return glue.target(question, goal, { language: 'en', units: 'as typed' });
+}
+
+/**
+ * @param {StatedNumber} number
+ * @returns {ConvertAnswer}
+ */
+export function convert(number) {
+  return glue.convert(number);
 }
 
 /**

@@ -13,6 +13,13 @@ import { render } from './render.js';
 import { caseFromText, caseToText, createState, withoutField } from './state.js';
 import { attachAll } from './units.js';
 import * as cases from './views/cases.js';
+import * as certainty from './views/certainty.js';
+import * as charts from './views/charts.js';
+import * as compare from './views/compare.js';
+import * as convert from './views/convert.js';
+import * as extras from './views/extras.js';
+import * as nudges from './views/nudges.js';
+import * as target from './views/target.js';
 import * as conditions from './views/conditions.js';
 import * as constant from './views/constant.js';
 import * as feed from './views/feed.js';
@@ -41,7 +48,7 @@ import * as working from './views/working.js';
 /** @import { State } from './state.js' */
 
 const inputs = [heading, reaction, constant, conditions, gas, solids, solution, feed];
-const views = [...inputs, verdict, valley, ledger, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
+const views = [...inputs, verdict, valley, certainty, ledger, nudges, extras, charts, target, compare, convert, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
 const notice = byId('notice', HTMLElement);
 
 const state = createState(

@@ -1,6 +1,7 @@
 /** Problems at their fields, with a list of all of them at the answer. */
 
 import { byId, create } from '../dom.js';
+import { findField } from '../find-field.js';
 import { reveal } from '../folds.js';
 
 /** @import { Problem } from '../shiftgauge.js' */
@@ -79,20 +80,6 @@ function place(problem, index) {
 function lineOf({ field: path }, field) {
   const line = field instanceof HTMLTextAreaElement ? /\[(\d+)\](?:\[\d+\])?$/.exec(path)?.[1] : undefined;
   return line === undefined ? '' : `Line ${Number(line) + 1}: `;
-}
-
-/**
- * The visible element of this path, or of the nearest path above it.
- * @param {string} path
- * @returns {HTMLElement | null}
- */
-function findField(path) {
-  for (let at = path; at !== ''; at = at.replace(/(?:^|\.)[^.[\]]+$|\[\d+\]$/, '')) {
-    for (const found of document.querySelectorAll(`[data-field~="${CSS.escape(at.replaceAll(' ', '_'))}"]`)) {
-      if (found instanceof HTMLElement && found.closest('[hidden]') === null) return found;
-    }
-  }
-  return null;
 }
 
 /**

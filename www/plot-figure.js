@@ -1,0 +1,105 @@
+/** A chart in the page: its drawing, a slider as the cursor, the values under it, and a table behind. */
+
+import { drawPlot } from './chart/plot.js';
+import { create, part } from './dom.js';
+
+/** @import { Plot, PlotScene } from './chart/plot.js' */
+
+/**
+ * @typedef {object} Told
+ * @property {(at: number) => string} x          the value of x at a place, with its unit
+ * @property {(value: number) => string} y       a value of y, with its unit
+ * @property {string} head                       the heading of x in the table
+ */
+
+/**
+ * Makes a chart of the parts of this figure.
+ * @param {HTMLElement} root
+ */
+export function plotFigure(root) {
+  const drawing = part(root, 'drawing', HTMLElement);
+  const words = part(root, 'words', HTMLElement);
+  const slider = part(root, 'cursor', HTMLInputElement);
+  const values = part(root, 'values', HTMLElement);
+  const table = part(root, 'table', HTMLElement);
+  const copy = part(root, 'copy', HTMLButtonElement);
+  /** @type {{ scene: PlotScene, told: Told } | null} */
+  let shown = null;
+  /** @type {Plot | null} */
+  let plot = null;
+  let width = 0;
+
+  function draw() {
+    if (shown === null || width === 0) return;
+    plot = drawPlot(shown.scene, Math.max(260, width));
+    drawing.replaceChildren(plot.svg);
+    move();
+  }
+
+  function move() {
+    if (shown === null) return;
+    const { scene, told } = shown;
+    const at = Math.min(Number(slider.value), scene.x.length - 1);
+    plot?.point(at);
+    const each = scene.lines.map(({ name, y }) => {
+      const value = y[at] ?? null;
+      return `${name === '' ? '' : `${name}: `}${value === null ? 'none' : told.y(value)}`;
+    });
+    values.textContent = `${told.x(at)} – ${each.join('; ')}`;
+    slider.setAttribute('aria-valuetext', values.textContent);
+  }
+
+  /** Every tenth point, and the last. */
+  function rows() {
+    if (shown === null) return [];
+    const { scene, told } = shown;
+    const step = Math.max(1, Math.round(scene.x.length / 20));
+    const places = scene.x.map((_, at) => at).filter((at) => at % step === 0 || at === scene.x.length - 1);
+    const head = [told.head, ...scene.lines.map(({ name }) => name || scene.labels.y)];
+    return [head, ...places.map((at) => [told.x(at), ...scene.lines.map(({ y }) => {
+      const value = y[at] ?? null;
+      return value === null ? '–' : told.y(value);
+    })])];
+  }
+
+  new ResizeObserver(([entry]) => {
+    const found = Math.round(entry?.contentRect.width ?? 0);
+    if (found === width || found === 0) return;
+    width = found;
+    draw();
+  }).observe(drawing);
+  slider.addEventListener('input', move);
+  for (const kind of /** @type {const} */ (['pointermove', 'pointerdown'])) {
+    drawing.addEventListener(kind, (event) => {
+      if (plot === null) return;
+      const box = plot.svg.getBoundingClientRect();
+      slider.value = String(plot.nearest(((event.clientX - box.left) / box.width) * Math.max(260, width)));
+      move();
+    });
+  }
+  copy.addEventListener('click', () => {
+    const text = rows().map((row) => row.join('\t')).join('\n');
+    void navigator.clipboard?.writeText(text).then(() => { copy.textContent = 'Copied'; }, () => { copy.textContent = 'Not allowed here'; });
+  });
+
+  return {
+    /**
+     * @param {PlotScene} scene
+     * @param {Told} told
+     * @param {number} at   where the cursor stands at first
+     */
+    show(scene, told, at) {
+      const first = shown === null || shown.scene.x.length !== scene.x.length;
+      shown = { scene, told };
+      slider.max = String(scene.x.length - 1);
+      if (first) slider.value = String(at);
+      words.textContent = scene.words.description;
+      copy.textContent = 'Copy the table';
+      const [head, ...body] = rows();
+      table.replaceChildren(
+        create('thead', {}, create('tr', {}, ...(head ?? []).map((cell) => create('th', { scope: 'col' }, cell)))),
+        create('tbody', {}, ...body.map(([x, ...cells]) => create('tr', {}, create('th', { scope: 'row' }, x ?? ''), ...cells.map((cell) => create('td', {}, cell))))));
+      draw();
+    },
+  };
+}
