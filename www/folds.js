@@ -21,5 +21,11 @@ export function reveal(element) {
 
 /** Folds every part again: for a case that comes in the place of another. */
 export function foldAll() {
-  for (const fold of document.querySelectorAll('details.fold')) if (fold instanceof HTMLDetailsElement) fold.open = false;
+  for (const fold of document.querySelectorAll('#inputs details.fold')) if (fold instanceof HTMLDetailsElement) fold.open = false;
+}
+
+/** On a narrow screen the longer parts of the answer are folded until they are wanted. */
+export function foldWhereNarrow() {
+  if (!window.matchMedia('(max-width: 699.98px)').matches) return;
+  for (const fold of document.querySelectorAll('details[data-fold="wide"]')) if (fold instanceof HTMLDetailsElement) fold.open = false;
 }

@@ -4,7 +4,7 @@ import { balance, check, isSupported, restartEngine, startEngine, versionLine } 
 import { byId } from './dom.js';
 import { listen } from './events.js';
 import { firstCase } from './examples.js';
-import { foldAll } from './folds.js';
+import { foldAll, foldWhereNarrow } from './folds.js';
 import { createMemory } from './memory.js';
 import { forget, keep, recall } from './recall.js';
 import { textFromHash } from './link.js';
@@ -50,6 +50,7 @@ import * as working from './views/working.js';
 const inputs = [heading, reaction, constant, conditions, gas, solids, solution, feed];
 const views = [...inputs, verdict, valley, certainty, ledger, nudges, extras, charts, target, compare, convert, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
 const notice = byId('notice', HTMLElement);
+foldWhereNarrow();
 
 const state = createState(
   /** @type {State} */ ({ question: firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),

@@ -121,7 +121,9 @@ function drawLine(scene, line, index, x, y, width) {
     else runs.at(-1)?.push([x(scene.x[at] ?? 0), y(value)]);
   });
   const drawn = runs.filter((run) => run.length > 1);
-  const last = drawn.at(-1)?.at(-1);
+  // At its right end, whichever way x runs.
+  const ends = [drawn[0]?.[0], drawn.at(-1)?.at(-1)].filter((end) => end !== undefined);
+  const last = ends.sort((a, b) => b[0] - a[0])[0];
   const inside = last === undefined ? [] : [createSvg('text', { class: 'line-label', x: Math.min(last[0], width - MARGIN.right) - 4, y: last[1] - 6, 'text-anchor': 'end' }, line.name)];
   return [
     ...drawn.map((run) => createSvg('path', { class: line.thin ? 'line thin' : 'line', d: path(run), 'stroke-dasharray': DASHES[index % DASHES.length] ?? '' })),

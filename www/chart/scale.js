@@ -7,6 +7,7 @@ import { linear, ticks } from './axes.js';
 const HEIGHT = 96;
 const MARGIN = { left: 16, right: 16 };
 const LINE = 52;
+const LABEL_ROOM = 130;
 
 /**
  * @typedef {object} ScaleScene
@@ -29,7 +30,8 @@ export function drawScale(scene, width) {
   const x = linear([-reach, reach], [MARGIN.left, width - MARGIN.right]);
   const along = ticks(-reach, reach, width < 420 ? 4 : 8);
   const [low, high] = [ends[0] === null ? -reach : ends[0], ends[1] === null ? reach : ends[1]];
-  const left = value < 0;
+  // The figure's label stands on the side away from rest, unless the border is too near.
+  const left = value < 0 ? x(value) > LABEL_ROOM : x(value) > width - LABEL_ROOM;
   return createSvg('svg', { class: 'scale-svg', viewBox: `0 0 ${width} ${HEIGHT}`, role: 'img', 'aria-labelledby': 'scale-svg-title scale-svg-text' },
     createSvg('title', { id: 'scale-svg-title' }, scene.title),
     createSvg('desc', { id: 'scale-svg-text' }, scene.description),
@@ -40,11 +42,11 @@ export function drawScale(scene, width) {
       createSvg('text', { class: 'tick', x: x(tick), y: LINE + 38, 'text-anchor': 'middle' }, `${fixed(tick, along.decimals)}${tick === along.values.at(-1) ? ` ${scene.unit}` : ''}`),
     ]),
     createSvg('line', { class: 'zero', x1: x(0), x2: x(0), y1: LINE - 30, y2: LINE + 22 }),
-    createSvg('text', { class: 'flag rest', x: x(0), y: 12, 'text-anchor': left ? 'start' : 'end' }, scene.labels.zero),
+    createSvg('text', { class: 'flag rest', x: x(0), y: 12, 'text-anchor': value < 0 ? 'start' : 'end' }, scene.labels.zero),
     createSvg('line', { class: 'interval', x1: x(low), x2: x(high), y1: LINE, y2: LINE }),
     ...[[ends[0], low, -1], [ends[1], high, 1]].map(([end, at, side]) => drawEnd(x(Number(at)), end === null, Number(side))),
     createSvg('circle', { class: 'now-mark', cx: x(value), cy: LINE, r: 6 }),
-    createSvg('text', { class: 'flag now', x: x(value), y: LINE - 14, 'text-anchor': left ? 'end' : 'start' }, scene.labels.value),
+    createSvg('text', { class: 'flag now', x: x(value), y: LINE - 16, 'text-anchor': left ? 'end' : 'start' }, scene.labels.value),
   );
 }
 

@@ -3,6 +3,7 @@
 import { sweep } from '../engine.js';
 import { byId, create } from '../dom.js';
 import { NO_BREAK, fixed, significant, speciesName, temperature, temperatureUnit } from '../format.js';
+import { numbersOfRest } from '../numbers-of-rest.js';
 import { plotFigure } from '../plot-figure.js';
 
 /** @import { Case, Report, SweepRequest, Wanted } from '../shiftgauge.js' */
@@ -22,6 +23,8 @@ const idle = window.requestIdleCallback?.bind(window) ?? ((/** @type {() => void
 /** @type {{ report: Report, answered: Case } | null} */
 let shown = null;
 let turn = 0;
+const fold = /** @type {HTMLDetailsElement} */ (section.querySelector('details'));
+fold.addEventListener('toggle', later);
 
 for (const control of [show, along]) control.addEventListener('change', later);
 
@@ -36,12 +39,9 @@ export function render({ report, answered, current }) {
 }
 
 /** What can be shown: the conversion of each reactant that is there, the fraction of each gas or liquid. */
-function offer(/** @type {Report} */ { species, conversions }) {
+function offer(/** @type {Report} */ report) {
   const before = show.value;
-  const options = [
-    ...conversions.filter(({ now_to_rest: now }) => now !== null).map(({ species: name }) => ({ value: `conversion ${name}`, text: `conversion of ${speciesName(name)}` })),
-    ...species.filter(({ nu, rest_fraction: fraction }) => nu !== 0 && fraction !== null).map(({ species: name }) => ({ value: `fraction ${name}`, text: `fraction of ${speciesName(name)}` })),
-  ];
+  const options = numbersOfRest(report);
   show.replaceChildren(...options.map(({ value, text }) => create('option', { value }, text)));
   if (options.some(({ value }) => value === before)) show.value = before;
 }
@@ -50,7 +50,7 @@ function later() {
   turn += 1;
   const mine = turn;
   idle(() => {
-    if (mine === turn) draw();
+    if (mine === turn && fold.open) draw();
   });
 }
 
@@ -59,6 +59,7 @@ function draw() {
   const { report, answered } = shown;
   const unit = temperatureUnit(answered.temperature);
   const [what = 'conversion', ...name] = show.value.split(' ');
+  byId('chart-rest', HTMLElement).hidden = show.value === '';
   if (show.value !== '') drawRest(report, answered, unit, /** @type {Wanted} */ ({ what, species: name.join(' ') }));
   drawConstant(report, answered, unit);
 }
@@ -106,25 +107,29 @@ function drawRest(report, answered, unit, wanted) {
   const byPressure = x.knob === 'pressure';
   /** @param {number} value */
   const place = (value) => (byPressure ? value / 1e5 : inUnit(value, unit));
+  const factor = wanted.what === 'amount' ? 1 : 100;
+  const title = wanted.what === 'fraction' ? 'Fraction' : wanted.what === 'amount' ? 'Amount' : 'Conversion';
+  const end = title !== 'Conversion' ? 'at rest' : report.balance === null ? 'from now to rest' : 'from the feed to rest';
+  const yUnit = wanted.what === 'amount' ? 'mol' : '%';
   /** @param {number} si */
   const setting = (si) => (byPressure ? temperature(si, unit, 0) : `${significant(si / 1e5, 3)}${NO_BREAK}bar`);
   const of = speciesName(wanted.species ?? '');
   const xs = x.values.map(place);
   rest.show({
     x: xs,
-    lines: lines.map(({ value_si: si, y }) => ({ name: si === null ? '' : setting(si), y: y.map((value) => (value === null ? null : value * 100)) })),
-    labels: { x: byPressure ? 'pressure, bar absolute' : `temperature, ${unit}`, y: '%' },
-    marks: now.x !== null && now.y !== null ? [{ x: place(now.x), y: now.y * 100, label: 'rest now', kind: 'rest' }] : [],
+    lines: lines.map(({ value_si: si, y }) => ({ name: si === null ? '' : setting(si), y: y.map((value) => (value === null ? null : value * factor)) })),
+    labels: { x: byPressure ? 'pressure, bar absolute' : `temperature, ${unit}`, y: yUnit },
+    marks: now.x !== null && now.y !== null ? [{ x: place(now.x), y: now.y * factor, label: 'rest now', kind: 'rest' }] : [],
     data: byPressure || data === null ? null : [place(data[0]), place(data[1])],
     words: {
       id: 'chart-rest',
-      title: `${wanted.what === 'fraction' ? 'Fraction' : 'Conversion'} of ${of} at rest`,
-      description: `${wanted.what === 'fraction' ? `Fraction of ${of} at rest` : `Conversion of ${of} on the way to rest`}, ${lines.length === 1 && !byPressure ? 'the same at every pressure' : `at ${byPressure ? 'three temperatures' : 'three pressures'}`}.${data === null || byPressure ? '' : ' Shaded: outside the range of the data.'}`,
+      title: `${title} of ${of} ${end}`,
+      description: `${title} of ${of} ${end}, ${lines.length > 1 ? `at ${byPressure ? 'three temperatures' : 'three pressures'}` : report.reactions[0]?.delta_nu_gas === 0 ? 'the same at every pressure' : 'the rest as it stands'}.${data !== null && !byPressure && (x.values.some((kelvin) => kelvin < data[0] || kelvin > data[1])) ? ' Shaded: outside the range of the data.' : ''}`,
     },
   }, {
     head: byPressure ? 'pressure' : 'temperature',
     x: (at) => (byPressure ? `${significant(xs[at] ?? 0, 4)}${NO_BREAK}bar` : temperature(x.values[at] ?? 0, unit, 0)),
-    y: (value) => `${significant(value, 4)}${NO_BREAK}%`,
+    y: (value) => `${significant(value, 4)}${NO_BREAK}${yUnit}`,
   }, Math.round(POINTS / 2));
 }
 

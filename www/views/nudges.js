@@ -1,7 +1,7 @@
 /** Nudges: one small change of each knob, an arrow as long as what it does, and why. */
 
 import { byId, create } from '../dom.js';
-import { NO_BREAK, formula, significant, signed } from '../format.js';
+import { NO_BREAK, amountChange, formula, significant, signed } from '../format.js';
 
 /** @import { Nudge } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -50,9 +50,10 @@ function length({ conversion_change: change, direction }) {
  * The change of rest in points of conversion; where that has no meaning, in moles of extent.
  * @param {Nudge} nudge
  */
-function size({ direction, local_direction: local, conversion_change: change, extent_change_mol: extent }) {
+function size({ knob, direction, local_direction: local, conversion_change: change, extent_change_mol: extent }) {
   const turned = local !== direction && local !== 'none' && direction !== 'none' ? `, at first ${WORDS[local]}` : '';
   if (direction === 'none' && (change === null || change === 0)) return '';
+  if (knob === 'add' || knob === 'remove') return extent === null ? '' : `${amountChange(extent)} of extent${turned}`;
   if (change !== null) return `${signed(significant(change * 100, 2))}${NO_BREAK}points of conversion${turned}`;
-  return extent === null ? '' : `${signed(significant(extent, 2))}${NO_BREAK}mol of extent${turned}`;
+  return extent === null ? '' : `${amountChange(extent)} of extent${turned}`;
 }

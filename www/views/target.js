@@ -5,6 +5,7 @@ import { byId, create } from '../dom.js';
 import { findField } from '../find-field.js';
 import { reveal } from '../folds.js';
 import { NO_BREAK, formula, significant, speciesName, temperature, temperatureUnit } from '../format.js';
+import { numbersOfRest } from '../numbers-of-rest.js';
 
 /** @import { Case, Goal, Report, Setting } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
@@ -22,8 +23,13 @@ const FIELDS = { value, from, to };
 
 /** @type {{ report: Report, answered: Case } | null} */
 let shown = null;
+let touched = false;
+let rangeTouched = false;
 
 byId('target-ask', HTMLButtonElement).addEventListener('click', ask);
+what.addEventListener('change', () => shown !== null && !touched && propose(shown.report));
+value.addEventListener('input', () => { touched = true; });
+for (const field of [from, to]) field.addEventListener('input', () => { rangeTouched = true; });
 knob.addEventListener('change', () => shown && range(shown.report, shown.answered));
 for (const field of Object.values(FIELDS)) {
   field.addEventListener('keydown', ({ key }) => {
@@ -41,11 +47,9 @@ export function render({ report, answered, current }) {
     ...(report.pressure_pa !== null && report.species.some(({ phase, nu }) => phase === 'g' && nu !== 0) ? [['pressure', 'the pressure']] : []),
     ...report.species.filter(({ now_mol: now }) => now !== null).map(({ species }) => [`amount of ${species}`, `the amount of ${speciesName(species)}`]),
   ]);
-  fill(what, [
-    ...report.conversions.filter(({ now_to_rest: now }) => now !== null).map(({ species }) => [`conversion ${species}`, `conversion of ${speciesName(species)}`]),
-    ...report.species.filter(({ nu, rest_fraction: fraction }) => nu !== 0 && fraction !== null).map(({ species }) => [`fraction ${species}`, `fraction of ${speciesName(species)}`]),
-  ]);
-  if (from.value === '') range(report, answered);
+  fill(what, numbersOfRest(report).map(({ value: name, text }) => [name, text]));
+  if (!touched) propose(report);
+  if (!rangeTouched) range(report, answered);
   said.textContent = '';
   settings.replaceChildren();
   problem.hidden = true;
@@ -59,6 +63,16 @@ function fill(select, options) {
   const before = select.value;
   select.replaceChildren(...options.map(([name = '', text = '']) => create('option', { value: name }, text)));
   if (options.some(([name]) => name === before)) select.value = before;
+}
+
+/**
+ * A number to aim at until the user writes one: 98 % converted, or a little more than now.
+ * @param {Report} report
+ */
+function propose({ species }) {
+  const [kind, ...name] = what.value.split(' ');
+  const fraction = species.find((one) => one.species === name.join(' '))?.rest_fraction ?? null;
+  value.value = kind === 'conversion' || fraction === null ? '98 %' : `${significant(fraction * 90, 2)} %`;
 }
 
 /**
