@@ -6,6 +6,7 @@
     reason = "a test fails by panicking"
 )]
 
+mod asking;
 mod balance;
 mod bare;
 mod check;
