@@ -10,7 +10,11 @@ import { create, part } from './dom.js';
  * @property {(at: number) => string} x          the value of x at a place, with its unit
  * @property {(value: number) => string} y       a value of y, with its unit
  * @property {string} head                       the heading of x in the table
+ * @property {{ head: string, value: (at: number) => number }[]} plain   x in bare numbers, for a spreadsheet
  */
+
+/** Digits of a number that goes to a spreadsheet. */
+const PLAIN_DIGITS = 7;
 
 /**
  * Makes a chart of the parts of this figure.
@@ -49,7 +53,7 @@ export function plotFigure(root) {
     slider.setAttribute('aria-valuetext', values.textContent);
   }
 
-  /** Every tenth point, and the last. */
+  /** About twenty places, and the last. */
   function rows() {
     if (shown === null) return [];
     const { scene, told } = shown;
@@ -60,6 +64,16 @@ export function plotFigure(root) {
       const value = y[at] ?? null;
       return value === null ? '–' : told.y(value);
     })])];
+  }
+
+  /** Every place in bare numbers, the units in the heading, as a spreadsheet takes it. */
+  function plainRows() {
+    if (shown === null) return [];
+    const { scene, told } = shown;
+    /** @param {number | null | undefined} value */
+    const plain = (value) => (value === null || value === undefined ? '' : String(Number(value.toPrecision(PLAIN_DIGITS))));
+    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name }) => [name, name === scene.labels.y ? '' : scene.labels.y].filter(Boolean).join(', '))];
+    return [head, ...scene.x.map((_, at) => [...told.plain.map(({ value }) => plain(value(at))), ...scene.lines.map(({ y }) => plain(y[at]))])];
   }
 
   new ResizeObserver(([entry]) => {
@@ -77,12 +91,30 @@ export function plotFigure(root) {
       move();
     });
   }
-  copy.addEventListener('click', () => {
-    const text = rows().map((row) => row.join('\t')).join('\n');
-    void navigator.clipboard?.writeText(text).then(() => { copy.textContent = 'Copied'; }, () => { copy.textContent = 'Not allowed here'; });
+  copy.addEventListener('click', async () => {
+    const text = plainRows().map((row) => row.join('\t')).join('\n').replaceAll('\u00a0', ' ');
+    try {
+      await navigator.clipboard.writeText(text);
+      copy.textContent = 'Copied, for a spreadsheet';
+    } catch {
+      copy.textContent = 'This browser does not allow copying here';
+    }
   });
 
   return {
+    /**
+     * Takes the chart away and says why: an old one must not stand in the place of one that is not there.
+     * @param {string} why
+     */
+    clear(why) {
+      shown = null;
+      plot = null;
+      root.classList.add('is-empty');
+      drawing.replaceChildren();
+      table.replaceChildren();
+      values.textContent = '';
+      words.textContent = why;
+    },
     /**
      * @param {PlotScene} scene
      * @param {Told} told
@@ -91,10 +123,11 @@ export function plotFigure(root) {
     show(scene, told, at) {
       const first = shown === null || shown.scene.x.length !== scene.x.length;
       shown = { scene, told };
+      root.classList.remove('is-empty');
       slider.max = String(scene.x.length - 1);
       if (first) slider.value = String(at);
       words.textContent = scene.words.description;
-      copy.textContent = 'Copy the table';
+      copy.textContent = 'Copy every point';
       const [head, ...body] = rows();
       table.replaceChildren(
         create('thead', {}, create('tr', {}, ...(head ?? []).map((cell) => create('th', { scope: 'col' }, cell)))),
