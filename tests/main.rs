@@ -32,6 +32,7 @@ mod nudges;
 mod nudges_reference;
 mod nudges_steps;
 mod quantity;
+mod quantity_presets;
 mod quantity_show;
 mod quantity_units;
 mod rational;

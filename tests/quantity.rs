@@ -248,7 +248,7 @@ fn the_first_allowed_measure_that_fits_is_taken() {
 #[test]
 #[rustfmt::skip]
 fn a_mistake_has_its_own_code_and_place() {
-    let rows: [(&str, Measure, &[&str]); 50] = [
+    let rows: [(&str, Measure, &[&str]); 52] = [
         ("215", Temperature, &["unit-missing @215"]),
         ("215 kPa", Temperature, &["unit-mismatch @kPa"]),
         ("215 °C", Pressure, &["unit-mismatch @°C"]),
@@ -289,10 +289,12 @@ fn a_mistake_has_its_own_code_and_place() {
         ("< 5 ± 1 ppm", Fraction, &["bound-tolerance @<"]),
         ("< 215 °C", Temperature, &["bound-not-here @<"]),
         ("(215 ± 2 °C", Temperature, &["parenthesis-open @("]),
-        ("215 °C ± type K class 2", Temperature, &["preset-unknown @type K class 2"]),
-        ("215 °C type K class 2", Temperature, &["preset-unknown @type K class 2"]),
+        ("215 °C ± type Q class 2", Temperature, &["preset-unknown @type Q class 2"]),
+        ("215 °C type K class 4", Temperature, &["preset-class @type K class 4"]),
         ("215 ± Pt100 class B °C", Temperature, &["preset-unknown @Pt100 class B °C"]),
-        ("type K class 2", Temperature, &["preset-unknown @type K class 2"]),
+        ("1300 °C ± type K class 2", Temperature, &["preset-range @type K class 2"]),
+        ("2 bar ± type K class 2", Pressure, &["preset-not-here @type K class 2"]),
+        ("type K class 2", Temperature, &["number-not-read @"]),
         ("1,234 ± 2,345 bar", Pressure, &["number-ambiguous @1,234", "number-ambiguous @2,345"]),
         ("1.2.3 furlong", Pressure, &["number-shape @1.2.3", "unit-unknown @furlong"]),
         ("-300 ± -2 °C", Temperature, &["tolerance-negative @-2", "quantity-out-of-range @-300"]),
@@ -349,6 +351,7 @@ fn every_code_has_sentences_that_its_problems_fill() {
         "< 5 ± 1 bar",
         "(5 bar",
         "5 bar class 1",
+        "5 bar ± type K class 2",
     ];
     let mut seen = Vec::new();
     let outcomes = texts.map(|text| parse(text, &[Pressure]).map(|_| ()));
@@ -359,6 +362,8 @@ fn every_code_has_sentences_that_its_problems_fill() {
         parse("5", &[Fraction]).map(|_| ()),
         parse("500", &[Fraction]).map(|_| ()),
         parse("< 5 K", &[Temperature]).map(|_| ()),
+        parse("5 °C type K class 9", &[Temperature]).map(|_| ()),
+        parse("1300 °C type K class 2", &[Temperature]).map(|_| ()),
     ];
     for problem in outcomes.into_iter().chain(others).filter_map(Result::err).flatten() {
         let sentence = words::say(&problem, words::Language::En);

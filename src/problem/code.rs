@@ -64,6 +64,9 @@ codes! {
         BoundNotHere = "bound-not-here",
         Parenthesis = "parenthesis-open",
         PresetUnknown = "preset-unknown",
+        PresetClass = "preset-class",
+        PresetNotHere = "preset-not-here",
+        PresetRange = "preset-range",
     }
 }
 

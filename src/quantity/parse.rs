@@ -1,9 +1,11 @@
 //! The grammar of a quantity: `[<] number [± tolerance] unit`.
 
+use super::constants::ZERO_CELSIUS_K;
 use super::limits::limit;
 use super::measure::Measure;
 use super::number::{Number, scan, shortened};
 use super::pieces::{self, Pieces};
+use super::preset::{Preset, classes_of, preset};
 use super::read_unit::unit_at;
 use super::show::range_text;
 use super::unit::{FractionBasis, PressureReference, Unit};
@@ -41,12 +43,15 @@ pub fn parse(text: &str, allowed: &[Measure]) -> Outcome<Quantity> {
     }
     let mut problems = Vec::new();
     let pieces = pieces::split(text, &mut problems);
-    if let Some(preset) = &pieces.preset {
-        let found = shortened(&text[preset.clone()]);
-        let problem = Problem::new(QuantityCode::PresetUnknown).with("found", found);
-        problems.push(problem.span(Span::of(text, preset.clone())));
-    }
-    if pieces.preset.is_some() && text[pieces.head.clone()].trim().is_empty() {
+    let class = pieces.preset.as_ref().and_then(|place| {
+        let class = preset(&text[place.clone()]);
+        if class.is_none() {
+            problems.push(unknown_class(&text[place.clone()]).span(Span::of(text, place.clone())));
+        }
+        class
+    });
+    // A class that is not known has said enough; without its number the class is not read.
+    if !problems.is_empty() && text[pieces.head.clone()].trim().is_empty() {
         return Err(problems);
     }
     let mut keep = |outcome: Result<Number, Problem>| match outcome {
@@ -97,11 +102,51 @@ pub fn parse(text: &str, allowed: &[Measure]) -> Outcome<Quantity> {
         let half_width = tolerance(text, value.value, &mut quantity, tail, &mut problems);
         quantity.standard_uncertainty_si = half_width.map(|half_width| half_width / 2.0);
     }
+    if let (Some(class), Some(place)) = (class, &pieces.preset) {
+        match uncertainty_of_class(class, &quantity) {
+            Ok(u) => {
+                quantity.standard_uncertainty_si = Some(u);
+                quantity.tolerance = Some(Tolerance::Preset(class));
+            }
+            Err(problem) => problems.push(problem.span(Span::of(text, place.clone()))),
+        }
+    }
     if let Some(bound) = &pieces.bound {
         problems.extend(check_bound(text, bound, &pieces, quantity.measure));
     }
     problems.extend(check_range(text, number_range, &quantity));
     if problems.is_empty() { Ok(quantity) } else { Err(problems) }
+}
+
+fn unknown_class(text: &str) -> Problem {
+    let found = shortened(text.trim());
+    match classes_of(text) {
+        Some((instrument, classes)) => Problem::new(QuantityCode::PresetClass)
+            .with("found", found)
+            .with("instrument", instrument)
+            .with("classes", classes),
+        None => Problem::new(QuantityCode::PresetUnknown).with("found", found),
+    }
+}
+
+/// The standard uncertainty of a reading by its instrument's class: limit/√3, as every value within
+/// the limits is as likely. Source: JCGM 100:2008, 4.3.7.
+fn uncertainty_of_class(class: &Preset, quantity: &Quantity) -> Result<f64, Problem> {
+    if quantity.measure != Measure::Temperature {
+        return Err(Problem::new(QuantityCode::PresetNotHere)
+            .with("found", class.text())
+            .with("measure", quantity.measure.name()));
+    }
+    let celsius = quantity.value_si - ZERO_CELSIUS_K;
+    let (low, high) = class.range_celsius;
+    // A temperature typed in another unit may miss the end by its rounding.
+    if celsius < low - 1e-9 || celsius > high + 1e-9 {
+        return Err(Problem::new(QuantityCode::PresetRange)
+            .with("found", class.text())
+            .with("low", format!("{low}"))
+            .with("high", format!("{high}")));
+    }
+    Ok(class.limit_k(celsius) / 3f64.sqrt())
 }
 
 /// A tolerance as read: its number, whether it is relative, and where its unit stands.
@@ -237,7 +282,7 @@ fn check_bound(
     measure: Measure,
 ) -> Option<Problem> {
     let span = Span::of(text, bound.clone());
-    if pieces.tail.is_some() {
+    if pieces.tail.is_some() || pieces.preset.is_some() {
         return Some(Problem::new(QuantityCode::BoundTolerance).span(span));
     }
     let problem = Problem::new(QuantityCode::BoundNotHere).with("measure", measure.name());

@@ -88,6 +88,9 @@ pub fn show_like(quantity: &Quantity) -> String {
             let width = as_written(part * 100.0, written);
             format!("{} ± {width} % rel", with_symbol(&number, unit, suffix))
         }
+        (Some(Tolerance::Preset(class)), _) => {
+            format!("{} ± {}", with_symbol(&number, unit, suffix), class.text())
+        }
         _ => with_symbol(&number, unit, suffix),
     };
     if quantity.is_bound { format!("< {text}") } else { text }

@@ -2,6 +2,7 @@
 
 use super::measure::Measure;
 use super::number::Written;
+use super::preset::Preset;
 use super::unit::{FractionBasis, PressureReference, Unit};
 
 /// How a tolerance was written, so that it can be shown back.
@@ -13,6 +14,8 @@ pub enum Tolerance {
     OtherUnit(Written, &'static Unit),
     /// In per cent of the value: `0.42 ± 2 % rel`.
     Relative(Written),
+    /// By the class of the instrument: `450 °C ± type K class 2`.
+    Preset(&'static Preset),
 }
 
 /// A number with its unit, in SI, with what is needed to show it as it was typed.
@@ -23,7 +26,8 @@ pub enum Tolerance {
 pub struct Quantity {
     /// The value in the SI unit of its measure; for a bound, the bound.
     pub value_si: f64,
-    /// The standard uncertainty in SI: half of the stated 95 % half-width; none if none was stated.
+    /// The standard uncertainty in SI: half of the stated 95 % half-width, or the limit of a class
+    /// over √3; none if none was stated.
     pub standard_uncertainty_si: Option<f64>,
     /// Whether `< x` was written: the value lies between zero and x.
     pub is_bound: bool,

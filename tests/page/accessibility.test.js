@@ -28,7 +28,7 @@ for (const colorScheme of /** @type {const} */ (['light', 'dark'])) {
           await page.selectOption('#constant-from', source);
           assert.deepEqual(await faults(), [], `with K from: ${source}`);
         }
-        for (const fold of await page.locator('details.fold > summary').all()) await fold.click();
+        for (const fold of await page.locator('#inputs details.fold > summary').all()) await fold.click();
         for (const name of ['solution', 'pure', 'gas']) await page.click(`#${name}-add`);
         await page.click('#gas-paste');
         await page.fill('#paste-text', 'CO 1 %');

@@ -106,8 +106,20 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "Close it before the unit, such as (215 ± 2) °C.",
         ),
         C::PresetUnknown => (
-            "The tolerance class “{found}” is not known by this version.",
-            "Write the tolerance as a number, such as ± 2 °C.",
+            "No instrument class is called {found}; known: type B, E, J, K, N, R, S or T and Pt100, each with its class.",
+            "Write it like type K class 2 or Pt100 class B, or write a tolerance such as ± 2.",
+        ),
+        C::PresetClass => (
+            "{instrument} has no such class as in {found}; there are {classes}.",
+            "Choose one of these classes.",
+        ),
+        C::PresetNotHere => (
+            "{found} is the class of a thermometer, and this is {measure}.",
+            "Write a tolerance such as ± 2 % rel.",
+        ),
+        C::PresetRange => (
+            "{found} holds from {low} °C to {high} °C.",
+            "Choose another class, or write a tolerance such as ± 5 °C.",
         ),
     }
 }
