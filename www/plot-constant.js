@@ -8,7 +8,7 @@ import { span } from './plot-rest.js';
 /** @import { PlotScene } from './chart/plot.js' */
 /** @import { Told } from './plot-figure.js' */
 /** @import { TemperatureUnit } from './format.js' */
-/** @import { Answered } from './plot-rest.js' */
+/** @import { Answered } from './state.js' */
 
 const POINTS = 121;
 

@@ -32,6 +32,8 @@ export function plotFigure(root) {
   /** @type {Plot | null} */
   let plot = null;
   let width = 0;
+  /** Whether the user has moved the cursor; until then it stands at now. */
+  let moved = false;
 
   function draw() {
     if (shown === null || width === 0) return;
@@ -82,11 +84,15 @@ export function plotFigure(root) {
     width = found;
     draw();
   }).observe(drawing);
-  slider.addEventListener('input', move);
+  slider.addEventListener('input', () => {
+    moved = true;
+    move();
+  });
   for (const kind of /** @type {const} */ (['pointermove', 'pointerdown'])) {
     drawing.addEventListener(kind, (event) => {
       if (plot === null) return;
       const box = plot.svg.getBoundingClientRect();
+      moved = true;
       slider.value = String(plot.nearest(((event.clientX - box.left) / box.width) * Math.max(260, width)));
       move();
     });
@@ -118,14 +124,13 @@ export function plotFigure(root) {
     /**
      * @param {PlotScene} scene
      * @param {Told} told
-     * @param {number} at   where the cursor stands at first
+     * @param {number} at   the place nearest to now
      */
     show(scene, told, at) {
-      const first = shown === null || shown.scene.x.length !== scene.x.length;
       shown = { scene, told };
       root.classList.remove('is-empty');
       slider.max = String(scene.x.length - 1);
-      if (first) slider.value = String(at);
+      if (!moved) slider.value = String(at);
       words.textContent = scene.words.description;
       copy.textContent = 'Copy every point';
       const [head, ...body] = rows();

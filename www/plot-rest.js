@@ -2,10 +2,10 @@
 
 import { NO_BREAK, significant, speciesName, temperature, temperatureIn, temperatureUnit } from './format.js';
 
-/** @import { Case, Report, SweepAnswer, SweepRequest, Wanted } from './shiftgauge.js' */
+/** @import { Report, SweepAnswer, SweepRequest, Wanted } from './shiftgauge.js' */
 /** @import { PlotScene } from './chart/plot.js' */
 /** @import { Told } from './plot-figure.js' */
-/** @typedef {{ report: Report, answered: Case }} Answered */
+/** @import { Answered } from './state.js' */
 /** @typedef {'temperature' | 'pressure'} Along */
 
 const POINTS = 121;

@@ -45,7 +45,7 @@ const LABEL_WIDTH = 84;
  */
 export function drawPlot(scene, width) {
   const frame = frameOf(scene, width);
-  const { from, to, x, y, ceiling, floor } = frame;
+  const { from, to, x, ceiling, floor } = frame;
   const cursor = createSvg('line', { class: 'cursor', x1: -10, x2: -10, y1: ceiling, y2: floor });
   const svg = createSvg('svg', { class: 'plot-svg', viewBox: `0 0 ${width} ${HEIGHT}`, role: 'img', 'aria-labelledby': `${scene.words.id}-title ${scene.words.id}-text` },
     createSvg('title', { id: `${scene.words.id}-title` }, scene.words.title),

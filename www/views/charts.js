@@ -7,12 +7,10 @@ import { constantRequest, constantScene } from '../plot-constant.js';
 import { plotFigure } from '../plot-figure.js';
 import { pressureMatters, restRequest, restScene, usualLines } from '../plot-rest.js';
 
-/** @import { Problem, Wanted } from '../shiftgauge.js' */
-/** @import { Along, Answered } from '../plot-rest.js' */
-/** @import { State } from '../state.js' */
+/** @import { Problem, SweepAnswer, Wanted } from '../shiftgauge.js' */
+/** @import { Along } from '../plot-rest.js' */
+/** @import { Answered, State } from '../state.js' */
 
-/** The slider starts in the middle, where now is. */
-const MIDDLE = 60;
 const section = byId('charts', HTMLElement);
 const show = byId('chart-show', HTMLSelectElement);
 const along = byId('chart-along', HTMLSelectElement);
@@ -87,7 +85,7 @@ function draw() {
   const answer = sweep(shown.answered, constantRequest(shown.report));
   if (!answer.ok) return constant.clear(sayAll(answer.problems));
   const found = constantScene(shown, answer);
-  if (found !== null) constant.show(found.scene, found.told, MIDDLE);
+  if (found !== null) constant.show(found.scene, found.told, nearestToNow(answer));
 }
 
 /** @param {Answered} answered */
@@ -104,7 +102,13 @@ function drawRest(answered) {
   else lines.removeAttribute('aria-invalid');
   if (!answer.ok) return rest.clear(wrong.length > 0 ? '' : sayAll(answer.problems));
   const { scene, told } = restScene(answered, answer);
-  rest.show(scene, told, MIDDLE);
+  rest.show(scene, told, nearestToNow(answer));
+}
+
+/** @param {Extract<SweepAnswer, { ok: true }>} answer */
+function nearestToNow({ sweep: { x, now } }) {
+  const distances = x.values.map((value) => Math.abs(value - (now.x ?? 0)));
+  return distances.indexOf(Math.min(...distances));
 }
 
 /** @param {Problem[]} problems */
