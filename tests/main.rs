@@ -13,6 +13,7 @@ mod codata;
 mod elements;
 mod equation;
 mod examples;
+mod exceptions;
 mod feed;
 mod formula;
 mod laws_case;

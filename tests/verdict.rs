@@ -147,13 +147,15 @@ fn where_a_temperature_says_nothing_the_band_is_on_conversion() {
 
 #[test]
 fn a_set_approach_is_the_middle_of_the_band() {
-    // A reading that is 20 K short, in a plant where 20 K are usual: K is taken at T*.
+    // A reading that is 20 K short, in a plant where 20 K are usual: rest is that of K at T*.
     let mut case = shift(0.40, " ± 2 % rel");
     let approach = reaction(&case)["approach_k"].as_f64().unwrap();
     case["reactions"][0]["constant"]["approach"] = json!(format!("{approach} K"));
     let found = reaction(&case);
     assert_eq!(found["verdict"], "at rest", "{found}");
-    assert!(found["affinity_over_rt"].as_f64().unwrap().abs() < 1e-9);
+    // The affinity is that at T all the same; it is the state at rest that stands where the mixture is.
+    assert!((found["affinity_over_rt"].as_f64().unwrap() - 0.40).abs() < 1e-9);
+    assert!(found["extent_mol"].as_f64().unwrap().abs() < 1e-9);
 }
 
 #[test]

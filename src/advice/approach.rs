@@ -40,9 +40,9 @@ const SEARCH_K: (f64, f64) = (150.0, 3000.0);
 
 /// Finds T*, where K(T*) = Q at the measured composition and pressure, nearest to the temperature.
 ///
-/// ln K is sampled at 96 points evenly spaced in 1/T over the range of the data, and each change of
-/// sign is closed in on to 1e-9 K; ln K(T) of a reaction has at most a few turning points, so that
-/// two roots between neighbouring samples would lie within a per cent of each other's temperature.
+/// ln K is sampled at 97 points evenly spaced in 1/T over the range of the data, and each change of
+/// sign is closed in on to 1e-9 K. Where ln K comes near ln Q and turns away again between samples,
+/// its turning point (where ΔH° = 0) is found first, so that two roots beside it are seen as well.
 ///
 /// # Errors
 /// The reason why there is none.
@@ -55,7 +55,13 @@ pub fn approach(
     if !constant.knows_temperature() {
         return Err(NoApproach::TemperatureUnknown);
     }
-    let (low, high) = constant.range_k().unwrap_or(SEARCH_K);
+    let (low, high) = match (constant, constant.range_k()) {
+        (Constant::Library(_), Some(range)) => range,
+        // A line or a formula is drawn on as far as a plant goes; the report marks what lies outside.
+        (_, range) => {
+            range.map_or(SEARCH_K, |(low, high)| (low.min(SEARCH_K.0), high.max(SEARCH_K.1)))
+        }
+    };
     let (from_k, to_k) = (low.min(temperature_k), high.max(temperature_k));
     // Outside the limits of a temperature there is no K and so no change of sign.
     let distance = |t: f64| Temperature::new(t).map_or(f64::NAN, |t| constant.ln_k(t) - ln_q);
@@ -65,12 +71,9 @@ pub fn approach(
         return Err(NoApproach::OutOfReach { from_k, to_k });
     };
     let approach_k = temperature_k - t_star_k;
-    // The sign of ΔH° between T and T* is that of the change of ln K; where ΔH° itself changes sign
-    // in between, this is the one that carries K to Q.
-    let between = Temperature::new(0.5 * (temperature_k + t_star_k)).ok();
-    let enthalpy = between.and_then(|between| constant.at(between).enthalpy_j_per_mol);
-    let exothermic = enthalpy.is_some_and(|enthalpy| enthalpy < 0.0);
-    let shortfall_k = if exothermic { -approach_k } else { approach_k };
+    // sign(ΔH°)·(T − T*) has the sign of ln K(T) − ln K(T*), whatever ΔH° does in between.
+    let short = distance(temperature_k) > 0.0;
+    let shortfall_k = if short { approach_k.abs() } else { -approach_k.abs() };
     Ok(Approach { t_star_k, approach_k, shortfall_k, others: found.len() - 1 })
 }
 
@@ -106,6 +109,7 @@ fn roots(distance: impl Fn(f64) -> f64, from_k: f64, to_k: f64) -> Vec<f64> {
     };
     let mut found = Vec::new();
     let mut left = (point(0), distance(point(0)));
+    let mut before: Option<(f64, f64)> = None;
     if left.1 == 0.0 {
         found.push(left.0);
     }
@@ -119,7 +123,41 @@ fn roots(distance: impl Fn(f64) -> f64, from_k: f64, to_k: f64) -> Vec<f64> {
                 found.push(root.x);
             }
         }
+        // A turning point on this side of zero between the last three samples may reach across it.
+        if let Some(before) = before.filter(|before: &(f64, f64)| turns(before.1, left.1, right.1))
+        {
+            let turning = turning_point(&distance, before.0, right.0);
+            if (turning.1 > 0.0) != (left.1 > 0.0) && turning.1 != 0.0 {
+                for end in [before, right] {
+                    let root = root_between(&distance, end.0, turning.0, 1e-9);
+                    if root.outcome == RootOutcome::Found {
+                        found.push(root.x);
+                    }
+                }
+            }
+        }
+        before = Some(left);
         left = right;
     }
     found
+}
+
+/// Whether the middle of three values of one sign is the nearest to zero.
+fn turns(a: f64, b: f64, c: f64) -> bool {
+    let one_sign = (a > 0.0) == (b > 0.0) && (b > 0.0) == (c > 0.0);
+    one_sign && b.abs() < a.abs() && b.abs() < c.abs()
+}
+
+/// The place between two others where a function that has one sign at both comes nearest to zero, by
+/// golden section, and its value there.
+fn turning_point(distance: &impl Fn(f64) -> f64, from_k: f64, to_k: f64) -> (f64, f64) {
+    const GOLDEN: f64 = 0.618_033_988_749_894_9;
+    let (mut a, mut b) = (from_k, to_k);
+    let sign = if distance(from_k) > 0.0 { 1.0 } else { -1.0 };
+    for _ in 0..80 {
+        let (c, d) = (b - GOLDEN * (b - a), a + GOLDEN * (b - a));
+        if sign * distance(c) < sign * distance(d) { b = d } else { a = c }
+    }
+    let middle = 0.5 * (a + b);
+    (middle, distance(middle))
 }

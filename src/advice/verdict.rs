@@ -1,7 +1,7 @@
 //! Which way the mixture moves, as far as the tolerances allow to say.
 
 use super::tolerance::Interval;
-use crate::equilibrium::{Affinity, RestOutcome};
+use crate::equilibrium::Affinity;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// A direction along the reaction as written.
@@ -95,8 +95,10 @@ pub struct Evidence {
     pub band_interval: Option<Interval>,
     /// The band.
     pub band: Band,
-    /// What became of the mixture.
-    pub outcome: RestOutcome,
+    /// Whether nothing that the forward reaction uses up is there.
+    pub forward_is_blocked: bool,
+    /// Whether nothing that the reverse reaction uses up is there.
+    pub reverse_is_blocked: bool,
 }
 
 /// Judges a reaction.
@@ -117,7 +119,11 @@ pub fn judge(evidence: &Evidence) -> Verdict {
         Band::Temperature { half_width_k } => half_width_k,
         Band::Conversion { half_width } => half_width,
     };
-    if let (RestOutcome::NothingCanMove, Some(direction)) = (evidence.outcome, leaning) {
+    let is_blocked = |direction| match direction {
+        Direction::Forward => evidence.forward_is_blocked,
+        Direction::Reverse => evidence.reverse_is_blocked,
+    };
+    if let Some(direction) = leaning.filter(|direction| is_blocked(*direction)) {
         return Verdict::Spent(direction);
     }
     if evidence.band_interval.is_some_and(|interval| interval.within(half_width)) {

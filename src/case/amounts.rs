@@ -215,7 +215,8 @@ pub(super) fn valley(found: &Findings, reading: &ReadingFindings) -> Option<Vall
     let to_mol = rest.extent_max_mol.unwrap_or(beyond);
     let state = reading.state(found.question.temperature.value_si, &reading.amounts_mol);
     let stretch = Stretch { from_mol, to_mol, rest_mol: rest.extent_mol };
-    let drawn = advice::valley(&reading.system, &state, found.at.ln_k, stretch)?;
+    let drawn =
+        advice::valley(&reading.system, &state, found.constant.ln_k(found.k_temperature), stretch)?;
     let limits = [("min", rest.extent_min_mol, 1.0), ("max", rest.extent_max_mol, -1.0)];
     Some(ValleyReport {
         extent_now_mol: 0.0,

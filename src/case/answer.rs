@@ -73,12 +73,7 @@ fn reaction(found: &Findings, pressure_pa: Option<f64>) -> ReactionReport {
         equation: found.equation.text(),
         terms: TermReport::list(&found.participants),
         delta_nu_gas: found.delta_nu_gas,
-        constant: k_report(
-            &found.at,
-            found.delta_nu_gas,
-            found.k_temperature.kelvin(),
-            pressure_pa,
-        ),
+        constant: k_report(&found.at, found.delta_nu_gas, temperature_k, pressure_pa),
         q: reading.map_or("undetermined", |reading| quotient_word(reading.quotient)),
         ln_q: reading.and_then(|reading| ln_q(reading.quotient)),
         affinity_over_rt: affinity,

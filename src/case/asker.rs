@@ -55,15 +55,16 @@ impl Asker<'_> {
         constant: &Constant,
         shift: Shift,
     ) -> Option<Judged> {
-        let k_temperature = k_temperature(question).ok()?;
-        let ln_k = constant.ln_k(k_temperature) + shift.of_ln_k(constant, k_temperature);
+        let at = |temperature| constant.ln_k(temperature) + shift.of_ln_k(constant, temperature);
+        let ln_k = at(Temperature::new(question.temperature.value_si).ok()?);
+        let rest_ln_k = at(k_temperature(question).ok()?);
         let setting = setting(question, self.ground.reacting.to_vec()).ok()?;
         let amounts_mol = setting.amounts_mol();
         let temperature_k = question.temperature.value_si;
         let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
         let system = self.ground.system;
         let affinity = affinity(system, &state, ln_k).ok()?;
-        let summary = rest_into(system, &state, ln_k, &mut self.workspace).ok()?;
+        let summary = rest_into(system, &state, rest_ln_k, &mut self.workspace).ok()?;
         let ln_q = affinity.finite().map(|over_rt| ln_k - over_rt);
         let approach_k = ln_q.zip(self.t_star_k).and_then(|(ln_q, from_k)| {
             let from = Temperature::new(from_k).ok()?;

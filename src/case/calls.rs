@@ -122,7 +122,7 @@ fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport>
             return Err(problems);
         }
     };
-    let found = participants(&parsed, &[], true).map_err(at_equation)?;
+    let found = participants(&parsed, &[], true, Some(at_temperature)).map_err(at_equation)?;
     let rows = found.list.iter().filter_map(|one| one.record.map(|record| (record, one.nu)));
     let rows: Vec<(&Record, f64)> = rows.collect();
     let constant = Constant::Library(Combination::new(&rows).map_err(at_equation)?);

@@ -123,8 +123,8 @@ pub(super) fn stated_constant(
     beside: Beside,
     delta_nu_gas: f64,
 ) -> Outcome<StatedConstant> {
-    let at_k = stated.at.as_ref().map(|at| at.value_si);
-    let temperature_k = at_k.unwrap_or(beside.temperature_k);
+    // A number without a temperature of its own belongs to that of the case.
+    let temperature_k = stated.at.as_ref().map_or(beside.temperature_k, |at| at.value_si);
     let value = stated.value.value_si;
     let u = stated.value.standard_uncertainty_si;
     let form = match stated.kind {
@@ -149,7 +149,7 @@ pub(super) fn stated_constant(
     Ok(StatedConstant {
         ln_k: ln - form.ln_factor(delta_nu_gas, temperature_k),
         u_ln_k: u_ln,
-        at_k,
+        at_k: Some(temperature_k),
         enthalpy_j_per_mol: stated.enthalpy.as_ref().map(|enthalpy| enthalpy.value_si),
         u_enthalpy_j_per_mol: stated.enthalpy.and_then(|enthalpy| enthalpy.standard_uncertainty_si),
         heat_capacity_j_per_mol_k: stated.heat_capacity.as_ref().map(|heat| heat.value_si),

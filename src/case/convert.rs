@@ -75,7 +75,7 @@ fn converted(number: &Value) -> Outcome<Converted> {
     if !reader.problems.is_empty() {
         return Err(reader.problems);
     }
-    let found = participants(&equation.equation, &[], false);
+    let found = participants(&equation.equation, &[], false, None);
     let found = found.map_err(|problems| at_field(problems, "equation"))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
     let temperature_k = temperature.kelvin();

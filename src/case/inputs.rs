@@ -188,12 +188,15 @@ pub(super) fn without_tolerance(question: &Question) -> Vec<Remark<InputCode>> {
     found
 }
 
-/// The places of the bounds: each lies somewhere between nothing and the value written.
-pub(super) fn bounds(question: &mut Question) -> Vec<Place> {
-    let places = places(question).into_iter().map(|(place, ..)| place);
-    places
-        .filter(|place| slot(question, *place).is_some_and(|quantity| quantity.is_bound))
-        .collect()
+/// The bounds: each lies somewhere between nothing and the value written.
+pub(super) fn bounds(question: &mut Question) -> Vec<Input> {
+    let mut found = Vec::new();
+    for (place, field, name) in places(question) {
+        if slot(question, place).is_some_and(|quantity| quantity.is_bound) {
+            found.push(Input { place, field, name, u_si: 0.0 });
+        }
+    }
+    found
 }
 
 /// The number at a place, to be read or moved.

@@ -25,7 +25,7 @@ pub(super) struct Judgement {
     /// The inputs with a tolerance, in the order of the budgets' shares.
     pub inputs: Vec<Named>,
     /// The inputs that are bounds.
-    pub bounds: Vec<Place>,
+    pub bounds: Vec<Input>,
     pub affinity: Option<Budget>,
     pub ln_q: Option<Budget>,
     pub gibbs: Option<Budget>,
@@ -118,7 +118,8 @@ pub(super) fn judgement(
         affinity_interval,
         band_interval,
         band,
-        outcome: ground.outcome,
+        forward_is_blocked: ground.rest.extent_max_mol == Some(0.0),
+        reverse_is_blocked: ground.rest.extent_min_mol == Some(0.0),
     });
     // A reading that K is taken from is at equilibrium because it is said to be.
     let verdict = if of_itself { Verdict::AtRest(None) } else { verdict };
@@ -187,10 +188,10 @@ fn data_shifts(constant: &Constant) -> Vec<(Remark<InputCode>, Shift)> {
 
 /// What the case gives when the bounded values are zero: each alone, then all that raise the
 /// affinity together, and all that lower it together.
-fn ends(work: &mut Question, asker: &mut Asker, bounds: &[Place], now: &Judged) -> Vec<Judged> {
+fn ends(work: &mut Question, asker: &mut Asker, bounds: &[Input], now: &Judged) -> Vec<Judged> {
     let (mut raising, mut lowering) = (Vec::new(), Vec::new());
     let mut found = Vec::new();
-    for &place in bounds {
+    for &Input { place, .. } in bounds {
         let Some(end) = with(work, place, 0.0, |moved| asker.ask(moved, place)) else { continue };
         match (end.affinity, now.affinity) {
             (Affinity::Finite(there), Affinity::Finite(here)) if there < here => {

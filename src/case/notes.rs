@@ -3,6 +3,7 @@
 use super::blocks::Block;
 use super::inputs::without_tolerance;
 use super::missing::Missing;
+use super::participants::Participant;
 use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
@@ -10,11 +11,12 @@ use super::setting::Basis;
 use super::shown;
 use crate::advice::NoApproach;
 use crate::constant::Constant;
+use crate::equilibrium::activities;
 use crate::library;
-use crate::mixture::SolutionModel;
+use crate::mixture::{SolutionModel, water_saturation_pressure_pa};
 use crate::problem::words::{Language, input, note};
 use crate::problem::{NoteCode, Remark};
-use crate::quantity::PressureReference;
+use crate::quantity::{PressureReference, STANDARD_PRESSURE_PA};
 use crate::reaction::Phase;
 
 /// Above this pressure the ideal gas is marked: a few per cent in activities of common gases.
@@ -68,6 +70,45 @@ fn missing_remarks(missing: &Missing, reading: &ReadingFindings) -> Vec<Remark> 
 const IDEAL_SOLUTION_MARK_MOL_PER_KG: f64 = 0.01;
 /// Charges that differ by more than this share of their mean are said. Common practice, no source.
 const CHARGES_AGREE: f64 = 0.05;
+
+fn has_gas(found: &Findings) -> bool {
+    found.participants.iter().any(|one| one.phase == Phase::Gas)
+}
+
+/// Above this pressure the activity of solids and liquids is marked: V ΔP/RT is 0.01 to 0.05 there.
+/// Common practice, no source.
+const PRESSED_MARK_PA: f64 = 20e5;
+
+/// What a high pressure does to condensed phases, and water beyond saturation, now and at rest.
+fn condensed_remarks(found: &Findings) -> Vec<Remark> {
+    let mut remarks = Vec::new();
+    let Some(reading) = &found.reading else { return remarks };
+    let reacts = |one: &Participant| one.nu != 0.0 && one.phase != Phase::Gas;
+    let pressed = reading.setting.pressure_pa.filter(|pressure_pa| *pressure_pa > PRESSED_MARK_PA);
+    if let Some(pressure_pa) = pressed.filter(|_| found.participants.iter().any(reacts)) {
+        let remark = Remark::new(NoteCode::PressedPhases);
+        remarks.push(remark.with("pressure", shown::pressure(pressure_pa)));
+    }
+    let water = |one: &Participant| one.phase == Phase::Gas && one.species.formula.text() == "H2O";
+    let Some(place) = found.participants.iter().position(water) else { return remarks };
+    let saturation = water_saturation_pressure_pa(found.question.temperature.value_si);
+    let Some(saturation_pa) = saturation else { return remarks };
+    let rest = reading.has_rest().then_some(&reading.rest.amounts_mol);
+    let times = [("Now", Some(&reading.amounts_mol)), ("At rest", rest)];
+    for (when, amounts_mol) in times {
+        let ln_activity = amounts_mol.and_then(|amounts_mol| {
+            let state = reading.state(found.question.temperature.value_si, amounts_mol);
+            activities(&reading.system, &state).ok()?.ln_activities[place]
+        });
+        let partial_pa = ln_activity.map(|ln| libm::exp(ln) * STANDARD_PRESSURE_PA);
+        if let Some(partial_pa) = partial_pa.filter(|partial_pa| *partial_pa > saturation_pa) {
+            let remark = Remark::new(NoteCode::WaterCondenses).with("when", when);
+            let remark = remark.with("partial", shown::pressure(partial_pa));
+            remarks.push(remark.with("saturation", shown::pressure(saturation_pa)));
+        }
+    }
+    remarks
+}
 
 /// The species that are known for harm, each once.
 fn hazards(found: &Findings) -> Option<Remark> {
@@ -126,6 +167,17 @@ fn tolerance_remarks(found: &Findings, reading: &ReadingFindings) -> Vec<Remark>
         let names = names.iter().map(|name| input(name, Language::En)).collect::<Vec<_>>();
         remarks.push(Remark::new(NoteCode::NoTolerance).with("names", names.join(", ")));
     }
+    for bound in &judgement.bounds {
+        let name = input(&bound.name, Language::En);
+        remarks.push(Remark::new(NoteCode::TakenAtBound).with("field", name));
+    }
+    if let (Ok(approach), Some((low, high))) = (&reading.approach, found.constant.range_k()) {
+        let by_k = (low - approach.t_star_k).max(approach.t_star_k - high);
+        if by_k > 0.0 {
+            let remark = Remark::new(NoteCode::TStarExtrapolated);
+            remarks.push(remark.with("by_k", shown::number(by_k)));
+        }
+    }
     if judgement.band_is_conversion_by_need {
         remarks.push(Remark::new(NoteCode::ConversionBand));
     }
@@ -147,6 +199,9 @@ fn pressure_remarks(found: &Findings) -> Vec<Remark> {
     let mut remarks = Vec::new();
     let question = &found.question;
     if let (Some(typed), Some(absolute_pa)) = (&question.pressure, question.pressure_pa()) {
+        if typed.pressure_reference == PressureReference::Unstated && has_gas(found) {
+            remarks.push(Remark::new(NoteCode::PressureTakenAbsolute));
+        }
         if typed.pressure_reference == PressureReference::Gauge {
             if question.atmosphere.is_none() {
                 remarks.push(Remark::new(NoteCode::StandardAtmosphere));
@@ -159,6 +214,7 @@ fn pressure_remarks(found: &Findings) -> Vec<Remark> {
             );
         }
     }
+    remarks.extend(condensed_remarks(found));
     let pressure_pa = found.reading.as_ref().and_then(|reading| reading.setting.pressure_pa);
     if let Some(pressure_pa) = pressure_pa.filter(|pressure_pa| *pressure_pa > IDEAL_GAS_MARK_PA) {
         let remark = Remark::new(NoteCode::IdealGas);

@@ -1,9 +1,10 @@
 //! Who takes part: the species of the reaction with their phases, then the inerts of the reading.
 
 use super::question::Question;
-use crate::library::{self, Record};
+use crate::library::{self, Record, Temperature};
+use crate::mixture::{Basis, Water};
 use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
-use crate::reaction::{Equation, Phase, Species, Term, nearest};
+use crate::reaction::{Equation, Phase, Species, Term, nearest, parse_species};
 
 /// One species that takes part.
 #[derive(Debug, Clone)]
@@ -31,7 +32,13 @@ pub(super) fn named_in(question: &Question) -> Vec<Species> {
     let liquid = question.liquid.iter().flat_map(|liquid| &liquid.entries);
     let solution = question.solution.iter().flat_map(|solution| &solution.entries);
     let all = gas.chain(liquid).chain(solution).chain(&question.pure);
-    all.map(|entry| entry.species.clone()).collect()
+    let mut named: Vec<Species> = all.map(|entry| entry.species.clone()).collect();
+    let gases = question.gas.iter().chain(&question.feed);
+    // Steam that a dry analysis states apart is named as well.
+    if gases.into_iter().any(|gas| !matches!(gas.basis, Basis::Wet | Basis::Dry(Water::None))) {
+        named.extend(parse_species("H2O(g)"));
+    }
+    named
 }
 
 /// Gives every species of the equation its phase and, if `from_library`, its record.
@@ -47,13 +54,15 @@ pub(super) fn participants(
     equation: &Equation,
     reading: &[Species],
     from_library: bool,
+    temperature: Option<Temperature>,
 ) -> Outcome<Participants> {
     let mut list = Vec::with_capacity(equation.terms.len());
     let (mut remarks, mut problems) = (Vec::new(), Vec::new());
     let in_water = equation.terms.iter().any(is_dissolved);
     let all_can_be_gas = equation.terms.iter().all(|term| can_be_gas(term, reading, in_water));
     for term in &equation.terms {
-        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas, in_water) {
+        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas, in_water, from_library)
+        {
             Ok(found) => found,
             Err(problem) => {
                 problems.push(problem.span(term.span));
@@ -64,7 +73,7 @@ pub(super) fn participants(
         if assumed {
             remarks.push(Remark::new(NoteCode::PhaseAssumed).with("species", species.text()));
         }
-        let record = match record_of(&species, from_library, &mut remarks) {
+        let record = match record_of(&species, from_library, temperature, &mut remarks) {
             Ok(record) => record,
             Err(problem) => {
                 problems.push(problem.span(term.span));
@@ -114,14 +123,17 @@ fn phase_of(
     reading: &[Species],
     all_gas: bool,
     in_water: bool,
+    from_library: bool,
 ) -> Result<(Phase, bool), Problem> {
     if let Some(phase) = term.species.phase {
         return Ok((phase, false));
     }
     match phases_known(term, reading, in_water)[..] {
-        // A species that nobody knows: a gas if it is one of the others' kind; where K comes from
-        // the library, its absence there is reported next.
-        [] => Ok((Phase::Gas, true)),
+        // A species that nobody knows. Where K comes from the library, its absence there is told.
+        [] if from_library => Ok((Phase::Gas, true)),
+        [] => Err(Problem::new(CaseCode::PhaseNeeded)
+            .with("species", term.species.formula.text())
+            .with("example", term.species.in_phase(Phase::Gas).text())),
         [only] => Ok((only, false)),
         ref several if all_gas && several.contains(&Phase::Gas) => Ok((Phase::Gas, true)),
         ref several => {
@@ -139,6 +151,7 @@ fn phase_of(
 fn record_of(
     species: &Species,
     from_library: bool,
+    temperature: Option<Temperature>,
     remarks: &mut Vec<Remark>,
 ) -> Result<Option<&'static Record>, Problem> {
     if !from_library {
@@ -148,7 +161,8 @@ fn record_of(
     match records[..] {
         [] => Err(unknown(species)),
         [only] => Ok(Some(only)),
-        [first, ..] => {
+        [first, ref others @ ..] => {
+            let first = stablest(first, others, temperature);
             let remark = Remark::new(NoteCode::FormAssumed)
                 .with("species", species.text())
                 .with("form", first.form.unwrap_or(first.names[0]));
@@ -156,6 +170,19 @@ fn record_of(
             Ok(Some(first))
         }
     }
+}
+
+/// The form with the lowest G° at the temperature, where that is known, else the first.
+fn stablest(
+    first: &'static Record,
+    others: &[&'static Record],
+    temperature: Option<Temperature>,
+) -> &'static Record {
+    let Some(at) = temperature else { return first };
+    let lower = |best: &'static Record, one: &&'static Record| {
+        if one.gibbs_over_rt(at) < best.gibbs_over_rt(at) { one } else { best }
+    };
+    others.iter().fold(first, lower)
 }
 
 /// The problem of a species that the library does not have, with what it has instead.

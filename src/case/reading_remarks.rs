@@ -63,9 +63,6 @@ pub(super) fn remarks_of(
         }
     }
     remarks.extend(unseen(reading, participants));
-    for field in &gas.bounds {
-        remarks.push(Remark::new(NoteCode::TakenAtBound).with("field", field.clone()));
-    }
     remarks
 }
 

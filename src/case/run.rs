@@ -6,7 +6,7 @@ use super::constant_of::{constant_of, constant_of_reading, k_temperature};
 use super::judgement::{Judgement, judgement};
 use super::missing::{Missing, find_missing};
 use super::participants::{Participant, named_in, participants};
-use super::question::{KSource, Question};
+use super::question::{KSource, LiquidReading, Question};
 use super::report::Report;
 use super::setting::{Setting, setting};
 use super::value::Value;
@@ -14,12 +14,12 @@ use super::{answer, read};
 use crate::advice::{Approach, Judged, NoApproach, approach};
 use crate::constant::{Constant, ConstantAt};
 use crate::equilibrium::{
-    Activities, Affinity, Quotient, Rest, RestOutcome, State, System, activities, affinity,
-    quotient, rest,
+    Activities, Affinity, Quotient, Rest, RestOutcome, State, Summary, System, activities,
+    affinity, quotient, rest,
 };
 use crate::library::Temperature;
-use crate::mixture::Ion;
-use crate::problem::{Outcome, Problem, Remark};
+use crate::mixture::{Entry, Ion};
+use crate::problem::{CaseCode, Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase};
 
 /// All that was found out about a case, in the rooms' own types; the report is written from it.
@@ -29,8 +29,9 @@ pub(super) struct Findings {
     pub equation: Equation,
     /// The species of the reaction, then the inerts of the reading.
     pub participants: Vec<Participant>,
-    /// Where K was taken: the reading's temperature, less a stated approach.
+    /// Where the K of the state at rest is taken: the reading's temperature, less a set approach.
     pub k_temperature: Temperature,
+    /// K at the reading's temperature.
     pub at: ConstantAt,
     pub delta_nu_gas: f64,
     pub constant: Constant,
@@ -51,7 +52,7 @@ pub(super) struct Ground<'a> {
     pub system: &'a System,
     pub setting: &'a Setting,
     /// What became of the mixture as read.
-    pub outcome: RestOutcome,
+    pub rest: &'a Summary,
 }
 
 impl Ground<'_> {
@@ -101,13 +102,21 @@ pub fn check(case: &Value) -> Outcome<Report> {
 pub(super) fn find(mut question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
     let from_library = matches!(question.reaction.source, KSource::Library);
-    let found = participants(&question.reaction.equation, &reading, from_library);
+    let found = participants(
+        &question.reaction.equation,
+        &reading,
+        from_library,
+        Temperature::new(question.temperature.value_si).ok(),
+    );
     let found = found.map_err(|problems| at_field(problems, EQUATION))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;
     let k_temperature = k_temperature(&question)?;
-    let ln_k = constant.as_ref().map(|constant| constant.ln_k(k_temperature));
+    let temperature = Temperature::new(question.temperature.value_si)
+        .map_err(|problems| at_field(problems, "temperature"))?;
+    gather_liquids(&mut question, &found.list)?;
+    let ln_k = constant.as_ref().map(|constant| constant.ln_k(temperature));
     let missing = find_missing(&mut question, &found.list, ln_k)?;
     let has_reading = question.has_reading();
     let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
@@ -116,7 +125,7 @@ pub(super) fn find(mut question: Question) -> Outcome<Findings> {
         None => constant_of_reading(&question, laid.as_ref().map(|laid| laid.quotient))?,
     };
     let mut findings = Findings {
-        at: constant.at(k_temperature),
+        at: constant.at(temperature),
         question,
         equation,
         participants: found.list,
@@ -137,6 +146,26 @@ pub(super) fn find(mut question: Question) -> Outcome<Findings> {
         findings.reading = Some(reading);
     }
     Ok(findings)
+}
+
+/// Where several liquids react they are one mixture, also when the reading has one line of it.
+fn gather_liquids(question: &mut Question, reacting: &[Participant]) -> Outcome<()> {
+    let liquids = reacting.iter().filter(|one| one.phase == Phase::Liquid).count();
+    if liquids < 2 || question.liquid.is_some() || question.solution.is_some() {
+        return Ok(());
+    }
+    if !question.has_reading() {
+        return Ok(());
+    }
+    let is_liquid = |entry: &Entry| entry.species.phase == Some(Phase::Liquid);
+    let entries: Vec<Entry> =
+        question.pure.iter().filter(|entry| is_liquid(entry)).cloned().collect();
+    if entries.is_empty() {
+        return Err(Problem::new(CaseCode::LiquidsNeedReading).at("reading.liquid").into());
+    }
+    question.pure.retain(|entry| !is_liquid(entry));
+    question.liquid = Some(LiquidReading { entries, closed_by: None });
+    Ok(())
 }
 
 /// The field of the equation.
@@ -190,11 +219,12 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
     let Findings { question, constant, .. } = found;
     let Laid { setting, system, amounts_mol, quotient } = laid;
     let ln_k = found.at.ln_k;
+    let rest_ln_k = constant.ln_k(found.k_temperature);
     let temperature_k = question.temperature.value_si;
     let at_constant = |found| at_field(found, "reactions[0].constant");
     let state = State { temperature_k, hold: setting.hold, amounts_mol: &amounts_mol };
     let affinity = affinity(&system, &state, ln_k).map_err(at_constant)?;
-    let rest = rest(&system, &state, ln_k).map_err(at_constant)?;
+    let rest = rest(&system, &state, rest_ln_k).map_err(at_constant)?;
     let activities = activities(&system, &state).ok();
     let ln_q = answer::ln_q(quotient);
     let approach = approach(constant, ln_q, temperature_k);
@@ -213,7 +243,7 @@ fn judge_reading(found: &Findings, laid: Laid) -> Outcome<ReadingFindings> {
         delta_nu_gas: found.delta_nu_gas,
         system: &system,
         setting: &setting,
-        outcome: rest.summary.outcome,
+        rest: &rest.summary,
     };
     let judgement = judgement(question, &ground, now, found.missing.is_some());
     Ok(ReadingFindings {

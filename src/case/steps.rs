@@ -9,6 +9,7 @@ use super::run::{Findings, ReadingFindings};
 use super::shown;
 use crate::constant::{Constant, FormulaTerm};
 use crate::equilibrium::{Hold, Quotient, RestOutcome};
+use crate::library::Temperature;
 use crate::problem::words::{Language, step};
 use crate::problem::{Step, StepCode};
 use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference};
@@ -31,7 +32,7 @@ pub(super) fn steps(found: &Findings) -> Vec<StepReport> {
 type Line = (&'static str, Step);
 
 fn kelvin(found: &Findings) -> String {
-    shown::kelvin(found.k_temperature.kelvin())
+    shown::kelvin(found.question.temperature.value_si)
 }
 
 fn constant_lines(found: &Findings) -> Vec<Line> {
@@ -39,8 +40,10 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
     let mut lines = Vec::new();
     match &found.constant {
         Constant::Library(combination) => {
+            let temperature = Temperature::new(found.question.temperature.value_si);
+            let temperature = temperature.unwrap_or(found.k_temperature);
             for (record, _) in combination.terms() {
-                let of = record.properties(found.k_temperature);
+                let of = record.properties(temperature);
                 lines.push((
                     "k",
                     Step::new(StepCode::SpeciesGibbs)
@@ -267,7 +270,7 @@ fn rest_lines(found: &Findings, reading: &ReadingFindings) -> Vec<Line> {
     if let Some(ln_q) = at_rest.ok().and_then(ln_q) {
         let line = Step::new(StepCode::RestCheck)
             .with("ln_q", show_number(ln_q, 10))
-            .with("ln_k", show_number(found.at.ln_k, 10));
+            .with("ln_k", show_number(found.constant.ln_k(found.k_temperature), 10));
         lines.push(("rest", line));
     }
     lines

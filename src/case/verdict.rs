@@ -1,7 +1,7 @@
 //! The verdict and its uncertainty as the report tells them.
 
 use super::answer::reacting;
-use super::inputs::{Of, Place, slot};
+use super::inputs::slot;
 use super::judgement::{Judgement, Named};
 use super::judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
 use super::run::{Findings, ReadingFindings};
@@ -119,7 +119,7 @@ fn why(found: &Findings, reading: &ReadingFindings) -> String {
     };
     let sentence = match judgement.verdict {
         Verdict::Moves(direction) => moves(reading, direction),
-        Verdict::AtRest(_) => at_rest(judgement),
+        Verdict::AtRest(_) => at_rest(judgement, found.question.reaction.approach_k),
         Verdict::Spent(direction) => {
             let sign = if direction == Direction::Forward { -1.0 } else { 1.0 };
             Remark::new(VerdictCode::Spent)
@@ -162,13 +162,18 @@ fn moves(reading: &ReadingFindings, direction: Direction) -> Remark<VerdictCode>
     Remark::new(code).with("way", way).with("by_k", shown::kelvins(by_k))
 }
 
-fn at_rest(judgement: &Judgement) -> Remark<VerdictCode> {
+fn at_rest(judgement: &Judgement, set_approach_k: Option<f64>) -> Remark<VerdictCode> {
     let now = &judgement.now;
     let nothing = now.affinity.finite().is_some_and(|over_rt| over_rt.abs() < 1e-9);
     match (judgement.band, now.approach_k, now.missing_conversion) {
         _ if nothing => Remark::new(VerdictCode::AtRest),
         (Band::Temperature { half_width_k }, Some(approach_k), _) => {
-            Remark::new(VerdictCode::InBand)
+            let code = match set_approach_k {
+                Some(_) => VerdictCode::InApproachBand,
+                None => VerdictCode::InBand,
+            };
+            Remark::new(code)
+                .with("set", shown::kelvins(set_approach_k.unwrap_or(0.0)))
                 .with("approach", shown::kelvins(approach_k))
                 .with("band", shown::number(half_width_k))
         }
@@ -188,15 +193,10 @@ fn better(found: &Findings, judgement: &Judgement) -> Vec<BetterRow> {
     }
     let mut question = found.question.clone();
     let mut rows: Vec<BetterRow> = Vec::new();
-    for place in &judgement.bounds {
-        if let Place::Gas(Of::Reading, i) = place {
-            let entry = question.gas.as_ref().and_then(|gas| gas.entries.get(*i));
-            let Some(entry) = entry else { continue };
-            let name = entry.species.formula.text().to_owned();
-            let input = entry.field.clone();
-            let sentence = Remark::new(VerdictCode::BetterBound).with("name", name.as_str());
-            rows.push(BetterRow { input, text: say(sentence), name });
-        }
+    for bound in &judgement.bounds {
+        let name = words::input(&bound.name, Language::En);
+        let sentence = Remark::new(VerdictCode::BetterBound).with("name", name.as_str());
+        rows.push(BetterRow { input: bound.field.clone(), text: say(sentence), name });
     }
     let (Some(budget), Some(over_rt)) = (&judgement.affinity, judgement.now.affinity.finite())
     else {

@@ -60,14 +60,19 @@ impl Constant {
                     Reach::InRange => 0.0,
                     Reach::Extrapolated { by_k } => by_k,
                 });
+                let outside = outside.reduce(f64::max).filter(|by_k| *by_k > 0.0);
                 ConstantAt {
                     ln_k: change.ln_k,
-                    u_ln_k: Some(combination.u_gibbs_j_per_mol() / rt),
+                    // How well constant heat capacities carry on is not known.
+                    u_ln_k: match outside {
+                        None => Some(combination.u_gibbs_j_per_mol() / rt),
+                        Some(_) => None,
+                    },
                     gibbs_j_per_mol: change.gibbs_j_per_mol,
                     enthalpy_j_per_mol: Some(change.enthalpy_j_per_mol),
                     entropy_j_per_mol_k: Some(change.entropy_j_per_mol_k),
                     heat_capacity_j_per_mol_k: Some(change.heat_capacity_j_per_mol_k),
-                    extrapolated_by_k: outside.reduce(f64::max).filter(|by_k| *by_k > 0.0),
+                    extrapolated_by_k: outside,
                 }
             }
             Constant::Points(line) => {

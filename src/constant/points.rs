@@ -81,7 +81,9 @@ pub fn line_through(points: &[Point]) -> Outcome<PointsLine> {
     let scatter: f64 = fit.residuals.iter().map(|r| r * r).sum();
     let freedom = points.len() - 2;
     let variance = match (&stated, freedom) {
-        (Some(_), _) => Some(1.0),
+        // Points that miss the line by more than their tolerances widen it: Birge's ratio, χ²/(n − 2).
+        (Some(_), 0) => Some(1.0),
+        (Some(_), freedom) => Some((scatter / freedom as f64).max(1.0)),
         (None, 0) => None,
         (None, freedom) => {
             let widening = 0.5 * student_t(freedom);

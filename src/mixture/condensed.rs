@@ -24,11 +24,19 @@ pub enum Held {
 pub fn pure_phases(entries: &[Entry], gas: Option<AmountBasis>) -> Outcome<Vec<Held>> {
     let mut problems = Vec::new();
     let mut held = Vec::with_capacity(entries.len());
+    let mut first = None;
     for (i, entry) in entries.iter().enumerate() {
         if entries[..i].iter().any(|earlier| earlier.species.same_substance(&entry.species)) {
             let name = entry.species.text();
             let problem = Problem::new(MixtureCode::SpeciesTwice).with("species", name);
             problems.push(problem.at(&entry.field));
+        }
+        if let Stated::Quantity(quantity) = &entry.stated {
+            let flow = matches!(quantity.measure, Measure::AmountRate | Measure::MassRate);
+            if *first.get_or_insert(flow) != flow {
+                problems.push(Problem::new(MixtureCode::MixedForms).at(&entry.field));
+                continue;
+            }
         }
         match held_of(entry, gas) {
             Ok(amount) => held.push(amount),

@@ -3,7 +3,7 @@
 use super::closing::{Closing, close};
 use super::element_balance::{ElementBalance, Feed, Sought, balance};
 use super::gas_form::{Form, common_basis, form_of, refuse_repeats};
-use super::reading::{Around, Basis, Entry, GasReading, Stated, Water};
+use super::reading::{Around, Basis, GasReading, Water};
 use super::water::water_fraction;
 use crate::problem::{MixtureCode, Outcome, Problem};
 use crate::reaction::{Species, parse_species};
@@ -32,8 +32,6 @@ pub struct GasMixture {
     pub added_water_fraction: Option<f64>,
     /// How the fractions were brought to a sum of one.
     pub closing: Closing,
-    /// The fields whose value was a bound, taken at the bound.
-    pub bounds: Vec<String>,
     /// What the feed says of this gas, where there is one.
     pub balance: Option<ElementBalance>,
 }
@@ -118,10 +116,8 @@ pub fn gas_mixture(
         amounts_mol = names.zip(balance.amounts_mol.iter().map(|amount| amount / per)).collect();
     }
     let total_mol = amounts_mol.iter().map(|(_, amount)| amount).sum();
-    let bounds = reading.entries.iter().filter(|entry| is_bound(entry));
-    let bounds = bounds.map(|entry| entry.field.clone()).collect();
     let added_water_fraction = water;
-    Ok(GasMixture { amounts_mol, total_mol, basis, added_water_fraction, closing, bounds, balance })
+    Ok(GasMixture { amounts_mol, total_mol, basis, added_water_fraction, closing, balance })
 }
 
 /// Makes a dry analysis wet: y = y(dry) (1 − y_w), or adds the water to amounts.
@@ -179,8 +175,4 @@ fn take_out_what_is_counted_within(
         amounts_mol.push((counted.clone(), argon_mol));
     }
     Ok(())
-}
-
-fn is_bound(entry: &Entry) -> bool {
-    matches!(&entry.stated, Stated::Quantity(quantity) if quantity.is_bound)
 }

@@ -238,6 +238,8 @@ codes! {
         KFromOpenReading = "k-from-open-reading",
         KFromNoReading = "k-from-no-reading",
         LostNeedsFeed = "lost-needs-feed",
+        PhaseNeeded = "phase-needed",
+        LiquidsNeedReading = "liquids-need-reading",
         ReadingNeeded = "reading-needed",
         SpeciesNotHere = "species-not-here",
         KnobNotHere = "knob-not-here",

@@ -5,11 +5,14 @@ import { answered, AT_DESK, BY_TOUCH, direction, openCase } from './reading.js';
 
 /** @import { Page } from 'playwright-core' */
 
+/** Spaces that do not break as plain ones. @param {string | null} found */
+const plain = (found) => (found ?? '').replace(/[\u00a0\u202f]/g, ' ');
+
 /**
  * @param {Page} page
  * @param {string} selector
  */
-const text = async (page, selector) => (await page.textContent(selector)) ?? '';
+const text = async (page, selector) => plain(await page.textContent(selector));
 
 /** @param {string} co */
 const shift = (co) => ({

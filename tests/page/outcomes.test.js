@@ -44,7 +44,7 @@ test('a reaction without a limit is given no state at rest', () =>
     assert.match(await text(page, '#sentence-more'), /ample phases/);
     const cells = await page.locator('#ledger-body td:not(:nth-child(2))').allTextContents();
     assert.deepEqual([...new Set(cells)], ['–'], 'no figures at rest');
-    assert.equal(await page.locator('.rest-mark').count(), 0);
+    assert.equal(await page.locator('#valley-drawing .rest-mark').count(), 0);
     assert.doesNotMatch(await text(page, '#valley-text'), /Now stands at rest/);
   }));
 

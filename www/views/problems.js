@@ -62,7 +62,7 @@ function place(problem, index) {
     if (problem.span !== null && field instanceof HTMLInputElement) message.append(' ', goButton('Show', problem, field));
     field.setAttribute('aria-invalid', 'true');
     field.setAttribute('aria-describedby', `${field.getAttribute('aria-describedby') ?? ''} ${id}`.trim());
-    const row = field.closest('.row, .entry') ?? field;
+    const row = field.closest('.row, .entry, label') ?? field;
     let after = row;
     while (after.nextElementSibling?.classList.contains('problem')) after = after.nextElementSibling;
     after.after(message);

@@ -121,6 +121,14 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "No amount of {species} brings this reading to equilibrium.",
             "Check the other lines, the temperature and the pressure.",
         ),
+        C::PhaseNeeded => (
+            "Neither the library nor the reading knows {species}, so its phase must be written.",
+            "Write it after the formula, such as {example}, or (l), (s) or (aq).",
+        ),
+        C::LiquidsNeedReading => (
+            "Several liquids react, and the reading does not say how they are mixed.",
+            "Enter the liquid with its components.",
+        ),
         C::ReadingNeeded => (
             "A chart and a target start from a reading, and there is none.",
             "Enter the reading, or what is fed.",

@@ -28,7 +28,7 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
         ),
         C::TakenAtBound => (
             Warning,
-            "{field} is a bound and is taken at the bound; values below it are not tried.",
+            "{field} is a bound: the numbers shown are those at the bound, and the verdict must hold for everything below it.",
         ),
         C::GaugeToAbsolute => {
             (Conversion, "{gauge} gauge and {atmosphere} of atmosphere make {absolute} absolute.")
@@ -50,7 +50,10 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Warning,
             "K is stated {by_k} K away from this temperature and no enthalpy is given, so it is used unchanged.",
         ),
-        C::ApproachTaken => (Conversion, "With the stated approach K is taken at {temperature}."),
+        C::ApproachTaken => (
+            Conversion,
+            "With the set approach the state at rest is that of K at {temperature}; K, ΔG and the direction are those at the temperature itself, and the band lies around the set approach.",
+        ),
         C::NotLinear => (
             Warning,
             "Within the tolerances the result does not change in proportion to the inputs, so that an interval of twice the standard uncertainty is a rough one.",
@@ -125,6 +128,22 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
         C::NoCommonBasis => (
             Assumption,
             "The gas is given in fractions, so that the amounts at rest are those of one mole of gas beside the liquid; Q and the verdict do not depend on it.",
+        ),
+        C::PressedPhases => (
+            Warning,
+            "Solids and liquids are taken with the activity they have at 1 bar; at {pressure} that of a dense liquid is higher, by up to about 10 % in 100 bar.",
+        ),
+        C::WaterCondenses => (
+            Warning,
+            "{when} the partial pressure of water, {partial}, is above its saturation pressure of {saturation}: part of it would be liquid, which is not worked out here.",
+        ),
+        C::PressureTakenAbsolute => (
+            Assumption,
+            "The pressure is taken as absolute; write (g) after the unit for a gauge reading.",
+        ),
+        C::TStarExtrapolated => (
+            Warning,
+            "T* lies {by_k} K outside the range of the data of K, and is worth as much as the line drawn on.",
         ),
         C::NoReading => (
             Assumption,

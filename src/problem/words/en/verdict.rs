@@ -41,6 +41,9 @@ pub(in crate::problem::words) fn verdict(code: VerdictCode) -> &'static str {
         C::InBand => {
             "At rest: T − T* = {approach} K lies with its tolerance inside the band of ± {band} K."
         }
+        C::InApproachBand => {
+            "At rest as far as the set approach goes: T − T* = {approach} K lies with its tolerance within ± {band} K of {set} K."
+        }
         C::InConversionBand => {
             "At rest: the missing conversion, {missing} %, lies with its tolerance inside the band of ± {band} %."
         }
