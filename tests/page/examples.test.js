@@ -91,7 +91,7 @@ test('the valley has its walls, its floor and words that say the same', async ()
     const labels = await page.locator('.wall-label').allTextContents();
     assert.deepEqual(labels.sort(), ['no CO left', 'no CO₂ left']);
     assert.equal(await page.locator('#valley-drawing .rest-mark').count(), 1);
-    assert.equal(await page.locator('.now-mark').count(), 1);
+    assert.equal(await page.locator('#valley-drawing .now-mark').count(), 1);
     assert.match((await page.textContent('#valley-text')) ?? '', /forward/);
     assert.match((await page.textContent('.valley-svg desc')) ?? '', /CO would run out/);
   } finally {
