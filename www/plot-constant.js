@@ -75,6 +75,7 @@ export function constantScene({ report, answered }, { sweep: { x, lines, data_ra
       head: 'temperature',
       x: (at) => `${temperature(x.values[at] ?? 0, unit, 0)} (1000${NO_BREAK}K/T = ${fixed(xs[at] ?? 0, 3)})`,
       y: (value) => significant(value, 5),
+      unit: '',
       plain: [
         { head: `temperature, ${unit}`, value: (at) => temperatureIn(x.values[at] ?? 0, unit) },
         { head: '1000 K/T', value: (at) => xs[at] ?? 0 },

@@ -10,6 +10,7 @@ import { create, part } from './dom.js';
  * @property {(at: number) => string} x          the value of x at a place, with its unit
  * @property {(value: number) => string} y       a value of y, with its unit
  * @property {string} head                       the heading of x in the table
+ * @property {string} unit                       of y; empty where it has none
  * @property {{ head: string, value: (at: number) => number }[]} plain   x in bare numbers, for a spreadsheet
  */
 
@@ -74,7 +75,7 @@ export function plotFigure(root) {
     const { scene, told } = shown;
     /** @param {number | null | undefined} value */
     const plain = (value) => (value === null || value === undefined ? '' : String(Number(value.toPrecision(PLAIN_DIGITS))));
-    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name }) => [name, name === scene.labels.y ? '' : scene.labels.y].filter(Boolean).join(', '))];
+    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name }) => [name, told.unit].filter(Boolean).join(', '))];
     return [head, ...scene.x.map((_, at) => [...told.plain.map(({ value }) => plain(value(at))), ...scene.lines.map(({ y }) => plain(y[at]))])];
   }
 

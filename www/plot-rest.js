@@ -106,6 +106,7 @@ export function restScene({ report, answered }, { sweep: { x, lines, show, data_
       head: byPressure ? 'pressure' : 'temperature',
       x: (at) => (byPressure ? `${significant(xs[at] ?? 0, 4)}${NO_BREAK}bar` : temperature(x.values[at] ?? 0, unit, 0)),
       y: (value) => `${significant(value, 4)}${NO_BREAK}${yUnit}`,
+      unit: yUnit,
       plain: [{ head: labels.x, value: (at) => xs[at] ?? 0 }],
     },
   };
