@@ -198,6 +198,10 @@ fn better(found: &Findings, judgement: &Judgement) -> Vec<BetterRow> {
         let sentence = Remark::new(VerdictCode::BetterBound).with("name", name.as_str());
         rows.push(BetterRow { input: bound.field.clone(), text: say(sentence), name });
     }
+    if !rows.is_empty() {
+        // Until the bounds are values no tolerance settles anything.
+        return rows;
+    }
     let (Some(budget), Some(over_rt)) = (&judgement.affinity, judgement.now.affinity.finite())
     else {
         return rows;

@@ -62,6 +62,10 @@ function build(state) {
     create('div', { class: 'record-columns' },
       part('picture', byId('valley-heading', HTMLElement).textContent ?? '', copy('valley-drawing'), copy('valley-text')),
       part('assumptions', 'Assumed and converted', copy('note-list'))),
+    create('div', { class: 'record-columns' },
+      part('certainty', 'How sure', copy('certainty-text'), copy('better'), inOneLine('#budget-rows li', 4, 'Most of it comes from')),
+      part('nudges', 'What one small change does to rest', inOneLine('#nudge-list summary', 5))),
+    part('extras', 'Feed and solution', copy('extra-figures')),
     part('working', 'Working', copy('working-lines')),
     part('sources', 'Constant and sources', copy('constant-forms'), copy('source-text'), ...all('.constants .records, .constants #citations')),
     part('cautions', 'Cautions', ...all('.cautions > p:first-child')),
@@ -81,6 +85,17 @@ function build(state) {
 function part(name, heading, ...content) {
   const found = content.filter((node) => node !== null && node.textContent?.trim() !== '').filter((node) => node !== null);
   return found.length === 0 ? '' : create('section', { 'data-record': name }, create('h2', {}, heading), ...found);
+}
+
+/**
+ * A list of the page as one line of the sheet.
+ * @param {string} selector
+ * @param {number} most   so many of its lines
+ * @param {string} [lead]
+ */
+function inOneLine(selector, most, lead = '') {
+  const each = all(selector).slice(0, most).map((row) => [...row.children].map(({ textContent }) => textContent?.trim() ?? '').filter((text) => !['', '→', '←', '·'].includes(text)).join(': '));
+  return each.length === 0 ? null : create('p', {}, `${lead === '' ? '' : `${lead}: `}${each.join('; ')}.`);
 }
 
 /** @param {State} state */
