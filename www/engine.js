@@ -2,7 +2,7 @@
 
 import * as glue from './shiftgauge.js';
 
-/** @import { BalanceAnswer, Case, CheckAnswer, ConvertAnswer, Goal, SpeciesMatch, StatedNumber, SweepAnswer, SweepRequest, TargetAnswer } from './shiftgauge.js' */
+/** @import { BalanceAnswer, Case, CheckAnswer, ConvertAnswer, Goal, Refusal, SpeciesMatch, StatedNumber, SweepAnswer, SweepRequest, TargetAnswer } from './shiftgauge.js' */
 
 /** @type {WebAssembly.Module | null} */
 let compiled = null;
@@ -57,7 +57,7 @@ export function check(question) {
  * @returns {SweepAnswer}
  */
 export function sweep(question, request) {
-  return glue.sweep(question, request, { language: 'en', units: 'as typed' });
+  return beside(() => glue.sweep(question, request, { language: 'en', units: 'as typed' }));
 }
 
 /**
@@ -66,7 +66,7 @@ export function sweep(question, request) {
  * @returns {TargetAnswer}
  */
 export function target(question, goal) {
-  return glue.target(question, goal, { language: 'en', units: 'as typed' });
+  return beside(() => glue.target(question, goal, { language: 'en', units: 'as typed' }));
 }
 
 /**
@@ -74,7 +74,25 @@ export function target(question, goal) {
  * @returns {ConvertAnswer}
  */
 export function convert(number) {
-  return glue.convert(number);
+  return beside(() => glue.convert(number));
+}
+
+/**
+ * What is asked beside the answer must not cost the answer: after a trap a new instance takes over, and
+ * the question is refused like any that cannot be answered.
+ * @template T
+ * @param {() => T} ask
+ * @returns {T | Refusal}
+ */
+function beside(ask) {
+  try {
+    return ask();
+  } catch (thrown) {
+    console.error(thrown);
+    restartEngine();
+    const message = 'The engine stopped on this, which is a fault of the program. The case and its answer are not touched.';
+    return { ok: false, problems: [{ code: 'engine-stopped', field: '', span: null, arguments: {}, message, hint: 'Change a value and ask again.' }] };
+  }
 }
 
 /**

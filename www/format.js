@@ -216,16 +216,16 @@ export function temperatureUnit(text) {
   return /\d\s*K\b/.test(text) ? 'K' : '°C';
 }
 
+/** A temperature as a bare number of a unit. */
+export const temperatureIn = (/** @type {number} */ kelvin, /** @type {TemperatureUnit} */ unit) => (unit === 'K' ? kelvin : unit === '°C' ? kelvin - 273.15 : kelvin * 1.8 - 459.67);
+
 /**
  * A temperature in the unit that was typed.
  * @param {number} kelvin
  * @param {TemperatureUnit} unit
  * @param {number} decimals
  */
-export function temperature(kelvin, unit, decimals) {
-  const value = unit === 'K' ? kelvin : unit === '°C' ? kelvin - 273.15 : kelvin * 1.8 - 459.67;
-  return `${fixed(value, decimals)}${NO_BREAK}${unit}`;
-}
+export const temperature = (kelvin, unit, decimals) => `${fixed(temperatureIn(kelvin, unit), decimals)}${NO_BREAK}${unit}`;
 
 /**
  * A temperature difference: in K, or in °F where the case is written so.

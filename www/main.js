@@ -53,7 +53,7 @@ const notice = byId('notice', HTMLElement);
 foldWhereNarrow();
 
 const state = createState(
-  /** @type {State} */ ({ question: firstCase(), report: null, answered: null, problems: [], balance: null, current: false, trapped: recall('stopped') ?? '' }),
+  /** @type {State} */ ({ question: firstCase(), report: null, answered: null, problems: [], balance: null, current: false, pinned: null, trapped: recall('stopped') ?? '' }),
   (changed) => {
     byId('results', HTMLElement).hidden = changed.report === null;
     byId('results', HTMLElement).classList.toggle('is-old', !changed.current);
@@ -200,6 +200,7 @@ async function start() {
   if (state.get().trapped !== '') tell('This case stopped the engine before, which is a fault of the program. The case is still here: change a value to go on.', true);
   cases.connect(actions);
   problems.connect({ takeOut });
+  compare.connect({ pin: (pinned) => state.set({ pinned }) });
   kept.connect({ current: readForm, openText: (text, said) => cases.openText(text, said, actions) });
   paste.connect({ current: readForm, change: (question, said) => { change(question); tell(said); } });
   undo.connect({

@@ -10,7 +10,12 @@ import { create, part } from './dom.js';
  * @property {(at: number) => string} x          the value of x at a place, with its unit
  * @property {(value: number) => string} y       a value of y, with its unit
  * @property {string} head                       the heading of x in the table
+ * @property {string} unit                       of y; empty where it has none
+ * @property {{ head: string, value: (at: number) => number }[]} plain   x in bare numbers, for a spreadsheet
  */
+
+/** Digits of a number that goes to a spreadsheet. */
+const PLAIN_DIGITS = 7;
 
 /**
  * Makes a chart of the parts of this figure.
@@ -28,6 +33,8 @@ export function plotFigure(root) {
   /** @type {Plot | null} */
   let plot = null;
   let width = 0;
+  /** Whether the user has moved the cursor; until then it stands at now. */
+  let moved = false;
 
   function draw() {
     if (shown === null || width === 0) return;
@@ -49,7 +56,7 @@ export function plotFigure(root) {
     slider.setAttribute('aria-valuetext', values.textContent);
   }
 
-  /** Every tenth point, and the last. */
+  /** About twenty places, and the last. */
   function rows() {
     if (shown === null) return [];
     const { scene, told } = shown;
@@ -62,39 +69,71 @@ export function plotFigure(root) {
     })])];
   }
 
+  /** Every place in bare numbers, the units in the heading, as a spreadsheet takes it. */
+  function plainRows() {
+    if (shown === null) return [];
+    const { scene, told } = shown;
+    /** @param {number | null | undefined} value */
+    const plain = (value) => (value === null || value === undefined ? '' : String(Number(value.toPrecision(PLAIN_DIGITS))));
+    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name }) => [name, told.unit].filter(Boolean).join(', '))];
+    return [head, ...scene.x.map((_, at) => [...told.plain.map(({ value }) => plain(value(at))), ...scene.lines.map(({ y }) => plain(y[at]))])];
+  }
+
   new ResizeObserver(([entry]) => {
     const found = Math.round(entry?.contentRect.width ?? 0);
     if (found === width || found === 0) return;
     width = found;
     draw();
   }).observe(drawing);
-  slider.addEventListener('input', move);
+  slider.addEventListener('input', () => {
+    moved = true;
+    move();
+  });
   for (const kind of /** @type {const} */ (['pointermove', 'pointerdown'])) {
     drawing.addEventListener(kind, (event) => {
       if (plot === null) return;
       const box = plot.svg.getBoundingClientRect();
+      moved = true;
       slider.value = String(plot.nearest(((event.clientX - box.left) / box.width) * Math.max(260, width)));
       move();
     });
   }
-  copy.addEventListener('click', () => {
-    const text = rows().map((row) => row.join('\t')).join('\n');
-    void navigator.clipboard?.writeText(text).then(() => { copy.textContent = 'Copied'; }, () => { copy.textContent = 'Not allowed here'; });
+  copy.addEventListener('click', async () => {
+    const text = plainRows().map((row) => row.join('\t')).join('\n').replaceAll('\u00a0', ' ');
+    try {
+      await navigator.clipboard.writeText(text);
+      copy.textContent = 'Copied, for a spreadsheet';
+    } catch {
+      copy.textContent = 'This browser does not allow copying here';
+    }
   });
 
   return {
     /**
+     * Takes the chart away and says why: an old one must not stand in the place of one that is not there.
+     * @param {string} why
+     */
+    clear(why) {
+      shown = null;
+      plot = null;
+      root.classList.add('is-empty');
+      drawing.replaceChildren();
+      table.replaceChildren();
+      values.textContent = '';
+      words.textContent = why;
+    },
+    /**
      * @param {PlotScene} scene
      * @param {Told} told
-     * @param {number} at   where the cursor stands at first
+     * @param {number} at   the place nearest to now
      */
     show(scene, told, at) {
-      const first = shown === null || shown.scene.x.length !== scene.x.length;
       shown = { scene, told };
+      root.classList.remove('is-empty');
       slider.max = String(scene.x.length - 1);
-      if (first) slider.value = String(at);
+      if (!moved) slider.value = String(at);
       words.textContent = scene.words.description;
-      copy.textContent = 'Copy the table';
+      copy.textContent = 'Copy every point';
       const [head, ...body] = rows();
       table.replaceChildren(
         create('thead', {}, create('tr', {}, ...(head ?? []).map((cell) => create('th', { scope: 'col' }, cell)))),

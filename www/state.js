@@ -2,6 +2,7 @@
 
 /** @import { Case, Report, Problem, BalanceAnswer } from './shiftgauge.js' */
 
+/** @typedef {{ report: Report, answered: Case }} Answered */
 /**
  * @typedef {object} State
  * @property {Case} question       the case as the form reads now
@@ -10,6 +11,7 @@
  * @property {Problem[]} problems  what is wrong with the case as it reads now
  * @property {BalanceAnswer | null} balance   how the equation was understood
  * @property {boolean} current     whether the report answers the case as it reads now
+ * @property {Answered | null} pinned   an answer kept beside the one now
  * @property {string} trapped      the case, as text, that stopped the engine; it is not tried again
  */
 

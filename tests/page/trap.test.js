@@ -77,6 +77,41 @@ test('a trap while species are looked up costs the suggestions and nothing else'
   }
 });
 
+/** Makes everything that is asked beside the answer trap, always. */
+function trapOnQuestions() {
+  const Real = WebAssembly.Instance;
+  /** @param {[WebAssembly.Module, WebAssembly.Imports?]} args */
+  function Trapping(...args) {
+    const exports = { ...new Real(...args).exports };
+    for (const name of ['sweep', 'target', 'convert']) {
+      if (typeof exports[name] !== 'function') throw new Error(`the engine has no ${name}`);
+      exports[name] = () => { throw new WebAssembly.RuntimeError('unreachable'); };
+    }
+    return { exports };
+  }
+  Reflect.set(WebAssembly, 'Instance', Trapping);
+}
+
+test('a trap in a chart, a target or a conversion is said in its place and costs the answer nothing', async () => {
+  const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /unreachable/ });
+  try {
+    await page.addInitScript(trapOnQuestions);
+    await page.reload();
+    await answered(page);
+    await page.waitForSelector('#chart-k figcaption:has-text("engine stopped")');
+    await page.click('#target-ask');
+    assert.match((await page.textContent('#target-problem')) ?? '', /engine stopped/);
+    await page.click('#convert > summary');
+    await page.fill('#convert-value', '7');
+    assert.match((await page.textContent('#convert-problem')) ?? '', /engine stopped/);
+    await page.fill('#temperature', '268 °C');
+    assert.equal(await direction(page), 'reverse');
+    assert.equal(await page.isHidden('#out-of-date'), true);
+  } finally {
+    await close();
+  }
+});
+
 test('without WebAssembly the page says what it needs', async () => {
   const { page, close } = await openPage({ from: 'served', viewport: { width: 1280, height: 800 }, expected: /WebAssembly is off/ });
   try {

@@ -21,3 +21,29 @@ export function heightAt(xs, ys, at) {
   const [y0, y1] = [ys[next - 1] ?? ys[next] ?? 0, ys[next] ?? 0];
   return x1 === x0 ? y1 : y0 + ((at - x0) / (x1 - x0)) * (y1 - y0);
 }
+
+/**
+ * Heights moved apart until each has this much room, in their order, and kept between two bounds as
+ * far as there is room at all.
+ * @param {readonly number[]} heights
+ * @param {number} room
+ * @param {number} top
+ * @param {number} bottom
+ * @returns {number[]}   in the order given
+ */
+export function spread(heights, room, top, bottom) {
+  const order = heights.map((height, index) => ({ height, index })).sort((a, b) => a.height - b.height);
+  let above = top - room;
+  for (const one of order) {
+    one.height = Math.max(one.height, above + room);
+    above = one.height;
+  }
+  let below = bottom + room;
+  for (const one of [...order].reverse()) {
+    one.height = Math.min(one.height, below - room);
+    below = one.height;
+  }
+  const moved = [...heights];
+  for (const { height, index } of order) moved[index] = height;
+  return moved;
+}

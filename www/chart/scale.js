@@ -13,7 +13,7 @@ const LABEL_ROOM = 130;
  * @typedef {object} ScaleScene
  * @property {number} value                          the figure; zero is rest
  * @property {[number | null, number | null]} ends   its 95 % interval; an end that is null is open
- * @property {number} band                           the half-width around zero that counts as rest
+ * @property {number | null} band                    the half-width around zero that counts as rest
  * @property {string} unit
  * @property {{ value: string, zero: string }} labels
  * @property {string} title
@@ -26,7 +26,7 @@ const LABEL_ROOM = 130;
  */
 export function drawScale(scene, width) {
   const { value, ends, band } = scene;
-  const reach = 1.15 * Math.max(band, Math.abs(value), ...ends.map((end) => Math.abs(end ?? value)), 1e-12);
+  const reach = 1.15 * Math.max(band ?? 0, Math.abs(value), ...ends.map((end) => Math.abs(end ?? value)), 1e-12);
   const x = linear([-reach, reach], [MARGIN.left, width - MARGIN.right]);
   const along = ticks(-reach, reach, width < 420 ? 4 : 8);
   const [low, high] = [ends[0] === null ? -reach : ends[0], ends[1] === null ? reach : ends[1]];
@@ -35,7 +35,7 @@ export function drawScale(scene, width) {
   return createSvg('svg', { class: 'scale-svg', viewBox: `0 0 ${width} ${HEIGHT}`, role: 'img', 'aria-labelledby': 'scale-svg-title scale-svg-text' },
     createSvg('title', { id: 'scale-svg-title' }, scene.title),
     createSvg('desc', { id: 'scale-svg-text' }, scene.description),
-    createSvg('rect', { class: 'band', x: x(-band), width: Math.max(1, x(band) - x(-band)), y: LINE - 22, height: 44 }),
+    ...(band === null ? [] : [createSvg('rect', { class: 'band', x: x(-band), width: Math.max(1, x(band) - x(-band)), y: LINE - 22, height: 44 })]),
     createSvg('line', { class: 'axis', x1: MARGIN.left, x2: width - MARGIN.right, y1: LINE, y2: LINE }),
     ...along.values.flatMap((tick) => [
       createSvg('line', { class: 'axis', x1: x(tick), x2: x(tick), y1: LINE, y2: LINE + 5 }),

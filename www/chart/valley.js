@@ -23,6 +23,7 @@ const FLAG_ROOM = 64;
  * @property {'G' | 'A'} energy       Gibbs energy, or Helmholtz energy at constant volume
  * @property {number} now             extent, mol
  * @property {number | null} rest     extent, mol
+ * @property {[number, number] | null} within   where rest could lie within the tolerances, mol
  * @property {{ at: number, label: string }[]} walls
  * @property {string} arrow           the direction's arrow
  * @property {string} title
@@ -50,6 +51,7 @@ export function drawValley(scene, width) {
     createSvg('path', { class: 'ground', d: `${line}L${x(to)} ${floor}L${x(from)} ${floor}Z` }),
     ...axis(x, y, { from, to, highest, floor, width, energy: scene.energy }),
     ...scene.walls.filter(({ at }) => at >= from && at <= to).flatMap((wall) => drawWall(x(wall.at), wall.label, floor, width)),
+    ...drawWithin(scene.within, [from, to], x, floor),
     createSvg('path', { class: 'curve', d: line }),
     ...(scene.rest === null ? [] : drawRest(x(scene.rest), y(heightAt(xs, ys, scene.rest)), now.x, width)),
     ...drawNow(now, scene.rest === null ? now.x : x(scene.rest), scene.arrow, width),
@@ -89,6 +91,22 @@ function drawWall(at, label, floor, width) {
   return [
     createSvg('line', { class: 'wall', x1: at, x2: at, y1: MARGIN.top - 8, y2: floor }),
     createSvg('text', { class: 'wall-label', x: at, y: 14, 'text-anchor': left ? 'start' : 'end' }, label),
+  ];
+}
+
+/**
+ * A strip on the floor with a stroke at each end that is in sight.
+ * @param {[number, number] | null} within
+ * @param {[number, number]} ends
+ * @param {(value: number) => number} x
+ * @param {number} floor
+ */
+function drawWithin(within, [from, to], x, floor) {
+  if (within === null || within[1] <= from || within[0] >= to) return [];
+  const [start, end] = [x(Math.max(from, within[0])), x(Math.min(to, within[1]))];
+  return [
+    createSvg('rect', { class: 'within', x: start, width: Math.max(1, end - start), y: floor - 5, height: 10 }),
+    ...within.filter((at) => at >= from && at <= to).map((at) => createSvg('line', { class: 'within-end', x1: x(at), x2: x(at), y1: floor - 8, y2: floor + 8 })),
   ];
 }
 

@@ -34,8 +34,8 @@ export function render({ report, answered }) {
   const reaction = report?.reactions[0];
   section.hidden = reaction === undefined || reaction.verdict === null || report?.rest === null;
   if (reaction === undefined || answered === null || section.hidden) return;
-  scene = reaction.band?.kind === 'conversion' ? conversionScene(reaction) : temperatureScene(reaction, answered.temperature);
-  words.textContent = scene?.description ?? 'There is no T* to draw: the verdict rests on the affinity alone.';
+  scene = (reaction.band?.kind === 'conversion' ? conversionScene(reaction) : temperatureScene(reaction, answered.temperature)) ?? affinityScene(reaction);
+  words.textContent = scene?.description ?? 'There is no interval to draw: Q is no number here.';
   better.hidden = reaction.better.length === 0;
   better.replaceChildren(create('p', {}, 'To settle it, measure better:'), create('ul', {}, ...reaction.better.map(({ text }) => create('li', {}, formula(text)))));
   fillBudget(reaction);
@@ -65,8 +65,34 @@ function temperatureScene({ approach_k: value, approach_interval_k: ends, band }
     unit: unit === '°F' ? '°F' : 'K',
     labels: { value: `T − T* ${say(value)}`, zero: 'rest: T = T*' },
     title: 'T − T* with its 95 % interval, against the band',
-    description: `T − T* is ${say(value)}, with 95 % ${range(ends, say)}. The band that counts as rest is ±${NO_BREAK}${temperatureDifference(band.half_width_k, unit)}: the interval ${place(ends, band.half_width_k)}.`,
+    description: `T − T* is ${say(value)}, ${range(ends, say)}. The band that counts as rest is ±${NO_BREAK}${temperatureDifference(band.half_width_k, unit)}: the interval ${place(ends, band.half_width_k)}.`,
   };
+}
+
+/**
+ * Where there is no T*, or no interval of it, the verdict rests on the affinity.
+ * @param {ReactionReport} reaction
+ * @returns {ScaleScene | null}
+ */
+function affinityScene({ affinity_over_rt: value, affinity_interval_over_rt: ends, t_star_k: tStar }) {
+  if (value === null || ends === null) return null;
+  const say = (/** @type {number} */ number) => signed(significant(number, 3));
+  const why = tStar === null ? 'There is no T* to compare with' : 'There is no interval of T − T* to compare with';
+  return {
+    value,
+    ends,
+    band: null,
+    unit: '',
+    labels: { value: `ln K − ln Q ${say(value)}`, zero: 'rest: Q = K' },
+    title: 'ln K − ln Q with its 95 % interval',
+    description: `${why}, so the verdict rests on ln K − ln Q: ${say(value)}, ${range(ends, say)}. Above zero the mixture moves forward, below it in reverse: ${side(ends)}.`,
+  };
+}
+
+/** @param {Interval} ends */
+function side([low, high]) {
+  if (low !== null && low > 0) return 'the interval lies above';
+  return high !== null && high < 0 ? 'the interval lies below' : 'the interval reaches to both sides';
 }
 
 /**
@@ -84,7 +110,7 @@ function conversionScene({ missing_conversion: value, missing_conversion_interva
     unit: '%',
     labels: { value: `missing ${say(value)}`, zero: 'rest' },
     title: 'Missing conversion with its 95 % interval, against the band',
-    description: `The missing conversion is ${say(value)}, with 95 % ${range(ends, say)}. The band that counts as rest is ±${NO_BREAK}${significant(band.half_width * 100, 3)}${NO_BREAK}%: the interval ${place(ends, band.half_width)}.`,
+    description: `The missing conversion is ${say(value)}, ${range(ends, say)}. The band that counts as rest is ±${NO_BREAK}${significant(band.half_width * 100, 3)}${NO_BREAK}%: the interval ${place(ends, band.half_width)}.`,
   };
 }
 
@@ -100,10 +126,10 @@ const scaled = ([low, high], factor) => [low === null ? null : low * factor, hig
  * @param {(value: number) => string} say
  */
 function range([low, high], say) {
-  if (low === null && high === null) return 'open both ways';
-  if (low === null) return `below ${say(/** @type {number} */ (high))}, open downwards`;
-  if (high === null) return `above ${say(low)}, open upwards`;
-  return `between ${say(low)} and ${say(high)}`;
+  if (low === null && high === null) return 'with 95 % open both ways';
+  if (low === null) return `with 95 % below ${say(/** @type {number} */ (high))}, open downwards`;
+  if (high === null) return `with 95 % above ${say(low)}, open upwards`;
+  return low === high ? 'and nothing has a tolerance, so that there is no interval' : `with 95 % between ${say(low)} and ${say(high)}`;
 }
 
 /**

@@ -3,8 +3,7 @@
 import { byId, create } from '../dom.js';
 import { NO_BREAK, decimalsFor, fixed, molarEnergy, significant, signed, speciesName, temperature, temperatureDifference, temperatureUnit } from '../format.js';
 
-/** @import { Case, Report } from '../shiftgauge.js' */
-/** @import { State } from '../state.js' */
+/** @import { Answered, State } from '../state.js' */
 
 const section = byId('compare', HTMLElement);
 const pin = byId('pin', HTMLButtonElement);
@@ -14,30 +13,32 @@ const table = byId('compare-table', HTMLElement);
 const rows = byId('compare-rows', HTMLElement);
 const HINT = text.textContent ?? '';
 
-/** @typedef {{ report: Report, answered: Case }} Answered */
-/** @type {Answered | null} */
-let pinned = null;
 /** @type {Answered | null} */
 let now = null;
 
-pin.addEventListener('click', () => {
-  pinned = now;
-  draw();
-});
-unpin.addEventListener('click', () => {
-  pinned = null;
-  draw();
-  pin.focus();
-});
-
-/** @param {State} state */
-export function render({ report, answered }) {
-  now = report === null || answered === null ? null : { report, answered };
-  section.hidden = now === null;
-  draw();
+/**
+ * Asks whoever runs the page to keep an answer beside the one now, or to let it go.
+ * @param {{ pin: (pinned: Answered | null) => void }} actions
+ */
+export function connect(actions) {
+  pin.addEventListener('click', () => actions.pin(now));
+  unpin.addEventListener('click', () => {
+    actions.pin(null);
+    pin.focus();
+  });
 }
 
-function draw() {
+/** @param {State} state */
+export function render({ report, answered, current, pinned }) {
+  now = report === null || answered === null ? null : { report, answered };
+  section.hidden = now === null;
+  // An answer that is out of date would be pinned under the name of a case that it does not belong to.
+  pin.disabled = !current;
+  draw(pinned);
+}
+
+/** @param {Answered | null} pinned */
+function draw(pinned) {
   unpin.hidden = pinned === null;
   table.hidden = pinned === null;
   pin.textContent = pinned === null ? 'Pin this answer' : 'Pin the answer now instead';

@@ -5,6 +5,7 @@ import { NO_BREAK, amountChange, amountPair, bareSpecies, fractionPair, pair, si
 
 /** @import { Report, SpeciesReport } from '../shiftgauge.js' */
 /** @import { State } from '../state.js' */
+/** @typedef {{ now: string, rest: string, change: string }} Columns */
 
 const body = byId('ledger-body', HTMLElement);
 const caption = byId('ledger-caption', HTMLElement);
@@ -13,17 +14,20 @@ const conversions = byId('conversions', HTMLElement);
 /** The report shown last, so that a change of basis needs no new answer. */
 /** @type {Report | null} */
 let shown = null;
+/** @type {Report | null} */
+let pinned = null;
 /** The case's own basis is taken over when it changes, and left alone otherwise. */
 let basisOfCase = '';
 
 for (const radio of document.querySelectorAll('input[name="ledger-basis"]')) radio.addEventListener('change', draw);
 
 /** @param {State} state */
-export function render({ report, answered }) {
+export function render({ report, answered, pinned: kept }) {
   const basis = answered?.reading.gas?.basis ?? 'amount';
   if (basis !== basisOfCase) choose('ledger-basis', basis);
   basisOfCase = basis;
   shown = report;
+  pinned = kept === null || kept.report === report ? null : kept.report;
   body.closest('section')?.toggleAttribute('hidden', report?.rest === null);
   draw();
 }
@@ -36,9 +40,9 @@ function draw() {
     dry: 'Gases as amount fractions of the gas without its water. Change is the difference of the two.',
   }[basis] ?? `Amounts on the basis of ${shown.basis}.`;
   conversions.textContent = conversionText(shown);
-  const dry = { now: dryTotal(shown.species, 'now_mol'), rest: dryTotal(shown.species, 'rest_mol') };
-  const found = shown.rest?.outcome !== 'has no limit';
-  body.replaceChildren(...shown.species.map((species) => row(species, basis, dry, found)));
+  const columns = columnsOf(shown, basis);
+  const before = pinned === null ? null : columnsOf(pinned, basis);
+  body.replaceChildren(...shown.species.flatMap((species) => rows(species, basis, columns(species), before, pinned)));
 }
 
 /**
@@ -54,6 +58,20 @@ function conversionText({ conversions: rows }) {
   return shares.length === 0 ? '' : `On the way to rest, ${shares.join('; ')}.`;
 }
 
+/**
+ * What a report's species show in the three columns; without a state at rest it repeats the start, which is
+ * not shown.
+ * @param {Report} report
+ * @param {string} basis
+ */
+function columnsOf({ species: all, rest }, basis) {
+  const dry = { now: dryTotal(all, 'now_mol'), rest: dryTotal(all, 'rest_mol') };
+  return (/** @type {SpeciesReport} */ species) => {
+    const shownNumbers = numbers(species, basis, dry);
+    return rest?.outcome === 'has no limit' ? { ...shownNumbers, rest: '–', change: '–' } : shownNumbers;
+  };
+}
+
 /** @param {SpeciesReport} species */
 const isWater = ({ species }) => species === 'H2O(g)';
 
@@ -66,19 +84,24 @@ function dryTotal(species, which) {
 }
 
 /**
+ * The row of a species, and under it what a pinned report says of it.
  * @param {SpeciesReport} species
  * @param {string} basis
- * @param {{ now: number, rest: number }} dry
- * @param {boolean} found   whether there is a state at rest; the report repeats the start where there is none
+ * @param {Columns} columns
+ * @param {((species: SpeciesReport) => Columns) | null} before   the columns of the pinned report
+ * @param {Report | null} kept
  */
-function row(species, basis, dry, found) {
-  const shownNumbers = numbers(species, basis, dry);
-  const { now, rest, change } = found ? shownNumbers : { ...shownNumbers, rest: '–', change: '–' };
+function rows(species, basis, { now, rest, change }, before, kept) {
+  const old = kept?.species.find((one) => one.species === species.species);
+  const was = old === undefined || before === null ? null : before(old);
   const asRatio = basis === 'dry' && isWater(species) ? [create('small', {}, ' per dry gas')] : [];
   const head = create('th', { scope: 'row' }, speciesName(species.species), ...asRatio);
   const gone = species.exhausted && (species.now_mol ?? 0) > 0 ? [' ', create('em', {}, 'used up')] : [];
-  return create('tr', { 'data-species': bareSpecies(species.species) },
+  const row = create('tr', { 'data-species': bareSpecies(species.species) },
     head, create('td', {}, now), create('td', {}, rest, ...gone), create('td', {}, change));
+  if (was === null) return [row];
+  const label = create('th', { scope: 'row' }, create('span', { class: 'visually-hidden' }, `${speciesName(species.species)}, `), 'pinned');
+  return [row, create('tr', { class: 'pinned' }, label, ...[was.now, was.rest, was.change].map((text) => create('td', {}, text)))];
 }
 
 /**

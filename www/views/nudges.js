@@ -1,4 +1,4 @@
-/** Nudges: one small change of each knob, an arrow as long as what it does, and why. */
+/** Nudges: one small change of each knob, an arrow that is longer the more it does, and why. */
 
 import { byId, create } from '../dom.js';
 import { NO_BREAK, amountChange, formula, significant, signed } from '../format.js';
@@ -10,27 +10,26 @@ const section = byId('nudges', HTMLElement);
 const list = byId('nudge-list', HTMLElement);
 const WORDS = { forward: 'forward', reverse: 'back', none: 'no move' };
 const ARROWS = { forward: '→', reverse: '←', none: '·' };
-/** An arrow of full length stands for this change of conversion; short ones are drawn longer than to scale. */
-const FULL = 0.05;
-
 /** @param {State} state */
 export function render({ report }) {
   const nudges = report?.nudges ?? [];
   section.hidden = nudges.length === 0 || report?.rest?.outcome === 'has no limit';
   if (section.hidden) return;
   const open = new Set([...list.querySelectorAll('details[open]')].map((row) => row.getAttribute('data-nudge')));
-  list.replaceChildren(...nudges.map((nudge) => row(nudge, open)));
+  const largest = Math.max(...nudges.map(({ extent_change_mol: extent }) => Math.abs(extent ?? 0)));
+  list.replaceChildren(...nudges.map((nudge) => row(nudge, open, largest)));
 }
 
 /**
  * @param {Nudge} nudge
  * @param {Set<string | null>} open   those whose reason is open stay so
+ * @param {number} largest            of the list, mol of extent
  */
-function row(nudge, open) {
-  const name = formula(nudge.name);
+function row(nudge, open, largest) {
+  const name = formula(nudge.name.replaceAll('(g)', ''));
   const key = `${nudge.knob} ${nudge.species ?? ''}`;
   const arrow = create('span', { class: 'length', 'aria-hidden': 'true' }, ARROWS[nudge.direction]);
-  arrow.style.setProperty('--length', String(length(nudge)));
+  arrow.style.setProperty('--length', String(length(nudge, largest)));
   const details = create('details', { class: `nudge ${nudge.direction}`, 'data-nudge': key },
     create('summary', {},
       create('span', { class: 'turn' }, name), arrow,
@@ -40,10 +39,14 @@ function row(nudge, open) {
   return create('li', {}, details);
 }
 
-/** @param {Nudge} nudge */
-function length({ conversion_change: change, direction }) {
-  if (change === null || direction === 'none') return 0;
-  return Math.min(1, Math.sqrt(Math.abs(change) / FULL));
+/**
+ * Arrows stand in the ratio of the square roots, so that a small one is still seen.
+ * @param {Nudge} nudge
+ * @param {number} largest
+ */
+function length({ extent_change_mol: change, direction }, largest) {
+  if (change === null || direction === 'none' || largest === 0) return 0;
+  return Math.sqrt(Math.abs(change) / largest);
 }
 
 /**

@@ -65,6 +65,7 @@ function draw() {
     energy: valley.energy,
     now: valley.extent_now_mol,
     rest: hasNoLimit(shown) ? null : reaction.extent_mol,
+    within: within(shown, valley),
     walls: walls(valley),
     arrow: ARROWS[reaction.verdict ?? 'cannot tell'],
     title: energyName(valley),
@@ -95,6 +96,19 @@ const capital = (text) => text.charAt(0).toUpperCase() + text.slice(1);
 /** @param {string[]} species */
 const listed = (species) => species.map(speciesName).join(' and ');
 
+/**
+ * Where rest could lie within the tolerances: the interval of the missing conversion, as extents between the walls.
+ * @param {Report} report
+ * @param {Valley} valley
+ * @returns {[number, number] | null}
+ */
+function within({ reactions }, { extent_min_mol: least, extent_max_mol: most }) {
+  const interval = reactions[0]?.missing_conversion_interval ?? null;
+  if (interval === null) return null;
+  const [low, high] = interval.map((share) => (share === null ? null : share * (most - least)));
+  return [Math.max(least, low ?? least), Math.min(most, high ?? most)];
+}
+
 /** @param {Valley} valley */
 function walls(valley) {
   return valley.limits.map(({ side, species }) => ({
@@ -117,9 +131,11 @@ function describe(report, valley) {
   const basis = `on the basis of ${report.basis}`;
   const course = extent === null ? '' : hasNoLimit(report) ? 'There is no state at rest within what is known. ' : extent === 0 ? 'Now stands at rest. '
     : `From now to rest the reaction runs ${mol(Math.abs(extent))} ${extent > 0 ? 'forward' : 'in reverse'}, ${basis}. `;
+  const range = extent === null || hasNoLimit(report) ? null : within(report, valley);
+  const tolerance = range === null || range[1] <= range[0] ? '' : `Within the tolerances rest lies between ${mol(range[0])} and ${mol(range[1])}, the strip on the floor. `;
   const limits = valley.limits.map(({ side, species }) => {
     const [room, way] = side === 'min' ? [-valley.extent_min_mol, 'in reverse'] : [valley.extent_max_mol, 'forward'];
     return room > 0 ? `${listed(species)} would run out at ${mol(room)} ${way}` : `without ${listed(species)} it cannot move ${way}`;
   });
-  return `${course}${limits.length > 0 ? `${capital(limits.join('; '))}.` : ''}`.trim();
+  return `${course}${tolerance}${limits.length > 0 ? `${capital(limits.join('; '))}.` : ''}`.trim();
 }

@@ -14,7 +14,7 @@ const more = byId('sentence-more', HTMLElement);
 const numbers = byId('numbers', HTMLElement);
 
 /** @param {State} state */
-export function render({ report, answered, current }) {
+export function render({ report, answered, current, pinned }) {
   answer.classList.toggle('is-old', !current && report !== null);
   if (report === null || answered === null) {
     answer.dataset.tone = 'unclear';
@@ -31,7 +31,8 @@ export function render({ report, answered, current }) {
     said.lead, create('strong', { class: 'direction', id: 'direction' }, said.word), said.tail,
   );
   more.textContent = said.more;
-  numbers.replaceChildren(...figures(report, unit).map((figure) => item(report, figure)));
+  const before = pinned === null || pinned.report === report ? [] : figures(pinned.report, unit);
+  numbers.replaceChildren(...figures(report, unit).map((figure) => item(report, figure, before.find(({ about }) => about === figure.about))));
 }
 
 /**
@@ -87,9 +88,11 @@ function plainDecimals(kelvin, unit) {
  * A number with its label; the label leads to the line of working where there is one.
  * @param {Report} report
  * @param {Figure} figure
+ * @param {Figure} [pinned]   the same number of a pinned answer
  */
-function item(report, { about, label, value }) {
+function item(report, { about, label, value }, pinned) {
   const worked = report.steps.some((step) => step.about === about);
   const name = worked ? create('a', { href: `#working-${about}`, title: 'How this came about' }, label) : label;
-  return create('div', { 'data-figure': about }, create('dt', {}, name), create('dd', {}, value));
+  return create('div', { 'data-figure': about }, create('dt', {}, name), create('dd', {}, value),
+    ...(pinned === undefined ? [] : [create('dd', { class: 'pinned' }, `pinned ${pinned.value}`)]));
 }
