@@ -146,6 +146,32 @@ fn where_a_temperature_says_nothing_the_band_is_on_conversion() {
 }
 
 #[test]
+fn a_slight_vacuum_has_a_tolerance_like_any_pressure() {
+    let kiln = |pressure: &str| {
+        reaction(&json!({
+            "format": "shiftgauge 1",
+            "reactions": [{ "equation": "CaCO3 = CaO + CO2", "constant": { "from": "library" } }],
+            "temperature": "840 ± 10 °C",
+            "pressure": pressure,
+            "reading": {
+                "gas": { "basis": "wet", "entries": [
+                    { "species": "CO2", "value": "33 ± 1 %" }, { "species": "N2", "value": "remainder" }
+                ] },
+                "solids": { "entries": [
+                    { "species": "CaCO3", "value": "present" }, { "species": "CaO", "value": "present" }
+                ] }
+            }
+        }))
+    };
+    let u = |found: &Json| found["u_affinity_over_rt"].as_f64().unwrap();
+    let (vacuum, none, gauge) = (kiln("-3 ± 1 mbar(g)"), kiln("-3 mbar(g)"), kiln("3 ± 1 mbar(g)"));
+    assert!(u(&none) > 0.05 && u(&vacuum) > u(&none), "{vacuum}");
+    assert!((u(&vacuum) / u(&gauge) - 1.0).abs() < 1e-3);
+    let rows = vacuum["budget"].as_array().unwrap();
+    assert!(rows.iter().any(|row| row["input"] == "pressure"), "{rows:?}");
+}
+
+#[test]
 fn a_set_approach_is_the_middle_of_the_band() {
     // A reading that is 20 K short, in a plant where 20 K are usual: rest is that of K at T*.
     let mut case = shift(0.40, " ± 2 % rel");

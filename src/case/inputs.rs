@@ -3,7 +3,7 @@
 use super::question::{KSource, Question, StatedK};
 use crate::mixture::{Basis, Entry, GasReading, Stated, Water};
 use crate::problem::{InputCode, Remark};
-use crate::quantity::{Measure, Quantity};
+use crate::quantity::{Measure, PressureReference, Quantity};
 
 /// A number in a case.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -268,7 +268,9 @@ pub(super) fn with<T>(
 ) -> Option<T> {
     let quantity = slot(question, place)?;
     let before = quantity.value_si;
-    let floor = if quantity.measure.starts_at_zero() { 0.0 } else { f64::MIN };
+    // A gauge reading may be below zero; what is left of the atmosphere is seen when it is added.
+    let gauge = quantity.pressure_reference == PressureReference::Gauge;
+    let floor = if quantity.measure.starts_at_zero() && !gauge { 0.0 } else { f64::MIN };
     let ceiling = if quantity.measure == Measure::Fraction { 1.0 } else { f64::MAX };
     if !(floor..=ceiling).contains(&value_si) {
         return None;

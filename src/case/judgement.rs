@@ -79,7 +79,13 @@ pub(super) fn judgement(
     let bounds = bounds(&mut work);
     let ends = ends(&mut work, &mut asker, &bounds, &now);
     let u = |budget: &Option<Budget>| budget.as_ref().map_or(0.0, |budget| budget.u);
-    let affinity_interval = affinity_interval(&now, &ends, u(&affinity));
+    // An input that can be moved neither way leaves the uncertainty unknown, which is not zero.
+    let unknown = affinity.is_none() && now.affinity.finite().is_some();
+    let affinity_interval = if unknown {
+        Some(Interval { low: None, high: None })
+    } else {
+        affinity_interval(&now, &ends, u(&affinity))
+    };
     let set_approach_k = question.reaction.approach_k.unwrap_or(0.0);
     let forward_of_approach = if ground.enthalpy_j_per_mol() > 0.0 { 1.0 } else { -1.0 };
     let approach_interval = approach.as_ref().zip(now.approach_k).map(|(budget, approach_k)| {
