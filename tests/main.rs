@@ -6,6 +6,7 @@
     reason = "a test fails by panicking"
 )]
 
+mod ammonia;
 mod asking;
 mod balance;
 mod bare;
