@@ -119,6 +119,9 @@ pub(super) fn find(mut question: Question) -> Outcome<Findings> {
     let ln_k = constant.as_ref().map(|constant| constant.ln_k(temperature));
     let missing = find_missing(&mut question, &found.list, ln_k)?;
     let has_reading = question.has_reading();
+    if question.feed.is_some() && !has_reading {
+        return Err(Problem::new(CaseCode::FeedWithoutReading).at("feed").into());
+    }
     let laid = if has_reading { Some(lay(&question, &found.list)?) } else { None };
     let constant = match constant {
         Some(constant) => constant,

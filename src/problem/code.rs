@@ -241,6 +241,7 @@ codes! {
         PhaseNeeded = "phase-needed",
         LiquidsNeedReading = "liquids-need-reading",
         ReadingNeeded = "reading-needed",
+        FeedWithoutReading = "feed-without-reading",
         SpeciesNotHere = "species-not-here",
         KnobNotHere = "knob-not-here",
         SweepCount = "sweep-count",

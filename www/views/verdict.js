@@ -30,7 +30,9 @@ export function render({ report, answered, current, pinned }) {
     create('span', { class: 'arrow', 'aria-hidden': 'true' }, said.arrow),
     said.lead, create('strong', { class: 'direction', id: 'direction' }, said.word), said.tail,
   );
-  more.textContent = said.more;
+  // What can outweigh the interval stands beside the verdict.
+  const ideal = report.notes.find(({ code }) => code === 'ideal-gas');
+  more.textContent = [said.more, ideal === undefined ? '' : 'The gas is taken as ideal; at this pressure that can shift T* by more than the interval shows.'].filter(Boolean).join(' ');
   const before = pinned === null || pinned.report === report ? [] : figures(pinned.report, unit);
   numbers.replaceChildren(...figures(report, unit).map((figure) => item(report, figure, before.find(({ about }) => about === figure.about))));
 }

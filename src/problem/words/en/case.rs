@@ -129,6 +129,10 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "Several liquids react, and the reading does not say how they are mixed.",
             "Enter the liquid with its components.",
         ),
+        C::FeedWithoutReading => (
+            "A feed is given, but no reading of what came of it.",
+            "To see how far the feed can go, enter it as the analysis.",
+        ),
         C::ReadingNeeded => (
             "A chart and a target start from a reading, and there is none.",
             "Enter the reading, or what is fed.",
