@@ -50,3 +50,19 @@ ATCT_LIMIT = 0.15
 
 # Largest difference from a second source that needs no reason: ΔfH° in kJ/mol, S° in J/(mol K).
 SECOND_LIMITS = (1.5, 1.5)
+
+# u(ΔfG°298) in kJ/mol of a species that no second source knows, by class: judged once, before any
+# comparison with the tables that the proof uses, and never moved afterwards to fit it.
+CLASSES = {
+    "molecule": 2.0,  # a closed-shell gas of H, C, N, O, S, P and the halogens, measured
+    "organic": 1.5,  # an organic gas or liquid with a measured heat of combustion
+    "radical": 5.0,  # a radical or an atom that no assessed network holds
+    "vapour": 8.0,  # a metal's oxide, halide, sulfide or hydroxide as a hot vapour
+    "estimate": 15.0,  # a figure that its own source calls an estimate
+    "salt": 1.5,  # a common oxide, hydroxide, halide, sulfate, carbonate or nitrate
+    "mineral": 3.0,  # a sulfide, carbide, nitride, silicate, phosphate or spinel
+    "rare": 8.0,  # a condensed species measured seldom or indirectly
+    "ion": 1.0,  # a dissolved ion of the CRC table
+    "complex": 2.0,  # a dissolved complex or an ion of a rarer element
+    "dissolved": 1.0,  # a dissolved molecule by Henry's constant or a published ΔfG°
+}
