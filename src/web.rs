@@ -63,10 +63,28 @@ pub fn convert(#[wasm_bindgen(unchecked_param_type = "StatedNumber")] number: Js
     give(&case::convert(&tree(number)))
 }
 
-/// Finds species of the library.
+/// Finds species of the library and of a book.
 #[wasm_bindgen(unchecked_return_type = "SpeciesAnswer")]
-pub fn species(text: &str) -> JsValue {
-    give(&case::species(text))
+pub fn species(
+    text: &str,
+    #[wasm_bindgen(unchecked_param_type = "Asked")] asked: JsValue,
+) -> JsValue {
+    give(&case::species(text, &tree(asked)))
+}
+
+/// Gives the sheet of one species.
+#[wasm_bindgen(unchecked_return_type = "SheetAnswer")]
+pub fn sheet(
+    text: &str,
+    #[wasm_bindgen(unchecked_param_type = "Asked")] asked: JsValue,
+) -> JsValue {
+    give(&case::sheet(text, &tree(asked)))
+}
+
+/// Looks a user's own book through.
+#[wasm_bindgen(unchecked_return_type = "BookAnswer")]
+pub fn book(#[wasm_bindgen(unchecked_param_type = "Book")] book: JsValue) -> JsValue {
+    give(&case::book(&tree(book)))
 }
 
 /// Gives ln K − ln Q of each reaction of a problem in bare numbers.

@@ -28,7 +28,7 @@ fn reactions_agree_with_the_log_kf_columns_of_janaf() {
             .terms()
             .iter()
             .map(|(record, nu)| {
-                let janaf = published[&(record.id, 298.15_f64.to_bits())].1;
+                let janaf = published[&(&*record.id, 298.15_f64.to_bits())].1;
                 nu * (record.formation_enthalpy_j_per_mol - 1000.0 * janaf)
             })
             .sum();
@@ -37,7 +37,7 @@ fn reactions_agree_with_the_log_kf_columns_of_janaf() {
             let expected: f64 = reaction
                 .terms()
                 .iter()
-                .map(|(record, nu)| nu * published[&(record.id, t.to_bits())].0)
+                .map(|(record, nu)| nu * published[&(&*record.id, t.to_bits())].0)
                 .sum();
             let difference = reaction.ln_k(kelvin(t)) / LN_10 - expected;
             let left = difference + shift_j_per_mol / (GAS_CONSTANT_J_PER_MOL_K * t * LN_10);
@@ -151,5 +151,6 @@ fn uncertainty_of_a_reaction_grows_with_its_numbers() {
     let (u1, u2) = (once.u_gibbs_j_per_mol(), twice.u_gibbs_j_per_mol());
     assert!(u1 > 50.0 && (u2 - 2.0 * u1).abs() < 1e-9, "{u1}, {u2}");
     assert_eq!(once.range_k(), Some((298.15, 5000.0)));
-    assert_eq!(once.reaches(kelvin(700.0)).count(), 3);
+    assert_eq!(once.extrapolated_by_k(kelvin(700.0)), None);
+    assert_eq!(once.extrapolated_by_k(kelvin(288.15)), Some(10.0));
 }

@@ -2,14 +2,17 @@
 
 use super::constant_of::k_report;
 use super::report::{
-    FitPoint, FitReport, ReactionReport, RecordReport, Report, SourceReport, TermReport,
+    FitPoint, FitReport, MeasuredUse, ReactionReport, RecordReport, Report, SourceReport,
+    TermReport,
 };
 use super::report_amounts::MissingReport;
 use super::run::Findings;
 use super::setting::Basis;
+use super::species::MeasuredReport;
 use super::{amounts, notes, nudges, steps, verdict};
 use crate::constant::Constant;
 use crate::equilibrium::{Affinity, Quotient, RestOutcome};
+use crate::library::Combination;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// Writes the report.
@@ -116,20 +119,38 @@ pub(super) fn quotient_word(quotient: Quotient) -> &'static str {
 }
 
 fn source(found: &Findings) -> SourceReport {
-    let records = found.participants.iter().filter_map(|participant| {
-        participant.record.map(|record| RecordReport {
-            species: participant.species.text(),
-            name: record.names.first().copied().unwrap_or_default().to_owned(),
-            sources: record.citations().collect(),
-            range_k: record.range_k.into(),
-            u_gibbs_j_per_mol: record.u_gibbs_j_per_mol,
-        })
+    let combination = match &found.constant {
+        Constant::Library(combination) => Some(combination),
+        _ => None,
+    };
+    let records = combination.map_or(&[][..], Combination::records).iter();
+    let records = records.map(|(record, nu)| RecordReport {
+        species: record.label(),
+        name: record.names.first().cloned().unwrap_or_default().into_owned(),
+        nu: *nu,
+        sources: record.citations().collect(),
+        range_k: record.range_k.into(),
+        u_gibbs_j_per_mol: record.u_gibbs_j_per_mol,
+        u_from: record.u_kind.as_str(),
+        own: record.is_own(),
     });
     let records: Vec<RecordReport> = records.collect();
+    let measured = combination.map_or(&[][..], Combination::measured).iter();
+    let measured: Vec<MeasuredUse> = measured
+        .map(|(known, times)| MeasuredUse { times: *times, measured: MeasuredReport::of(known) })
+        .collect();
     let text = match &found.constant {
-        Constant::Library(_) => {
+        Constant::Library(_) if measured.is_empty() => {
             format!("The library, from the records of {} species", records.len())
         }
+        Constant::Library(_) if records.is_empty() => {
+            format!("The library, from equilibria that were measured: {}", measured.len())
+        }
+        Constant::Library(_) => format!(
+            "The library, from equilibria that were measured ({}) and the records of {} species",
+            measured.len(),
+            records.len()
+        ),
         Constant::Stated(_) => "A value that was entered in the case".to_owned(),
         Constant::Formula(formula) => {
             format!("A formula of {} terms that was entered in the case", formula.terms.len())
@@ -146,6 +167,7 @@ fn source(found: &Findings) -> SourceReport {
         range_k: found.constant.range_k().map(Into::into),
         extrapolated_by_k: found.at.extrapolated_by_k,
         records,
+        measured,
         fit: match &found.constant {
             Constant::Points(line) => Some(FitReport {
                 points: line

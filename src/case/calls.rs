@@ -9,7 +9,7 @@ use super::report::{KReport, Report, TermReport};
 use super::run::{self, at_field, delta_nu_gas};
 use super::value::Value;
 use crate::constant::Constant;
-use crate::library::{self, Combination, Record, Temperature};
+use crate::library::{self, Book, Combination, Known, Temperature};
 use crate::problem::Outcome;
 use crate::quantity::{self, Measure};
 use crate::reaction::{self, parse_equation};
@@ -122,9 +122,11 @@ fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport>
             return Err(problems);
         }
     };
-    let found = participants(&parsed, &[], true, Some(at_temperature)).map_err(at_equation)?;
-    let rows = found.list.iter().filter_map(|one| one.record.map(|record| (record, one.nu)));
-    let rows: Vec<(&Record, f64)> = rows.collect();
+    let found = participants(&parsed, &[], &Book::default(), true, Some(at_temperature));
+    let found = found.map_err(at_equation)?;
+    let rows = found.list.iter();
+    let rows = rows.filter_map(|one| one.record.clone().map(|record| (record, one.nu)));
+    let rows: Vec<(Known, f64)> = rows.collect();
     let constant = Constant::Library(Combination::new(&rows).map_err(at_equation)?);
     let at = constant.at(at_temperature);
     Ok(ConstantReport {
@@ -135,87 +137,6 @@ fn constant_report(equation: &str, temperature: &str) -> Outcome<ConstantReport>
         range_k: constant.range_k().map(Into::into),
         extrapolated_by_k: at.extrapolated_by_k,
     })
-}
-
-/// The answer of `species`.
-#[derive(Debug, Clone, Serialize)]
-pub struct SpeciesAnswer {
-    ok: bool,
-    /// The matching species; empty where there is none.
-    pub species: Vec<SpeciesMatch>,
-    /// A formula of the library that is near what was asked for, where nothing matches.
-    pub near: Option<String>,
-}
-
-/// A species of the library.
-#[derive(Debug, Clone, Serialize)]
-pub struct SpeciesMatch {
-    /// The species with its phase, as an equation may name it.
-    pub species: String,
-    /// Its formula.
-    pub formula: &'static str,
-    /// `g`, `l`, `s` or `aq`.
-    pub phase: &'static str,
-    /// Its polymorph or isomer, where the formula and the phase do not tell.
-    pub form: Option<&'static str>,
-    /// Its names.
-    pub names: Vec<&'static str>,
-    /// Its CAS number; empty where it has none.
-    pub cas: &'static str,
-    /// The range of temperature.
-    pub range_k: [f64; 2],
-    /// The published sources.
-    pub sources: Vec<&'static str>,
-    /// ΔfH° at 298.15 K.
-    pub enthalpy_of_formation_j_per_mol: f64,
-    /// S° at 298.15 K.
-    pub entropy_j_per_mol_k: f64,
-    /// Standard uncertainty of ΔfG° at 298.15 K.
-    pub u_gibbs_j_per_mol: f64,
-}
-
-/// Finds the species of the library that a formula, a name or a CAS number stands for.
-#[must_use]
-pub fn species(text: &str) -> SpeciesAnswer {
-    let records = matching(text);
-    let near = if records.is_empty() { reaction::nearest(text, library::formulas()) } else { None };
-    let species = records.into_iter().map(species_match).collect();
-    SpeciesAnswer { ok: true, species, near }
-}
-
-/// So many species are offered for what is half typed.
-const OFFERED_AT_MOST: usize = 24;
-
-/// Records by formula, with its phase and form if written, else by name or CAS number, else those
-/// that begin so.
-fn matching(text: &str) -> Vec<&'static Record> {
-    let by_formula = reaction::parse_species(text).map(|species| {
-        library::find(species.formula.text(), species.phase, species.form.as_deref())
-    });
-    match by_formula {
-        Ok(records) if !records.is_empty() => records,
-        _ => {
-            let named = library::named(text);
-            if named.is_empty() { library::beginning(text, OFFERED_AT_MOST) } else { named }
-        }
-    }
-}
-
-fn species_match(record: &'static Record) -> SpeciesMatch {
-    let standard = record.properties(Temperature::standard());
-    SpeciesMatch {
-        species: record.label(),
-        formula: record.formula,
-        phase: record.phase.symbol(),
-        form: record.form,
-        names: record.names.clone(),
-        cas: record.cas,
-        range_k: record.range_k.into(),
-        sources: record.citations().collect(),
-        enthalpy_of_formation_j_per_mol: standard.enthalpy_j_per_mol,
-        entropy_j_per_mol_k: standard.entropy_j_per_mol_k,
-        u_gibbs_j_per_mol: record.u_gibbs_j_per_mol,
-    }
 }
 
 /// The answer of `version`.

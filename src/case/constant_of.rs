@@ -2,7 +2,7 @@
 
 use super::answer::quotient_word;
 use super::participants::Participant;
-use super::question::{KSource, KindOfK, Question, StatedFormula, StatedK};
+use super::question::{KSource, KindOfK, OwnConstant, Question, StatedFormula, StatedK};
 use super::report::{FormReport, KReport};
 use super::run::{EQUATION, at_field};
 use crate::constant::{
@@ -10,8 +10,8 @@ use crate::constant::{
     StatedConstant, all_forms, line_through,
 };
 use crate::equilibrium::Quotient;
-use crate::library::{Combination, Record, Temperature};
-use crate::problem::{CaseCode, Outcome, Problem};
+use crate::library::{Combination, Known, Temperature};
+use crate::problem::{CaseCode, NoteCode, Outcome, Problem, Remark};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::Equation;
 use std::f64::consts::LN_10;
@@ -49,12 +49,13 @@ pub(super) fn constant_of(
     // A number belongs to the other equation, whose Δν is ours over the factor.
     let own_delta_nu = delta_nu_gas / factor;
     Ok(Some(match &question.reaction.source {
-        KSource::Library => {
+        KSource::Library { measured } => {
             let rows = participants.iter().filter_map(|participant| {
-                participant.record.map(|record| (record, participant.nu))
+                participant.record.clone().map(|record| (record, participant.nu))
             });
-            let rows: Vec<(&Record, f64)> = rows.collect();
-            let combination = Combination::new(&rows);
+            let rows: Vec<(Known, f64)> = rows.collect();
+            let combination =
+                if *measured { Combination::new(&rows) } else { Combination::of_species(&rows) };
             Constant::Library(combination.map_err(|found| at_field(found, EQUATION))?)
         }
         KSource::Points(stated) => {
@@ -79,8 +80,31 @@ pub(super) fn constant_of(
         KSource::Formula(stated) => {
             Constant::Formula(formula_constant(stated, own_delta_nu, factor))
         }
-        KSource::Reading(_) => return Ok(None),
+        // A book's constant has been put in its place before this.
+        KSource::Reading(_) | KSource::Book => return Ok(None),
     }))
+}
+
+/// Puts the constant that the user's book keeps for this reaction, a multiple or the reverse of it, in
+/// the place of the mention of the book, and says so.
+///
+/// # Errors
+/// The book keeps none.
+pub(super) fn take_from_book(
+    question: &mut Question,
+    equation: &Equation,
+    participants: &[Participant],
+) -> Outcome<Remark> {
+    let is_this = |kept: &&OwnConstant| {
+        equation.multiple_of(&with_phases(&kept.equation, participants)).is_some()
+    };
+    let Some(kept) = question.book.constants.iter().find(is_this) else {
+        let problem = Problem::new(CaseCode::NotInBook).with("equation", equation.text());
+        return Err(problem.at(FROM).into());
+    };
+    question.reaction.source = kept.constant.clone();
+    question.reaction.constant_for = Some(kept.equation.clone());
+    Ok(Remark::new(NoteCode::KFromBook).with("source", kept.source.as_str()))
 }
 
 /// The formula as one of ln K for the reaction as written and p° = 1 bar.

@@ -12,7 +12,7 @@ use super::report::{FormReport, TermReport};
 use super::run::{at_field, delta_nu_gas};
 use super::value::Value;
 use crate::constant::Constant;
-use crate::library::Temperature;
+use crate::library::{Book, Temperature};
 use crate::mixture::absolute_pressure_pa;
 use crate::problem::{CaseCode, Outcome};
 use crate::quantity::{Measure, STANDARD_ATMOSPHERE_PA};
@@ -75,7 +75,7 @@ fn converted(number: &Value) -> Outcome<Converted> {
     if !reader.problems.is_empty() {
         return Err(reader.problems);
     }
-    let found = participants(&equation.equation, &[], false, None);
+    let found = participants(&equation.equation, &[], &Book::default(), false, None);
     let found = found.map_err(|problems| at_field(problems, "equation"))?;
     let delta_nu_gas = delta_nu_gas(&found.list);
     let temperature_k = temperature.kelvin();

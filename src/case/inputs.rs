@@ -99,8 +99,7 @@ fn places(question: &Question) -> Vec<Named> {
         Part::HeatCapacity => ("heat_capacity", InputCode::KHeatCapacity),
     };
     match &question.reaction.source {
-        KSource::Library | KSource::Formula(_) => {}
-        KSource::Reading(_) => {}
+        KSource::Library { .. } | KSource::Formula(_) | KSource::Reading(_) | KSource::Book => {}
         KSource::Value(_) => {
             for part in [Part::Value, Part::At, Part::Enthalpy, Part::HeatCapacity] {
                 let (name, code) = of_k(part);

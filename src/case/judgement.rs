@@ -169,16 +169,19 @@ fn fix_closing(work: &mut Question, ground: &Ground) {
 /// The uncertainty of K's own data: one for each record of the library, or one of a line.
 fn data_shifts(constant: &Constant) -> Vec<(Remark<InputCode>, Shift)> {
     match constant {
-        Constant::Library(combination) => combination
-            .terms()
-            .iter()
-            .filter(|(record, nu)| *nu != 0.0 && record.u_gibbs_j_per_mol > 0.0)
-            .map(|(record, nu)| {
+        Constant::Library(combination) => {
+            let records = combination.records().iter().map(|(record, nu)| {
                 let name = Remark::new(InputCode::Data).with("species", record.label());
-                let gibbs_j_per_mol = nu * record.u_gibbs_j_per_mol;
-                (name, Shift { gibbs_j_per_mol, times_u: 0.0 })
-            })
-            .collect(),
+                (name, nu * record.u_gibbs_j_per_mol)
+            });
+            let measured = combination.measured().iter().map(|(known, times)| {
+                let name = Remark::new(InputCode::Measured).with("equation", known.equation());
+                (name, times * known.u_gibbs_j_per_mol())
+            });
+            let rows = records.chain(measured).filter(|(_, gibbs)| *gibbs != 0.0);
+            let shift = |gibbs_j_per_mol| Shift { gibbs_j_per_mol, times_u: 0.0 };
+            rows.map(|(name, gibbs_j_per_mol)| (name, shift(gibbs_j_per_mol))).collect()
+        }
         Constant::Points(line) if line.u_ln_k(line.range_k.0).is_some_and(|u| u > 0.0) => {
             let shift = Shift { gibbs_j_per_mol: 0.0, times_u: 1.0 };
             vec![(Remark::new(InputCode::KScatter), shift)]

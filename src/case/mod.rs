@@ -9,8 +9,10 @@ mod ask;
 mod asker;
 mod bare;
 mod blocks;
+mod book;
 mod calls;
 mod constant_of;
+mod constant_remarks;
 mod convert;
 mod inputs;
 mod judgement;
@@ -22,6 +24,7 @@ mod nudges;
 mod participants;
 mod question;
 mod read;
+mod read_book;
 mod read_constant;
 mod read_reading;
 mod reading_remarks;
@@ -30,7 +33,9 @@ mod report;
 mod report_amounts;
 mod run;
 mod setting;
+mod sheet;
 mod shown;
+mod species;
 mod steps;
 mod sweep;
 mod target;
@@ -38,9 +43,10 @@ mod value;
 mod verdict;
 
 pub use bare::{AffinitiesAnswer, AffinityReport, RestAnswer, affinities, rest};
+pub use book::{BookAnswer, KeptConstant, book};
 pub use calls::{
-    Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, SpeciesAnswer, SpeciesMatch,
-    Version, balance, check, constant, species, version,
+    Balanced, BalancedTerm, Checked, ConstantAnswer, ConstantReport, Version, balance, check,
+    constant, version,
 };
 pub use convert::{Converted, convert};
 pub use judgement_report::{BandReport, BetterRow, BudgetRow, JudgementReport};
@@ -54,6 +60,10 @@ pub use report_amounts::{
     BalanceReport, ChargeReport, Conversion, CurveReport, ElementReport, Limit, MissingReport,
     RestReport, RestoredReport, SaturationReport, SpeciesReport, ValleyReport,
 };
+pub use sheet::{
+    CurveOfSpecies, InsteadOf, PointOfSpecies, SheetAnswer, SheetReport, TransitionReport, sheet,
+};
+pub use species::{MeasuredReport, SpeciesAnswer, SpeciesMatch, species};
 pub use sweep::{AxisReport, LineReport, NowReport, ShowReport, SweepReport, Swept, sweep};
 pub use target::{SettingReport, TargetReport, Targeted, target};
 pub use value::Value;

@@ -1,16 +1,15 @@
 //! Notes beside the report, and the sentence of the verdict.
 
 use super::blocks::Block;
+use super::constant_remarks::constant_remarks;
 use super::inputs::without_tolerance;
 use super::missing::Missing;
 use super::participants::Participant;
-use super::question::KSource;
 use super::report::NoteReport;
 use super::run::{Findings, ReadingFindings};
 use super::setting::Basis;
 use super::shown;
 use crate::advice::NoApproach;
-use crate::constant::Constant;
 use crate::equilibrium::activities;
 use crate::library;
 use crate::mixture::{SolutionModel, water_saturation_pressure_pa};
@@ -219,30 +218,6 @@ fn pressure_remarks(found: &Findings) -> Vec<Remark> {
     if let Some(pressure_pa) = pressure_pa.filter(|pressure_pa| *pressure_pa > IDEAL_GAS_MARK_PA) {
         let remark = Remark::new(NoteCode::IdealGas);
         remarks.push(remark.with("pressure", shown::pressure(pressure_pa)));
-    }
-    remarks
-}
-
-fn constant_remarks(found: &Findings) -> Vec<Remark> {
-    let mut remarks = Vec::new();
-    if found.question.reaction.approach_k.is_some() {
-        let remark = Remark::new(NoteCode::ApproachTaken);
-        remarks.push(remark.with("temperature", shown::temperature(found.k_temperature.kelvin())));
-    }
-    if matches!(&found.constant, Constant::Points(line) if line.bends) {
-        remarks.push(Remark::new(NoteCode::PointsBend));
-    }
-    if matches!(found.question.reaction.source, KSource::Reading(_)) {
-        remarks.push(Remark::new(NoteCode::KFromReading));
-    }
-    if let Some(by_k) = found.at.extrapolated_by_k {
-        let code = match found.constant {
-            Constant::Library(_) => NoteCode::Extrapolated,
-            Constant::Points(_) => NoteCode::LineExtended,
-            Constant::Formula(_) => NoteCode::FormulaExtended,
-            Constant::Stated(_) => NoteCode::KNotCarried,
-        };
-        remarks.push(Remark::new(code).with("by_k", shown::number(by_k)));
     }
     remarks
 }

@@ -1,7 +1,7 @@
 //! Who takes part: the species of the reaction with their phases, then the inerts of the reading.
 
 use super::question::Question;
-use crate::library::{self, Record, Temperature};
+use crate::library::{Book, Known, Temperature};
 use crate::mixture::{Basis, Water};
 use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase, Species, Term, nearest, parse_species};
@@ -14,7 +14,7 @@ pub(super) struct Participant {
     /// Its stoichiometric number; zero for an inert.
     pub nu: f64,
     /// What the library knows of it, where K comes from there.
-    pub record: Option<&'static Record>,
+    pub record: Option<Known>,
 }
 
 /// The participants of a reaction, and what had to be assumed.
@@ -53,16 +53,17 @@ pub(super) fn named_in(question: &Question) -> Vec<Species> {
 pub(super) fn participants(
     equation: &Equation,
     reading: &[Species],
+    book: &Book,
     from_library: bool,
     temperature: Option<Temperature>,
 ) -> Outcome<Participants> {
     let mut list = Vec::with_capacity(equation.terms.len());
     let (mut remarks, mut problems) = (Vec::new(), Vec::new());
     let in_water = equation.terms.iter().any(is_dissolved);
-    let all_can_be_gas = equation.terms.iter().all(|term| can_be_gas(term, reading, in_water));
+    let around = Around { reading, book, in_water, from_library };
+    let all_can_be_gas = equation.terms.iter().all(|term| around.can_be_gas(term));
     for term in &equation.terms {
-        let (phase, assumed) = match phase_of(term, reading, all_can_be_gas, in_water, from_library)
-        {
+        let (phase, assumed) = match around.phase_of(term, all_can_be_gas) {
             Ok(found) => found,
             Err(problem) => {
                 problems.push(problem.span(term.span));
@@ -73,7 +74,7 @@ pub(super) fn participants(
         if assumed {
             remarks.push(Remark::new(NoteCode::PhaseAssumed).with("species", species.text()));
         }
-        let record = match record_of(&species, from_library, temperature, &mut remarks) {
+        let record = match around.record_of(&species, temperature, &mut remarks) {
             Ok(record) => record,
             Err(problem) => {
                 problems.push(problem.span(term.span));
@@ -95,107 +96,119 @@ fn is_dissolved(term: &Term) -> bool {
     term.species.formula.charge() != 0 || term.species.phase == Some(Phase::Aqueous)
 }
 
-/// The phases in which the library has this substance, or the reading names it.
-fn phases_known(term: &Term, reading: &[Species], in_water: bool) -> Vec<Phase> {
-    let named = reading.iter().filter(|species| species.same_substance(&term.species));
-    let mut found: Vec<Phase> = named.filter_map(|species| species.phase).collect();
-    if found.is_empty() {
-        let records =
-            library::find(term.species.formula.text(), None, term.species.form.as_deref());
-        found.extend(records.iter().map(|record| record.phase));
-        if !in_water && found.iter().any(|phase| *phase != Phase::Aqueous) {
-            found.retain(|phase| *phase != Phase::Aqueous);
-        }
-    }
-    Phase::ALL.into_iter().filter(|phase| found.contains(phase)).collect()
-}
-
-fn can_be_gas(term: &Term, reading: &[Species], in_water: bool) -> bool {
-    match term.species.phase {
-        Some(phase) => phase == Phase::Gas,
-        None => phases_known(term, reading, in_water).contains(&Phase::Gas),
-    }
-}
-
-/// The phase of a term, and whether it had to be assumed.
-fn phase_of(
-    term: &Term,
-    reading: &[Species],
-    all_gas: bool,
+/// What the species of an equation are looked for in.
+struct Around<'a> {
+    reading: &'a [Species],
+    book: &'a Book,
+    /// Whether the equation is one of a solution.
     in_water: bool,
     from_library: bool,
-) -> Result<(Phase, bool), Problem> {
-    if let Some(phase) = term.species.phase {
-        return Ok((phase, false));
-    }
-    match phases_known(term, reading, in_water)[..] {
-        // A species that nobody knows. Where K comes from the library, its absence there is told.
-        [] if from_library => Ok((Phase::Gas, true)),
-        [] => Err(Problem::new(CaseCode::PhaseNeeded)
-            .with("species", term.species.formula.text())
-            .with("example", term.species.in_phase(Phase::Gas).text())),
-        [only] => Ok((only, false)),
-        ref several if all_gas && several.contains(&Phase::Gas) => Ok((Phase::Gas, true)),
-        ref several => {
-            let written = |phase: &Phase| term.species.in_phase(*phase).text();
-            let allowed: Vec<String> = several.iter().map(written).collect();
-            let example = allowed[0].clone();
-            Err(Problem::new(CaseCode::PhaseUnclear)
-                .with("species", term.species.formula.text())
-                .with("allowed", allowed.join(" or "))
-                .with("example", example))
-        }
-    }
 }
 
-fn record_of(
-    species: &Species,
-    from_library: bool,
-    temperature: Option<Temperature>,
-    remarks: &mut Vec<Remark>,
-) -> Result<Option<&'static Record>, Problem> {
-    if !from_library {
-        return Ok(None);
+impl Around<'_> {
+    /// The phases in which the library has this substance, or the reading names it.
+    fn phases_known(&self, term: &Term) -> Vec<Phase> {
+        let named = self.reading.iter().filter(|species| species.same_substance(&term.species));
+        let mut found: Vec<Phase> = named.filter_map(|species| species.phase).collect();
+        if found.is_empty() {
+            let Species { formula, form, .. } = &term.species;
+            let records = self.book.meant(formula, None, form.as_deref());
+            found.extend(records.iter().map(|record| record.phase));
+            if !self.in_water && found.iter().any(|phase| *phase != Phase::Aqueous) {
+                found.retain(|phase| *phase != Phase::Aqueous);
+            }
+        }
+        Phase::ALL.into_iter().filter(|phase| found.contains(phase)).collect()
     }
-    let records = library::find(species.formula.text(), species.phase, species.form.as_deref());
-    match records[..] {
-        [] => Err(unknown(species)),
-        [only] => Ok(Some(only)),
-        [first, ref others @ ..] => {
-            let first = stablest(first, others, temperature);
-            let remark = Remark::new(NoteCode::FormAssumed)
-                .with("species", species.text())
-                .with("form", first.form.unwrap_or(first.names[0]));
-            remarks.push(remark);
-            Ok(Some(first))
+
+    fn can_be_gas(&self, term: &Term) -> bool {
+        match term.species.phase {
+            Some(phase) => phase == Phase::Gas,
+            None => self.phases_known(term).contains(&Phase::Gas),
+        }
+    }
+
+    /// The phase of a term, and whether it had to be assumed.
+    fn phase_of(&self, term: &Term, all_gas: bool) -> Result<(Phase, bool), Problem> {
+        if let Some(phase) = term.species.phase {
+            return Ok((phase, false));
+        }
+        match self.phases_known(term)[..] {
+            // A species that nobody knows. Where K comes from the library, its absence there is told.
+            [] if self.from_library => Ok((Phase::Gas, true)),
+            [] => Err(Problem::new(CaseCode::PhaseNeeded)
+                .with("species", term.species.formula.text())
+                .with("example", term.species.in_phase(Phase::Gas).text())),
+            [only] => Ok((only, false)),
+            ref several if all_gas && several.contains(&Phase::Gas) => Ok((Phase::Gas, true)),
+            ref several => {
+                let written = |phase: &Phase| term.species.in_phase(*phase).text();
+                let allowed: Vec<String> = several.iter().map(written).collect();
+                let example = allowed[0].clone();
+                Err(Problem::new(CaseCode::PhaseUnclear)
+                    .with("species", term.species.formula.text())
+                    .with("allowed", allowed.join(" or "))
+                    .with("example", example))
+            }
+        }
+    }
+
+    /// The record of a species: of several polymorphs the stablest, with a remark.
+    fn record_of(
+        &self,
+        species: &Species,
+        temperature: Option<Temperature>,
+        remarks: &mut Vec<Remark>,
+    ) -> Result<Option<Known>, Problem> {
+        if !self.from_library {
+            return Ok(None);
+        }
+        let records = self.book.meant(&species.formula, species.phase, species.form.as_deref());
+        match &records[..] {
+            [] => Err(self.unknown(species)),
+            [only] => Ok(Some(only.clone())),
+            // Isomers do not turn into one another as polymorphs do: which one is meant is not guessed.
+            several if species.phase != Some(Phase::Solid) => {
+                let known: Vec<String> = several.iter().map(|record| record.label()).collect();
+                let problem = Problem::new(LibraryCode::Several).with("found", species.text());
+                Err(problem.with("known", known.join(", ")))
+            }
+            [first, others @ ..] => {
+                let record = stablest(first, others, temperature);
+                let form = record.form.as_ref().or(record.names.first());
+                let remark = Remark::new(NoteCode::FormAssumed)
+                    .with("species", species.text())
+                    .with("form", form.map_or("", |form| &**form));
+                remarks.push(remark);
+                Ok(Some(record.clone()))
+            }
+        }
+    }
+
+    /// The problem of a species that the library does not have, with what it has instead.
+    fn unknown(&self, species: &Species) -> Problem {
+        let found = |code: LibraryCode| Problem::new(code).with("found", species.text());
+        let others = self.book.meant(&species.formula, None, None);
+        if !others.is_empty() {
+            let known: Vec<String> = others.iter().map(|record| record.label()).collect();
+            return found(LibraryCode::PhaseUnknown).with("known", known.join(", "));
+        }
+        match nearest(species.formula.text(), self.book.formulas()) {
+            Some(near) => found(LibraryCode::UnknownNear).with("near", near),
+            None => found(LibraryCode::Unknown),
         }
     }
 }
 
 /// The form with the lowest G° at the temperature, where that is known, else the first.
-fn stablest(
-    first: &'static Record,
-    others: &[&'static Record],
+fn stablest<'a>(
+    first: &'a Known,
+    others: &'a [Known],
     temperature: Option<Temperature>,
-) -> &'static Record {
+) -> &'a Known {
     let Some(at) = temperature else { return first };
-    let lower = |best: &'static Record, one: &&'static Record| {
+    let lower = |best: &'a Known, one: &'a Known| {
         if one.gibbs_over_rt(at) < best.gibbs_over_rt(at) { one } else { best }
     };
     others.iter().fold(first, lower)
-}
-
-/// The problem of a species that the library does not have, with what it has instead.
-fn unknown(species: &Species) -> Problem {
-    let formula = species.formula.text();
-    let found = |code: LibraryCode| Problem::new(code).with("found", species.text());
-    let others = library::find(formula, None, None);
-    if !others.is_empty() {
-        let known: Vec<String> = others.iter().map(|record| record.label()).collect();
-        return found(LibraryCode::PhaseUnknown).with("known", known.join(", "));
-    }
-    match nearest(formula, library::formulas()) {
-        Some(near) => found(LibraryCode::UnknownNear).with("near", near),
-        None => found(LibraryCode::Unknown),
-    }
 }

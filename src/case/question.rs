@@ -1,7 +1,10 @@
 //! A case with all its texts read: what the run needs, in the rooms' own types.
 
+use std::rc::Rc;
+
 use crate::advice::Band;
 use crate::constant::FormulaTerm;
+use crate::library::Book;
 use crate::mixture::{
     Around, Entry, GasReading, SolutionModel, SolutionReading, absolute_pressure_pa,
 };
@@ -56,7 +59,12 @@ pub(super) struct StatedFormula {
 /// Where K comes from.
 #[derive(Debug, Clone)]
 pub(super) enum KSource {
-    Library,
+    /// The library; whether measured equilibria may stand in for species' own records.
+    Library {
+        measured: bool,
+    },
+    /// The constant of this reaction in the user's own book.
+    Book,
     Value(Box<StatedK>),
     /// Numbers at several temperatures, which stand in `at` of each.
     Points(Vec<StatedK>),
@@ -64,6 +72,25 @@ pub(super) enum KSource {
     Formula(StatedFormula),
     /// The reading itself, taken as at equilibrium, with an enthalpy where one is stated.
     Reading(Option<Quantity>),
+}
+
+/// A reaction's K that a user keeps.
+#[derive(Debug, Clone)]
+pub(super) struct OwnConstant {
+    /// The equation that it belongs to.
+    pub equation: Equation,
+    /// A value, points or a formula.
+    pub constant: KSource,
+    /// Where it comes from, in words.
+    pub source: String,
+}
+
+/// What a user keeps of their own.
+#[derive(Debug, Clone, Default)]
+pub(super) struct OwnBook {
+    /// The library with their own species before the tables'.
+    pub library: Book,
+    pub constants: Vec<OwnConstant>,
 }
 
 /// What is asked of one reaction.
@@ -100,6 +127,8 @@ pub(super) struct Question {
     pub solution_model: SolutionModel,
     /// The solids and the liquid, each its own phase.
     pub pure: Vec<Entry>,
+    /// The user's own species and constants.
+    pub book: Rc<OwnBook>,
 }
 
 /// A liquid mixture as read.

@@ -1,7 +1,10 @@
 //! The case, walked by hand: every mistake in it is found in one go.
 
+use std::rc::Rc;
+
 use super::node::{Node, Reader};
 use super::question::{Held, KSource, LiquidReading, Question, ReactionQuestion};
+use super::read_book::read_book;
 use super::read_constant::{read_formula, read_points, read_stated};
 use super::read_reading::{read_gas, read_liquid, read_pure, read_solution};
 use super::value::Value;
@@ -14,7 +17,7 @@ use crate::reaction::{Balanced, Phase, balance};
 /// The first words of every case of this format.
 pub(super) const FORMAT: &str = "shiftgauge 1";
 
-const CASE_FIELDS: [&str; 14] = [
+const CASE_FIELDS: [&str; 15] = [
     "format",
     "title",
     "note",
@@ -29,6 +32,7 @@ const CASE_FIELDS: [&str; 14] = [
     "reading",
     "feed",
     "models",
+    "book",
 ];
 
 /// Reads a case.
@@ -47,6 +51,7 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
     }
     let solution_model = read_models(&mut reader, &root).unwrap_or_default();
     let reaction = read_reaction(&mut reader, &root.field("reactions"));
+    let book = Rc::new(read_book(&mut reader, &root.field("book")));
     let temperature = reader.needed_quantity(&root.field("temperature"), &[Measure::Temperature]);
     let atmosphere = read_atmosphere(&mut reader, &root.field("atmosphere"));
     let atmosphere_pa = atmosphere.map_or(STANDARD_ATMOSPHERE_PA, |stated| stated.value_si);
@@ -83,6 +88,7 @@ pub(super) fn read(case: &Value) -> Outcome<Question> {
         solution,
         solution_model,
         pure,
+        book,
     })
 }
 
@@ -208,19 +214,7 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     }
     let equation = read_equation(reader, &first.field("equation"), true);
     let constant = first.field("constant");
-    reader.object(&constant, &CONSTANT_FIELDS);
-    let from = constant.field("from");
-    let words = [("library", 0), ("value", 1), ("points", 2), ("formula", 3), ("reading", 4)];
-    let source = match reader.choice(&from, &words)? {
-        0 => Some(KSource::Library),
-        1 => read_stated(reader, &constant).map(|stated| KSource::Value(Box::new(stated))),
-        2 => read_points(reader, &constant).map(KSource::Points),
-        3 => read_formula(reader, &constant).map(KSource::Formula),
-        _ => {
-            let enthalpy = constant.field("enthalpy");
-            Some(KSource::Reading(reader.quantity(&enthalpy, &[Measure::MolarEnergy])))
-        }
-    };
+    let source = read_source(reader, &constant, false);
     let constant_for = read_equation(reader, &constant.field("for"), false);
     let constant_for = constant_for.map(|balanced| balanced.equation);
     let approach = constant.field("approach");
@@ -229,6 +223,33 @@ fn read_reaction(reader: &mut Reader, list: &Node) -> Option<ReactionQuestion> {
     let Balanced { equation, already_balanced } = equation?;
     let source = source?;
     Some(ReactionQuestion { equation, already_balanced, source, constant_for, approach_k })
+}
+
+/// Where K comes from; of what is kept in a book, only what stands on its own.
+pub(super) fn read_source(reader: &mut Reader, constant: &Node, is_kept: bool) -> Option<KSource> {
+    reader.object(constant, &CONSTANT_FIELDS);
+    let words = [
+        ("library", 0),
+        ("species", 1),
+        ("book", 2),
+        ("reading", 3),
+        ("value", 4),
+        ("points", 5),
+        ("formula", 6),
+    ];
+    let allowed = if is_kept { &words[4..] } else { &words[..] };
+    match reader.choice(&constant.field("from"), allowed)? {
+        0 => Some(KSource::Library { measured: true }),
+        1 => Some(KSource::Library { measured: false }),
+        2 => Some(KSource::Book),
+        3 => {
+            let enthalpy = constant.field("enthalpy");
+            Some(KSource::Reading(reader.quantity(&enthalpy, &[Measure::MolarEnergy])))
+        }
+        4 => read_stated(reader, constant).map(|stated| KSource::Value(Box::new(stated))),
+        5 => read_points(reader, constant).map(KSource::Points),
+        _ => read_formula(reader, constant).map(KSource::Formula),
+    }
 }
 
 const CONSTANT_FIELDS: [&str; 13] = [

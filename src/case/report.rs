@@ -1,5 +1,7 @@
 //! The report: what `check` answers, as plain data in SI, every number finite.
 
+use std::borrow::Cow;
+
 use serde::Serialize;
 
 use super::judgement_report::JudgementReport;
@@ -9,6 +11,7 @@ use super::report_amounts::{
     BalanceReport, ChargeReport, Conversion, MissingReport, RestReport, SaturationReport,
     SpeciesReport, ValleyReport,
 };
+use super::species::MeasuredReport;
 
 /// Everything that is known of one case.
 #[derive(Debug, Clone, Serialize)]
@@ -155,8 +158,10 @@ pub struct SourceReport {
     pub range_k: Option<[f64; 2]>,
     /// How far outside its range the reading lies, if it does.
     pub extrapolated_by_k: Option<f64>,
-    /// One for each species that the library gave.
+    /// One for each record of the library that K rests on.
     pub records: Vec<RecordReport>,
+    /// The measured equilibria of the library that K rests on.
+    pub measured: Vec<MeasuredUse>,
     /// The line through points, where K is from points.
     pub fit: Option<FitReport>,
 }
@@ -192,12 +197,28 @@ pub struct RecordReport {
     pub species: String,
     /// Its name.
     pub name: String,
-    /// The published sources.
-    pub sources: Vec<&'static str>,
+    /// How many times it enters K: its stoichiometric number, unless measured equilibria stand in.
+    pub nu: f64,
+    /// The sources in full.
+    pub sources: Vec<Cow<'static, str>>,
     /// The range of temperature.
     pub range_k: [f64; 2],
     /// Standard uncertainty of ΔfG° at 298.15 K.
     pub u_gibbs_j_per_mol: f64,
+    /// How it was got: `element`, `atct`, `codata`, `sources`, `class` or `own`.
+    pub u_from: &'static str,
+    /// Whether it is the user's own.
+    pub own: bool,
+}
+
+/// A measured equilibrium that K rests on.
+#[derive(Debug, Clone, Serialize)]
+pub struct MeasuredUse {
+    /// How many times it enters K.
+    pub times: f64,
+    /// The equilibrium, as fields of their own.
+    #[serde(flatten)]
+    pub measured: MeasuredReport,
 }
 
 /// A line of the working.

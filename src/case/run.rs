@@ -2,7 +2,7 @@
 
 use super::asker::missing_conversion;
 use super::blocks::ion;
-use super::constant_of::{constant_of, constant_of_reading, k_temperature};
+use super::constant_of::{constant_of, constant_of_reading, k_temperature, take_from_book};
 use super::judgement::{Judgement, judgement};
 use super::missing::{Missing, find_missing};
 use super::participants::{Participant, named_in, participants};
@@ -101,14 +101,18 @@ pub fn check(case: &Value) -> Outcome<Report> {
 /// All that is found out about a question.
 pub(super) fn find(mut question: Question) -> Outcome<Findings> {
     let reading = named_in(&question);
-    let from_library = matches!(question.reaction.source, KSource::Library);
-    let found = participants(
+    let from_library = matches!(question.reaction.source, KSource::Library { .. });
+    let mut found = participants(
         &question.reaction.equation,
         &reading,
+        &question.book.library,
         from_library,
         Temperature::new(question.temperature.value_si).ok(),
-    );
-    let found = found.map_err(|problems| at_field(problems, EQUATION))?;
+    )
+    .map_err(|problems| at_field(problems, EQUATION))?;
+    if matches!(question.reaction.source, KSource::Book) {
+        found.remarks.push(take_from_book(&mut question, &found.equation, &found.list)?);
+    }
     let delta_nu_gas = delta_nu_gas(&found.list);
     let equation = found.equation;
     let constant = constant_of(&question, &equation, &found.list, delta_nu_gas)?;

@@ -15,6 +15,7 @@ use crate::problem::{Step, StepCode};
 use crate::quantity::{GAS_CONSTANT_J_PER_MOL_K, PressureReference};
 use crate::quantity::{show_like, show_number};
 use crate::reaction::Phase;
+use std::f64::consts::LN_10;
 
 /// All lines, in the order in which one would work it out by hand.
 pub(super) fn steps(found: &Findings) -> Vec<StepReport> {
@@ -42,12 +43,23 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
         Constant::Library(combination) => {
             let temperature = Temperature::new(found.question.temperature.value_si);
             let temperature = temperature.unwrap_or(found.k_temperature);
-            for (record, _) in combination.terms() {
+            for (known, times) in combination.measured() {
+                lines.push((
+                    "k",
+                    Step::new(StepCode::MeasuredK)
+                        .with("equation", known.equation())
+                        .with("log10_k", shown::number(known.ln_k(temperature) / LN_10))
+                        .with("times", shown::number(*times))
+                        .with("temperature_k", kelvin(found)),
+                ));
+            }
+            for (record, nu) in combination.records() {
                 let of = record.properties(temperature);
                 lines.push((
                     "k",
                     Step::new(StepCode::SpeciesGibbs)
                         .with("species", record.label())
+                        .with("times", shown::number(*nu))
                         .with("enthalpy", shown::kilojoule(of.enthalpy_j_per_mol))
                         .with("entropy", shown::number(of.entropy_j_per_mol_k))
                         .with("gibbs", shown::kilojoule(of.gibbs_j_per_mol))
@@ -57,11 +69,15 @@ fn constant_lines(found: &Findings) -> Vec<Line> {
             let optional = |value: Option<f64>| value.unwrap_or(0.0);
             lines.push((
                 "k",
-                Step::new(StepCode::ReactionGibbs)
-                    .with("gibbs", shown::kilojoule(at.gibbs_j_per_mol))
-                    .with("enthalpy", shown::kilojoule(optional(at.enthalpy_j_per_mol)))
-                    .with("entropy", shown::number(optional(at.entropy_j_per_mol_k)))
-                    .with("temperature_k", kelvin(found)),
+                Step::new(if combination.measured().is_empty() {
+                    StepCode::ReactionGibbs
+                } else {
+                    StepCode::MeasuredGibbs
+                })
+                .with("gibbs", shown::kilojoule(at.gibbs_j_per_mol))
+                .with("enthalpy", shown::kilojoule(optional(at.enthalpy_j_per_mol)))
+                .with("entropy", shown::number(optional(at.entropy_j_per_mol_k)))
+                .with("temperature_k", kelvin(found)),
             ));
         }
         Constant::Points(line) => lines.push((

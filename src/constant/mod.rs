@@ -10,7 +10,7 @@ pub use formula::{FormulaAt, FormulaConstant, FormulaTerm};
 pub use points::{Point, PointsLine, line_through};
 pub use stated::{Carried, StatedConstant};
 
-use crate::library::{Combination, Reach, Temperature};
+use crate::library::{Combination, Temperature};
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 
 /// Where the K of a reaction comes from.
@@ -56,11 +56,7 @@ impl Constant {
         match self {
             Constant::Library(combination) => {
                 let change = combination.change(temperature);
-                let outside = combination.reaches(temperature).map(|(_, reach)| match reach {
-                    Reach::InRange => 0.0,
-                    Reach::Extrapolated { by_k } => by_k,
-                });
-                let outside = outside.reduce(f64::max).filter(|by_k| *by_k > 0.0);
+                let outside = combination.extrapolated_by_k(temperature);
                 ConstantAt {
                     ln_k: change.ln_k,
                     // How well constant heat capacities carry on is not known.

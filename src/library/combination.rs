@@ -1,10 +1,11 @@
 //! A reaction's species summed once, so that K at any T is one short polynomial.
 
+use super::basis::Basis;
+use super::known::Known;
+use super::measured::Measured;
 use super::polynomial::Piece;
 use super::polynomial::Polynomial;
 use super::polynomial::holding;
-use super::record::Reach;
-use super::record::Record;
 use super::temperature::Temperature;
 use crate::numeric::sort_short;
 use crate::problem::LibraryCode;
@@ -32,6 +33,10 @@ pub struct Change {
 
 /// Records with their stoichiometric numbers ν, products positive.
 ///
+/// A species that a [`Measured`] equilibrium ties is replaced by it, so that the reaction rests on
+/// measured constants as far as they reach and on records for the rest; what stands on both sides
+/// cancels exactly, its uncertainty too. [`Combination::of_species`] leaves that out.
+///
 /// The sums Σ ν·(coefficient) are made once for every stretch of temperature on which no species
 /// changes its piece, the extrapolated ends included; then ln K costs one bisection of a few
 /// numbers and one polynomial, however many species take part.
@@ -47,16 +52,35 @@ pub struct Change {
 /// ```
 #[derive(Debug, Clone, PartialEq)]
 pub struct Combination {
-    terms: Vec<(&'static Record, f64)>,
+    terms: Vec<(Known, f64)>,
+    basis: Basis,
     pieces: Vec<Piece>,
 }
 
 impl Combination {
-    /// Sums the species of a reaction; no terms at all is the empty reaction, K = 1.
+    /// Sums the species of a reaction, with measured equilibria where there are some; no terms at
+    /// all is the empty reaction, K = 1.
     ///
     /// # Errors
     /// `species-coefficient` for each ν that is not finite or beyond [`STOICHIOMETRIC_LIMIT`].
-    pub fn new(terms: &[(&'static Record, f64)]) -> Outcome<Self> {
+    pub fn new(terms: &[(impl Into<Known> + Clone, f64)]) -> Outcome<Self> {
+        Self::on(terms, Basis::of_equilibria)
+    }
+
+    /// Sums the species of a reaction from their own records alone.
+    ///
+    /// # Errors
+    /// As [`Combination::new`].
+    pub fn of_species(terms: &[(impl Into<Known> + Clone, f64)]) -> Outcome<Self> {
+        Self::on(terms, Basis::of_species)
+    }
+
+    fn on(
+        terms: &[(impl Into<Known> + Clone, f64)],
+        basis: fn(&[(Known, f64)]) -> Basis,
+    ) -> Outcome<Self> {
+        let terms: Vec<(Known, f64)> =
+            terms.iter().map(|(record, nu)| (record.clone().into(), *nu)).collect();
         let bad: Vec<Problem> = terms
             .iter()
             .filter(|(_, nu)| nu.is_nan() || nu.abs() > STOICHIOMETRIC_LIMIT)
@@ -70,26 +94,28 @@ impl Combination {
         if !bad.is_empty() {
             return Err(bad);
         }
-        let starts = terms.iter().flat_map(|(record, _)| &record.pieces).map(|piece| piece.from_k);
-        let mut starts: Vec<f64> = starts.collect();
-        sort_short(&mut starts, |before, item| before > item);
-        starts.dedup();
-        let piece = |from_k: f64| {
-            let mut polynomial = Polynomial::default();
-            for (record, nu) in terms {
-                if let Some(part) = holding(&record.pieces, from_k) {
-                    polynomial.add(*nu, part);
-                }
-            }
-            Piece { from_k, polynomial }
-        };
-        Ok(Self { terms: terms.to_vec(), pieces: starts.into_iter().map(piece).collect() })
+        let basis = basis(&terms);
+        let pieces = summed(&basis);
+        Ok(Self { terms, basis, pieces })
     }
 
     /// The records with their stoichiometric numbers, as given.
     #[must_use]
-    pub fn terms(&self) -> &[(&'static Record, f64)] {
+    pub fn terms(&self) -> &[(Known, f64)] {
         &self.terms
+    }
+
+    /// The records that K rests on, and how many of each: those of the reaction, or where measured
+    /// equilibria stand in for some, what is left.
+    #[must_use]
+    pub fn records(&self) -> &[(Known, f64)] {
+        &self.basis.records
+    }
+
+    /// The measured equilibria that K rests on, and how many times each.
+    #[must_use]
+    pub fn measured(&self) -> &[(&'static Measured, f64)] {
+        &self.basis.measured
     }
 
     /// ln K at T.
@@ -120,26 +146,58 @@ impl Combination {
         }
     }
 
-    /// For each term, whether T is inside its record's range.
-    pub fn reaches(&self, at: Temperature) -> impl Iterator<Item = (&'static Record, Reach)> + '_ {
-        self.terms.iter().map(move |(record, _)| (*record, record.reach(at)))
+    /// How far T lies outside the data that K rests on, in K; none inside.
+    #[must_use]
+    pub fn extrapolated_by_k(&self, at: Temperature) -> Option<f64> {
+        let outside =
+            self.ranges_k().map(|(low, high)| (low - at.kelvin()).max(at.kelvin() - high));
+        outside.reduce(f64::max).filter(|by_k| *by_k > 0.0)
     }
 
-    /// The temperatures in K inside every record's range, if there are any; none without terms.
+    /// The temperatures in K inside every range that K rests on, if there are any; none without
+    /// terms.
     #[must_use]
     pub fn range_k(&self) -> Option<(f64, f64)> {
-        let ranges = || self.terms.iter().map(|(record, _)| record.range_k);
-        let low = ranges().map(|range| range.0).reduce(f64::max)?;
-        let high = ranges().map(|range| range.1).reduce(f64::min)?;
+        let low = self.ranges_k().map(|range| range.0).reduce(f64::max)?;
+        let high = self.ranges_k().map(|range| range.1).reduce(f64::min)?;
         (low <= high).then_some((low, high))
     }
 
-    /// The standard uncertainty of Δ_rG° in J/mol: √Σ(ν u)², the records taken as independent.
+    fn ranges_k(&self) -> impl Iterator<Item = (f64, f64)> + '_ {
+        let of_records = self.basis.records.iter().map(|(record, _)| record.range_k);
+        of_records.chain(self.basis.measured.iter().map(|(known, _)| known.range_k))
+    }
+
+    /// The standard uncertainty of Δ_rG° in J/mol: √Σ(ν u)² over records and measured equilibria,
+    /// taken as independent.
     ///
     /// Records that share a source are not independent, so this is a fair size and no more.
     #[must_use]
     pub fn u_gibbs_j_per_mol(&self) -> f64 {
-        let squares = self.terms.iter().map(|(record, nu)| nu * record.u_gibbs_j_per_mol);
-        squares.map(|part| part * part).sum::<f64>().sqrt()
+        let records = self.basis.records.iter().map(|(record, nu)| nu * record.u_gibbs_j_per_mol);
+        let measured = self.basis.measured.iter();
+        let measured = measured.map(|(known, times)| times * known.u_gibbs_j_per_mol());
+        records.chain(measured).map(|part| part * part).sum::<f64>().sqrt()
     }
+}
+
+/// One polynomial for every stretch of temperature on which nothing changes its piece.
+fn summed(basis: &Basis) -> Vec<Piece> {
+    let of_records = basis.records.iter().map(|(record, nu)| (&record.pieces, *nu));
+    let of_measured = basis.measured.iter().map(|(known, times)| (&known.pieces, *times));
+    let parts: Vec<(&Vec<Piece>, f64)> = of_records.chain(of_measured).collect();
+    let starts = parts.iter().flat_map(|(pieces, _)| *pieces).map(|piece| piece.from_k);
+    let mut starts: Vec<f64> = starts.collect();
+    sort_short(&mut starts, |before, item| before > item);
+    starts.dedup();
+    let piece = |from_k: f64| {
+        let mut polynomial = Polynomial::default();
+        for (pieces, times) in &parts {
+            if let Some(part) = holding(pieces, from_k) {
+                polynomial.add(*times, part);
+            }
+        }
+        Piece { from_k, polynomial }
+    };
+    starts.into_iter().map(piece).collect()
 }

@@ -62,6 +62,12 @@ impl Polynomial {
         }
     }
 
+    /// Sets the two constants so that H°/RT and S°/R at a temperature are these.
+    pub(super) fn meet(&mut self, at: Temperature, enthalpy: f64, entropy: f64) {
+        self.b_enthalpy += (enthalpy - self.enthalpy(at)) * at.kelvin();
+        self.b_entropy += entropy - self.entropy(at);
+    }
+
     /// Adds `nu` times another polynomial.
     pub(super) fn add(&mut self, nu: f64, other: &Polynomial) {
         for (sum, term) in self.a.iter_mut().zip(&other.a) {
@@ -83,4 +89,14 @@ pub(super) struct Piece {
 pub(super) fn holding(pieces: &[Piece], kelvin: f64) -> Option<&Polynomial> {
     let after = pieces.partition_point(|piece| piece.from_k <= kelvin);
     pieces.get(after.saturating_sub(1)).map(|piece| &piece.polynomial)
+}
+
+/// Pieces up to a highest temperature, with one of constant heat capacity put at either end.
+pub(super) fn with_ends(mut pieces: Vec<Piece>, high_k: f64) -> Option<Vec<Piece>> {
+    let (first, last) = (*pieces.first()?, *pieces.last()?);
+    let below = first.polynomial.continued_from(Temperature::new(first.from_k).ok()?);
+    let above = last.polynomial.continued_from(Temperature::new(high_k).ok()?);
+    pieces.insert(0, Piece { from_k: 0.0, polynomial: below });
+    pieces.push(Piece { from_k: high_k, polynomial: above });
+    Some(pieces)
 }

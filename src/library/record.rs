@@ -1,13 +1,16 @@
 //! What is known of one species, and its properties at a temperature.
 
+use std::borrow::Cow;
+
+use super::element::elements_entropy_j_per_mol_k;
 use super::polynomial::Piece;
 use super::polynomial::Polynomial;
 use super::polynomial::holding;
 use super::table::citation;
-use super::temperature::TEMPERATURE_LIMITS_K;
 use super::temperature::Temperature;
 use crate::quantity::GAS_CONSTANT_J_PER_MOL_K;
 use crate::reaction::Phase;
+use crate::reaction::parse_formula;
 
 /// Whether a property at T rests on the record's data or on constant heat capacity beyond them.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -34,7 +37,40 @@ pub enum UncertaintyKind {
     Sources,
     /// A class: judged, for want of better.
     Class,
+    /// Stated by the user with a record of their own.
+    Own,
 }
+
+impl UncertaintyKind {
+    pub(super) const WORDS: [(&'static str, UncertaintyKind); 6] = [
+        ("element", UncertaintyKind::Element),
+        ("atct", UncertaintyKind::Atct),
+        ("codata", UncertaintyKind::Codata),
+        ("sources", UncertaintyKind::Sources),
+        ("class", UncertaintyKind::Class),
+        ("own", UncertaintyKind::Own),
+    ];
+
+    /// The word of the tables and of the border: `element`, `atct`, `codata`, `sources`, `class` or
+    /// `own`.
+    #[must_use]
+    pub fn as_str(self) -> &'static str {
+        Self::WORDS.iter().find(|(_, kind)| *kind == self).map_or("", |(word, _)| word)
+    }
+}
+
+/// A change of phase or of form inside one record's range.
+#[derive(Debug, Clone, Copy, PartialEq)]
+pub struct Transition {
+    /// Where it is passed, in K.
+    pub temperature_k: f64,
+    /// Its enthalpy in J/mol, positive on heating.
+    pub enthalpy_j_per_mol: f64,
+}
+
+/// A step of H° at a joint is a transition from this size on, J/mol: what rounding leaves is a
+/// thousand times less, the smallest transition of the tables ten times more.
+const TRANSITION_FROM_J_PER_MOL: f64 = 1.0;
 
 /// Standard molar properties at one temperature, p° = 1 bar.
 ///
@@ -58,17 +94,17 @@ pub struct Properties {
 #[derive(Debug, Clone, PartialEq)]
 pub struct Record {
     /// The row's name in the tables, such as `S.s.rhombic`.
-    pub id: &'static str,
+    pub id: Cow<'static, str>,
     /// The formula as the trade writes it, such as `Ca(OH)2`.
-    pub formula: &'static str,
+    pub formula: Cow<'static, str>,
     /// The phase.
     pub phase: Phase,
     /// The polymorph or isomer, where the formula and the phase do not tell.
-    pub form: Option<&'static str>,
+    pub form: Option<Cow<'static, str>>,
     /// English names, the most usual first.
-    pub names: Vec<&'static str>,
+    pub names: Vec<Cow<'static, str>>,
     /// The CAS registry number.
-    pub cas: &'static str,
+    pub cas: Cow<'static, str>,
     /// Δ_fH°(298.15 K) in J/mol, as in the table.
     pub formation_enthalpy_j_per_mol: f64,
     /// S°(298.15 K) in J/(mol K), as in the table.
@@ -77,8 +113,9 @@ pub struct Record {
     pub u_gibbs_j_per_mol: f64,
     /// How that uncertainty was got.
     pub u_kind: UncertaintyKind,
-    /// The ids of the sources; [`Record::citations`] gives them in full.
-    pub sources: Vec<&'static str>,
+    /// The ids of the sources, or for a user's own record the source in words;
+    /// [`Record::citations`] gives them in full.
+    pub sources: Vec<Cow<'static, str>>,
     /// The lowest and the highest temperature of the data in K.
     pub range_k: (f64, f64),
     /// Pieces over all temperatures: the ends are constant heat capacity.
@@ -117,6 +154,16 @@ impl Record {
         self.polynomial(at).gibbs(at)
     }
 
+    /// Δ_fG°(298.15 K) in J/mol = Δ_fH° − T (S° − Σ S° of the elements); none where the library lacks an
+    /// element's reference state.
+    #[must_use]
+    pub fn formation_gibbs_j_per_mol(&self) -> Option<f64> {
+        let formula = parse_formula(&self.formula).ok()?;
+        let elements = elements_entropy_j_per_mol_k(&formula).ok()?;
+        let formed = self.standard_entropy_j_per_mol_k - elements;
+        Some(self.formation_enthalpy_j_per_mol - Temperature::standard().kelvin() * formed)
+    }
+
     /// Whether T is inside the record's range, and how far outside.
     #[must_use]
     pub fn reach(&self, at: Temperature) -> Reach {
@@ -125,15 +172,30 @@ impl Record {
     }
 
     /// The sources in full.
-    pub fn citations(&self) -> impl Iterator<Item = &'static str> + '_ {
-        self.sources.iter().filter_map(|id| citation(id))
+    pub fn citations(&self) -> impl Iterator<Item = Cow<'static, str>> + '_ {
+        let own = self.u_kind == UncertaintyKind::Own;
+        self.sources.iter().filter_map(move |id| {
+            if own { Some(id.clone()) } else { citation(id).map(Cow::Borrowed) }
+        })
+    }
+
+    /// Whether a user made it.
+    #[must_use]
+    pub fn is_own(&self) -> bool {
+        self.u_kind == UncertaintyKind::Own
+    }
+
+    /// Whether another record is of the same formula in the same phase and form.
+    #[must_use]
+    pub fn stands_for(&self, other: &Record) -> bool {
+        (&self.formula, self.phase, &self.form) == (&other.formula, other.phase, &other.form)
     }
 
     /// The species as an equation may name it, such as `S(s, rhombic)`.
     #[must_use]
     pub fn label(&self) -> String {
-        let (formula, phase) = (self.formula, self.phase.symbol());
-        self.form.map_or_else(
+        let (formula, phase) = (&self.formula, self.phase.symbol());
+        self.form.as_ref().map_or_else(
             || format!("{formula}({phase})"),
             |form| format!("{formula}({phase}, {form})"),
         )
@@ -148,75 +210,28 @@ impl Record {
         self.pieces.iter().map(|piece| piece.from_k).filter(inside).collect()
     }
 
+    /// The transitions inside the range, from the lowest on.
+    ///
+    /// ```
+    /// use shiftgauge::library;
+    /// let iron = &library::find("Fe", Some(shiftgauge::reaction::Phase::Solid), None)[0];
+    /// let first = iron.transitions()[0]; // alpha to gamma, 900 J/mol at 1184 K in the JANAF tables
+    /// assert!((first.temperature_k - 1184.0).abs() < 1.0 && first.enthalpy_j_per_mol > 800.0);
+    /// ```
+    #[must_use]
+    pub fn transitions(&self) -> Vec<Transition> {
+        let pairs = self.pieces.iter().zip(self.pieces.iter().skip(1));
+        let found = pairs.filter_map(|(lower, upper)| {
+            let at = Temperature::new(upper.from_k).ok()?;
+            let step = upper.polynomial.enthalpy(at) - lower.polynomial.enthalpy(at);
+            let enthalpy_j_per_mol = GAS_CONSTANT_J_PER_MOL_K * at.kelvin() * step;
+            (enthalpy_j_per_mol.abs() >= TRANSITION_FROM_J_PER_MOL)
+                .then_some(Transition { temperature_k: at.kelvin(), enthalpy_j_per_mol })
+        });
+        found.collect()
+    }
+
     fn polynomial(&self, at: Temperature) -> Polynomial {
         holding(&self.pieces, at.kelvin()).copied().unwrap_or_default()
     }
-
-    /// Reads a line of the species table and its lines of the heat table; none if one is broken.
-    pub(super) fn read(
-        line: &'static str,
-        heat: impl Iterator<Item = &'static str>,
-    ) -> Option<Record> {
-        let cells: Vec<&'static str> = line.split('\t').collect();
-        let [id, formula, phase, form, names, cas, enthalpy, entropy, u, kind, sources] = cells[..]
-        else {
-            return None;
-        };
-        let (range_k, pieces) = read_pieces(heat)?;
-        Some(Record {
-            id,
-            formula,
-            phase: Phase::from_symbol(phase)?,
-            form: Some(form).filter(|text| !text.is_empty()),
-            names: names.split(';').collect(),
-            cas,
-            formation_enthalpy_j_per_mol: 1000.0 * number(enthalpy)?,
-            standard_entropy_j_per_mol_k: number(entropy)?,
-            u_gibbs_j_per_mol: 1000.0 * number(u)?,
-            u_kind: match kind {
-                "element" => UncertaintyKind::Element,
-                "atct" => UncertaintyKind::Atct,
-                "codata" => UncertaintyKind::Codata,
-                "sources" => UncertaintyKind::Sources,
-                "class" => UncertaintyKind::Class,
-                _ => return None,
-            },
-            sources: sources.split(';').collect(),
-            range_k,
-            pieces,
-        })
-    }
-}
-
-/// The range and the pieces of a species, with one of constant heat capacity at either end.
-fn read_pieces(heat: impl Iterator<Item = &'static str>) -> Option<((f64, f64), Vec<Piece>)> {
-    let mut pieces: Vec<Piece> = Vec::with_capacity(4);
-    let mut end_k = None;
-    for line in heat {
-        let mut figures = [0.0; 11];
-        let mut cells = line.split('\t').skip(1);
-        for figure in &mut figures {
-            *figure = number(cells.next()?)?;
-        }
-        let [low, high, a @ .., b_enthalpy, b_entropy] = figures;
-        let in_order =
-            low > TEMPERATURE_LIMITS_K.0 && high >= low && end_k.is_none_or(|k| k == low);
-        if !in_order {
-            return None;
-        }
-        end_k = Some(high);
-        let polynomial = Polynomial { a, b_enthalpy, b_entropy };
-        pieces.push(Piece { from_k: low, polynomial });
-    }
-    let (first, last) = (*pieces.first()?, *pieces.last()?);
-    let (low_k, high_k) = (first.from_k, end_k?);
-    let below = first.polynomial.continued_from(Temperature::new(low_k).ok()?);
-    let above = last.polynomial.continued_from(Temperature::new(high_k).ok()?);
-    pieces.insert(0, Piece { from_k: 0.0, polynomial: below });
-    pieces.push(Piece { from_k: high_k, polynomial: above });
-    Some(((low_k, high_k), pieces))
-}
-
-fn number(cell: &str) -> Option<f64> {
-    cell.parse().ok().filter(|value: &f64| value.is_finite())
 }

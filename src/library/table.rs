@@ -3,9 +3,12 @@
 use std::sync::OnceLock;
 
 use super::record::Record;
+use crate::reaction::Formula;
+use crate::reaction::parse_formula;
 
 const SPECIES: &str = include_str!("tables/species.tsv");
 const HEAT: &str = include_str!("tables/heat.tsv");
+const MEASURED: &str = include_str!("tables/measured.tsv");
 const SOURCES: &str = include_str!("tables/sources.tsv");
 
 /// A line of the species table, with its id and formula cut out and the record once it is read.
@@ -14,12 +17,23 @@ pub(super) struct Entry {
     pub(super) formula: &'static str,
     pub(super) line: &'static str,
     record: OnceLock<Option<Record>>,
+    composition: OnceLock<Option<Formula>>,
 }
 
 impl Entry {
     /// The record, read from the tables at the first call.
     pub(super) fn record(&'static self) -> Option<&'static Record> {
         self.record.get_or_init(|| Record::read(self.line, rows(HEAT, self.id))).as_ref()
+    }
+
+    /// What the species is made of, read from its formula at the first call.
+    pub(super) fn composition(&'static self) -> Option<&'static Formula> {
+        self.composition.get_or_init(|| parse_formula(self.formula).ok()).as_ref()
+    }
+
+    /// One cell of the line, counted from zero.
+    pub(super) fn cell(&self, place: usize) -> &'static str {
+        self.line.split('\t').nth(place).unwrap_or_default()
     }
 }
 
@@ -32,9 +46,31 @@ pub(super) fn entries() -> &'static [Entry] {
             .filter_map(|line| {
                 let mut cells = line.split('\t');
                 let (id, formula) = (cells.next()?, cells.next()?);
-                Some(Entry { id, formula, line, record: OnceLock::new() })
+                let (record, composition) = (OnceLock::new(), OnceLock::new());
+                Some(Entry { id, formula, line, record, composition })
             })
             .collect()
+    })
+}
+
+/// The record of an id.
+pub(super) fn record(id: &str) -> Option<&'static Record> {
+    let place = entries().binary_search_by(|entry| entry.id.cmp(id)).ok()?;
+    entries()[place].record()
+}
+
+/// The lines of the measured equilibrium that a species is tied by.
+pub(super) fn measured(id: &str) -> impl Iterator<Item = &'static str> + Clone + use<> {
+    rows(MEASURED, id)
+}
+
+/// The ids of the tied species, each once.
+pub(super) fn tied() -> impl Iterator<Item = &'static str> {
+    let mut last = "";
+    MEASURED.lines().skip(1).map(first_cell).filter(move |id| {
+        let new = *id != last;
+        last = id;
+        new
     })
 }
 
@@ -65,7 +101,7 @@ pub fn citation(source: &str) -> Option<&'static str> {
 }
 
 /// The lines of a table, sorted by its first cell, whose first cell is `id`.
-fn rows(table: &'static str, id: &str) -> impl Iterator<Item = &'static str> {
+fn rows(table: &'static str, id: &str) -> impl Iterator<Item = &'static str> + Clone + use<> {
     let first = first_not_before(table, id);
     let id = id.to_owned();
     table[first..].lines().take_while(move |line| first_cell(line) == id)

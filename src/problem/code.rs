@@ -128,6 +128,16 @@ codes! {
         Several = "species-several",
         Temperature = "species-temperature",
         Coefficient = "species-coefficient",
+        OwnTooFew = "own-figures-too-few",
+        OwnDisagree = "own-figures-disagree",
+        OwnElement = "own-element-unknown",
+        OwnEntropy = "own-entropy-not-positive",
+        OwnHeatMissing = "own-heat-missing",
+        OwnHeat = "own-heat-not-positive",
+        OwnRange = "own-range",
+        OwnGap = "own-range-gap",
+        OwnJump = "own-heat-steps",
+        OwnStandard = "own-range-without-standard",
     }
 }
 
@@ -249,6 +259,12 @@ codes! {
         MissingTakesNoPart = "missing-takes-no-part",
         MissingWithoutK = "missing-without-k",
         MissingNotFound = "missing-not-found",
+        BookFormat = "book-format",
+        BookTwice = "book-species-twice",
+        BookPhase = "book-phase-needed",
+        BookSource = "book-source-needed",
+        NotInBook = "not-in-book",
+        SheetSpecies = "sheet-species",
     }
 }
 

@@ -27,6 +27,9 @@ codes! {
         FormulaExtended = "formula-extended",
         PointsBend = "points-bend",
         KFromReading = "k-from-reading",
+        KFromBook = "k-from-book",
+        OwnRecord = "own-record",
+        MeasuredUsed = "measured-used",
         FoundFromFeed = "found-from-feed",
         FeedDoesNotClose = "feed-does-not-close",
         LostNotRestored = "lost-not-restored",
@@ -55,6 +58,8 @@ codes! {
     /// A line of the working.
     StepCode in Beside {
         SpeciesGibbs = "species-gibbs",
+        MeasuredK = "measured-k",
+        MeasuredGibbs = "measured-gibbs",
         ReactionGibbs = "reaction-gibbs",
         StatedK = "stated-k",
         Line = "line",
@@ -100,6 +105,7 @@ codes! {
         KScatter = "k-scatter",
         KFormula = "k-formula",
         Data = "data",
+        Measured = "measured",
         Feed = "feed",
         FeedWater = "feed-water",
     }

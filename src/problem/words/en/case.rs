@@ -151,6 +151,27 @@ pub(super) fn template(code: C) -> (&'static str, &'static str) {
             "{found} lines are asked for; 1 to {most} are allowed.",
             "Name a few settings of the other knob.",
         ),
+        C::BookFormat => (
+            "This is a book of the format {found}, which this version does not read.",
+            "Open it with the version that wrote it.",
+        ),
+        C::BookTwice => (
+            "The book holds {found} twice.",
+            "Keep one of the two, or give the other a form of its own, such as C2H6O(g, ethanol).",
+        ),
+        C::BookPhase => (
+            "A species of a book needs its phase.",
+            "Write it after the formula: (g), (l), (s) or (aq).",
+        ),
+        C::BookSource => (
+            "A book's entry says where its figures come from.",
+            "Name the handbook, paper or measurement.",
+        ),
+        C::NotInBook => (
+            "The book keeps no constant for {equation}.",
+            "Add it to the book, or take K from the library.",
+        ),
+        C::SheetSpecies => ("{found} names no single species.", "Choose one of the list."),
         C::BandNegative => (
             "A band is a width and cannot be negative.",
             "Write it without its sign, such as 10 K.",

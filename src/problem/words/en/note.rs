@@ -42,6 +42,17 @@ pub(in crate::problem::words) fn template(code: C) -> (Level, &'static str) {
             Warning,
             "The temperature is {by_k} K outside the range of the data; constant heat capacities carry them on.",
         ),
+        C::KFromBook => (
+            Assumption,
+            "K is the one that your book keeps for this reaction. Its source: {source}.",
+        ),
+        C::OwnRecord => {
+            (Assumption, "{species} is your own record. Its source: {source}.{difference}")
+        }
+        C::MeasuredUsed => (
+            Conversion,
+            "K rests on measured equilibria; the species' own records alone would give log10 K = {log10_k}, {difference} from it.",
+        ),
         C::LineExtended => (
             Warning,
             "The temperature is {by_k} K outside the points of K; the straight line is drawn on.",

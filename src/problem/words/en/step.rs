@@ -5,7 +5,13 @@ use crate::problem::StepCode as C;
 pub(in crate::problem::words) fn template(code: C) -> &'static str {
     match code {
         C::SpeciesGibbs => {
-            "{species}: H° = {enthalpy} kJ/mol, S° = {entropy} J/(mol K), G° = H° − T S° = {gibbs} kJ/mol at {temperature_k} K"
+            "{species}, ν = {times}: H° = {enthalpy} kJ/mol, S° = {entropy} J/(mol K), G° = H° − T S° = {gibbs} kJ/mol at {temperature_k} K"
+        }
+        C::MeasuredK => {
+            "Measured, and counted {times} times: {equation}: log10 K = {log10_k} at {temperature_k} K"
+        }
+        C::MeasuredGibbs => {
+            "ΔG° = Σ −RT ln K of the measured equilibria + Σ ν G° of what is left = {gibbs} kJ/mol; ΔH° = {enthalpy} kJ/mol, ΔS° = {entropy} J/(mol K) at {temperature_k} K"
         }
         C::ReactionGibbs => {
             "ΔG° = Σ ν G° = {gibbs} kJ/mol; ΔH° = {enthalpy} kJ/mol, ΔS° = {entropy} J/(mol K) at {temperature_k} K"

@@ -27,6 +27,7 @@ pub(in crate::problem::words) fn input(code: InputCode) -> &'static str {
         C::KScatter => "the scatter of the points of K",
         C::KFormula => "the formula of K",
         C::Data => "the data of {species}",
+        C::Measured => "the measured constant of {equation}",
     }
 }
 

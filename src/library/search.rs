@@ -1,0 +1,228 @@
+//! Finding a species while its name is being typed.
+
+use std::borrow::Cow;
+
+use super::book::Book;
+use super::known::Known;
+use super::table;
+use crate::reaction::Formula;
+use crate::reaction::Phase;
+use crate::reaction::Species;
+use crate::reaction::nearest;
+use crate::reaction::parse_formula;
+use crate::reaction::parse_species;
+
+/// By what a record was found; the better ways come first.
+#[derive(Debug, Clone, Copy, PartialEq, Eq, PartialOrd, Ord)]
+pub enum FoundBy {
+    /// Its formula is spelled so.
+    Formula,
+    /// Its formula has the same atoms and charge in another order.
+    Atoms,
+    /// A name, the CAS number, or the formula but for capitals is the text.
+    Name,
+    /// Its formula begins so.
+    FormulaStart,
+    /// A name, or the CAS number, begins so.
+    NameStart,
+    /// A later word of a name begins so.
+    Word,
+    /// A name holds the text.
+    Within,
+    /// A name or the formula is a slip or two away.
+    Near,
+}
+
+impl FoundBy {
+    /// All ways, the best first.
+    pub const ALL: [FoundBy; 8] = [
+        FoundBy::Formula,
+        FoundBy::Atoms,
+        FoundBy::Name,
+        FoundBy::FormulaStart,
+        FoundBy::NameStart,
+        FoundBy::Word,
+        FoundBy::Within,
+        FoundBy::Near,
+    ];
+}
+
+/// A record that was found.
+#[derive(Debug, Clone, PartialEq)]
+pub struct Found {
+    /// The record.
+    pub record: Known,
+    /// By what.
+    pub by: FoundBy,
+}
+
+/// Fewer letters are not looked for inside names.
+const LETTERS_WITHIN: usize = 3;
+/// Fewer letters are not taken for a slip.
+const LETTERS_NEAR: usize = 4;
+
+/// What was typed.
+struct Typed<'a> {
+    text: &'a str,
+    species: Option<Species>,
+}
+
+/// What a record is found by.
+struct Card<'a> {
+    formula: &'a str,
+    phase: Phase,
+    form: &'a str,
+    names: Cow<'a, str>,
+    cas: &'a str,
+    composition: Option<Cow<'a, Formula>>,
+}
+
+impl Book {
+    /// The records that a text may mean, the likeliest first, at most so many: by formula (with its
+    /// phase and form if they are written), atoms in any order, name, CAS number, their beginnings,
+    /// words inside names; where nothing fits, near misses. In each group dissolved species are last
+    /// and the user's own first.
+    ///
+    /// ```
+    /// use shiftgauge::library::Book;
+    /// let first = |text| Book::default().search(text, 8)[0].record.id.to_string();
+    /// assert_eq!(first("NH3"), "NH3.g");
+    /// assert_eq!(first("H3N"), "NH3.g"); // atoms in any order
+    /// assert_eq!(first("7664-41-7"), "NH3.g"); // CAS number
+    /// assert_eq!(first("quickl"), "CaO.s");
+    /// assert_eq!(first("amonia"), "NH3.g"); // a slip
+    /// ```
+    #[must_use]
+    pub fn search(&self, text: &str, most: usize) -> Vec<Found> {
+        let text = text.trim();
+        if text.is_empty() {
+            return Vec::new();
+        }
+        let typed = Typed { text, species: parse_species(text).ok() };
+        let mut groups: Vec<Vec<Place>> = vec![Vec::new(); FoundBy::ALL.len()];
+        self.each_card(|place, card| {
+            if let Some(by) = typed.rank(card) {
+                groups[by as usize].push(place);
+            }
+        });
+        if groups.iter().all(Vec::is_empty) {
+            groups[FoundBy::Near as usize] = self.near(text);
+        }
+        let ordered = FoundBy::ALL.into_iter().zip(groups).flat_map(|(by, group)| {
+            let (dissolved, others): (Vec<Place>, Vec<Place>) =
+                group.into_iter().partition(|place| place.phase == Phase::Aqueous);
+            others.into_iter().chain(dissolved).map(move |place| (by, place))
+        });
+        let record = |(by, place): (FoundBy, Place)| {
+            let record = match place.own {
+                Some(own) => self.own()[own].clone(),
+                None => Known::Table(table::entries()[place.entry].record()?),
+            };
+            Some(Found { record, by })
+        };
+        ordered.take(most).filter_map(record).collect()
+    }
+
+    /// Shows every record's card: the user's own, then those of the tables that none stands for.
+    fn each_card(&self, mut see: impl FnMut(Place, &Card)) {
+        for (own, record) in self.own().iter().enumerate() {
+            let card = Card {
+                formula: &record.formula,
+                phase: record.phase,
+                form: record.form.as_deref().unwrap_or_default(),
+                names: Cow::Owned(record.names.join(";")),
+                cas: &record.cas,
+                composition: parse_formula(&record.formula).ok().map(Cow::Owned),
+            };
+            see(Place { own: Some(own), entry: 0, phase: record.phase }, &card);
+        }
+        for (entry, line) in table::entries().iter().enumerate() {
+            let Some(phase) = Phase::from_symbol(line.cell(2)) else { continue };
+            if !self.own().is_empty() && line.record().is_none_or(|record| self.replaces(record)) {
+                continue;
+            }
+            let card = Card {
+                formula: line.formula,
+                phase,
+                form: line.cell(3),
+                names: Cow::Borrowed(line.cell(4)),
+                cas: line.cell(5),
+                composition: line.composition().map(Cow::Borrowed),
+            };
+            see(Place { own: None, entry, phase }, &card);
+        }
+    }
+
+    /// The records whose name or formula is nearest to a text, where it is near at all.
+    fn near(&self, text: &str) -> Vec<Place> {
+        if text.chars().count() < LETTERS_NEAR {
+            return Vec::new();
+        }
+        let mut words: Vec<(String, Place)> = Vec::new();
+        self.each_card(|place, card| {
+            let names = card.names.split(';').chain([card.formula]);
+            words.extend(names.map(|name| (name.to_owned(), place)));
+        });
+        let Some(best) = nearest(text, words.iter().map(|(word, _)| word.as_str())) else {
+            return Vec::new();
+        };
+        words.into_iter().filter(|(word, _)| *word == best).map(|(_, place)| place).collect()
+    }
+}
+
+/// Where a record is: among the user's own, or in the table.
+#[derive(Debug, Clone, Copy)]
+struct Place {
+    own: Option<usize>,
+    entry: usize,
+    phase: Phase,
+}
+
+impl Typed<'_> {
+    /// By what a record is found, if it is; never [`FoundBy::Near`].
+    fn rank(&self, card: &Card) -> Option<FoundBy> {
+        if let Some(species) = &self.species {
+            let form = species.form.as_deref();
+            let fits = species.phase.is_none_or(|phase| phase == card.phase)
+                && form.is_none_or(|form| form == card.form);
+            if fits && species.formula.text() == card.formula {
+                return Some(FoundBy::Formula);
+            }
+            let composition = card.composition.as_deref();
+            if fits && composition.is_some_and(|known| known.has_same_atoms(&species.formula)) {
+                return Some(FoundBy::Atoms);
+            }
+        }
+        let names = || card.names.split(';');
+        let is_text = |word: &str| word.eq_ignore_ascii_case(self.text);
+        if names().any(is_text) || is_text(card.cas) || is_text(card.formula) {
+            return Some(FoundBy::Name);
+        }
+        if self.text.chars().count() < 2 {
+            return None;
+        }
+        if card.formula.starts_with(self.text) {
+            Some(FoundBy::FormulaStart)
+        } else if names().any(|name| starts(name, self.text)) || starts(card.cas, self.text) {
+            Some(FoundBy::NameStart)
+        } else if names()
+            .any(|name| name.split([' ', '-', '(']).any(|word| starts(word, self.text)))
+        {
+            Some(FoundBy::Word)
+        } else if names().any(|name| holds(name, self.text)) {
+            Some(FoundBy::Within)
+        } else {
+            None
+        }
+    }
+}
+
+fn starts(word: &str, text: &str) -> bool {
+    word.get(..text.len()).is_some_and(|start| start.eq_ignore_ascii_case(text))
+}
+
+/// Whether a name holds a text of some letters, but for capitals.
+fn holds(name: &str, text: &str) -> bool {
+    let long = text.chars().count() >= LETTERS_WITHIN;
+    long && name.char_indices().any(|(place, _)| starts(&name[place..], text))
+}
