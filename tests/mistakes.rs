@@ -64,6 +64,8 @@ fn ask(call: &str, input: &str) -> String {
         "bare check" => problems(&case::check(&tree(&json()))),
         "balance" => problems(&case::balance(line())),
         "constant" => problems(&case::constant(line(), line())),
+        "book" => problems(&case::book(&tree(&json()))),
+        "sheet" => problems(&case::sheet(line(), &Value::Null)),
         "rest" => problems(&case::rest(&tree(&json()))),
         "affinities" => problems(&case::affinities(&tree(&json()))),
         other => panic!("no call {other}"),
