@@ -7,12 +7,18 @@ import library_sources as published
 from library_condensed import CONDENSED
 from library_dissolved import DISSOLVED
 from library_gases import GASES
-from library_pieces import Piece, constant_piece, fit, fit_heat_capacity, join, written
+from library_gases_carbon import ORGANIC
+from library_gases_halides import HALIDES
+from library_gases_janaf import TABULATED
+from library_gases_metals import METALS
+from library_gases_nonmetals import NONMETALS
+from library_pieces import (Piece, constant_piece, fit, fit_heat_capacity, join, limits_of,
+                            written)
 from library_solution import build_dissolved, formation_entropy, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 
-SPECIES = GASES + CONDENSED + DISSOLVED
+SPECIES = GASES + ORGANIC + NONMETALS + HALIDES + METALS + TABULATED + CONDENSED + DISSOLVED
 
 
 def species_of(ident):
@@ -45,7 +51,8 @@ def build(species):
     elif how[0] == "janaf":
         row = next(row for row in published.janaf(how[1]) if row[0] == T0)
         h, s = row[4], row[2]
-        pieces, transitions, worst = fit(how[1], how[2], "janaf", species.blunt)
+        limits = how[2] or limits_of(how[1], *how[3:])
+        pieces, transitions, worst = fit(how[1], limits, "janaf", species.blunt)
         pieces[0].low = species.low or pieces[0].low
         if species.crc:
             h, s = published.crc(cas, phase)

@@ -1,5 +1,6 @@
 """Pieces of Cp/R as powers of T from T^-2 to T^4, their integrals, and fits of them to tables."""
 
+from functools import lru_cache
 from math import log
 
 import numpy as np
@@ -10,6 +11,8 @@ POWERS = (-2, -1, 0, 1, 2, 3, 4)
 # From few terms to many: a fit takes the first that meets the limits.
 BASES = ((0,), (0, 1), (-2, 0, 1), (-2, 0, 1, 2), (-2, -1, 0, 1, 2), (-2, -1, 0, 1, 2, 3), POWERS)
 CP_LIMIT, H_LIMIT, S_LIMIT = 0.0005, 0.004, 0.004  # of Cp; kJ/mol; J/(mol K)
+# A piece whose limits were found by itself is cut again unless it is as good as this.
+GOOD_CP, GOOD_H_AND_S, GOOD_SWING = 0.0025, 0.01, 0.018
 
 
 def h_term(power, t):
@@ -101,6 +104,37 @@ def fit(code, limits, source, blunt=()):
         pieces.append(piece)
         worst.append((low, high, *errors, swing(piece, inside, blunt)))
     return pieces, transitions, worst
+
+
+@lru_cache(maxsize=None)
+def limits_of(code, low=T0, high=3000.0, melts=False):
+    """Limits of the pieces of a fit, found by themselves: at transitions, else as few as will do.
+
+    A range that no basis fits within the limits is cut in the middle of its rows. With `melts` the
+    range ends where the table's next phase begins.
+    """
+    rows = [row for row in janaf(code) if row[0] >= low]
+    cuts = [t for t in sorted({row[0] for row in rows}) if jump(rows, t) is not None]
+    top = max(row[0] for row in rows if row[0] <= high)
+    if melts and cuts:
+        top = min(top, cuts[-1])
+    ends = [low, *(t for t in cuts if low < t < top), top]
+    limits = [low]
+    for one, two in zip(ends, ends[1:]):
+        limits += cut_until_good(code, one, two)
+    return tuple(limits)
+
+
+def cut_until_good(code, low, high):
+    """The upper limits of as few pieces as fit a stretch without a transition."""
+    inside = sorted({row[0] for row in within(janaf(code), low, high)})
+    _, _, worst = fit(code, (low, high), "janaf")
+    _, _, cp, h, s, swings = worst[0]
+    good = cp < GOOD_CP and h < GOOD_H_AND_S and s < GOOD_H_AND_S and swings < GOOD_SWING
+    if good or len(inside) < 5:
+        return [high]
+    middle = inside[len(inside) // 2]
+    return cut_until_good(code, low, middle) + cut_until_good(code, middle, high)
 
 
 def within(rows, low, high):

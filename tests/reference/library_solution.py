@@ -7,7 +7,7 @@ from math import log, log10, sqrt
 import library_sources as published
 from library_dissolved import (BLIND_RANGE_K, CP_RECALLED, ELEMENTS, GIBBS_LIMIT, GIBBS_LIMIT_APART,
                                HENRY_APART, HENRY_COMPARED, HENRY_LIMIT, KNOWN_RANGE_K,
-                               SILVER_ENTROPY)
+                               OTHER_ELEMENTS, SILVER_ENTROPY)
 from library_pieces import constant_piece, join
 from library_sources import R_EXACT, T0
 
@@ -30,6 +30,8 @@ def element_entropy(symbol):
     """S° of one mole of atoms of an element in its reference state."""
     if symbol == "Ag":
         return SILVER_ENTROPY
+    if symbol in OTHER_ELEMENTS:
+        return published.crc(OTHER_ELEMENTS[symbol], "s")[1]
     table, atoms = ELEMENTS[symbol]
     return next(row[2] for row in published.janaf(table) if row[0] == T0) / atoms
 

@@ -33,6 +33,13 @@ def fitted(formula, phase, names, cas, table, limits, **more):
     return Species(formula, phase, names, cas, ("janaf", table, limits), janaf=table, **more)
 
 
+def janaf_fit(formula, phase, names, cas, table, kind, low=298.15, high=3000.0, melts=False, **more):
+    """A species fitted to its JANAF table over pieces that are found by themselves."""
+    how = ("janaf", table, None, low, high, melts)
+    more.setdefault("floor", CLASSES[kind])
+    return Species(formula, phase, names, cas, how, janaf=table, **more)
+
+
 def trc(formula, names, cas, **more):
     return Species(formula, "g", names, cas, ("trc",), **more)
 
