@@ -44,8 +44,12 @@ def second_figures(species):
         h = s = None
     if h is not None or s is not None:
         found.append(("CRC", h, s))
-    if species.how[0] == "trc":
-        found.append(("Yaws", *published.yaws(species.cas)))
+    if species.how[0] in ("trc", "poling"):
+        # What was taken from a table is no second opinion of itself.
+        own = built(species.id)["sources"]
+        h2, s2 = published.yaws(species.cas)
+        taken = "yaws" in own
+        found.append(("Yaws", None if taken else h2, None if taken and species.how[0] == "poling" else s2))
     return found
 
 

@@ -29,6 +29,8 @@ SOURCES = {
     "trc": "Frenkel, Kabo, Marsh, Roganov and Wilhoit, Thermodynamics of Organic Compounds in the Gas "
     "State, Thermodynamics Research Center, 1994: Cp and S of ideal gases, Cp written here in powers "
     "of T within 0.2 %.",
+    "yaws": "Yaws, Thermophysical Properties of Chemicals and Hydrocarbons, 2nd edition, Gulf Professional "
+    "Publishing, 2014: ΔfH° and S° of ideal gases.",
     "crc_ions": "CRC Handbook of Chemistry and Physics, Thermodynamic Properties of Aqueous Ions: "
     "ΔfG and S as published, ΔfH from them; rounded to 0.1 kJ/mol.",
     "nbs": "Wagman et al., The NBS Tables of Chemical Thermodynamic Properties, Journal of Physical and "

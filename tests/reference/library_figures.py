@@ -12,13 +12,18 @@ from library_gases_halides import HALIDES
 from library_gases_janaf import TABULATED
 from library_gases_metals import METALS
 from library_gases_nonmetals import NONMETALS
+from library_organic_hydrocarbons import HYDROCARBONS
+from library_organic_others import OTHERS
+from library_organic_oxygenates import OXYGENATES
 from library_pieces import (Piece, constant_piece, fit, fit_heat_capacity, join, limits_of,
                             written)
 from library_solution import build_dissolved, formation_entropy, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 
-SPECIES = GASES + ORGANIC + NONMETALS + HALIDES + METALS + TABULATED + CONDENSED + DISSOLVED
+INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED
+ORGANIC_GASES = ORGANIC + HYDROCARBONS + OXYGENATES + OTHERS
+SPECIES = INORGANIC_GASES + ORGANIC_GASES + CONDENSED + DISSOLVED
 
 
 def species_of(ident):
@@ -59,18 +64,16 @@ def build(species):
             sources.append("crc")
         sources.append("janaf")
     elif how[0] == "poling":
-        h, s = published.crc(cas, phase)
+        h, s, from_tables = organic_figures(cas)
         powers, low, high = published.poling_gas(cas)
-        pieces = [Piece(low, high, [0, 0, *powers], "poling")]
-        sources += ["crc", "poling"]
+        pieces = [Piece(min(low, T0), high, [0, 0, *powers], "poling")]
+        sources += [*from_tables, "poling"]
     elif how[0] == "trc":
-        h, _ = published.crc(cas, phase)
+        h, _, from_tables = organic_figures(cas, False)
         s = round(published.trc_entropy(cas, T0), 2)
         high = min(published.trc(cas)[1], 1500)
-        coefficients = fit_heat_capacity(
-            lambda t: published.trc_heat_capacity(cas, t), T0, high, 2e-3)
-        pieces = [Piece(T0, high, coefficients, "trc")]
-        sources += ["crc", "trc"]
+        pieces = trc_pieces(cas, T0, high)
+        sources += [*from_tables, "trc"]
     elif how[0] == "perry":
         h, s = published.crc(cas, phase)
         (const, linear, inverse, square), _, high = published.perry(cas)
@@ -98,7 +101,9 @@ def build(species):
         sources += [how[4], "crc"]
     elif how[0] == "calcite":
         h, s = published.crc(cas, phase)
-        pieces = [Piece(T0, 1200, fit_heat_capacity(calcite_heat_capacity, T0, 1200), "jacobs")]
+        coefficients, apart = fit_heat_capacity(calcite_heat_capacity, T0, 1200)
+        assert apart < 1e-4, f"the fit leaves the formula by {apart:.2%}"
+        pieces = [Piece(T0, 1200, coefficients, "jacobs")]
         perry_figures, low, high = published.perry(cas)
         for t in range(300, 1033, 20):
             perry = perry_figures[0] + perry_figures[1] * t + perry_figures[2] / t**2
@@ -139,6 +144,31 @@ def build(species):
     join(pieces, h, s, transitions)
     return {"h": h, "s": s, "pieces": pieces, "sources": list(dict.fromkeys(sources)),
             "worst": worst}
+
+
+def organic_figures(cas, entropy_too=True):
+    """ΔfH° and S° of an organic gas from the CRC table, else from Yaws', and which were used."""
+    figures, used = [], []
+    pairs = list(zip(published.crc(cas, "g"), published.yaws(cas)))
+    for crc, yaws in pairs if entropy_too else pairs[:1]:
+        figures.append(yaws if crc is None else crc)
+        used.append("yaws" if crc is None else "crc")
+    better = published.atct(cas, "g")
+    if figures[0] is None and better:
+        figures[0], used[0] = better[0], "atct"
+    return figures[0], figures[-1], list(dict.fromkeys(used))
+
+
+def trc_pieces(cas, low, high):
+    """Cp of the TRC tables in powers of T within 0.2 %: one piece, or two where one will not do."""
+    def formula(t):
+        return published.trc_heat_capacity(cas, t)
+
+    coefficients, worst = fit_heat_capacity(formula, low, high)
+    if worst < 2e-3:
+        return [Piece(low, high, coefficients, "trc")]
+    middle = float(round(low + 0.35 * (high - low), -2))
+    return trc_pieces(cas, low, middle) + trc_pieces(cas, middle, high)
 
 
 def gas_pieces(file):

@@ -44,6 +44,12 @@ def trc(formula, names, cas, **more):
     return Species(formula, "g", names, cas, ("trc",), **more)
 
 
+def organic(formula, names, cas, form="", kind="trc", **more):
+    """An organic gas with Cp of the TRC tables (or of Poling's) and ΔfH° of the CRC table or Yaws'."""
+    more.setdefault("floor", CLASSES["organic"])
+    return Species(formula, "g", names, cas, (kind,), form=form, **more)
+
+
 # 95 % half-widths of the CODATA key values (Cox, Wagman and Medvedev, 1989), kJ/mol, recalled
 # from memory: they serve as u where a value kept here is a key value without an ATcT figure.
 CODATA = {"SO2.g": 0.20, "S2.g": 0.30, "H2S.g": 0.50, "CaO.s": 0.90, "MgO.s": 0.30}
