@@ -32,6 +32,8 @@ HEADS = {
 
 def second_figures(species):
     """(name, ΔfH°, S°) of every other source that knows the species."""
+    if species.is_melt:
+        return []
     found = []
     if species.janaf and (species.how[0] != "janaf" or species.crc):
         row = next(row for row in published.janaf(species.janaf) if row[0] == T0)
@@ -116,11 +118,14 @@ def piece_at(made, t):
 def gibbs_function_difference(species, made):
     """The largest difference of -[G - H(298)]/T from JANAF's table up to 2000 K, and where."""
     worst, at = 0.0, T0
+    # A melt's own H at 298.15 K is carried down; the table counts from its own there.
+    standard = next(row[4] for row in published.janaf(species.janaf) if row[0] == T0)
+    start = standard if species.is_melt else made["h"]
     for t, _, s, h, _, log_kf in published.janaf(species.janaf):
         piece = piece_at(made, t)
         if log_kf is None or piece is None or t > 2000:
             continue
-        here = piece.s(t) - 1000 * (piece.h(t) - made["h"]) / t
+        here = piece.s(t) - 1000 * (piece.h(t) - start) / t
         difference = here - (s - 1000 * h / t)
         if abs(difference) > abs(worst):
             worst, at = difference, t
@@ -152,7 +157,7 @@ def problems_of(report):
             line += "\n" + more
             found += wrong
         published_cp = published.crc_heat_capacity(species.cas, species.phase)
-        if published_cp and species.form != "monoclinic":
+        if published_cp and species.form != "monoclinic" and not species.is_melt:
             cp = piece_at(made, T0).cp(T0)
             line += f"\n    Cp(298) {cp:.2f}, CRC {published_cp}"
             if abs(cp / published_cp - 1) > 0.025 and not species.apart:
@@ -169,7 +174,7 @@ def problems_of(report):
 def gibbs_apart(species, made):
     """ΔfG° from ΔfH° and S° here less that of the CRC table, kJ/mol, or None."""
     g = published.crc_gibbs(species.cas, species.phase)
-    if g is None or species.form == "monoclinic":
+    if g is None or species.form == "monoclinic" or species.is_melt:
         return None
     return solution.formation_gibbs(species, made) - g
 

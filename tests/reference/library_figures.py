@@ -5,6 +5,10 @@ from math import log, sqrt
 
 import library_sources as published
 from library_condensed import CONDENSED
+from library_condensed_elements import ELEMENTS
+from library_condensed_minerals import MINERALS
+from library_condensed_oxides import OXIDES
+from library_condensed_salts import SALTS
 from library_dissolved import DISSOLVED
 from library_gases import GASES
 from library_gases_carbon import ORGANIC
@@ -23,7 +27,8 @@ from library_species import ATCT_LIMIT, KEY_VALUES
 
 INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED
 ORGANIC_GASES = ORGANIC + HYDROCARBONS + OXYGENATES + OTHERS
-SPECIES = INORGANIC_GASES + ORGANIC_GASES + CONDENSED + DISSOLVED
+PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS
+SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + DISSOLVED
 
 
 def species_of(ident):
@@ -56,7 +61,7 @@ def build(species):
     elif how[0] == "janaf":
         row = next(row for row in published.janaf(how[1]) if row[0] == T0)
         h, s = row[4], row[2]
-        limits = how[2] or limits_of(how[1], *how[3:])
+        limits = how[2] or limits_of(how[1], phase)
         pieces, transitions, worst = fit(how[1], limits, "janaf", species.blunt)
         pieces[0].low = species.low or pieces[0].low
         if species.crc:
@@ -141,7 +146,10 @@ def build(species):
     if species.id in KEY_VALUES:
         h, s = KEY_VALUES[species.id]
         sources.append("codata")
-    join(pieces, h, s, transitions)
+    if species.is_melt:
+        h, s = carried_down(pieces, transitions, how[1])
+    else:
+        join(pieces, h, s, transitions)
     return {"h": h, "s": s, "pieces": pieces, "sources": list(dict.fromkeys(sources)),
             "worst": worst}
 
@@ -157,6 +165,17 @@ def organic_figures(cas, entropy_too=True):
     if figures[0] is None and better:
         figures[0], used[0] = better[0], "atct"
     return figures[0], figures[-1], list(dict.fromkeys(used))
+
+
+def carried_down(pieces, transitions, code):
+    """Anchors a melt at its melting point; gives its H and S at 298.15 K by constant Cp from there."""
+    rows, low = published.janaf(code), pieces[0].low
+    standard = next(row for row in rows if row[0] == T0)
+    _, _, s, h, *_ = [row for row in rows if row[0] == low][-1]
+    join(pieces, standard[4] + h, s, transitions, low)
+    cp = pieces[0].cp(low)
+    return (round(pieces[0].h(low) - cp * (low - T0) / 1000, 3),
+            round(pieces[0].s(low) - cp * log(low / T0), 3))
 
 
 def trc_pieces(cas, low, high):

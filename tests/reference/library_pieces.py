@@ -5,7 +5,7 @@ from math import log
 
 import numpy as np
 
-from library_sources import R_EXACT, T0, janaf
+from library_sources import R_EXACT, T0, boiling, janaf, melting
 
 POWERS = (-2, -1, 0, 1, 2, 3, 4)
 # From few terms to many: a fit takes the first that meets the limits.
@@ -13,6 +13,7 @@ BASES = ((0,), (0, 1), (-2, 0, 1), (-2, 0, 1, 2), (-2, -1, 0, 1, 2), (-2, -1, 0,
 CP_LIMIT, H_LIMIT, S_LIMIT = 0.0005, 0.004, 0.004  # of Cp; kJ/mol; J/(mol K)
 # A piece whose limits were found by itself is cut again unless it is as good as this.
 GOOD_CP, GOOD_H_AND_S, GOOD_SWING = 0.0025, 0.01, 0.018
+HIGHEST_K = 3000.0  # where fits end: hotter than any plant
 
 
 def h_term(power, t):
@@ -69,15 +70,15 @@ def constant_piece(low, high, heat_capacity, source):
     return piece
 
 
-def join(pieces, h298, s298, transitions=()):
-    """Anchors the piece that holds 298.15 K, then joins the others to it.
+def join(pieces, h298, s298, transitions=(), start_k=T0):
+    """Anchors the piece that holds `start_k`, 298.15 K as a rule, then joins the others to it.
 
     H and S meet at a joint. At a transition they jump by its enthalpy, in kJ/mol, and by that
     enthalpy over T, so that G is continuous.
     """
     jumps = dict(transitions)
-    start = next(i for i, piece in enumerate(pieces) if piece.low <= T0 <= piece.high)
-    pieces[start].anchor(T0, h298, s298)
+    start = next(i for i, piece in enumerate(pieces) if piece.low <= start_k <= piece.high)
+    pieces[start].anchor(start_k, h298, s298)
     for lower, upper in zip(pieces[start:], pieces[start + 1 :]):
         t, jump = upper.low, jumps.get(upper.low, 0.0)
         upper.anchor(t, lower.h(t) + jump, lower.s(t) + 1000 * jump / t)
@@ -107,34 +108,55 @@ def fit(code, limits, source, blunt=()):
 
 
 @lru_cache(maxsize=None)
-def limits_of(code, low=T0, high=3000.0, melts=False):
+def limits_of(code, phase):
     """Limits of the pieces of a fit, found by themselves: at transitions, else as few as will do.
 
-    A range that no basis fits within the limits is cut in the middle of its rows. With `melts` the
-    range ends where the table's next phase begins.
+    A gas goes from 298.15 to 3000 K, a solid from 200 or 298.15 K to its melting, a melt from there to
+    its boiling. A range that no basis fits within the limits is cut in the middle of its rows.
     """
-    rows = [row for row in janaf(code) if row[0] >= low]
+    rows = janaf(code)
+    temperatures = sorted({row[0] for row in rows})
+    low, high = T0, HIGHEST_K
+    if phase == "s":
+        low = 200.0 if 200.0 in temperatures else T0
+        high = melting(code) or high
+    elif phase == "l":
+        low, high = melting(code) or T0, boiling(code) or high
+    top = max(t for t in temperatures if t <= high)
+    found = good_pieces(code, low, top)
+    if low < T0 and (len(found) < 2 or found[-1] <= T0):
+        found = good_pieces(code, T0, top)
+    if len(found) < 2:
+        raise SystemExit(f"no piece fits {code} at {T0} K")
+    return tuple(found)
+
+
+def good_pieces(code, low, top):
+    """The limits from `low` up to where the fits are good; a lambda peak ends the range before it."""
+    rows = janaf(code)
     cuts = [t for t in sorted({row[0] for row in rows}) if jump(rows, t) is not None]
-    top = max(row[0] for row in rows if row[0] <= high)
-    if melts and cuts:
-        top = min(top, cuts[-1])
     ends = [low, *(t for t in cuts if low < t < top), top]
     limits = [low]
     for one, two in zip(ends, ends[1:]):
-        limits += cut_until_good(code, one, two)
-    return tuple(limits)
+        upper = cut_until_good(code, one, two)
+        limits += upper
+        if upper[-1:] != [two]:
+            break
+    return limits
 
 
 def cut_until_good(code, low, high):
-    """The upper limits of as few pieces as fit a stretch without a transition."""
+    """The upper limits of as few pieces as fit a stretch without a transition, as far as they do."""
     inside = sorted({row[0] for row in within(janaf(code), low, high)})
     _, _, worst = fit(code, (low, high), "janaf")
     _, _, cp, h, s, swings = worst[0]
-    good = cp < GOOD_CP and h < GOOD_H_AND_S and s < GOOD_H_AND_S and swings < GOOD_SWING
-    if good or len(inside) < 5:
+    if cp < GOOD_CP and h < GOOD_H_AND_S and s < GOOD_H_AND_S and swings < GOOD_SWING:
         return [high]
+    if len(inside) < 3:
+        return []
     middle = inside[len(inside) // 2]
-    return cut_until_good(code, low, middle) + cut_until_good(code, middle, high)
+    lower = cut_until_good(code, low, middle)
+    return lower + cut_until_good(code, middle, high) if lower[-1:] == [middle] else lower
 
 
 def within(rows, low, high):

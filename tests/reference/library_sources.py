@@ -47,6 +47,26 @@ def janaf(code):
     return rows
 
 
+@lru_cache(maxsize=None)
+def melting(code):
+    """Where a JANAF table marks the change between crystal and liquid, in K, or None."""
+    for line in (folder("janaf") / "data" / f"{code}.txt").read_text().splitlines()[2:]:
+        left, sign, right = line.partition("<-->")
+        if sign and right.strip().upper().startswith("LIQUID") and "GLASS" not in left.upper():
+            return float(line.split("\t")[0])
+    return None
+
+
+@lru_cache(maxsize=None)
+def boiling(code):
+    """Where a JANAF table marks the change between liquid and gas, in K, or None."""
+    for line in (folder("janaf") / "data" / f"{code}.txt").read_text().splitlines()[2:]:
+        left, sign, right = line.partition("<-->")
+        if "LIQUID" in left.upper() and "GAS" in right.upper():
+            return float(line.split("\t")[0])
+    return None
+
+
 def number(text):
     try:
         return float(text)

@@ -21,6 +21,12 @@ class Species:
     low: float = 0.0  # a lower limit below the table's first row, for a short, smooth reach
 
     @property
+    def is_melt(self):
+        """Whether it is fitted from its melting point on; H and S at 298.15 K are then carried down."""
+        is_fit = self.phase == "l" and self.how[0] == "janaf"
+        return is_fit and (self.how[2] is None or self.how[2][0] > 298.15)
+
+    @property
     def id(self):
         return ".".join(part for part in (self.formula, self.phase, self.form) if part)
 
@@ -33,11 +39,11 @@ def fitted(formula, phase, names, cas, table, limits, **more):
     return Species(formula, phase, names, cas, ("janaf", table, limits), janaf=table, **more)
 
 
-def janaf_fit(formula, phase, names, cas, table, kind, low=298.15, high=3000.0, melts=False, **more):
-    """A species fitted to its JANAF table over pieces that are found by themselves."""
-    how = ("janaf", table, None, low, high, melts)
+def janaf_fit(formula, phase, names, cas, table, kind, **more):
+    """A species fitted to its JANAF table over pieces that are found by themselves: a gas to 3000 K,
+    a solid up to its melting, a melt from there to its boiling."""
     more.setdefault("floor", CLASSES[kind])
-    return Species(formula, phase, names, cas, how, janaf=table, **more)
+    return Species(formula, phase, names, cas, ("janaf", table, None), janaf=table, **more)
 
 
 def trc(formula, names, cas, **more):
