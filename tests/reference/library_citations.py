@@ -37,6 +37,10 @@ SOURCES = {
     "Chemical Reference Data 11, supplement 2, 1982. Recalled from memory.",
     "robie": "Robie and Hemingway, Thermodynamic Properties of Minerals, U.S. Geological Survey Bulletin "
     "2131, 1995. Recalled from memory.",
+    "kopp": "Kopp's rule: Cp of a solid as the sum of its elements' contributions, as in Perry's Chemical "
+    "Engineers' Handbook; within 20 %, used over a few kelvin only. From memory.",
+    "majzlan": "Majzlan, Navrotsky and Schwertmann, Geochimica et Cosmochimica Acta 68 (2004) 1049, and "
+    "Majzlan et al., American Mineralogist 88 (2003) 846: goethite. Recalled from memory.",
     "sander": "Sander, Compilation of Henry's law constants for water as solvent, Atmospheric Chemistry "
     "and Physics 15 (2015) 4399: averages over the entries, with the gas of this library.",
     "shock": "Shock, Helgeson and Sverjensky, Geochimica et Cosmochimica Acta 52 (1988) 2009, 53 (1989) "

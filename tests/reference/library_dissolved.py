@@ -152,7 +152,8 @@ OTHER_ELEMENTS = {
     "As": "7440-38-2", "Au": "7440-57-5", "Bi": "7440-69-9", "Cd": "7440-43-9", "Ce": "7440-45-1",
     "Ge": "7440-56-4", "In": "7440-74-6", "La": "7439-91-0", "Pd": "7440-05-3", "Pt": "7440-06-4",
     "Re": "7440-15-5", "Rh": "7440-16-6", "Sb": "7440-36-0", "Sc": "7440-20-2", "Se": "7782-49-2",
-    "Sn": "7440-31-5", "Te": "13494-80-9", "Th": "7440-29-1", "Tl": "7440-28-0", "U": "7440-61-1",
+    "Te": "13494-80-9", "Th": "7440-29-1", "Tl": "7440-28-0", "U": "7440-61-1",
     "Y": "7440-65-5",
 }
-SILVER_ENTROPY = 42.55  # CODATA, recalled from memory: JANAF has no silver
+# CODATA, recalled from memory: JANAF has no silver, and the CRC table's tin is the grey one.
+RECALLED_ENTROPIES = {"Ag": 42.55, "Sn": 51.18}

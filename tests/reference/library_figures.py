@@ -5,6 +5,7 @@ from math import log, sqrt
 
 import library_sources as published
 from library_condensed import CONDENSED
+from library_condensed_ambient import AMBIENT
 from library_condensed_elements import ELEMENTS
 from library_condensed_minerals import MINERALS
 from library_condensed_oxides import OXIDES
@@ -16,18 +17,19 @@ from library_gases_halides import HALIDES
 from library_gases_janaf import TABULATED
 from library_gases_metals import METALS
 from library_gases_nonmetals import NONMETALS
+from library_liquids import LIQUIDS
 from library_organic_hydrocarbons import HYDROCARBONS
 from library_organic_others import OTHERS
 from library_organic_oxygenates import OXYGENATES
 from library_pieces import (Piece, constant_piece, fit, fit_heat_capacity, join, limits_of,
                             written)
-from library_solution import build_dissolved, formation_entropy, formed
+from library_solution import atoms_and_charge, build_dissolved, formation_entropy, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 
 INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED
 ORGANIC_GASES = ORGANIC + HYDROCARBONS + OXYGENATES + OTHERS
-PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS
+PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS + AMBIENT + LIQUIDS
 SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + DISSOLVED
 
 
@@ -92,6 +94,10 @@ def build(species):
             h = round(g + T0 * formation_entropy(species.formula, s), 2)
         pieces = [constant_piece(how[1], how[2], published.crc_heat_capacity(cas, phase), "crc")]
         sources.append("crc")
+    elif how[0] == "kopp":
+        h, s = published.crc(cas, phase)
+        pieces = [constant_piece(288.15, 310, kopp(species.formula), "kopp")]
+        sources += ["crc", "kopp"]
     elif how[0] == "recalled":
         h, s = how[1], how[2]
         pieces = recalled_pieces(how[3], how[4])
@@ -126,13 +132,14 @@ def build(species):
     elif how[0] == "vapour":
         # ΔfH° is measured on the liquid; S° is what makes the vapour pressure right.
         vapour, at_crc = built(how[1]), published.crc(cas, phase)
-        liquid, gaseous = published.atct(cas, phase), published.atct(cas, "g")
+        liquid = published.atct(cas, phase)
         if liquid:
             h, from_table = round(liquid[0], 2), "atct"
         else:
-            # The difference of the two phases is kept where the vapour's enthalpy was replaced.
-            shift = vapour["h"] - published.crc(cas, "g")[0]
-            h, from_table = round(at_crc[0] + (shift if gaseous else 0.0), 2), "crc"
+            # The enthalpy of vaporization of one table is kept, whatever the vapour's own became.
+            of_vapour = published.crc(cas, "g")[0]
+            shift = vapour["h"] - of_vapour if of_vapour is not None else 0.0
+            h, from_table = round(at_crc[0] + shift, 2), "crc"
         s = round(vapour["s"] - 1000 * (vapour["h"] - h - vaporization(cas)) / T0, 2)
         pieces = liquid_pieces(cas, phase)
         sources += [from_table, "poling", pieces[0].source]
@@ -165,6 +172,17 @@ def organic_figures(cas, entropy_too=True):
     if figures[0] is None and better:
         figures[0], used[0] = better[0], "atct"
     return figures[0], figures[-1], list(dict.fromkeys(used))
+
+
+# J/(mol K) for each atom, by Kopp's rule.
+KOPP = {"C": 7.5, "H": 9.6, "B": 11.3, "Si": 15.9, "O": 16.7, "F": 20.9, "P": 22.6, "S": 22.6}
+KOPP_OTHERS = 25.9
+
+
+def kopp(formula):
+    """Cp of a solid near room temperature from its elements."""
+    atoms, _ = atoms_and_charge(formula)
+    return round(sum(count * KOPP.get(symbol, KOPP_OTHERS) for symbol, count in atoms.items()), 1)
 
 
 def carried_down(pieces, transitions, code):
@@ -208,6 +226,11 @@ def vaporization(cas):
     return -R_EXACT * T0 * log(published.antoine_pa(cas, T0) / 1e5) / 1000
 
 
+def boiling_k(cas):
+    """Where the vapour pressure is one atmosphere, in whole kelvin."""
+    return float(next(t for t in range(280, 700) if published.antoine_pa(cas, t) > 101_325))
+
+
 def liquid_pieces(cas, phase):
     """Cp of a liquid by Zábranský's splines that hold 298.15 K onwards, else the CRC constant."""
     splines = published.zabransky(cas)
@@ -215,7 +238,7 @@ def liquid_pieces(cas, phase):
     if joined and any(low <= T0 <= high for low, high, _ in joined) and chained(joined):
         return [Piece(low, high, [0, 0, *(written(v) for v in powers), 0], "zabransky")
                 for low, high, powers in joined]
-    low, high = LIQUID_RANGE_K[cas]
+    low, high = LIQUID_RANGE_K.get(cas) or (273.15, boiling_k(cas))
     return [constant_piece(low, high, published.crc_heat_capacity(cas, phase), "crc")]
 
 

@@ -7,7 +7,7 @@ from math import log, log10, sqrt
 import library_sources as published
 from library_dissolved import (BLIND_RANGE_K, CP_RECALLED, ELEMENTS, GIBBS_LIMIT, GIBBS_LIMIT_APART,
                                HENRY_APART, HENRY_COMPARED, HENRY_LIMIT, KNOWN_RANGE_K,
-                               OTHER_ELEMENTS, SILVER_ENTROPY)
+                               OTHER_ELEMENTS, RECALLED_ENTROPIES)
 from library_pieces import constant_piece, join
 from library_sources import R_EXACT, T0
 
@@ -17,10 +17,12 @@ RT_LN_10 = R_EXACT * T0 * log(10) / 1000  # kJ/mol
 def atoms_and_charge(formula):
     """The atoms of a formula such as Al(OH)4^-, and its charge."""
     body, _, charge = formula.partition("^")
-    body = re.sub(r"\((\w+)\)(\d*)", lambda m: m[1] * int(m[2] or 1), body)
     atoms = {}
-    for symbol, number in re.findall(r"([A-Z][a-z]?)(\d*)", body):
-        atoms[symbol] = atoms.get(symbol, 0) + int(number or 1)
+    for part in body.split("·"):
+        times, rest = re.fullmatch(r"([\d.]*)(.*)", part).groups()
+        rest = re.sub(r"\((\w+)\)(\d*)", lambda m: m[1] * int(m[2] or 1), rest)
+        for symbol, number in re.findall(r"([A-Z][a-z]?)([\d.]*)", rest):
+            atoms[symbol] = atoms.get(symbol, 0) + float(number or 1) * float(times or 1)
     size = int(charge[:-1] or 1) if charge else 0
     return atoms, -size if charge.endswith("-") else size
 
@@ -28,8 +30,8 @@ def atoms_and_charge(formula):
 @lru_cache(maxsize=None)
 def element_entropy(symbol):
     """S° of one mole of atoms of an element in its reference state."""
-    if symbol == "Ag":
-        return SILVER_ENTROPY
+    if symbol in RECALLED_ENTROPIES:
+        return RECALLED_ENTROPIES[symbol]
     if symbol in OTHER_ELEMENTS:
         return published.crc(OTHER_ELEMENTS[symbol], "s")[1]
     table, atoms = ELEMENTS[symbol]
