@@ -1,7 +1,7 @@
 //! Who takes part: the species of the reaction with their phases, then the inerts of the reading.
 
 use super::question::Question;
-use crate::library::{Book, Known, Temperature};
+use crate::library::{Book, Known, Temperature, likely};
 use crate::mixture::{Basis, Water};
 use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase, Species, Term, nearest, parse_species};
@@ -60,7 +60,8 @@ pub(super) fn participants(
     let mut list = Vec::with_capacity(equation.terms.len());
     let (mut remarks, mut problems) = (Vec::new(), Vec::new());
     let in_water = equation.terms.iter().any(is_dissolved);
-    let around = Around { reading, book, in_water, from_library };
+    let likely_at = temperature.unwrap_or(Temperature::standard());
+    let around = Around { reading, book, likely_at, in_water, from_library };
     let all_can_be_gas = equation.terms.iter().all(|term| around.can_be_gas(term));
     for term in &equation.terms {
         let (phase, assumed) = match around.phase_of(term, all_can_be_gas) {
@@ -100,6 +101,8 @@ fn is_dissolved(term: &Term) -> bool {
 struct Around<'a> {
     reading: &'a [Species],
     book: &'a Book,
+    /// The temperature that a phase must be likely at where none is written.
+    likely_at: Temperature,
     /// Whether the equation is one of a solution.
     in_water: bool,
     from_library: bool,
@@ -113,6 +116,7 @@ impl Around<'_> {
         if found.is_empty() {
             let Species { formula, form, .. } = &term.species;
             let records = self.book.meant(formula, None, form.as_deref());
+            let records = likely(records, self.likely_at);
             found.extend(records.iter().map(|record| record.phase));
             if !self.in_water && found.iter().any(|phase| *phase != Phase::Aqueous) {
                 found.retain(|phase| *phase != Phase::Aqueous);

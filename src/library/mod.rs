@@ -45,6 +45,7 @@ mod record;
 mod search;
 mod table;
 mod temperature;
+mod usual;
 
 pub use book::Book;
 pub use combination::Change;
@@ -69,3 +70,4 @@ pub use search::{Found, FoundBy};
 pub use table::citation;
 pub use temperature::TEMPERATURE_LIMITS_K;
 pub use temperature::Temperature;
+pub use usual::likely;

@@ -5,6 +5,8 @@ use std::borrow::Cow;
 use super::book::Book;
 use super::known::Known;
 use super::table;
+use super::temperature::Temperature;
+use super::usual::likely;
 use crate::reaction::Formula;
 use crate::reaction::Phase;
 use crate::reaction::Species;
@@ -101,26 +103,42 @@ impl Book {
         let typed = Typed { text, species: parse_species(text).ok() };
         let mut groups: Vec<Vec<Place>> = vec![Vec::new(); FoundBy::ALL.len()];
         self.each_card(|place, card| {
-            if let Some(by) = typed.rank(card) {
-                groups[by as usize].push(place);
+            if let Some((by, letters)) = typed.rank(card) {
+                groups[by as usize].push(Place { letters, ..place });
             }
         });
         if groups.iter().all(Vec::is_empty) {
             groups[FoundBy::Near as usize] = self.near(text);
         }
-        let ordered = FoundBy::ALL.into_iter().zip(groups).flat_map(|(by, group)| {
-            let (dissolved, others): (Vec<Place>, Vec<Place>) =
-                group.into_iter().partition(|place| place.phase == Phase::Aqueous);
-            others.into_iter().chain(dissolved).map(move |place| (by, place))
+        let ordered = FoundBy::ALL.into_iter().zip(groups).flat_map(|(by, mut group)| {
+            // Short names before long ones; what is dissolved, and hot vapours, last.
+            group.sort_by_key(|place| (self.is_unusual(*place), place.letters));
+            group.into_iter().map(move |place| (by, place))
         });
-        let record = |(by, place): (FoundBy, Place)| {
-            let record = match place.own {
-                Some(own) => self.own()[own].clone(),
-                None => Known::Table(table::entries()[place.entry].record()?),
-            };
-            Some(Found { record, by })
-        };
+        let record =
+            |(by, place): (FoundBy, Place)| Some(Found { record: self.record(place)?, by });
         ordered.take(most).filter_map(record).collect()
+    }
+
+    fn record(&self, place: Place) -> Option<Known> {
+        match place.own {
+            Some(own) => Some(self.own()[own].clone()),
+            None => Some(Known::Table(table::entries()[place.entry].record()?)),
+        }
+    }
+
+    /// How far down a record belongs among equals: 0, 1 for a vapour that room temperature knows as a
+    /// solid or a liquid only, 2 for what is dissolved.
+    fn is_unusual(&self, place: Place) -> u8 {
+        match place.phase {
+            Phase::Aqueous => 2,
+            Phase::Liquid | Phase::Solid => 0,
+            Phase::Gas => {
+                let Some(record) = self.record(place) else { return 0 };
+                let all = self.find(&record.formula, None, record.form.as_deref());
+                u8::from(!likely(all, Temperature::standard()).contains(&record))
+            }
+        }
     }
 
     /// Shows every record's card: the user's own, then those of the tables that none stands for.
@@ -134,7 +152,7 @@ impl Book {
                 cas: &record.cas,
                 composition: parse_formula(&record.formula).ok().map(Cow::Owned),
             };
-            see(Place { own: Some(own), entry: 0, phase: record.phase }, &card);
+            see(Place { own: Some(own), entry: 0, phase: record.phase, letters: 0 }, &card);
         }
         for (entry, line) in table::entries().iter().enumerate() {
             let Some(phase) = Phase::from_symbol(line.cell(2)) else { continue };
@@ -149,7 +167,7 @@ impl Book {
                 cas: line.cell(5),
                 composition: line.composition().map(Cow::Borrowed),
             };
-            see(Place { own: None, entry, phase }, &card);
+            see(Place { own: None, entry, phase, letters: 0 }, &card);
         }
     }
 
@@ -176,44 +194,49 @@ struct Place {
     own: Option<usize>,
     entry: usize,
     phase: Phase,
+    /// How long the word is that the text was found in.
+    letters: usize,
 }
 
 impl Typed<'_> {
-    /// By what a record is found, if it is; never [`FoundBy::Near`].
-    fn rank(&self, card: &Card) -> Option<FoundBy> {
+    /// By what a record is found, if it is, and how long the word is that it was found in; never by
+    /// [`FoundBy::Near`].
+    fn rank(&self, card: &Card) -> Option<(FoundBy, usize)> {
         if let Some(species) = &self.species {
             let form = species.form.as_deref();
             let fits = species.phase.is_none_or(|phase| phase == card.phase)
                 && form.is_none_or(|form| form == card.form);
             if fits && species.formula.text() == card.formula {
-                return Some(FoundBy::Formula);
+                return Some((FoundBy::Formula, card.form.len()));
             }
             let composition = card.composition.as_deref();
             if fits && composition.is_some_and(|known| known.has_same_atoms(&species.formula)) {
-                return Some(FoundBy::Atoms);
+                return Some((FoundBy::Atoms, card.form.len()));
             }
         }
-        let names = || card.names.split(';');
         let is_text = |word: &str| word.eq_ignore_ascii_case(self.text);
-        if names().any(is_text) || is_text(card.cas) || is_text(card.formula) {
-            return Some(FoundBy::Name);
+        if card.names.split(';').any(is_text) || is_text(card.cas) || is_text(card.formula) {
+            return Some((FoundBy::Name, 0));
         }
         if self.text.chars().count() < 2 {
             return None;
         }
         if card.formula.starts_with(self.text) {
-            Some(FoundBy::FormulaStart)
-        } else if names().any(|name| starts(name, self.text)) || starts(card.cas, self.text) {
-            Some(FoundBy::NameStart)
-        } else if names()
-            .any(|name| name.split([' ', '-', '(']).any(|word| starts(word, self.text)))
-        {
-            Some(FoundBy::Word)
-        } else if names().any(|name| holds(name, self.text)) {
-            Some(FoundBy::Within)
-        } else {
-            None
+            return Some((FoundBy::FormulaStart, card.formula.len()));
         }
+        let shortest = |fits: &dyn Fn(&str) -> bool| {
+            card.names.split(';').filter(|name| fits(name)).map(str::len).min()
+        };
+        if starts(card.cas, self.text) {
+            return Some((FoundBy::NameStart, 0));
+        }
+        let later = |name: &str| name.split([' ', '-', '(']).any(|word| starts(word, self.text));
+        let ways: [(FoundBy, &dyn Fn(&str) -> bool); 3] = [
+            (FoundBy::NameStart, &|name| starts(name, self.text)),
+            (FoundBy::Word, &later),
+            (FoundBy::Within, &|name| holds(name, self.text)),
+        ];
+        ways.into_iter().find_map(|(by, fits)| Some((by, shortest(fits)?)))
     }
 }
 

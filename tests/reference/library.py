@@ -19,6 +19,7 @@ from library_species import CODATA, SECOND_LIMITS
 ROOT = Path(__file__).resolve().parents[2]
 TABLES = ROOT / "src" / "library" / "tables"
 LOG_KF = ROOT / "tests" / "published" / "janaf_log_kf.tsv"
+TRANSITIONS = ROOT / "tests" / "published" / "transitions.tsv"
 REACTIONS = ROOT / "tests" / "published" / "janaf_reactions.tsv"
 # What the Gibbs function may leave JANAF's by without a reason, J/(mol K): 0.013 in log10 Kf.
 GIBBS_FUNCTION_LIMIT = 0.25
@@ -255,6 +256,18 @@ def log_kf_lines():
     return lines
 
 
+def transition_lines():
+    """Every transition that a record passes, with the enthalpy that its table gives."""
+    lines = [
+        "# Enthalpies of transition inside the range of a record, from the NIST-JANAF tables, J/mol.",
+        "id\ttemperature_k\tenthalpy_j_per_mol",
+    ]
+    for species in sorted(SPECIES, key=lambda one: one.id.encode()):
+        for t, jump in built(species.id)["transitions"]:
+            lines.append(f"{species.id}\t{t:g}\t{1000 * jump:g}")
+    return lines
+
+
 def main():
     assert POWERS[0] == -2 and R_EXACT > 8
     rows, report = make()
@@ -264,7 +277,10 @@ def main():
             text = "\n".join("\t".join(line) for line in [HEADS[name].split(), *lines])
             (TABLES / f"{name}.tsv").write_text(text + "\n")
         LOG_KF.write_text("\n".join(log_kf_lines()) + "\n")
+        TRANSITIONS.write_text("\n".join(transition_lines()) + "\n")
     found += check_tables(rows)
+    if TRANSITIONS.read_text().splitlines() != transition_lines():
+        found.append("transitions.tsv differs from the published tables")
     if LOG_KF.read_text().splitlines() != log_kf_lines():
         found.append("janaf_log_kf.tsv differs from the published tables")
     compared_with(report)

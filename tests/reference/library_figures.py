@@ -153,12 +153,12 @@ def build(species):
     if species.id in KEY_VALUES:
         h, s = KEY_VALUES[species.id]
         sources.append("codata")
-    if species.is_melt:
+    if species.is_melt and pieces[0].low > T0:
         h, s = carried_down(pieces, transitions, how[1])
     else:
         join(pieces, h, s, transitions)
     return {"h": h, "s": s, "pieces": pieces, "sources": list(dict.fromkeys(sources)),
-            "worst": worst}
+            "worst": worst, "transitions": list(transitions)}
 
 
 def organic_figures(cas, entropy_too=True):
@@ -192,8 +192,11 @@ def carried_down(pieces, transitions, code):
     _, _, s, h, *_ = [row for row in rows if row[0] == low][-1]
     join(pieces, standard[4] + h, s, transitions, low)
     cp = pieces[0].cp(low)
-    return (round(pieces[0].h(low) - cp * (low - T0) / 1000, 3),
-            round(pieces[0].s(low) - cp * log(low / T0), 3))
+    down_h, down_s = cp * (low - T0) / 1000, cp * log(low / T0)
+    h, s = round(pieces[0].h(low) - down_h, 3), round(pieces[0].s(low) - down_s, 3)
+    # The table's figures are the rounded ones, and the pieces are those that lead to them.
+    join(pieces, h + down_h, s + down_s, transitions, low)
+    return h, s
 
 
 def trc_pieces(cas, low, high):

@@ -55,7 +55,7 @@ class Piece:
 
 
 def rounded(value):
-    return float(f"{value:.14g}")
+    return float(f"{value:.16g}")
 
 
 def written(value):

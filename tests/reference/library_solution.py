@@ -83,7 +83,8 @@ def build_dissolved(species, built):
     pieces = [constant_piece(low, high, cp or 0.0, source or sources[0])]
     h, s = round(h, 3), round(s, 3)
     join(pieces, h, s)
-    return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": []}
+    return {"h": h, "s": s, "pieces": pieces, "sources": sources, "worst": [],
+            "transitions": []}
 
 
 def formed(equilibrium, built):
