@@ -11,7 +11,8 @@ from pathlib import Path
 import library_solution as solution
 import library_sources as published
 from library_citations import SOURCES
-from library_figures import SPECIES, built
+from library_figures import SPECIES, built, species_of
+from library_measured import MEASURED
 from library_pieces import POWERS
 from library_sources import R_EXACT, T0
 from library_species import CODATA, SECOND_LIMITS
@@ -23,10 +24,14 @@ TRANSITIONS = ROOT / "tests" / "published" / "transitions.tsv"
 REACTIONS = ROOT / "tests" / "published" / "janaf_reactions.tsv"
 # What the Gibbs function may leave JANAF's by without a reason, J/(mol K): 0.013 in log10 Kf.
 GIBBS_FUNCTION_LIMIT = 0.25
+# log10 K of a measured equilibrium may leave that of the species' own records by this without a reason.
+MEASURED_LIMIT = 0.35
 HEADS = {
     "species": "id formula phase form names cas enthalpy_kj_per_mol entropy_j_per_mol_k "
     "u_gibbs_kj_per_mol u_class sources",
     "heat": "id low_k high_k a_minus2 a_minus1 a0 a1 a2 a3 a4 b_enthalpy b_entropy source",
+    "measured": "id terms low_k high_k a_minus2 a_minus1 a0 a1 a2 a3 a4 b_enthalpy b_entropy log10_k "
+    "u_log10_k source",
     "sources": "id citation",
 }
 
@@ -56,10 +61,14 @@ def second_figures(species):
     return found
 
 
+def u_of(ident):
+    return uncertainty(species_of(ident), built(ident))[0]
+
+
 def uncertainty(species, made):
     """u of ΔfG°298 in kJ/mol and how it was got."""
     if species.phase == "aq":
-        return solution.uncertainty(species, made)
+        return solution.uncertainty(species, made, u_of)
     if species.element:
         return 0.0, "element"
     h, s = made["h"], made["s"]
@@ -90,7 +99,7 @@ def figure(value):
 
 def make():
     """Every table as lists of rows, sorted by id, and the report of fits and second sources."""
-    rows, report = {"species": [], "heat": [], "sources": []}, []
+    rows, report = {"species": [], "heat": [], "measured": [], "sources": []}, []
     used = set()
     for species in sorted(SPECIES, key=lambda one: one.id.encode()):
         made = built(species.id)
@@ -106,6 +115,11 @@ def make():
             rows["heat"].append([species.id, *(figure(v) for v in (
                 piece.low, piece.high, *piece.a, piece.b_h, piece.b_s)), piece.source])
         report.append((species, made, u, kind))
+    for row in sorted(MEASURED, key=lambda one: one.tied.encode()):
+        figures = [figure(v) for v in (row.low, row.high, *row.powers, row.b_h, row.b_s)]
+        rows["measured"].append([row.tied, row.terms, *figures, f"{row.log10_k(T0):.3f}", f"{row.u:g}",
+                                 row.source])
+        used.add(row.source)
     rows["sources"] = [[key, SOURCES[key]] for key in sorted(used)]
     missing = used - set(SOURCES)
     assert not missing, missing
@@ -169,6 +183,34 @@ def problems_of(report):
             if abs(worst) > GIBBS_FUNCTION_LIMIT and not species.apart:
                 found.append(f"{species.id}: the Gibbs function leaves JANAF's by {worst:.3f} at {at} K")
         print(line)
+    return found
+
+
+def problems_of_measured():
+    """Where a measured equilibrium names no species, closes a circle, or leaves the species' records."""
+    found, tied = [], {row.tied: row for row in MEASURED}
+    known = {species.id for species in SPECIES}
+    for row in MEASURED:
+        parts = row.stoichiometry()
+        missing = set(parts) - known
+        if missing:
+            found.append(f"{row.tied}: no record of {missing}")
+            continue
+        reached, open_ones = set(), [ident for ident in parts if ident != row.tied]
+        while open_ones:
+            ident = open_ones.pop()
+            if ident in tied and ident not in reached:
+                open_ones += [other for other in tied[ident].stoichiometry() if other != ident]
+            reached.add(ident)
+        if row.tied in reached:
+            found.append(f"{row.tied} leads back to itself")
+        gibbs = sum(nu * solution.formation_gibbs(species_of(ident), built(ident))
+                    for ident, nu in parts.items())
+        apart = row.log10_k(T0) + gibbs / solution.RT_LN_10
+        print(f"measured {row.tied:22} log10 K {row.log10_k(T0):8.3f}, {apart:+.3f} from the records"
+              f"{'  ' + row.apart if row.apart else ''}")
+        if abs(apart) > MEASURED_LIMIT and not row.apart:
+            found.append(f"{row.tied}: log10 K leaves the species' records by {apart:+.3f}")
     return found
 
 
@@ -271,7 +313,7 @@ def transition_lines():
 def main():
     assert POWERS[0] == -2 and R_EXACT > 8
     rows, report = make()
-    found = problems_of(report)
+    found = problems_of(report) + problems_of_measured()
     if "--write" in sys.argv:
         for name, lines in rows.items():
             text = "\n".join("\t".join(line) for line in [HEADS[name].split(), *lines])

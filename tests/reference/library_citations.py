@@ -37,6 +37,38 @@ SOURCES = {
     "Chemical Reference Data 11, supplement 2, 1982. Recalled from memory.",
     "robie": "Robie and Hemingway, Thermodynamic Properties of Minerals, U.S. Geological Survey Bulletin "
     "2131, 1995. Recalled from memory.",
+    "iapws_kw": "IAPWS R11-07, Release on the Ionization Constant of H2O, 2007 (Bandura and Lvov, Journal of "
+    "Physical and Chemical Reference Data 35 (2006) 15): written here as A + B T + C/T + D log10 T + E/T² "
+    "within 0.001 over 0 to 100 °C. Recalled from memory, and borne out by its pKw at 0, 25 and 100 °C.",
+    "plummer": "Plummer and Busenberg, Geochimica et Cosmochimica Acta 46 (1982) 1011: CO2, its acid "
+    "constants, calcite, aragonite and calcium's ion pairs, 0 to 90 °C. Recalled from memory.",
+    "nordstrom": "Nordstrom, Plummer, Langmuir, Busenberg, May, Jones and Parkhurst, Revised Chemical "
+    "Equilibrium Data for Major Water-Mineral Reactions, ACS Symposium Series 416 (1990) 398. Recalled "
+    "from memory.",
+    "nist46": "Smith and Martell, Critical Stability Constants, volumes 4 to 6, Plenum, 1976 to 1989. "
+    "Recalled from memory.",
+    "bates_p1": "Bates, Journal of Research of the National Bureau of Standards 47 (1951) 127: pK1 of "
+    "phosphoric acid. Recalled from memory.",
+    "bates_p2": "Bates and Acree, Journal of Research of the National Bureau of Standards 30 (1943) 129: pK2 "
+    "of phosphoric acid. Recalled from memory.",
+    "millero": "Millero, Plese and Fernandez, Limnology and Oceanography 33 (1988) 269: pK1 of hydrogen "
+    "sulfide. Recalled from memory.",
+    "izatt": "Izatt, Christensen, Pack and Bench, Inorganic Chemistry 1 (1962) 828: pK of hydrogen cyanide. "
+    "Recalled from memory.",
+    "morris": "Morris, Journal of Physical Chemistry 70 (1966) 3798: pK of hypochlorous acid. Recalled from "
+    "memory.",
+    "owen": "Owen and King, Journal of the American Chemical Society 65 (1943) 1612: pK of boric acid. "
+    "Recalled from memory.",
+    "harned_acetic": "Harned and Ehlers, Journal of the American Chemical Society 55 (1933) 652: pK of acetic "
+    "acid, 1170.48/T - 3.1649 + 0.013399 T. Recalled from memory.",
+    "harned_formic": "Harned and Embree, Journal of the American Chemical Society 56 (1934) 1042: pK of formic "
+    "acid, 1342.85/T - 5.2743 + 0.015168 T. Recalled from memory.",
+    "edwards": "Edwards, Maurer, Newman and Prausnitz, AIChE Journal 24 (1978) 966: carbamate, rounded. "
+    "Recalled from memory.",
+    "reardon": "Reardon and Armstrong, Geochimica et Cosmochimica Acta 51 (1987) 63: celestite. Recalled from "
+    "memory.",
+    "gregory": "Gregory, Moreno and Brown, Journal of Research of the National Bureau of Standards 74A (1970) "
+    "461: brushite. Recalled from memory.",
     "kopp": "Kopp's rule: Cp of a solid as the sum of its elements' contributions, as in Perry's Chemical "
     "Engineers' Handbook; within 20 %, used over a few kelvin only. From memory.",
     "majzlan": "Majzlan, Navrotsky and Schwertmann, Geochimica et Cosmochimica Acta 68 (2004) 1049, and "

@@ -11,6 +11,7 @@ from library_condensed_minerals import MINERALS
 from library_condensed_oxides import OXIDES
 from library_condensed_salts import SALTS
 from library_dissolved import DISSOLVED
+from library_dissolved_more import BASES, IONS, MOLECULES, TIED
 from library_gases import GASES
 from library_gases_carbon import ORGANIC
 from library_gases_halides import HALIDES
@@ -30,7 +31,8 @@ from library_species import ATCT_LIMIT, KEY_VALUES
 INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED
 ORGANIC_GASES = ORGANIC + HYDROCARBONS + OXYGENATES + OTHERS
 PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS + AMBIENT + LIQUIDS
-SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + DISSOLVED
+AQUEOUS = DISSOLVED + IONS + MOLECULES + BASES + TIED
+SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + AQUEOUS
 
 
 def species_of(ident):

@@ -8,6 +8,7 @@ import library_sources as published
 from library_dissolved import (BLIND_RANGE_K, CP_RECALLED, ELEMENTS, GIBBS_LIMIT, GIBBS_LIMIT_APART,
                                HENRY_APART, HENRY_COMPARED, HENRY_LIMIT, KNOWN_RANGE_K,
                                OTHER_ELEMENTS, RECALLED_ENTROPIES)
+from library_measured import MEASURED
 from library_pieces import constant_piece, join
 from library_sources import R_EXACT, T0
 
@@ -69,6 +70,15 @@ def build_dissolved(species, built):
         g, s = how[1:]
         h = g + T0 * formation_entropy(species.formula, s)
         sources = ["nbs"]
+    elif how[0] == "measured":
+        row = next(row for row in MEASURED if row.tied == species.id)
+        parts = row.stoichiometry()
+        share = -1 / parts.pop(species.id)
+        parts = {ident: nu * share for ident, nu in parts.items()}
+        h, s = formed((parts, -share * row.log10_k(T0), -share * row.enthalpy(T0)), built)
+        cp = sum(nu * heat_capacity(built(ident)) for ident, nu in parts.items())
+        low, high = row.low, row.high
+        sources = [row.source]
     else:
         if how[0] == "henry":
             constant, slope = published.henry(species.cas)
@@ -100,7 +110,7 @@ def heat_capacity(made):
     return round(next(p for p in made["pieces"] if p.low <= T0 <= p.high).cp(T0), 2)
 
 
-def uncertainty(species, made):
+def uncertainty(species, made, made_u):
     """u of ΔfG°298 in kJ/mol and how it was got."""
     how = species.how
     if species.element:
@@ -111,6 +121,12 @@ def uncertainty(species, made):
         h = published.aqueous_ion(species.cas)[0]
         apart = abs(made["h"] - h) / 2 if h is not None else 0.0
         return (apart, "sources") if apart > species.floor else (species.floor, "class")
+    if how[0] == "measured":
+        # That of the equilibrium and of the other species, as if they were independent.
+        row = next(row for row in MEASURED if row.tied == species.id)
+        parts = row.stoichiometry()
+        others = sum((nu * made_u(ident)) ** 2 for ident, nu in parts.items() if ident != species.id)
+        return sqrt(others + (row.u * RT_LN_10) ** 2), "measured"
     return species.floor, "class"
 
 
