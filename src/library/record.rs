@@ -37,22 +37,25 @@ pub enum UncertaintyKind {
     Sources,
     /// A class: judged, for want of better.
     Class,
+    /// That of a measured equilibrium and of the species that it ties this one to.
+    Measured,
     /// Stated by the user with a record of their own.
     Own,
 }
 
 impl UncertaintyKind {
-    pub(super) const WORDS: [(&'static str, UncertaintyKind); 6] = [
+    pub(super) const WORDS: [(&'static str, UncertaintyKind); 7] = [
         ("element", UncertaintyKind::Element),
         ("atct", UncertaintyKind::Atct),
         ("codata", UncertaintyKind::Codata),
         ("sources", UncertaintyKind::Sources),
         ("class", UncertaintyKind::Class),
+        ("measured", UncertaintyKind::Measured),
         ("own", UncertaintyKind::Own),
     ];
 
-    /// The word of the tables and of the border: `element`, `atct`, `codata`, `sources`, `class` or
-    /// `own`.
+    /// The word of the tables and of the border: `element`, `atct`, `codata`, `sources`, `class`,
+    /// `measured` or `own`.
     #[must_use]
     pub fn as_str(self) -> &'static str {
         Self::WORDS.iter().find(|(_, kind)| *kind == self).map_or("", |(word, _)| word)

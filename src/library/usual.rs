@@ -2,6 +2,7 @@
 
 use super::known::Known;
 use super::record::Reach;
+use super::record::UncertaintyKind;
 use super::temperature::Temperature;
 use crate::reaction::Phase;
 
@@ -11,7 +12,8 @@ use crate::reaction::Phase;
 const LEAST_PRESSURE: f64 = 1e-6;
 
 /// The records of one formula that are likely at a temperature: without liquids and solids out of
-/// their range where another is in it, and without vapours of less than 0.1 Pa over what is left.
+/// their range where another is in it, without vapours of less than 0.1 Pa over what is left, and
+/// without pairs of ions in water where there is a solid.
 ///
 /// ```
 /// use shiftgauge::library::{Book, Temperature, likely};
@@ -27,6 +29,9 @@ pub fn likely(mut records: Vec<Known>, at: Temperature) -> Vec<Known> {
             let keeps_its_place = matches!(record.phase, Phase::Gas | Phase::Aqueous);
             keeps_its_place || in_range(record)
         });
+    }
+    if records.iter().any(|record| record.phase == Phase::Solid) {
+        records.retain(|record| record.u_kind != UncertaintyKind::Measured);
     }
     let condensed = |record: &&Known| matches!(record.phase, Phase::Liquid | Phase::Solid);
     let lowest = records.iter().filter(condensed).map(|record| record.gibbs_over_rt(at));

@@ -105,10 +105,6 @@ ACIDS = [
     at_25("NH2COO^-.aq", "-1 NH3.aq -1 HCO3^-.aq 1 NH2COO^-.aq 1 H2O.l", 0.37, -18.0, 0.1, "edwards"),
     at_25("NH3.aq", "-1 NH3.g 1 NH3.aq", 1.778, -34.2, 0.01, "clegg"),
 ]
-
-# What the species' own records, rounded to 0.1 kJ/mol or from another series, may lead to.
-
-SERIES = "ΔfG° of this solid's family has another zero than the solubility; the solubility is what counts"
 FINE = "the tables have a well-crystallised solid, the solubility is of what precipitates"
 
 MINERALS = [
@@ -117,15 +113,17 @@ MINERALS = [
     fit("CaCO3.s.aragonite", "-1 CaCO3.s.aragonite 1 Ca^2+.aq 1 CO3^2-.aq",
         (-171.9773, -0.077993, 2903.293, 71.595), **WARM, u=0.01, source="plummer"),
     at_25("CaMg(CO3)2.s", "-1 CaMg(CO3)2.s 1 Ca^2+.aq 1 Mg^2+.aq 2 CO3^2-.aq", -17.09, -39.5, 0.2,
-          "nordstrom", apart=SERIES),
+          "nordstrom"),
     fit("SrCO3.s", "-1 SrCO3.s 1 Sr^2+.aq 1 CO3^2-.aq", (155.0305, 0, -7239.594, -56.58638), **WARM,
         u=0.01, source="busenberg"),
     fit("BaCO3.s", "-1 BaCO3.s 1 Ba^2+.aq 1 CO3^2-.aq", (607.642, 0.121098, -20011.25, -236.4948), **WARM,
         u=0.01, source="busenberg"),
-    at_25("FeCO3.s", "-1 FeCO3.s 1 Fe^2+.aq 1 CO3^2-.aq", -10.89, -10.4, 0.1, "nordstrom", apart=SERIES),
-    at_25("MnCO3.s", "-1 MnCO3.s 1 Mn^2+.aq 1 CO3^2-.aq", -11.13, -6.0, 0.1, "nordstrom", apart=SERIES),
-    at_25("PbCO3.s", "-1 PbCO3.s 1 Pb^2+.aq 1 CO3^2-.aq", -13.13, 20.3, 0.1, "nordstrom", apart=SERIES),
-    at_25("ZnCO3.s", "-1 ZnCO3.s 1 Zn^2+.aq 1 CO3^2-.aq", -10.0, -18.3, 0.1, "nordstrom", apart=SERIES),
+    at_25("FeCO3.s", "-1 FeCO3.s 1 Fe^2+.aq 1 CO3^2-.aq", -10.89, -10.4, 0.1, "nordstrom",
+          apart="iron(II) of the CRC table is known to 6 kJ/mol"),
+    at_25("MnCO3.s", "-1 MnCO3.s 1 Mn^2+.aq 1 CO3^2-.aq", -11.13, -6.0, 0.2, "nordstrom",
+          apart="measured values spread from -10.6 to -11.4"),
+    at_25("PbCO3.s", "-1 PbCO3.s 1 Pb^2+.aq 1 CO3^2-.aq", -13.13, 20.3, 0.1, "nordstrom"),
+    at_25("ZnCO3.s", "-1 ZnCO3.s 1 Zn^2+.aq 1 CO3^2-.aq", -10.0, -18.3, 0.3, "nordstrom"),
     fit("CaSO4·2H2O.s", "-1 CaSO4·2H2O.s 1 Ca^2+.aq 1 SO4^2-.aq 2 H2O.l", (68.2401, 0, -3221.51, -25.0627),
         **WARM, u=0.02, source="nordstrom"),
     fit("CaSO4.s.anhydrite", "-1 CaSO4.s.anhydrite 1 Ca^2+.aq 1 SO4^2-.aq",
@@ -137,24 +135,21 @@ MINERALS = [
     at_25("PbSO4.s", "-1 PbSO4.s 1 Pb^2+.aq 1 SO4^2-.aq", -7.79, 9.0, 0.05, "nordstrom"),
     fit("CaF2.s", "-1 CaF2.s 1 Ca^2+.aq 2 F^-.aq", (66.348, 0, -4298.2, -25.271), **WARM, u=0.1,
         source="nordstrom"),
-    fit("SiO2.s.quartz", "-1 SiO2.s.quartz -2 H2O.l 1 H4SiO4.aq", (0.41, 0, -1309), 273.15, 573.15, u=0.05,
+    fit("SiO2.s.quartz", "-1 SiO2.s.quartz -2 H2O.l 1 H4SiO4.aq", (0.41, 0, -1309), 273.15, 573.15, u=0.12,
         source="nordstrom"),
     at_25("Al(OH)3.s.gibbsite", "-1 Al(OH)3.s.gibbsite -3 H^+.aq 1 Al^3+.aq 3 H2O.l", 7.74, -105.0, 0.1,
           "palmer"),
     at_25("Ca(OH)2.s", "-1 Ca(OH)2.s -2 H^+.aq 1 Ca^2+.aq 2 H2O.l", 22.80, -128.4, 0.1, "nordstrom"),
-    at_25("Mg(OH)2.s", "-1 Mg(OH)2.s -2 H^+.aq 1 Mg^2+.aq 2 H2O.l", 16.84, -113.4, 0.1, "nordstrom",
-          apart=SERIES),
+    at_25("Mg(OH)2.s", "-1 Mg(OH)2.s -2 H^+.aq 1 Mg^2+.aq 2 H2O.l", 16.84, -113.4, 0.15, "nordstrom"),
     at_25("FeOOH.s.goethite", "-1 FeOOH.s.goethite -3 H^+.aq 1 Fe^3+.aq 2 H2O.l", -1.0, -60.6, 0.3,
-          "nordstrom", apart=SERIES),
-    at_25("Zn(OH)2.s", "-1 Zn(OH)2.s -2 H^+.aq 1 Zn^2+.aq 2 H2O.l", 11.5, -90.0, 0.2, "nist46", apart=SERIES),
+          "nordstrom",
+          apart="iron(III) of the CRC table is known to 6 kJ/mol"),
+    at_25("Zn(OH)2.s", "-1 Zn(OH)2.s -2 H^+.aq 1 Zn^2+.aq 2 H2O.l", 11.5, -90.0, 0.2, "nist46",
+          apart="measured values spread from 11.2 to 12.5 with the form of the solid"),
     at_25("Cu(OH)2.s", "-1 Cu(OH)2.s -2 H^+.aq 1 Cu^2+.aq 2 H2O.l", 8.67, -64.5, 0.2, "nist46", apart=FINE),
     at_25("Ni(OH)2.s", "-1 Ni(OH)2.s -2 H^+.aq 1 Ni^2+.aq 2 H2O.l", 10.8, -90.0, 0.3, "nist46", apart=FINE),
     at_25("Fe(OH)3.s", "-1 Fe(OH)3.s -3 H^+.aq 1 Fe^3+.aq 3 H2O.l", 4.891, -70.0, 0.5, "nordstrom",
           apart=FINE),
-    at_25("Ca5(PO4)3OH.s", "-1 Ca5(PO4)3OH.s -4 H^+.aq 5 Ca^2+.aq 3 HPO4^2-.aq 1 H2O.l", -3.421, -151.3, 0.5,
-          "nordstrom", apart=SERIES),
-    at_25("Ca5(PO4)3F.s", "-1 Ca5(PO4)3F.s -3 H^+.aq 5 Ca^2+.aq 3 HPO4^2-.aq 1 F^-.aq", -17.6, -84.0, 0.5,
-          "nordstrom", apart=SERIES),
     at_25("CaHPO4·2H2O.s", "-1 CaHPO4·2H2O.s 1 Ca^2+.aq 1 HPO4^2-.aq 2 H2O.l", -6.59, 6.2, 0.05, "gregory"),
     at_25("AgCl.s", "-1 AgCl.s 1 Ag^+.aq 1 Cl^-.aq", -9.75, 65.5, 0.01, "nist46"),
     at_25("AgBr.s", "-1 AgBr.s 1 Ag^+.aq 1 Br^-.aq", -12.28, 84.4, 0.02, "nist46"),
@@ -166,11 +161,8 @@ MINERALS = [
     at_25("KCl.s", "-1 KCl.s 1 K^+.aq 1 Cl^-.aq", 0.90, 17.2, 0.02, "nist46"),
     at_25("Na2SO4·10H2O.s", "-1 Na2SO4·10H2O.s 2 Na^+.aq 1 SO4^2-.aq 10 H2O.l", -1.114, 79.4, 0.05,
           "nordstrom", high=305.5),
-    at_25("FeS.s.troilite", "-1 FeS.s.troilite -1 H^+.aq 1 Fe^2+.aq 1 HS^-.aq", -3.915, -20.0, 0.3,
-          "nordstrom", apart=SERIES),
     at_25("ZnS.s.sphalerite", "-1 ZnS.s.sphalerite -1 H^+.aq 1 Zn^2+.aq 1 HS^-.aq", -11.618, 34.5, 0.3,
-          "nordstrom", apart=SERIES),
-    at_25("PbS.s", "-1 PbS.s -1 H^+.aq 1 Pb^2+.aq 1 HS^-.aq", -12.78, 81.2, 0.3, "nordstrom", apart=SERIES),
+          "nordstrom"),
 ]
 
 COMPLEXES = [
