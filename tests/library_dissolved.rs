@@ -18,11 +18,10 @@ fn equilibria_in_water_agree_with_those_measured() {
         let alone = Combination::of_species(tied.terms()).unwrap();
         let [t, value, tolerance] = [1, 2, 3].map(|column| row[column].parse::<f64>().unwrap());
         assert!(row[4].len() > 3 && row[5].len() > 5, "{} has no reason or source", row[0]);
-        let within =
-            row[4].split_once("measured within ").map_or(tolerance, |(_, text)| {
-                let figure = text.split([':', ' ']).next().unwrap();
-                figure.parse().unwrap_or_else(|_| panic!("{text} is no width"))
-            });
+        let within = row[4].split_once("measured within ").map_or(tolerance, |(_, text)| {
+            let figure = text.split([':', ' ']).next().unwrap();
+            figure.parse().unwrap_or_else(|_| panic!("{text} is no width"))
+        });
         let is_known_alone = !row[4].starts_with("measured");
         let log10 = |reaction: &Combination| reaction.ln_k(kelvin(t)) / LN_10;
         let u = tied.u_gibbs_j_per_mol() / (GAS_CONSTANT_J_PER_MOL_K * t * LN_10);

@@ -28,6 +28,7 @@ mod laws_solution;
 mod library;
 mod library_constants;
 mod library_dissolved;
+mod library_proof;
 mod liquids;
 mod mistakes;
 mod mixtures;
