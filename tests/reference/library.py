@@ -73,6 +73,8 @@ def uncertainty(species, made):
         return 0.0, "element"
     h, s = made["h"], made["s"]
     better = published.atct(species.cas, species.phase)
+    if "ATcT" in species.outliers:
+        better = None
     others = [row for row in second_figures(species) if row[0] not in species.outliers]
     half_s = max([abs(s - s2) / 2 for _, _, s2 in others if s2] + [0.0])
     of_entropy = T0 * half_s / 1000

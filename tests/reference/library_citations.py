@@ -69,6 +69,8 @@ SOURCES = {
     "memory.",
     "gregory": "Gregory, Moreno and Brown, Journal of Research of the National Bureau of Standards 74A (1970) "
     "461: brushite. Recalled from memory.",
+    "parker": "Parker and Khodakovskii, Journal of Physical and Chemical Reference Data 24 (1995) 1699: iron "
+    "ions. Recalled from memory.",
     "kopp": "Kopp's rule: Cp of a solid as the sum of its elements' contributions, as in Perry's Chemical "
     "Engineers' Handbook; within 20 %, used over a few kelvin only. From memory.",
     "majzlan": "Majzlan, Navrotsky and Schwertmann, Geochimica et Cosmochimica Acta 68 (2004) 1049, and "
@@ -92,5 +94,6 @@ SOURCES = {
     "busenberg": "Busenberg, Plummer and Parker, Geochimica et Cosmochimica Acta 48 (1984) 2021, and "
     "Busenberg and Plummer, 50 (1986) 2225: log Ksp of strontianite -9.271 and witherite -8.562, -1.67 "
     "and 2.94 kJ/mol. Recalled from memory.",
-    "handbook": "Common practice: Cp of liquid sulfur trioxide is near 258 J/(mol K). From memory.",
+    "handbook": "Common practice: Cp of liquid sulfur trioxide is near 258, of ammonia 77, of sulfur dioxide 87, of "
+    "chlorine 67 J/(mol K). From memory.",
 }

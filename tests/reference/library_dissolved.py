@@ -7,7 +7,8 @@ the hydrogen that balances its charge.
 How a species gets its figures:
 ("codata", H, uH, S, uS)  key values with their 95 % half-widths, recalled from memory
 ("ion",)                  ΔfG° and S° of the CRC table of aqueous ions; ΔfH° follows from them
-("recalled", G, S)        ΔfG° and S° of the NBS tables, recalled from memory; ΔfH° follows
+("recalled", G, S)        ΔfG° and S° of the NBS tables, or of the source named after them, recalled
+                          from memory; ΔfH° follows
 ("henry", gas)            a gas of the library and Henry's constant of Sander's compilation
 ("formed", parts, log10 K, ΔrH)  species of the library and a measured equilibrium that forms it
                           from them, recalled from memory
@@ -44,8 +45,10 @@ DISSOLVED = [
     ion("Sr^2+", "strontium ion", "22537-39-9", floor=1.0),
     ion("Ba^2+", "barium ion", "22541-12-4", floor=1.0),
     ion("Mn^2+", "manganese(II) ion", "16397-91-4", floor=1.0),
-    ion("Fe^2+", "iron(II) ion;ferrous ion", "15438-31-0", floor=6.0),
-    ion("Fe^3+", "iron(III) ion;ferric ion", "20074-52-6", floor=6.0),
+    ion("Fe^2+", "iron(II) ion;ferrous ion", "15438-31-0", ("recalled", -90.53, -101.6, "parker"),
+        floor=0.5, apart="the CRC table keeps the older iron, 11.6 kJ/mol higher"),
+    ion("Fe^3+", "iron(III) ion;ferric ion", "20074-52-6", ("recalled", -16.28, -278.4, "parker"),
+        floor=1.0, apart="the CRC table keeps the older iron, 11.6 kJ/mol higher"),
     ion("Ni^2+", "nickel(II) ion", "14701-22-5", floor=2.0),
     ion("Cu^2+", "copper(II) ion;cupric ion", "15158-11-9", ("codata", 64.9, 1.0, -98.0, 4.0),
         apart="CODATA's S° is 1.6 J/(mol K) higher, inside its own 4"),
@@ -124,7 +127,7 @@ CP_RECALLED = {
 KNOWN_RANGE_K, BLIND_RANGE_K = (273.15, 373.15), (288.15, 308.15)
 
 # ΔfG° of a key value may leave the CRC table's by this, kJ/mol, without and with a reason.
-GIBBS_LIMIT, GIBBS_LIMIT_APART = 0.8, 7.0
+GIBBS_LIMIT, GIBBS_LIMIT_APART = 0.8, 12.0
 # log10 of Henry's constant, in mol/(kg bar), may leave Sander's compilation by this. The
 # compilation has two averages a gas, one at 298.15 K and one from fits over temperature; they
 # differ from one another by up to 0.25, and the nearer one is taken.

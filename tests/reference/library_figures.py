@@ -146,9 +146,22 @@ def build(species):
         pieces = liquid_pieces(cas, phase)
         sources += [from_table, "poling", pieces[0].source]
         tied = True
+    elif how[0] == "boiling":
+        # Tied below 1 bar, where the vapour is nearly ideal: its pressure and the slope of that.
+        _, ident, anchor_k, cp, low, high = how
+        vapour = next(p for p in built(ident)["pieces"] if p.high >= anchor_k)
+        lost = vaporization_enthalpy(cas, anchor_k)
+        down_cp = round(cp / R_EXACT, 6) * R_EXACT
+        pressure = log(published.antoine_pa(cas, anchor_k) / 1e5)
+        h = round(vapour.h(anchor_k) - lost + down_cp * (T0 - anchor_k) / 1000, 2)
+        s = vapour.s(anchor_k) - R_EXACT * pressure - 1000 * lost / anchor_k
+        s = round(s + down_cp * log(T0 / anchor_k), 2)
+        pieces = [constant_piece(low, high, cp, "handbook")]
+        sources += ["poling", "handbook"]
+        tied = True
     if species.element:
         h = 0.0
-    better = published.atct(cas, phase)
+    better = None if "ATcT" in species.outliers else published.atct(cas, phase)
     if better and not species.element and abs(better[0] - h) > ATCT_LIMIT and not tied:
         h = round(better[0], 3)
         sources.append("atct")
@@ -229,6 +242,12 @@ def gas_pieces(file):
 def vaporization(cas):
     """ΔG of vaporization at 298.15 K in kJ/mol."""
     return -R_EXACT * T0 * log(published.antoine_pa(cas, T0) / 1e5) / 1000
+
+
+def vaporization_enthalpy(cas, t):
+    """The ideal vapour's enthalpy of vaporization in kJ/mol: R T² d ln P/dT of the Antoine equation."""
+    low, high = (published.antoine_pa(cas, t + step) for step in (-0.01, 0.01))
+    return R_EXACT * t**2 * log(high / low) / 0.02 / 1000
 
 
 def boiling_k(cas):

@@ -172,8 +172,6 @@ METALS = [
     gas("TaO", "O_Ta", "tantalum monoxide", "12035-90-4", "O-017", floor=CLASSES["vapour"]),
     gas("TiO", "O_Ti", "titanium monoxide", "12137-20-1", "O-022", floor=CLASSES["vapour"]),
     gas("VO", "O_V", "vanadium monoxide", "12035-98-2", "O-026", floor=CLASSES["vapour"]),
-    gas("ZrO", "O_Zr", "zirconium monoxide", "12036-01-0", "O-028", floor=CLASSES["vapour"],
-        apart="JANAF keeps 58.6 kJ/mol"),
     gas("Pb", "Pb", "lead vapour", "", "Pb-005", floor=CLASSES["vapour"]),
     gas("Pb2", "Pb2", "dilead", "12596-92-8", "Pb-012", floor=CLASSES["vapour"]),
     gas("PbS", "Pb_S", "lead monosulfide;lead monosulphide", "1314-87-0", "Pb-011",

@@ -1,4 +1,4 @@
-"""Organic liquids, tied to their vapours by the vapour pressure at 298.15 K."""
+"""Liquids that are tied to their vapours by the vapour pressure: at 298.15 K, or below 1 bar."""
 
 from library_species import CLASSES, Species
 
@@ -85,4 +85,10 @@ LIQUIDS = [
             ("vapour", "C9H12.g.1,2,4-trimethylbenzene"), form="1,2,4-trimethylbenzene", floor=CLASSES["organic"]),
     Species("C12H26", "l", "dodecane", "112-40-3",
             ("vapour", "C12H26.g.dodecane"), form="dodecane", floor=CLASSES["organic"]),
+    Species("NH3", "l", "liquid ammonia", "7664-41-7", ("boiling", "NH3.g", 235.0, 77.0, 200.0, 320.0),
+            floor=0.3),
+    Species("SO2", "l", "liquid sulfur dioxide;liquid sulphur dioxide", "7446-09-5",
+            ("boiling", "SO2.g", 260.0, 87.0, 200.0, 320.0), floor=0.3),
+    Species("Cl2", "l", "liquid chlorine", "7782-50-5", ("boiling", "Cl2.g", 235.0, 67.0, 200.0, 320.0),
+            floor=0.3),
 ]

@@ -41,7 +41,6 @@ HYDROCARBONS = [
     organic("C5H8", "isoprene vapour;2-methyl-1,3-butadiene vapour", "78-79-5", form="isoprene"),
     organic("C4H6", "1-butyne;ethylacetylene", "107-00-6", form="1-butyne"),
     organic("C4H6", "2-butyne vapour;dimethylacetylene vapour", "503-17-3", form="2-butyne"),
-    organic("C4H4", "vinylacetylene;1-buten-3-yne", "689-97-4", form="vinylacetylene"),
     organic("C8H10", "o-xylene vapour;1,2-dimethylbenzene vapour", "95-47-6", form="o-xylene"),
     organic("C8H10", "m-xylene vapour;1,3-dimethylbenzene vapour", "108-38-3", form="m-xylene"),
     organic("C8H10", "p-xylene vapour;1,4-dimethylbenzene vapour", "106-42-3", form="p-xylene"),

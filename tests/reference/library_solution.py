@@ -67,9 +67,9 @@ def build_dissolved(species, built):
         h = g + T0 * formation_entropy(species.formula, s)
         sources = ["crc_ions"]
     elif how[0] == "recalled":
-        g, s = how[1:]
+        g, s, *named = how[1:]
         h = g + T0 * formation_entropy(species.formula, s)
-        sources = ["nbs"]
+        sources = named or ["nbs"]
     elif how[0] == "measured":
         row = next(row for row in MEASURED if row.tied == species.id)
         parts = row.stoichiometry()
