@@ -81,7 +81,12 @@ fn a_record_of_ones_own_is_not_tied_but_cancels_with_the_tables() {
         enthalpy_j_per_mol: Some(-690_000.0),
         gibbs_j_per_mol: None,
         entropy_j_per_mol_k: Some(98.0),
-        heat: vec![OwnHeat { low_k: 273.15, high_k: 373.15, terms: [0.0; 7], transition_j_per_mol: 0.0 }],
+        heat: vec![OwnHeat {
+            low_k: 273.15,
+            high_k: 373.15,
+            terms: [0.0; 7],
+            transition_j_per_mol: 0.0,
+        }],
         u_gibbs_j_per_mol: 200.0,
         source: "Ours".to_owned(),
     });

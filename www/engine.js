@@ -2,7 +2,7 @@
 
 import * as glue from './shiftgauge.js';
 
-/** @import { BalanceAnswer, Case, CheckAnswer, ConvertAnswer, Goal, Refusal, SpeciesMatch, StatedNumber, SweepAnswer, SweepRequest, TargetAnswer } from './shiftgauge.js' */
+/** @import { Asked, BalanceAnswer, Book, BookAnswer, Case, CheckAnswer, ConvertAnswer, Goal, Refusal, SheetAnswer, SpeciesMatch, StatedNumber, SweepAnswer, SweepRequest, TargetAnswer } from './shiftgauge.js' */
 
 /** @type {WebAssembly.Module | null} */
 let compiled = null;
@@ -107,38 +107,45 @@ export function balance(equation) {
 }
 
 /**
- * The phase of a species that the library has as a gas only, or never as a gas; null otherwise.
+ * The phase of a species that the library has, as far as room temperature goes, as a gas only or never as a gas;
+ * null otherwise.
  * @param {string} name
  */
 function onlyPhase(name) {
-  const phases = [...new Set(lookUp(name).species.map(({ phase }) => phase))];
+  const exact = findSpecies(name).filter(({ found_by: by, likely }) => ['formula', 'atoms'].includes(by) && likely);
+  const phases = [...new Set(exact.map(({ phase }) => phase))];
   return phases.length > 1 && phases.includes('g') ? null : phases[0] ?? null;
 }
 
 /**
- * The species of the library that a formula, a name or a CAS number stands for; where it stands for none,
- * those of the formula that is nearest.
+ * The species that a formula in any order, a name, a CAS number or the beginning of one may mean, the likeliest
+ * first; help with typing is not worth a dead page, so after a trap nothing is found.
  * @param {string} text
+ * @param {Asked | null} [asked]
  * @returns {SpeciesMatch[]}
  */
-export function findSpecies(text) {
+export function findSpecies(text, asked = null) {
   if (text.trim() === '') return [];
-  const { species, near } = lookUp(text);
-  return species.length === 0 && near !== null ? lookUp(near).species : species;
+  const found = beside(() => glue.species(text, asked));
+  return found.ok ? found.species : [];
 }
 
 /**
- * Help with typing is not worth a dead page: after a trap a new instance takes over, and nothing is found.
  * @param {string} text
+ * @param {Asked | null} asked
+ * @returns {SheetAnswer}
  */
-function lookUp(text) {
-  try {
-    return glue.species(text);
-  } catch (thrown) {
-    console.error(thrown);
-    restartEngine();
-    return { species: [], near: null };
-  }
+export function sheet(text, asked) {
+  return beside(() => glue.sheet(text, asked));
+}
+
+/**
+ * Looks a book through.
+ * @param {Book} given
+ * @returns {BookAnswer}
+ */
+export function book(given) {
+  return beside(() => glue.book(given));
 }
 
 /** The program's and the tables' versions as one line. */

@@ -12,6 +12,8 @@ import { keepOffline } from './offline/keep.js';
 import { render } from './render.js';
 import { caseFromText, caseToText, createState, withoutField } from './state.js';
 import { attachAll } from './units.js';
+import { connect as connectSheet } from './species-sheet.js';
+import * as book from './views/book.js';
 import * as cases from './views/cases.js';
 import * as certainty from './views/certainty.js';
 import * as charts from './views/charts.js';
@@ -28,7 +30,9 @@ import * as heading from './views/heading.js';
 import * as kept from './views/kept.js';
 import * as keys from './views/keys.js';
 import * as ledger from './views/ledger.js';
+import * as library from './views/library.js';
 import * as notes from './views/notes.js';
+import * as own from './views/own.js';
 import * as paste from './views/paste.js';
 import * as problems from './views/problems.js';
 import * as reaction from './views/reaction.js';
@@ -48,7 +52,7 @@ import * as working from './views/working.js';
 /** @import { State } from './state.js' */
 
 const inputs = [heading, reaction, constant, conditions, gas, solids, solution, feed];
-const views = [...inputs, verdict, valley, certainty, ledger, nudges, extras, charts, target, compare, convert, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip];
+const views = [...inputs, verdict, valley, certainty, ledger, nudges, extras, charts, target, compare, convert, sources, notes, working, problems, spoken, cases, kept, keys, undo, record, strip, library, book];
 const notice = byId('notice', HTMLElement);
 foldWhereNarrow();
 
@@ -202,6 +206,9 @@ async function start() {
   problems.connect({ takeOut });
   compare.connect({ pin: (pinned) => state.set({ pinned }) });
   kept.connect({ current: readForm, openText: (text, said) => cases.openText(text, said, actions) });
+  book.connect({ current: readForm, change, edit: own.edit });
+  own.connect({ keep: book.keepSpecies });
+  connectSheet({ useOwn: own.startFrom });
   paste.connect({ current: readForm, change: (question, said) => { change(question); tell(said); } });
   undo.connect({
     ...memory.history,

@@ -37,7 +37,7 @@ function reach(report) {
  * @param {Extract<SweepAnswer, { ok: true }>} answer
  * @returns {{ scene: PlotScene, told: Told } | null}
  */
-export function constantScene({ report, answered }, { sweep: { x, lines, data_range_k: data } }) {
+export function constantScene({ report, answered }, { sweep: { x, lines, data_range_k: data, u_ln_k: u } }) {
   const reaction = report.reactions[0];
   if (reaction === undefined) return null;
   const unit = temperatureUnit(answered.temperature);
@@ -50,6 +50,10 @@ export function constantScene({ report, answered }, { sweep: { x, lines, data_ra
       x: xs,
       lines: [
         { name: 'ln K', y: lines[0]?.y ?? [], broken: true },
+        ...[-2, 2].filter(() => u.some((one) => one !== null && one > 0)).map((times) => ({
+          name: times > 0 ? '95 % band' : '', thin: true,
+          y: xs.map((_, at) => (u[at] === null || u[at] === undefined || lines[0]?.y[at] === null ? null : (lines[0]?.y[at] ?? 0) + times * u[at])),
+        })),
         ...(level === null ? [] : [{ name: 'ln Q now', y: xs.map(() => level), thin: true }]),
       ],
       labels: { x: `1000${NO_BREAK}K/T`, y: 'ln K' },
@@ -66,6 +70,7 @@ export function constantScene({ report, answered }, { sweep: { x, lines, data_ra
         description: [
           'ln K against 1/T: the slope is −ΔH°/R.',
           level === null ? '' : tStar === null ? 'K does not meet Q here.' : `K meets Q at T* = ${temperature(tStar, unit, 1)}.`,
+          u.some((one) => one !== null) ? 'The thin lines beside it are its interval of 95 %.' : '',
           points.length === 0 ? '' : 'The small rings are the points that K comes from.',
           beyond ? 'Shaded and dashed: outside the range of the data.' : '',
         ].filter(Boolean).join(' '),

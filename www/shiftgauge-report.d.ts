@@ -2,6 +2,8 @@
  * The report of the engine: what `check` gives. Every number is SI and finite; the unit is in the name.
  */
 
+import type { MeasuredEquilibrium, UncertaintyKind } from './shiftgauge-library.js';
+
 export interface Term {
   species: string;
   phase: string | null;
@@ -21,8 +23,10 @@ export interface SourceReport {
   text: string;
   range_k: [number, number] | null;
   extrapolated_by_k: number | null;
-  /** One for each species that the library gave. */
+  /** One for each record of the library that K rests on. */
   records: RecordReport[];
+  /** The measured equilibria of the library that K rests on, and how many times each. */
+  measured: (MeasuredEquilibrium & { times: number })[];
   /** The straight line of ln K against 1/T, where K is from points. */
   fit: {
     points: { temperature_k: number; ln_k: number; residual: number }[];
@@ -35,9 +39,13 @@ export interface SourceReport {
 export interface RecordReport {
   species: string;
   name: string;
+  /** How many times it enters K. */
+  nu: number;
   sources: string[];
   range_k: [number, number];
   u_gibbs_j_per_mol: number;
+  u_from: UncertaintyKind;
+  own: boolean;
 }
 
 /** An interval of 95 %; an end that is null is open. */

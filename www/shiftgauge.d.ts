@@ -4,8 +4,10 @@
  */
 
 import type { Term, Form, ReactionReport, Outcome, Report } from './shiftgauge-report.js';
+import type { Asked, Book, BookAnswer, SheetAnswer, SpeciesAnswer } from './shiftgauge-library.js';
 
 export type * from './shiftgauge-report.js';
+export type * from './shiftgauge-library.js';
 
 /** What a value of K is given as. */
 export type ConstantKind = 'K' | 'Kp' | 'Kc' | 'Kx' | 'log10 K' | 'ln K' | 'pK' | 'gibbs';
@@ -83,6 +85,8 @@ export interface Case {
   band: string;
   reading: Reading;
   feed: Feed | null;
+  /** The user's own species and constants that this case may use. */
+  book?: Book | null;
   [other: string]: unknown;
 }
 
@@ -118,26 +122,6 @@ export interface ConstantReport {
 }
 export type ConstantAnswer = { ok: true; constant: ConstantReport } | Refusal;
 
-export interface SpeciesMatch {
-  species: string;
-  formula: string;
-  phase: 'g' | 'l' | 's' | 'aq';
-  form: string | null;
-  names: string[];
-  cas: string;
-  range_k: [number, number];
-  sources: string[];
-  enthalpy_of_formation_j_per_mol: number;
-  entropy_j_per_mol_k: number;
-  u_gibbs_j_per_mol: number;
-}
-export interface SpeciesAnswer {
-  ok: true;
-  species: SpeciesMatch[];
-  /** A formula of the library that is near, where nothing matches. */
-  near: string | null;
-}
-
 export type Knob = 'temperature' | 'pressure' | 'volume' | `amount of ${string}`;
 
 /** A number of a state of rest; conversion, fraction and amount are of a species. */
@@ -161,6 +145,8 @@ export type SweepAnswer =
         lines: { name: string; value_si: number | null; y: (number | null)[] }[];
         show: Wanted;
         data_range_k: [number, number] | null;
+      /** u(ln K) at each x, where ln K is shown along the temperature. */
+      u_ln_k: (number | null)[];
         now: { x: number | null; y: number | null };
       };
     }
@@ -261,7 +247,9 @@ export function constant(reaction: string, temperature: string): ConstantAnswer;
 export function sweep(question: Case, request: SweepRequest, options: Options): SweepAnswer;
 export function target(question: Case, goal: Goal, options: Options): TargetAnswer;
 export function convert(number: StatedNumber): ConvertAnswer;
-export function species(text: string): SpeciesAnswer;
+export function species(text: string, asked: Asked | null): SpeciesAnswer | Refusal;
+export function sheet(species: string, asked: Asked | null): SheetAnswer;
+export function book(book: Book): BookAnswer;
 export function affinities(problem: BareProblem): AffinitiesAnswer;
 export function rest(problem: BareProblem): RestAnswer;
 export function version(): Version;

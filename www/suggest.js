@@ -46,7 +46,8 @@ export function suggest(field, picked = () => {}) {
     const { text } = word();
     const found = text.length < least ? [] : findSpecies(text);
     matches = found.filter((match) => inEquation || phases.includes(match.phase)).slice(0, MOST);
-    const alreadyThere = matches.length === 1 && [matches[0]?.formula, matches[0]?.species].includes(text);
+    const whole = matches.filter(({ found_by: by }) => by === 'formula');
+    const alreadyThere = whole.length === 1 && matches.length === 1;
     close();
     if (matches.length === 0 || alreadyThere) return;
     list.replaceChildren(...matches.map(option));
@@ -102,8 +103,8 @@ export function suggest(field, picked = () => {}) {
     close();
     // A name that means one species alone is written as its formula.
     const typed = field.value.trim();
-    const [only, ...others] = inEquation ? [] : findSpecies(typed).filter(({ phase }) => phases.includes(phase));
-    if (only !== undefined && others.length === 0 && isNamed(only, typed)) take(only);
+    const [only, ...others] = inEquation ? [] : findSpecies(typed).filter((match) => phases.includes(match.phase) && match.found_by === 'name');
+    if (only !== undefined && others.length === 0) take(only);
   });
   field.addEventListener('keydown', (event) => {
     if (event.key === 'ArrowDown' && list.hidden) offer(1);
@@ -120,23 +121,17 @@ export function suggest(field, picked = () => {}) {
 }
 
 /**
- * @param {SpeciesMatch} match
- * @param {string} text
- */
-const isNamed = ({ names, cas }, text) => cas === text || names.some((name) => name.toLowerCase() === text.toLowerCase());
-
-/**
  * How a block names a species: without the phase, which the block says, but with the name of its form.
  * @param {SpeciesMatch} match
  */
 const blockName = ({ species, formula: bare, form }) => (form === null ? bare : species);
 
 /**
- * In an equation the phase is written where the library has the formula in more than one.
+ * In an equation the phase is written where the library has the formula in more than one that is likely.
  * @param {SpeciesMatch} match
  * @param {readonly SpeciesMatch[]} all
  */
 function equationName(match, all) {
-  const several = [...all, ...findSpecies(match.formula)].some((other) => other.formula === match.formula && other.species !== match.species);
-  return several ? match.species : match.formula;
+  const several = [...all, ...findSpecies(match.formula)].some((other) => other.formula === match.formula && other.species !== match.species && other.likely);
+  return several || !match.likely ? match.species : match.formula;
 }

@@ -6,7 +6,7 @@ use super::node::{Node, Reader};
 use super::question::KSource;
 use super::read_book::{BOOK_FORMAT, read_book};
 use super::refusal::Answer;
-use super::species::{SpeciesMatch, species_match};
+use super::species::{Asked, SpeciesMatch, species_match};
 use super::value::Value;
 use crate::library::{Found, FoundBy};
 use crate::problem::{CaseCode, Outcome};
@@ -55,7 +55,7 @@ fn look_through(value: &Value) -> Outcome<BookAnswer> {
     Ok(BookAnswer {
         ok: true,
         format: BOOK_FORMAT,
-        species: own.map(|record| species_match(&found(record), None)).collect(),
+        species: own.map(|record| species_match(&found(record), &Asked::default())).collect(),
         constants: book
             .constants
             .into_iter()

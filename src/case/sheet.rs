@@ -122,7 +122,7 @@ fn sheet_of(species: &str, asked: &Value) -> Outcome<SheetReport> {
     let formula = parse_formula(&record.formula).ok();
     let standard = record.properties(Temperature::standard());
     Ok(SheetReport {
-        species: species_match(&found, asked.temperature),
+        species: species_match(&found, &asked),
         molar_mass_kg_per_mol: formula.as_ref().and_then(|known| known.molar_mass_kg_per_mol()),
         gibbs_of_formation_j_per_mol: record.formation_gibbs_j_per_mol(),
         heat_capacity_j_per_mol_k: standard.heat_capacity_j_per_mol_k,

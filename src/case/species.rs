@@ -9,7 +9,7 @@ use super::read_book::read_book;
 use super::refusal::Answer;
 use super::value::Value;
 use crate::library::{
-    Book, Found, FoundBy, Known, Measured, Reach, Temperature, citation, measured,
+    Book, Found, FoundBy, Known, Measured, Reach, Temperature, citation, likely, measured,
 };
 use crate::problem::{CaseCode, Outcome, Problem};
 use crate::quantity::Measure;
@@ -43,6 +43,9 @@ pub struct SpeciesMatch {
     pub found_by: &'static str,
     /// Whether it is one of the user's own.
     pub own: bool,
+    /// Whether its phase is likely at the temperature asked about, or at 25 °C: no melt where the solid
+    /// is, no vapour below 0.1 Pa.
+    pub likely: bool,
     /// The range of temperature.
     pub range_k: [f64; 2],
     /// How far the temperature asked about lies outside the range; null inside, or where none is asked
@@ -94,6 +97,7 @@ impl MeasuredReport {
 const OFFERED_AT_MOST: usize = 24;
 
 /// What is asked about beside the text: a temperature, a book.
+#[derive(Default)]
 pub(super) struct Asked {
     pub temperature: Option<Temperature>,
     pub book: Book,
@@ -131,7 +135,7 @@ pub fn species(text: &str, asked: &Value) -> Answer<SpeciesAnswer> {
         SpeciesAnswer {
             ok: true,
             near: near.map(|first| first.record.formula.clone().into_owned()),
-            species: found.iter().map(|one| species_match(one, asked.temperature)).collect(),
+            species: found.iter().map(|one| species_match(one, &asked)).collect(),
         }
     });
     answer.into()
@@ -148,8 +152,10 @@ fn found_by(by: FoundBy) -> &'static str {
 }
 
 /// A record as the border carries it.
-pub(super) fn species_match(found: &Found, temperature: Option<Temperature>) -> SpeciesMatch {
-    let record = &found.record;
+pub(super) fn species_match(found: &Found, asked: &Asked) -> SpeciesMatch {
+    let (record, temperature) = (&found.record, asked.temperature);
+    let all = asked.book.find(&record.formula, None, record.form.as_deref());
+    let likely_at = temperature.unwrap_or(Temperature::standard());
     let standard = record.properties(Temperature::standard());
     let outside = temperature.map(|at| record.reach(at));
     SpeciesMatch {
@@ -161,6 +167,7 @@ pub(super) fn species_match(found: &Found, temperature: Option<Temperature>) -> 
         cas: record.cas.clone(),
         found_by: found_by(found.by),
         own: record.is_own(),
+        likely: likely(all, likely_at).contains(record),
         range_k: record.range_k.into(),
         outside_by_k: match outside {
             Some(Reach::Extrapolated { by_k }) => Some(by_k),

@@ -7,6 +7,7 @@ use super::node::{Node, Reader};
 use super::refusal::Answer;
 use super::value::Value;
 use crate::advice::{self, Knob, Knobs, SWEEP_LINES_MAX, SWEEP_POINTS_MAX, SweepRequest};
+use crate::library::Temperature;
 use crate::problem::{CaseCode, Outcome, Problem};
 
 /// The answer of `sweep`.
@@ -28,6 +29,9 @@ pub struct SweepReport {
     pub show: ShowReport,
     /// The temperatures that the data of K cover, where they have a range.
     pub data_range_k: Option<[f64; 2]>,
+    /// The standard uncertainty of ln K at each x, where ln K is shown along the temperature; null where
+    /// none is known, and empty for what else is shown.
+    pub u_ln_k: Vec<Option<f64>>,
     /// Where the plant stands: its setting of x, and the number at rest there.
     pub now: NowReport,
 }
@@ -125,7 +129,11 @@ fn swept(case: &Value, request: &Value) -> Outcome<SweepReport> {
         value_si: value(i),
         y: told(line),
     });
+    let constant = &asked.found.constant;
+    let u_of = |t: &f64| Temperature::new(*t).ok().and_then(|at| constant.at(at).u_ln_k);
+    let shows_k = show.what == "ln_k" && knob.name == "temperature";
     Ok(SweepReport {
+        u_ln_k: if shows_k { drawn.x.iter().map(u_of).collect() } else { Vec::new() },
         lines: drawn_lines.collect(),
         x: AxisReport {
             unit: knob.unit(),

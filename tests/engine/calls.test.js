@@ -68,10 +68,37 @@ test('balance, constant, species and version answer as the contract says', () =>
   // log10 K of SO2 + 1/2 O2 = SO3 at 700 K is 2.456 in the NIST-JANAF tables, 4th edition.
   assert.ok(Math.abs(constant.constant.log10_k - 2 * 2.456) < 0.02);
 
-  const found = /** @type {any} */ (engine.species('carbon monoxide'));
-  assert.deepEqual(found.species.map((/** @type {any} */ one) => one.species), ['CO(g)']);
-  assert.equal(/** @type {any} */ (engine.species('C0')).species.length, 0);
+  const found = /** @type {any} */ (engine.species('carbon monoxide', null));
+  assert.equal(found.species[0].species, 'CO(g)');
+  assert.equal(found.species[0].found_by, 'name');
+  assertPlain(found, 'species');
+  assert.equal(/** @type {any} */ (engine.species('C0', null)).species.length, 0);
+  const cold = /** @type {any} */ (engine.species('SO2(g)', { temperature: '-40 °C' }));
+  assert.ok(Math.abs(cold.species[0].outside_by_k - 65) < 1e-9);
   assertPlain(engine.version(), 'version');
+});
+
+test('a species has a sheet, and a book of one\'s own stands before the library', () => {
+  const plain = /** @type {any} */ (engine.sheet('quartz', { temperature: '600 °C' }));
+  assertPlain(plain, 'sheet');
+  assert.equal(plain.sheet.species, 'SiO2(s, quartz)');
+  // Alpha to beta quartz at 847 K, 728 J/mol in the NIST-JANAF tables, 4th edition.
+  assert.equal(plain.sheet.transitions.length, 1);
+  assert.ok(Math.abs(plain.sheet.transitions[0].enthalpy_j_per_mol - 728) < 1);
+  assert.equal(plain.sheet.curve.gibbs_j_per_mol.length, plain.sheet.curve.temperature_k.length);
+
+  const book = { species: [{
+    species: 'SO3(g)', source: 'Invented works', enthalpy: '-395 ± 1 kJ/mol', entropy: '257 J/(mol K)',
+    heat_capacity: [{ from: '298.15 K', to: '1000 K', terms: { 1: '60' } }],
+  }] };
+  const looked = engine.book(book);
+  assert.ok(looked.ok);
+  assert.equal(looked.species[0]?.u_gibbs_j_per_mol, 500);
+  const own = /** @type {any} */ (engine.sheet('SO3(g)', { book }));
+  assert.equal(own.sheet.own, true);
+  assert.ok(Math.abs(own.sheet.instead_of.enthalpy_j_per_mol + 765) < 100);
+  const refused = engine.book({ species: [{ species: 'SO3(g)', source: '', heat_capacity: [] }] });
+  assert.equal(refused.ok, false);
 });
 
 /** @import { BareProblem } from '../../dist/shiftgauge.js' */

@@ -7,9 +7,12 @@ import { ENGINE_BYTES } from './engine.js';
 /**
  * A little above what the engine takes now; it may only be lowered, or raised with a reason. Raised from
  * 235,000 when tolerances, feeds, liquids, solutions, nudges, sweeps and targets came in (about 75 kB of
- * code and sentences) and the library grew from 58 to 254 species (19 kB).
+ * code and sentences) and the library grew from 58 to 254 species (19 kB); from 335,000 when it grew to
+ * more than 1,400 species with measured equilibria (145 kB), and with books, sheets and the search (25 kB).
  */
-const CEILING_BYTES = 335_000;
+const CEILING_BYTES = 515_000;
+/** What the whole library may take of it. */
+const TABLES_BYTES = 200_000;
 
 const TABLES = new URL('../../src/library/tables/', import.meta.url);
 
@@ -19,5 +22,6 @@ test('the engine does not grow on its way over the network', async (t) => {
   const size = gzippedLength(ENGINE_BYTES);
   const ofTables = gzippedLength(Buffer.concat(tables));
   t.diagnostic(`engine: ${ENGINE_BYTES.length} bytes, ${size} gzipped, of it about ${ofTables} tables of species`);
-  assert.ok(ofTables > 0 && size <= CEILING_BYTES, `${size} bytes gzipped, ceiling ${CEILING_BYTES}`);
+  assert.ok(ofTables > 0 && ofTables <= TABLES_BYTES, `${ofTables} bytes of tables gzipped, at most ${TABLES_BYTES}`);
+  assert.ok(size <= CEILING_BYTES, `${size} bytes gzipped, ceiling ${CEILING_BYTES}`);
 });

@@ -16,7 +16,7 @@ if (!source || !folder) throw new Error('this script is started by Trunk: run ./
 const page = join(folder, 'index.html');
 await optimise(folder);
 await addReset(folder);
-for (const types of ['shiftgauge.d.ts', 'shiftgauge-report.d.ts']) await copyFile(join(source, types), join(folder, types));
+for (const types of ['shiftgauge.d.ts', 'shiftgauge-report.d.ts', 'shiftgauge-library.d.ts']) await copyFile(join(source, types), join(folder, types));
 await copyOffline(source, folder);
 await bundle(source, folder);
 await writeFile(page, servedPage(await withParts(await readFile(page, 'utf8'), source)));

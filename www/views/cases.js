@@ -1,6 +1,7 @@
 /** Cases opened and sent: examples, files, links, and the case before this one. */
 
-import { byId, create } from '../dom.js';
+import { byId } from '../dom.js';
+import { saveText } from '../files.js';
 import { EXAMPLES } from '../examples.js';
 import { hashOf } from '../link.js';
 import { keep, recall } from '../recall.js';
@@ -103,10 +104,7 @@ export function openText(text, said, actions) {
 function save({ current, tell }) {
   const question = current();
   const name = `${question.title.toLowerCase().normalize('NFKD').replace(/[^a-z0-9]+/g, '-').replace(/^-+|-+$/g, '').slice(0, 60) || 'case'}.json`;
-  const address = URL.createObjectURL(new Blob([caseToText(question)], { type: 'application/json' }));
-  const anchor = create('a', { href: address, download: name });
-  anchor.click();
-  window.setTimeout(() => URL.revokeObjectURL(address), 10_000);
+  saveText(name, caseToText(question));
   tell(`Saved as ${name}.`);
 }
 

@@ -5,6 +5,9 @@ import { unfold } from '../folds.js';
 import { linesOfPoints, pointsOfLines } from '../points.js';
 import { asText, fieldsOf, isRecord } from '../state.js';
 
+/** Sources that need nothing else than their name. */
+const BARE = ['library', 'species', 'book'];
+
 /** @import { Case, ConstantKind, ConstantSource } from '../shiftgauge.js' */
 
 /** @param {string} name */
@@ -75,7 +78,7 @@ export function read(question) {
 function readConstant() {
   const source = from.value;
   /** @type {ConstantSource} */
-  const constant = { ...(source === 'library' ? {} : others), from: source };
+  const constant = { ...(BARE.includes(source) ? {} : others), from: source };
   if (source === 'value' || source === 'points') {
     constant.kind = /** @type {ConstantKind} */ (kind.value);
     if (kind.value === 'Kp') constant.pressure_unit = unit.value;
@@ -93,7 +96,7 @@ function readConstant() {
     addGiven(constant, { tolerance });
   }
   if (source === 'reading') addGiven(constant, { enthalpy: extras.enthalpy });
-  addGiven(constant, source === 'library' ? { approach } : shared);
+  addGiven(constant, BARE.includes(source) ? { approach } : shared);
   return constant;
 }
 

@@ -23,7 +23,7 @@ export function render({ report }) {
     ...(thermal === null ? [] : [figure('ΔH° of the reaction', molarEnergy(thermal))]),
   );
   source.textContent = sourceText(reaction);
-  showRecords(reaction.source.records);
+  showRecords(reaction.source.records, reaction.source.measured);
 }
 
 /** @param {ReactionReport} reaction */
@@ -59,12 +59,19 @@ function sourceText({ source: { text, range_k: range, extrapolated_by_k: beyond 
   return `${text}${covered}.${warned}`;
 }
 
-/** @param {readonly RecordReport[]} given */
-function showRecords(given) {
-  records.hidden = given.length === 0;
-  const texts = [...new Set(given.flatMap(({ sources }) => sources))];
-  rows.replaceChildren(...given.map(({ species, name, range_k: [low, high], u_gibbs_j_per_mol: u, sources }) => create('tr', {},
-    create('th', { scope: 'row' }, `${speciesName(species)}, ${name}`),
+/**
+ * @param {readonly RecordReport[]} given
+ * @param {ReactionReport['source']['measured']} measured
+ */
+function showRecords(given, measured) {
+  records.hidden = given.length + measured.length === 0;
+  const texts = [...new Set([...measured.map(({ source: text }) => text), ...given.flatMap(({ sources }) => sources)])];
+  rows.replaceChildren(...measured.map(({ equation, times, range_k: [low, high], log10_k: value, u_log10_k: u, source: text }) => create('tr', {},
+    create('th', { scope: 'row', class: 'wraps' }, `${times === 1 ? '' : `${significant(times, 4)} × `}${equation}, measured: log10 K ${fixed(value, 3)} at 25 °C`),
+    create('td', {}, `${fixed(low, 0)} – ${fixed(high, 0)}${NO_BREAK}K`),
+    create('td', {}, `${significant(u, 2)} in log10 K`),
+    create('td', {}, String(texts.indexOf(text) + 1)))), ...given.map(({ species, name, own, range_k: [low, high], u_gibbs_j_per_mol: u, sources }) => create('tr', {},
+    create('th', { scope: 'row' }, `${speciesName(species)}, ${name}${own ? ' (my own)' : ''}`),
     create('td', {}, `${fixed(low, 0)} – ${fixed(high, 0)}${NO_BREAK}K`),
     create('td', {}, `${significant(u / 1000, 2)}${NO_BREAK}kJ/mol`),
     create('td', {}, sources.map((text) => String(texts.indexOf(text) + 1)).join(', ')))));
