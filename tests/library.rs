@@ -39,6 +39,10 @@ fn every_line_of_the_species_table_is_a_record_with_a_known_source() {
         assert!(!record.sources.is_empty(), "{}", record.id);
         assert_eq!(record.citations().count(), record.sources.len(), "{}", record.id);
         assert!(!record.names[0].is_empty(), "{}", record.id);
+        let formula = shiftgauge::reaction::parse_formula(&record.formula).unwrap();
+        let line =
+            table.lines().find(|line| line.starts_with(&format!("{}\t", record.id))).unwrap();
+        assert_eq!(line.split('\t').nth(6), Some(formula.hill().as_str()), "{}", record.id);
         let form = record.form.as_ref().map_or(String::new(), |form| format!(".{form}"));
         let id = format!("{}.{}{form}", record.formula, record.phase.symbol());
         assert_eq!(record.id, id);

@@ -116,6 +116,7 @@ export function plotFigure(root) {
     clear(why) {
       shown = null;
       plot = null;
+      moved = false;
       root.classList.add('is-empty');
       drawing.replaceChildren();
       table.replaceChildren();

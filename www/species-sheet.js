@@ -1,15 +1,15 @@
 /** The sheet of one species: figures, range, uncertainty, sources, and its curves against temperature. */
 
-import { drawPlot } from './chart/plot.js';
 import { byId, create } from './dom.js';
 import { sheet as askSheet } from './engine.js';
-import { NO_BREAK, fixed, molarEnergy, significant, speciesName } from './format.js';
+import { NO_BREAK, fixed, significant, speciesName } from './format.js';
+import { plotFigure } from './plot-figure.js';
 
 /** @import { Asked, Sheet, UncertaintyKind } from './shiftgauge.js' */
 
 const root = byId('sheet', HTMLElement);
 const property = byId('sheet-property', HTMLSelectElement);
-const drawing = byId('sheet-drawing', HTMLElement);
+const figure = plotFigure(byId('sheet-figure', HTMLElement));
 
 /** @type {Sheet | null} */
 let shown = null;
@@ -24,7 +24,6 @@ byId('sheet-own', HTMLButtonElement).addEventListener('click', () => {
 /** @param {{ useOwn: (sheet: Sheet) => void }} actions */
 export function connect(actions) {
   ({ useOwn } = actions);
-  new ResizeObserver(draw).observe(drawing);
 }
 
 /** @type {Record<UncertaintyKind, string>} */
@@ -33,7 +32,7 @@ const WAYS = {
   atct: 'stated by the Active Thermochemical Tables',
   codata: 'stated by the CODATA key values',
   sources: 'half of what two sources differ by',
-  class: 'judged by its class, as no second source is known',
+  class: 'judged by its class: no second source is known, or what is known agrees better than that',
   measured: 'that of the measured equilibrium and of the other species in it',
   own: 'stated with your own figures',
 };
@@ -63,6 +62,7 @@ export function showSheet(species, asked) {
   byId('sheet-measured', HTMLElement).textContent = measured(sheet);
   byId('sheet-instead', HTMLElement).textContent = instead(sheet);
   byId('sheet-sources', HTMLElement).replaceChildren(...sheet.sources.map((text) => create('li', {}, text)));
+  figure.clear('');
   draw();
   byId('sheet-heading', HTMLElement).focus({ preventScroll: true });
   root.scrollIntoView({ block: 'nearest' });
@@ -78,20 +78,29 @@ const perMole = (joule) => `${significant(joule / 1000, 2)}${NO_BREAK}kJ/mol`;
 function figures(sheet) {
   const { at, range_k: [low, high], gibbs_of_formation_j_per_mol: gibbs, molar_mass_kg_per_mol: mass } = sheet;
   const there = at.temperature_k === 298.15 ? [] : /** @type {[string, string][]} */ ([
-    [`G° at ${fixed(at.temperature_k, 1)}${NO_BREAK}K`, molarEnergy(at.gibbs_j_per_mol)],
+    [`G° at ${fixed(at.temperature_k, 1)}${NO_BREAK}K`, energy(at.gibbs_j_per_mol)],
     [`C°p at ${fixed(at.temperature_k, 1)}${NO_BREAK}K`, `${fixed(at.heat_capacity_j_per_mol_k, 2)}${NO_BREAK}J/(mol${NO_BREAK}K)`],
   ]);
   return [
-    ['ΔfH° at 298.15 K', molarEnergy(sheet.enthalpy_of_formation_j_per_mol)],
+    ['ΔfH° at 298.15 K', energy(sheet.enthalpy_of_formation_j_per_mol)],
     ['S° at 298.15 K', `${fixed(sheet.entropy_j_per_mol_k, 2)}${NO_BREAK}J/(mol${NO_BREAK}K)`],
-    ...(gibbs === null ? [] : [/** @type {[string, string]} */ (['ΔfG° at 298.15 K', molarEnergy(gibbs)])]),
+    ...(gibbs === null ? [] : [/** @type {[string, string]} */ (['ΔfG° at 298.15 K', energy(gibbs)])]),
     ['C°p at 298.15 K', `${fixed(sheet.heat_capacity_j_per_mol_k, 2)}${NO_BREAK}J/(mol${NO_BREAK}K)`],
     ...there,
-    ['Data from – to', `${fixed(low, 1)} – ${fixed(high, 1)}${NO_BREAK}K`],
+    ['Data from – to', `${kelvin(low)} – ${kelvin(high)}${NO_BREAK}K`],
     ...(mass === null ? [] : [/** @type {[string, string]} */ (['Molar mass', `${fixed(mass * 1000, 3)}${NO_BREAK}g/mol`])]),
-    ...sheet.transitions.map((one) => /** @type {[string, string]} */ ([`Transition at ${fixed(one.temperature_k, 1)}${NO_BREAK}K`, molarEnergy(one.enthalpy_j_per_mol)])),
+    ...sheet.transitions.map((one) => /** @type {[string, string]} */ ([`Transition at ${fixed(one.temperature_k, 1)}${NO_BREAK}K`, energy(one.enthalpy_j_per_mol)])),
   ];
 }
+
+/**
+ * To ten joules, whatever its size: a formation is the difference of large numbers.
+ * @param {number} joule
+ */
+const energy = (joule) => `${fixed(joule / 1000, 2)}${NO_BREAK}kJ/mol`;
+
+/** @param {number} value */
+const kelvin = (value) => fixed(value, Number.isInteger(value) ? 0 : 2);
 
 /** @param {Sheet} sheet */
 function measured({ equilibrium }) {
@@ -110,22 +119,25 @@ function instead({ instead_of: other, at }) {
 const signed = (value) => `${value < 0 ? '−' : '+'}${significant(Math.abs(value), 3)}`;
 
 function draw() {
-  const width = drawing.clientWidth;
   const curve = CURVES[property.value];
-  if (shown === null || curve === undefined || width === 0) return;
+  if (shown === null || curve === undefined) return;
   const { curve: columns, range_k: [low, high], at, species } = shown;
-  const y = columns[curve.column].map((value) => value * curve.scale);
+  const kelvins = columns.temperature_k;
   /** @type {Record<string, number>} */
   const here = { gibbs: at.gibbs_j_per_mol, enthalpy: at.enthalpy_j_per_mol, entropy: at.entropy_j_per_mol_k, heat: at.heat_capacity_j_per_mol_k };
-  const words = `${curve.label.split(',')[0]} of ${speciesName(species)} against temperature. Shaded and dashed: outside the range of the data, with constant C°p.`;
-  const { svg } = drawPlot({
-    x: columns.temperature_k,
-    lines: [{ name: '', y, broken: true }],
+  const title = `${curve.label.split(',')[0]} of ${speciesName(species)} against temperature`;
+  figure.show({
+    x: kelvins,
+    lines: [{ name: '', y: columns[curve.column].map((value) => value * curve.scale), broken: true }],
     labels: { x: 'temperature, K', y: curve.label },
     marks: [{ x: at.temperature_k, y: (here[property.value] ?? 0) * curve.scale, label: `${fixed(at.temperature_k, 0)} K`, kind: 'now' }],
     data: [low, high],
-    words: { id: 'sheet-plot', title: words, description: words },
-  }, width);
-  drawing.replaceChildren(svg);
-  byId('sheet-words', HTMLElement).textContent = words;
+    words: { id: 'sheet-plot', title, description: `${title}. Shaded and dashed: outside the range of the data, with constant C°p.` },
+  }, {
+    head: 'temperature',
+    x: (place) => `${fixed(kelvins[place] ?? 0, 1)}${NO_BREAK}K, ${fixed((kelvins[place] ?? 0) - 273.15, 1)}${NO_BREAK}°C`,
+    y: (value) => `${fixed(value, 2)}${NO_BREAK}${curve.unit}`,
+    unit: curve.unit,
+    plain: [{ head: 'temperature, K', value: (place) => kelvins[place] ?? 0 }],
+  }, kelvins.findIndex((kelvin) => kelvin >= at.temperature_k));
 }

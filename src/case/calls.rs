@@ -158,6 +158,6 @@ pub fn version() -> Version {
         ok: true,
         program: env!("CARGO_PKG_VERSION"),
         format: super::read::FORMAT,
-        species: library::all().count(),
+        species: library::count(),
     }
 }

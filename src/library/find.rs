@@ -75,11 +75,17 @@ pub fn one(formula: &str, phase: Option<Phase>, form: Option<&str>) -> Outcome<&
     Err(problem.with("found", wanted).into())
 }
 
+/// How many records there are, without reading any.
+#[must_use]
+pub fn count() -> usize {
+    table::entries().len()
+}
+
 /// Every record made of the same atoms with the same charge, however its formula is spelled: isomers
 /// are among them.
-pub(super) fn of_atoms(formula: &Formula) -> impl Iterator<Item = &'static Record> + '_ {
-    let same = |entry: &&'static table::Entry| {
-        entry.composition().is_some_and(|known| known.has_same_atoms(formula))
-    };
+pub(super) fn of_atoms(formula: &Formula) -> impl Iterator<Item = &'static Record> {
+    let wanted = formula.hill();
+    let same =
+        move |entry: &&'static table::Entry| entry.cells().is_some_and(|[.., hill]| hill == wanted);
     table::entries().iter().filter(same).filter_map(table::Entry::record)
 }

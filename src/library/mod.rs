@@ -51,7 +51,7 @@ pub use book::Book;
 pub use combination::Change;
 pub use combination::Combination;
 pub use combination::STOICHIOMETRIC_LIMIT;
-pub use find::{all, find, formulas, named, one};
+pub use find::{all, count, find, formulas, named, one};
 pub use hazard::hazards;
 pub use known::Known;
 pub use measured::Measured;

@@ -17,7 +17,8 @@ impl Record {
         heat: impl Iterator<Item = &'static str>,
     ) -> Option<Record> {
         let cells: Vec<&'static str> = line.split('\t').collect();
-        let [id, formula, phase, form, names, cas, enthalpy, entropy, u, kind, sources] = cells[..]
+        let [id, formula, phase, form, names, cas, _hill, enthalpy, entropy, u, kind, sources] =
+            cells[..]
         else {
             return None;
         };

@@ -7,7 +7,6 @@ use super::known::Known;
 use super::table;
 use super::temperature::Temperature;
 use super::usual::likely;
-use crate::reaction::Formula;
 use crate::reaction::Phase;
 use crate::reaction::Species;
 use crate::reaction::nearest;
@@ -63,10 +62,15 @@ const LETTERS_WITHIN: usize = 3;
 /// Fewer letters are not taken for a slip.
 const LETTERS_NEAR: usize = 4;
 
+/// A way to find, and whether a name is found so.
+type Way<'a> = (FoundBy, &'a dyn Fn(&str) -> bool);
+
 /// What was typed.
 struct Typed<'a> {
     text: &'a str,
     species: Option<Species>,
+    /// Its atoms in Hill's order, with the charge.
+    hill: String,
 }
 
 /// What a record is found by.
@@ -76,7 +80,8 @@ struct Card<'a> {
     form: &'a str,
     names: Cow<'a, str>,
     cas: &'a str,
-    composition: Option<Cow<'a, Formula>>,
+    /// The atoms in Hill's order, with the charge.
+    hill: Cow<'a, str>,
 }
 
 impl Book {
@@ -100,7 +105,9 @@ impl Book {
         if text.is_empty() {
             return Vec::new();
         }
-        let typed = Typed { text, species: parse_species(text).ok() };
+        let species = parse_species(text).ok();
+        let hill = species.as_ref().map(|species| species.formula.hill()).unwrap_or_default();
+        let typed = Typed { text, species, hill };
         let mut groups: Vec<Vec<Place>> = vec![Vec::new(); FoundBy::ALL.len()];
         self.each_card(|place, card| {
             if let Some((by, letters)) = typed.rank(card) {
@@ -112,7 +119,7 @@ impl Book {
         }
         let ordered = FoundBy::ALL.into_iter().zip(groups).flat_map(|(by, mut group)| {
             // Short names before long ones; what is dissolved, and hot vapours, last.
-            group.sort_by_key(|place| (self.is_unusual(*place), place.letters));
+            group.sort_by_cached_key(|place| (self.is_unusual(*place), place.letters));
             group.into_iter().map(move |place| (by, place))
         });
         let record =
@@ -150,23 +157,19 @@ impl Book {
                 form: record.form.as_deref().unwrap_or_default(),
                 names: Cow::Owned(record.names.join(";")),
                 cas: &record.cas,
-                composition: parse_formula(&record.formula).ok().map(Cow::Owned),
+                hill: parse_formula(&record.formula)
+                    .map_or(Cow::Borrowed(""), |known| known.hill().into()),
             };
             see(Place { own: Some(own), entry: 0, phase: record.phase, letters: 0 }, &card);
         }
         for (entry, line) in table::entries().iter().enumerate() {
-            let Some(phase) = Phase::from_symbol(line.cell(2)) else { continue };
+            let Some([phase, form, names, cas, hill]) = line.cells() else { continue };
+            let Some(phase) = Phase::from_symbol(phase) else { continue };
             if !self.own().is_empty() && line.record().is_none_or(|record| self.replaces(record)) {
                 continue;
             }
-            let card = Card {
-                formula: line.formula,
-                phase,
-                form: line.cell(3),
-                names: Cow::Borrowed(line.cell(4)),
-                cas: line.cell(5),
-                composition: line.composition().map(Cow::Borrowed),
-            };
+            let (names, hill) = (Cow::Borrowed(names), Cow::Borrowed(hill));
+            let card = Card { formula: line.formula, phase, form, names, cas, hill };
             see(Place { own: None, entry, phase, letters: 0 }, &card);
         }
     }
@@ -176,15 +179,20 @@ impl Book {
         if text.chars().count() < LETTERS_NEAR {
             return Vec::new();
         }
-        let mut words: Vec<(String, Place)> = Vec::new();
-        self.each_card(|place, card| {
-            let names = card.names.split(';').chain([card.formula]);
-            words.extend(names.map(|name| (name.to_owned(), place)));
+        let names = self.own().iter().flat_map(|record| {
+            record.names.iter().map(AsRef::as_ref).chain([record.formula.as_ref()])
         });
-        let Some(best) = nearest(text, words.iter().map(|(word, _)| word.as_str())) else {
-            return Vec::new();
-        };
-        words.into_iter().filter(|(word, _)| *word == best).map(|(_, place)| place).collect()
+        let lines =
+            table::entries().iter().filter_map(|line| Some((line.formula, line.cells()?[2])));
+        let known = lines.flat_map(|(formula, names)| names.split(';').chain([formula]));
+        let Some(best) = nearest(text, names.chain(known)) else { return Vec::new() };
+        let mut places = Vec::new();
+        self.each_card(|place, card| {
+            if card.formula == best || card.names.split(';').any(|name| name == best) {
+                places.push(place);
+            }
+        });
+        places
     }
 }
 
@@ -209,8 +217,7 @@ impl Typed<'_> {
             if fits && species.formula.text() == card.formula {
                 return Some((FoundBy::Formula, card.form.len()));
             }
-            let composition = card.composition.as_deref();
-            if fits && composition.is_some_and(|known| known.has_same_atoms(&species.formula)) {
+            if fits && self.hill == card.hill {
                 return Some((FoundBy::Atoms, card.form.len()));
             }
         }
@@ -231,7 +238,7 @@ impl Typed<'_> {
             return Some((FoundBy::NameStart, 0));
         }
         let later = |name: &str| name.split([' ', '-', '(']).any(|word| starts(word, self.text));
-        let ways: [(FoundBy, &dyn Fn(&str) -> bool); 3] = [
+        let ways: [Way; 3] = [
             (FoundBy::NameStart, &|name| starts(name, self.text)),
             (FoundBy::Word, &later),
             (FoundBy::Within, &|name| holds(name, self.text)),

@@ -3,8 +3,6 @@
 use std::sync::OnceLock;
 
 use super::record::Record;
-use crate::reaction::Formula;
-use crate::reaction::parse_formula;
 
 const SPECIES: &str = include_str!("tables/species.tsv");
 const HEAT: &str = include_str!("tables/heat.tsv");
@@ -17,7 +15,7 @@ pub(super) struct Entry {
     pub(super) formula: &'static str,
     pub(super) line: &'static str,
     record: OnceLock<Option<Record>>,
-    composition: OnceLock<Option<Formula>>,
+    cells: OnceLock<Option<[&'static str; 5]>>,
 }
 
 impl Entry {
@@ -26,14 +24,11 @@ impl Entry {
         self.record.get_or_init(|| Record::read(self.line, rows(HEAT, self.id))).as_ref()
     }
 
-    /// What the species is made of, read from its formula at the first call.
-    pub(super) fn composition(&'static self) -> Option<&'static Formula> {
-        self.composition.get_or_init(|| parse_formula(self.formula).ok()).as_ref()
-    }
-
-    /// One cell of the line, counted from zero.
-    pub(super) fn cell(&self, place: usize) -> &'static str {
-        self.line.split('\t').nth(place).unwrap_or_default()
+    /// The phase, the form, the names, the CAS number and the atoms in Hill's order, as they stand;
+    /// kept, for the finder asks again at every letter.
+    pub(super) fn cells(&self) -> Option<[&'static str; 5]> {
+        let read = || self.line.split('\t').skip(2).take(5).collect::<Vec<_>>().try_into().ok();
+        *self.cells.get_or_init(read)
     }
 }
 
@@ -46,8 +41,8 @@ pub(super) fn entries() -> &'static [Entry] {
             .filter_map(|line| {
                 let mut cells = line.split('\t');
                 let (id, formula) = (cells.next()?, cells.next()?);
-                let (record, composition) = (OnceLock::new(), OnceLock::new());
-                Some(Entry { id, formula, line, record, composition })
+                let (record, cells) = (OnceLock::new(), OnceLock::new());
+                Some(Entry { id, formula, line, record, cells })
             })
             .collect()
     })

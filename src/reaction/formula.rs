@@ -98,6 +98,40 @@ impl Formula {
         self.charge
     }
 
+    /// The atoms in Hill's order (carbon and hydrogen first where there is carbon, the others by the
+    /// alphabet) and the charge: one text for all spellings.
+    ///
+    /// ```
+    /// use shiftgauge::reaction::parse_formula;
+    /// assert_eq!(parse_formula("CH3COOH").unwrap().hill(), "C2H4O2");
+    /// assert_eq!(parse_formula("NH4^+").unwrap().hill(), "H4N^+1");
+    /// ```
+    #[must_use]
+    pub fn hill(&self) -> String {
+        let has_carbon = self.count("C") != Rational::ZERO;
+        let place = |symbol: &str| match symbol {
+            "C" if has_carbon => 0,
+            "H" if has_carbon => 1,
+            _ => 2,
+        };
+        let mut atoms: Vec<(&str, f64)> =
+            self.atoms.iter().map(|(element, count)| (element.symbol, count.to_f64())).collect();
+        sort_short(&mut atoms, |before, item| {
+            (place(before.0), before.0) > (place(item.0), item.0)
+        });
+        let mut text = String::new();
+        for (symbol, count) in atoms {
+            text.push_str(symbol);
+            if count != 1.0 {
+                text.push_str(&format!("{count}"));
+            }
+        }
+        if self.charge != 0 {
+            text.push_str(&format!("^{:+}", self.charge));
+        }
+        text
+    }
+
     /// Whether the other has the same atoms and the same charge, however it is spelled.
     #[must_use]
     pub fn has_same_atoms(&self, other: &Formula) -> bool {

@@ -1,5 +1,8 @@
 //! The known word that a mistyped one is likely to stand for.
 
+use rapidfuzz::distance::osa::Args;
+use rapidfuzz::distance::osa::BatchComparator;
+
 /// The longest text that is compared, in characters: longer ones are no slip of one word.
 const LONGEST: usize = 80;
 
@@ -16,50 +19,29 @@ const LONGEST: usize = 80;
 /// assert_eq!(nearest("xenon", ["CO", "CO2"].into_iter()), None);
 /// ```
 pub fn nearest<'a>(text: &str, candidates: impl Iterator<Item = &'a str>) -> Option<String> {
-    let typed = folded(text.trim());
+    let typed: Vec<char> = folded(text.trim()).collect();
     if typed.is_empty() || typed.len() > LONGEST {
         return None;
     }
-    let allowed = (typed.len() / 3).min(3);
-    let mut best: Option<(usize, &str)> = None;
+    let mut allowed = (typed.len() / 3).min(3);
+    let slips_to = BatchComparator::new(typed.iter().copied());
+    let mut best: Option<&str> = None;
     for candidate in candidates {
-        let known = folded(candidate);
-        if known.len().abs_diff(typed.len()) > allowed {
+        // No character has fewer bytes than one: a longer word in characters is longer in bytes.
+        if candidate.len() + allowed < typed.len() {
             continue;
         }
-        let slips = distance(&typed, &known);
-        let nearer = match best {
-            Some((least, _)) => slips < least,
-            None => true,
-        };
-        if slips <= allowed && nearer {
-            best = Some((slips, candidate));
+        let cutoff = Args::default().score_cutoff(allowed);
+        let Some(slips) = slips_to.distance_with_args(folded(candidate), &cutoff) else { continue };
+        best = Some(candidate);
+        if slips == 0 {
+            break;
         }
+        allowed = slips - 1;
     }
-    best.map(|(_, candidate)| candidate.to_owned())
+    best.map(ToOwned::to_owned)
 }
 
-fn folded(text: &str) -> Vec<char> {
-    text.chars().map(|c| c.to_ascii_lowercase()).collect()
-}
-
-/// The optimal string alignment distance.
-fn distance(left: &[char], right: &[char]) -> usize {
-    let mut before_last: Vec<usize> = Vec::new();
-    let mut last: Vec<usize> = (0..=right.len()).collect();
-    for (row, &a) in left.iter().enumerate() {
-        let mut now = vec![row + 1];
-        for (column, &b) in right.iter().enumerate() {
-            let mut least =
-                (last[column] + usize::from(a != b)).min(last[column + 1] + 1).min(now[column] + 1);
-            let swapped =
-                row > 0 && column > 0 && a != b && a == right[column - 1] && left[row - 1] == b;
-            if swapped {
-                least = least.min(before_last[column - 1] + 1);
-            }
-            now.push(least);
-        }
-        before_last = std::mem::replace(&mut last, now);
-    }
-    last[right.len()]
+fn folded(text: &str) -> impl DoubleEndedIterator<Item = char> + Clone {
+    text.chars().map(|c| c.to_ascii_lowercase())
 }

@@ -27,7 +27,7 @@ GIBBS_FUNCTION_LIMIT = 0.25
 # log10 K of a measured equilibrium may leave that of the species' own records by this without a reason.
 MEASURED_LIMIT = 0.35
 HEADS = {
-    "species": "id formula phase form names cas enthalpy_kj_per_mol entropy_j_per_mol_k "
+    "species": "id formula phase form names cas hill enthalpy_kj_per_mol entropy_j_per_mol_k "
     "u_gibbs_kj_per_mol u_class sources",
     "heat": "id low_k high_k a_minus2 a_minus1 a0 a1 a2 a3 a4 b_enthalpy b_entropy source",
     "measured": "id terms low_k high_k a_minus2 a_minus1 a0 a1 a2 a3 a4 b_enthalpy b_entropy log10_k "
@@ -111,6 +111,7 @@ def make():
         used.update(ids, (piece.source for piece in made["pieces"]))
         rows["species"].append([
             species.id, species.formula, species.phase, species.form, species.names, species.cas,
+            solution.hill(species.formula),
             f"{made['h']:.3f}".replace("-0.000", "0.000"), f"{made['s']:.3f}", f"{u:.2g}", kind,
             ";".join(ids)])
         for piece in made["pieces"]:

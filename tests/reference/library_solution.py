@@ -28,6 +28,15 @@ def atoms_and_charge(formula):
     return atoms, -size if charge.endswith("-") else size
 
 
+def hill(formula):
+    """The atoms in Hill's order (carbon, hydrogen, then by the alphabet) and the charge, as one text."""
+    atoms, charge = atoms_and_charge(formula)
+    first = [symbol for symbol in ("C", "H") if "C" in atoms and symbol in atoms]
+    order = first + sorted(symbol for symbol in atoms if symbol not in first)
+    text = "".join(f"{symbol}{'' if atoms[symbol] == 1 else f'{atoms[symbol]:.6g}'}" for symbol in order)
+    return text if charge == 0 else f"{text}^{charge:+d}"
+
+
 @lru_cache(maxsize=None)
 def element_entropy(symbol):
     """S° of one mole of atoms of an element in its reference state."""

@@ -43,19 +43,50 @@ export function edit(entry) {
   form.scrollIntoView({ block: 'nearest' });
 }
 
+/** Above this the start from the library does not reach: three points do not tell more. */
+const HIGHEST_K = 1000;
+
 /**
- * Starts from the library's record: its figures at 298.15 K, and C°p through three points of its curve.
+ * Starts from the library's record: its figures at 298.15 K, and C°p = a + b T + c/T² through three points.
  * @param {Sheet} sheet
  */
 export function startFrom(sheet) {
-  const [low, high] = sheet.range_k;
+  const low = Math.max(sheet.range_k[0], 298.15);
+  const high = Math.max(Math.min(sheet.range_k[1], HIGHEST_K), low + 1);
   edit({
     species: sheet.species, names: sheet.names.join('; '), cas: sheet.cas,
     enthalpy: `${(sheet.enthalpy_of_formation_j_per_mol / 1000).toFixed(3)} kJ/mol`,
     entropy: `${sheet.entropy_j_per_mol_k.toFixed(3)} J/(mol K)`, gibbs: '',
-    heat_capacity: [{ from: `${low} K`, to: `${high} K`, terms: { 1: sheet.heat_capacity_j_per_mol_k.toFixed(3) } }],
+    heat_capacity: [{ from: `${Math.min(low, 298.15)} K`, to: `${high} K`, terms: heatThrough(sheet, [low, (low + high) / 2, high]) }],
     source: '',
   });
+}
+
+/**
+ * @param {Sheet} sheet
+ * @param {[number, number, number]} kelvins
+ * @returns {Record<string, string>}
+ */
+function heatThrough({ curve }, kelvins) {
+  const [x, y, z] = kelvins;
+  const [p, q, r] = /** @type {[number, number, number]} */ (kelvins.map((t) => heatAt(curve, t)));
+  // The slopes of the two chords are b - c (s + t)/(s t)^2.
+  const bend = (/** @type {number} */ s, /** @type {number} */ t) => (s + t) / (s * t) ** 2;
+  const [first, second] = [(q - p) / (y - x), (r - q) / (z - y)];
+  const c = (second - first) / (bend(x, y) - bend(y, z));
+  const b = first + c * bend(x, y);
+  const a = p - b * x - c / x ** 2;
+  return { 1: a.toPrecision(6), T: b.toPrecision(6), '1/T^2': c.toPrecision(6) };
+}
+
+/**
+ * @param {Sheet['curve']} curve
+ * @param {number} kelvin
+ */
+function heatAt({ temperature_k: kelvins, heat_capacity_j_per_mol_k: heats }, kelvin) {
+  const after = Math.min(Math.max(kelvins.findIndex((t) => t >= kelvin), 1), kelvins.length - 1);
+  const [low = 0, high = 1, below = 0, above = 0] = [kelvins[after - 1], kelvins[after], heats[after - 1], heats[after]];
+  return below + ((above - below) * (kelvin - low)) / (high - low || 1);
 }
 
 /** @returns {string} */
