@@ -112,11 +112,11 @@ function measured({ equilibrium }) {
 /** @param {Sheet} sheet */
 function instead({ instead_of: other, at }) {
   if (other === null) return '';
-  return `The library's record has ΔfH° ${signed(other.enthalpy_j_per_mol / 1000)} kJ/mol, S° ${signed(other.entropy_j_per_mol_k)} J/(mol K) and, at ${fixed(at.temperature_k, 1)} K, G° ${signed(other.gibbs_j_per_mol / 1000)} kJ/mol from yours; its u(ΔfG°) is ${perMole(other.u_gibbs_j_per_mol)}.`;
+  return `The library's record differs from yours by ${signed(other.enthalpy_j_per_mol / 1000)} kJ/mol in ΔfH°, by ${signed(other.entropy_j_per_mol_k)} J/(mol K) in S° and, at ${fixed(at.temperature_k, 1)} K, by ${signed(other.gibbs_j_per_mol / 1000)} kJ/mol in G°; its u(ΔfG°) is ${perMole(other.u_gibbs_j_per_mol)}.`;
 }
 
 /** @param {number} value */
-const signed = (value) => `${value < 0 ? '−' : '+'}${significant(Math.abs(value), 3)}`;
+const signed = (value) => (value === 0 ? '0' : `${value < 0 ? '−' : '+'}${significant(Math.abs(value), 3)}`);
 
 function draw() {
   const curve = CURVES[property.value];
