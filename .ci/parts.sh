@@ -134,6 +134,7 @@ part_reference() {
     touch "$venv/ready"
   fi
   check "the species tables are the published figures" "$venv/bin/python" tests/reference/library.py
+  check "the reactions of the proof are those of the tables" "$venv/bin/python" tests/reference/janaf_proof.py
   check "the element table is the standard's" "$venv/bin/python" tests/reference/elements.py
   check "tolerances by a hundred thousand draws" "$venv/bin/python" tests/reference/monte_carlo.py
   check "the states of rest again in ninety digits" "$venv/bin/python" tests/reference/rest.py --check

@@ -101,7 +101,8 @@ pub struct CurveOfSpecies {
     pub gibbs_j_per_mol: Vec<f64>,
 }
 
-/// So many points a curve has, both ends of the range and both sides of every joint beside them.
+/// So many points a curve has; beside them stand both ends of the range, both sides of every joint and
+/// the wanted temperature.
 const POINTS: u32 = 96;
 /// The curves are carried beyond the range by this share of it, to show what extrapolation does.
 const BEYOND: f64 = 0.08;
@@ -136,7 +137,7 @@ fn sheet_of(species: &str, asked: &Value) -> Outcome<SheetReport> {
             })
             .collect(),
         instead_of: instead_of(&record, at),
-        curve: curve(&record),
+        curve: curve(&record, at),
         at: point(&record, at),
         equilibrium: measured_of(&record).map(MeasuredReport::of),
     })
@@ -174,14 +175,14 @@ fn point(record: &Known, at: Temperature) -> PointOfSpecies {
     }
 }
 
-fn curve(record: &Known) -> CurveOfSpecies {
+fn curve(record: &Known, at: Temperature) -> CurveOfSpecies {
     let (low, high) = record.range_k;
     let beyond = BEYOND * (high - low);
-    let from = (low - beyond).max(TEMPERATURE_LIMITS_K.0);
-    let to = (high + beyond).min(TEMPERATURE_LIMITS_K.1);
+    let from = (low - beyond).max(TEMPERATURE_LIMITS_K.0).min(at.kelvin());
+    let to = (high + beyond).min(TEMPERATURE_LIMITS_K.1).max(at.kelvin());
     let step = (to - from) / f64::from(POINTS - 1);
     let mut kelvins: Vec<f64> = (0..POINTS).map(|i| from + f64::from(i) * step).collect();
-    kelvins.extend([low, high]);
+    kelvins.extend([low, high, at.kelvin()]);
     kelvins.extend(record.joints_k().iter().flat_map(|joint| [joint * (1.0 - BESIDE), *joint]));
     kelvins.sort_by(f64::total_cmp);
     let points: Vec<PointOfSpecies> = kelvins

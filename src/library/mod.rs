@@ -1,7 +1,8 @@
 //! What is known of each species: Δ_fH°, S°, C°p(T), where it holds, how well, and from where.
 //!
-//! The tables lie beside this file as tab-separated text: `species.tsv` (one line a species),
-//! `heat.tsv` (one line a range of temperature) and `sources.tsv`. Nothing is parsed before it is
+//! The tables lie beside this file as tab-separated text: `species.tsv` (one line a species, its
+//! atoms in Hill's order among the cells), `heat.tsv` (one line a range of temperature),
+//! `measured.tsv` (one line a constant in water) and `sources.tsv`. Nothing is parsed before it is
 //! asked for. `tests/reference/library.py` made them from published data and checks them.
 //!
 //! Conventions: p° = 1 bar; H° of the elements in their reference states is zero at 298.15 K; the
@@ -9,9 +10,10 @@
 //! change it, as some do for sulfur above 882 K, agree for balanced reactions only.
 //!
 //! Dissolved species, `(aq)`: the standard state is the ideal solution of 1 mol/kg. Δ_fG°, S° and
-//! C°p of the hydrogen ion are zero. Key values of CODATA come first; other ions have Δ_fG° and S°
-//! of the CRC table, from which Δ_fH° follows; neutral molecules have Henry's constants with the
-//! gas, or the NBS tables. Where a measured constant tells more than tables of single species do
+//! C°p of the hydrogen ion are zero. Where a constant of `measured.tsv` ties a species, a reaction
+//! goes by it, and the record stands for sheets and for `Combination::of_species`. Key values of
+//! CODATA come first; other ions have Δ_fG° and S° of the CRC table, from which Δ_fH° follows;
+//! neutral molecules have Henry's constants with the gas, or the NBS tables. Where a measured constant tells more than tables of single species do
 //! (ammonium, sulfite, hydrogen fluoride, witherite), the record is formed by that constant, and
 //! its sources say so. C°p is constant: the range is 0 to 100 °C where it is published and 15 to
 //! 35 °C where it is not, and there it is zero or that of the reaction's other side. Carbonic acid
