@@ -152,14 +152,9 @@ fn a_line_through_points_is_drawn_on_to_find_t_star_and_said_so() {
 }
 
 #[test]
-fn sulfur_is_taken_in_the_form_that_is_stable_at_the_temperature() {
-    let form = |temperature: &str| {
-        let found = report(&case(
-            "S(s) + O2 = SO2(g)",
-            json!({ "from": "library" }),
-            temperature,
-            Json::Null,
-        ));
+fn a_solid_is_taken_in_the_form_that_is_stable_at_the_temperature() {
+    let form = |equation: &str, temperature: &str| {
+        let found = report(&case(equation, json!({ "from": "library" }), temperature, Json::Null));
         found["notes"]
             .as_array()
             .unwrap()
@@ -170,8 +165,28 @@ fn sulfur_is_taken_in_the_form_that_is_stable_at_the_temperature() {
             .unwrap()
             .to_owned()
     };
-    assert!(form("25 °C").contains("rhombic"), "{}", form("25 °C"));
-    assert!(form("105 °C").contains("monoclinic"), "{}", form("105 °C"));
+    let (sulfur, lead) = ("S(s) + O2 = SO2(g)", "Pb(l) + 1/2 O2 = PbO(s)");
+    assert!(form(sulfur, "25 °C").contains("rhombic"));
+    assert!(form(sulfur, "105 °C").contains("monoclinic"));
+    assert!(form(lead, "400 °C").contains("red"));
+    // The data of the red form end at 489 °C, and are not drawn on where the yellow one has its own.
+    assert!(form(lead, "700 °C").contains("yellow"));
+}
+
+#[test]
+fn above_its_boiling_point_a_substance_is_taken_as_a_gas_and_said_so() {
+    let soda = |temperature: &str| {
+        let equation = "2 NaHCO3(s) = Na2CO3(s) + CO2 + H2O";
+        ask(&case(equation, json!({ "from": "library" }), temperature, Json::Null))
+    };
+    let found = soda("127 °C");
+    assert_eq!(
+        found["report"]["reactions"][0]["equation"],
+        "2 NaHCO3(s) = Na2CO3(s) + CO2(g) + H2O(g)"
+    );
+    let notes = found["report"]["notes"].as_array().unwrap();
+    assert!(notes.iter().any(|note| note["code"] == "phase-assumed"), "{notes:?}");
+    assert_eq!(soda("90 °C")["problems"][0]["code"], "phase-unclear");
 }
 
 #[test]

@@ -51,7 +51,7 @@ export function constantScene({ report, answered }, { sweep: { x, lines, data_ra
       lines: [
         { name: 'ln K', y: lines[0]?.y ?? [], broken: true },
         ...[-2, 2].filter(() => u.some((one) => one !== null && one > 0)).map((times) => ({
-          name: times > 0 ? '95 % band' : '', thin: true,
+          name: times > 0 ? '95 % band' : '', head: `ln K ${times > 0 ? '+' : '−'} 2u`, thin: true,
           y: xs.map((_, at) => (u[at] === null || u[at] === undefined || lines[0]?.y[at] === null ? null : (lines[0]?.y[at] ?? 0) + times * u[at])),
         })),
         ...(level === null ? [] : [{ name: 'ln Q now', y: xs.map(() => level), thin: true }]),

@@ -48,9 +48,9 @@ export function plotFigure(root) {
     const { scene, told } = shown;
     const at = Math.min(Number(slider.value), scene.x.length - 1);
     plot?.point(at);
-    const each = scene.lines.map(({ name, y }) => {
+    const each = scene.lines.map(({ name, head = name, y }) => {
       const value = y[at] ?? null;
-      return `${name === '' ? '' : `${name}: `}${value === null ? 'none' : told.y(value)}`;
+      return `${head === '' ? '' : `${head}: `}${value === null ? 'none' : told.y(value)}`;
     });
     values.textContent = `${told.x(at)} – ${each.join('; ')}`;
     slider.setAttribute('aria-valuetext', values.textContent);
@@ -62,7 +62,7 @@ export function plotFigure(root) {
     const { scene, told } = shown;
     const step = Math.max(1, Math.round(scene.x.length / 20));
     const places = scene.x.map((_, at) => at).filter((at) => at % step === 0 || at === scene.x.length - 1);
-    const head = [told.head, ...scene.lines.map(({ name }) => name || scene.labels.y)];
+    const head = [told.head, ...scene.lines.map(({ name, head = name }) => head || scene.labels.y)];
     return [head, ...places.map((at) => [told.x(at), ...scene.lines.map(({ y }) => {
       const value = y[at] ?? null;
       return value === null ? '–' : told.y(value);
@@ -75,7 +75,7 @@ export function plotFigure(root) {
     const { scene, told } = shown;
     /** @param {number | null | undefined} value */
     const plain = (value) => (value === null || value === undefined ? '' : String(Number(value.toPrecision(PLAIN_DIGITS))));
-    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name }) => [name, told.unit].filter(Boolean).join(', '))];
+    const head = [...told.plain.map((column) => column.head), ...scene.lines.map(({ name, head = name }) => [head, told.unit].filter(Boolean).join(', '))];
     return [head, ...scene.x.map((_, at) => [...told.plain.map(({ value }) => plain(value(at))), ...scene.lines.map(({ y }) => plain(y[at]))])];
   }
 

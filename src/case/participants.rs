@@ -1,7 +1,7 @@
 //! Who takes part: the species of the reaction with their phases, then the inerts of the reading.
 
 use super::question::Question;
-use crate::library::{Book, Known, Temperature, likely};
+use crate::library::{Book, Known, Reach, Temperature, likely};
 use crate::mixture::{Basis, Water};
 use crate::problem::{CaseCode, LibraryCode, NoteCode, Outcome, Problem, Remark};
 use crate::reaction::{Equation, Phase, Species, Term, nearest, parse_species};
@@ -145,6 +145,7 @@ impl Around<'_> {
                 .with("example", term.species.in_phase(Phase::Gas).text())),
             [only] => Ok((only, false)),
             ref several if all_gas && several.contains(&Phase::Gas) => Ok((Phase::Gas, true)),
+            [Phase::Gas, Phase::Liquid] if self.boils(term) => Ok((Phase::Gas, true)),
             ref several => {
                 let written = |phase: &Phase| term.species.in_phase(*phase).text();
                 let allowed: Vec<String> = several.iter().map(written).collect();
@@ -155,6 +156,16 @@ impl Around<'_> {
                     .with("example", example))
             }
         }
+    }
+
+    /// Whether the library's liquid lies above its boiling point at p°.
+    fn boils(&self, term: &Term) -> bool {
+        let Species { formula, form, .. } = &term.species;
+        let lowest = |phase: Phase| {
+            let records = self.book.meant(formula, Some(phase), form.as_deref());
+            records.iter().map(|record| record.gibbs_over_rt(self.likely_at)).reduce(f64::min)
+        };
+        lowest(Phase::Gas).zip(lowest(Phase::Liquid)).is_some_and(|(gas, liquid)| gas < liquid)
     }
 
     /// The record of a species: of several polymorphs the stablest, with a remark.
@@ -204,15 +215,19 @@ impl Around<'_> {
     }
 }
 
-/// The form with the lowest G° at the temperature, where that is known, else the first.
+/// The form with the lowest G° of those whose data reach the temperature, where that is known, else of
+/// all; without a temperature the first.
 fn stablest<'a>(
     first: &'a Known,
     others: &'a [Known],
     temperature: Option<Temperature>,
 ) -> &'a Known {
     let Some(at) = temperature else { return first };
+    let place = |record: &Known| (record.reach(at) != Reach::InRange, record.gibbs_over_rt(at));
     let lower = |best: &'a Known, one: &'a Known| {
-        if one.gibbs_over_rt(at) < best.gibbs_over_rt(at) { one } else { best }
+        let ((beyond, gibbs), (best_beyond, best_gibbs)) = (place(one), place(best));
+        let is_lower = beyond.cmp(&best_beyond).then(gibbs.total_cmp(&best_gibbs)).is_lt();
+        if is_lower { one } else { best }
     };
     others.iter().fold(first, lower)
 }

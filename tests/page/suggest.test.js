@@ -51,9 +51,9 @@ test('a species taken by touch stands in the equation with the phase that was ch
     await page.keyboard.type(' ');
     assert.equal(await options.count(), 0, 'a word that is ended asks for nothing');
     await page.keyboard.press('Backspace');
-    assert.equal(await options.count(), 2);
+    assert.ok(await options.count() >= 2, 'water as a gas and as a liquid, and what begins alike');
     assert.ok(((await options.first().boundingBox())?.height ?? 0) >= 44);
-    await options.filter({ hasText: 'liquid' }).tap();
+    await options.filter({ hasText: 'liquid' }).first().tap();
     assert.equal(await page.inputValue('#equation'), 'CaO + H2O(l)');
     await page.keyboard.type(' = Ca(OH)2');
     assert.match((await page.textContent('#understood')) ?? '', /CaO.* \+ H₂O\(l\) = Ca\(OH\)₂/);

@@ -1,6 +1,6 @@
 """Salts of oxygen acids, minerals, sulfides, carbides and the like, from JANAF."""
 
-from library_species import janaf_fit
+from library_species import CLASSES, fitted, janaf_fit
 
 # Where the CRC table differs, `apart` says by what; half the difference is in the u.
 MINERALS = [
@@ -84,7 +84,8 @@ MINERALS = [
     janaf_fit("Cr7C3", "s", "heptachromium tricarbide", "12075-40-0", "C-140", "mineral"),
     janaf_fit("Cr23C6", "s", "chromium hexacarbide", "12105-81-6", "C-151", "mineral"),
     janaf_fit("Al4C3", "s", "aluminium carbide;aluminum carbide", "1299-86-1", "C-139", "mineral"),
-    janaf_fit("CrN", "s", "chromium nitride", "24094-93-7", "Cr-008", "mineral"),
+    fitted("CrN", "s", "chromium nitride", "24094-93-7", "Cr-008", (298.15, 400, 2000),
+           floor=CLASSES["mineral"], blunt=(300,)),
     janaf_fit("Cr2N", "s", "dichromium nitride", "12053-27-9", "Cr-013", "mineral"),
     janaf_fit("TiN", "s", "titanium nitride", "25583-20-4", "N-014", "mineral"),
     janaf_fit("ZrN", "s", "zirconium nitride", "25658-42-8", "N-019", "mineral"),

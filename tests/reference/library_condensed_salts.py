@@ -1,6 +1,6 @@
 """Halides, solid and molten, from JANAF."""
 
-from library_species import janaf_fit
+from library_species import CLASSES, fitted, janaf_fit
 
 # Where the CRC table differs, `apart` says by what; half the difference is in the u.
 SALTS = [
@@ -81,7 +81,8 @@ SALTS = [
               apart="the CRC table has -927.7 kJ/mol"),
     janaf_fit("FeF2", "s", "iron(II) fluoride", "7789-28-8", "F-055", "mineral",
               apart="the CRC table has -711.3 kJ/mol"),
-    janaf_fit("FeF3", "s", "iron(III) fluoride", "7783-50-8", "F-111", "mineral"),
+    fitted("FeF3", "s", "iron(III) fluoride", "7783-50-8", "F-111", (298.15, 367, 600, 1200),
+           floor=CLASSES["mineral"], blunt=(367,)),
     janaf_fit("MgF2", "s", "magnesium fluoride;sellaite", "7783-40-6", "F-072", "salt"),
     janaf_fit("PbF2", "s", "lead(II) fluoride", "7783-46-2", "F-091", "salt",
               apart="the CRC table has -664.0 kJ/mol and 110.5 J/(mol K)"),

@@ -107,7 +107,7 @@ DISSOLVED = [
     molecule("HCOOH", "dissolved formic acid", "64-18-6", ("recalled", -372.3, 163.0), floor=0.5),
     molecule("H3PO4", "phosphoric acid;orthophosphoric acid", "7664-38-2",
              ("recalled", -1142.54, 158.2), floor=1.5),
-    molecule("HClO", "hypochlorous acid;HOCl", "7790-92-3", ("recalled", -79.9, 142.0), floor=0.5),
+    molecule("HOCl", "hypochlorous acid;HClO", "7790-92-3", ("recalled", -79.9, 142.0), floor=0.5),
     molecule("Cl2", "dissolved chlorine;chlorine water", "7782-50-5", ("recalled", 6.94, 121.0),
              floor=0.3),
     molecule("CH4", "dissolved methane", "74-82-8",

@@ -58,7 +58,7 @@ def build(species):
     how, cas, phase = species.how, species.cas, species.phase
     if phase == "aq":
         return build_dissolved(species, built)
-    sources, worst, transitions, tied = [], [], (), False
+    sources, worst, transitions, tied, molten = [], [], (), False, None
     if how[0] == "tm4513":
         h, s, pieces = gas_pieces(how[1])
         sources.append("tm4513")
@@ -101,9 +101,10 @@ def build(species):
         pieces = [constant_piece(288.15, 310, kopp(species.formula), "kopp")]
         sources += ["crc", "kopp"]
     elif how[0] == "recalled":
-        h, s = how[1], how[2]
-        pieces = recalled_pieces(how[3], how[4])
-        sources.append(how[4])
+        # ΔfH° and S°, Cp, their source, that of Cp if it is another, and transitions.
+        h, s, sources = how[1], how[2], list(how[4:6])
+        pieces = recalled_pieces(how[3], sources[-1])
+        transitions = how[6] if len(how) > 6 else ()
     elif how[0] == "recalled_cp":
         h, s = published.crc(cas, phase)
         pieces = recalled_pieces(how[1], how[2])
@@ -146,6 +147,14 @@ def build(species):
         pieces = liquid_pieces(cas, phase)
         sources += [from_table, "poling", pieces[0].source]
         tied = True
+    elif how[0] == "melted":
+        # From the solid at the melting point by the enthalpy of fusion.
+        _, ident, fusion, cp, high = how
+        solid = built(ident)["pieces"][-1]
+        low = solid.high
+        molten = solid.h(low) + fusion, solid.s(low) + 1000 * fusion / low
+        pieces = [constant_piece(low, high, cp, "kelley")]
+        sources.append("kelley")
     elif how[0] == "boiling":
         # Tied below 1 bar, where the vapour is nearly ideal: its pressure and the slope of that.
         _, ident, anchor_k, cp, low, high = how
@@ -169,7 +178,9 @@ def build(species):
         h, s = KEY_VALUES[species.id]
         sources.append("codata")
     if species.is_melt and pieces[0].low > T0:
-        h, s = carried_down(pieces, transitions, how[1])
+        molten = melt_figures(how[1], pieces[0].low)
+    if molten:
+        h, s = carried_down(pieces, transitions, *molten)
     else:
         join(pieces, h, s, transitions)
     return {"h": h, "s": s, "pieces": pieces, "sources": list(dict.fromkeys(sources)),
@@ -200,15 +211,19 @@ def kopp(formula):
     return round(sum(count * KOPP.get(symbol, KOPP_OTHERS) for symbol, count in atoms.items()), 1)
 
 
-def carried_down(pieces, transitions, code):
-    """Anchors a melt at its melting point; gives its H and S at 298.15 K by constant Cp from there."""
-    rows, low = published.janaf(code), pieces[0].low
+def melt_figures(code, low):
+    """H against the elements at 298.15 K, and S, of a melt of the JANAF tables where it begins."""
+    rows = published.janaf(code)
     standard = next(row for row in rows if row[0] == T0)
     _, _, s, h, *_ = [row for row in rows if row[0] == low][-1]
-    join(pieces, standard[4] + h, s, transitions, low)
-    cp = pieces[0].cp(low)
+    return standard[4] + h, s
+
+
+def carried_down(pieces, transitions, h_low, s_low):
+    """Anchors a melt at its melting point; gives its H and S at 298.15 K by constant Cp from there."""
+    low, cp = pieces[0].low, pieces[0].cp(pieces[0].low)
     down_h, down_s = cp * (low - T0) / 1000, cp * log(low / T0)
-    h, s = round(pieces[0].h(low) - down_h, 3), round(pieces[0].s(low) - down_s, 3)
+    h, s = round(h_low - down_h, 3), round(s_low - down_s, 3)
     # The table's figures are the rounded ones, and the pieces are those that lead to them.
     join(pieces, h + down_h, s + down_s, transitions, low)
     return h, s

@@ -89,7 +89,7 @@ ACIDS = [
           apart="the CRC table's HF2^- belongs to its own fluoride, 2.7 kJ/mol above CODATA's"),
     at_25("CN^-.aq", "-1 HCN.aq 1 CN^-.aq 1 H^+.aq", -9.21, 43.6, 0.02, "izatt",
           apart="the CRC table's cyanide belongs to an older HCN, 5.8 kJ/mol above ATcT's"),
-    fit("ClO^-.aq", "-1 HClO.aq 1 ClO^-.aq 1 H^+.aq", (10.0686, -0.0253, -3000.0), 273.15, 308.15,
+    fit("ClO^-.aq", "-1 HOCl.aq 1 ClO^-.aq 1 H^+.aq", (10.0686, -0.0253, -3000.0), 273.15, 308.15,
         u=0.02, source="morris"),
     at_25("NO2^-.aq", "-1 HNO2.aq 1 NO2^-.aq 1 H^+.aq", -3.15, 8.0, 0.05, "nist46",
           apart="dissolved HNO2 hangs on its gas, whose enthalpy is known to 1.5 kJ/mol"),

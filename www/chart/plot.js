@@ -17,6 +17,7 @@ const LABEL_WIDTH = 84;
 /**
  * @typedef {object} PlotLine
  * @property {string} name
+ * @property {string} [head]           in a table, where that is another than the name
  * @property {(number | null)[]} y     one for each x; null where there is none
  * @property {boolean} [thin]
  * @property {boolean} [broken]        dashed where it lies outside the data
