@@ -115,15 +115,24 @@ impl Measured {
 /// The measured equilibrium that a species is tied by, if it is.
 #[must_use]
 pub fn measured(id: &str) -> Option<&'static Measured> {
-    all().iter().find(|one| one.tied == id)
+    let place = all().binary_search_by(|(tied, _)| (*tied).cmp(id)).ok()?;
+    read_once(&all()[place])
 }
 
 /// Every measured equilibrium, in the order of the table.
 pub fn all_measured() -> impl Iterator<Item = &'static Measured> {
-    all().iter()
+    all().iter().filter_map(read_once)
 }
 
-fn all() -> &'static [Measured] {
-    static ALL: OnceLock<Vec<Measured>> = OnceLock::new();
-    ALL.get_or_init(|| table::tied().filter_map(|id| Measured::read(table::measured(id))).collect())
+/// A tied species, and its equilibrium once it is read: one reads the records of all its species.
+type Tie = (&'static str, OnceLock<Option<Measured>>);
+
+fn read_once((tied, measured): &'static Tie) -> Option<&'static Measured> {
+    measured.get_or_init(|| Measured::read(table::measured(tied))).as_ref()
+}
+
+/// The ties, sorted by the species.
+fn all() -> &'static [Tie] {
+    static ALL: OnceLock<Vec<Tie>> = OnceLock::new();
+    ALL.get_or_init(|| table::tied().map(|tied| (tied, OnceLock::new())).collect())
 }

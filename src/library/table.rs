@@ -9,19 +9,24 @@ const HEAT: &str = include_str!("tables/heat.tsv");
 const MEASURED: &str = include_str!("tables/measured.tsv");
 const SOURCES: &str = include_str!("tables/sources.tsv");
 
+/// About the length of a short line: room for as many entries is made at once.
+const SHORTEST_LINE: usize = 80;
+
 /// A line of the species table, with its id and formula cut out and the record once it is read.
 pub(super) struct Entry {
     pub(super) id: &'static str,
     pub(super) formula: &'static str,
     pub(super) line: &'static str,
-    record: OnceLock<Option<Record>>,
+    // Boxed, so that an entry that nobody asks for stays small.
+    record: OnceLock<Option<Box<Record>>>,
     cells: OnceLock<Option<[&'static str; 5]>>,
 }
 
 impl Entry {
     /// The record, read from the tables at the first call.
     pub(super) fn record(&'static self) -> Option<&'static Record> {
-        self.record.get_or_init(|| Record::read(self.line, rows(HEAT, self.id))).as_ref()
+        let read = || Record::read(self.line, rows(HEAT, self.id)).map(Box::new);
+        self.record.get_or_init(read).as_deref()
     }
 
     /// The phase, the form, the names, the CAS number and the atoms in Hill's order, as they stand;
@@ -36,15 +41,14 @@ impl Entry {
 pub(super) fn entries() -> &'static [Entry] {
     static ENTRIES: OnceLock<Vec<Entry>> = OnceLock::new();
     ENTRIES.get_or_init(|| {
-        let lines = SPECIES.lines().skip(1);
-        lines
-            .filter_map(|line| {
-                let mut cells = line.split('\t');
-                let (id, formula) = (cells.next()?, cells.next()?);
-                let (record, cells) = (OnceLock::new(), OnceLock::new());
-                Some(Entry { id, formula, line, record, cells })
-            })
-            .collect()
+        let mut entries = Vec::with_capacity(SPECIES.len() / SHORTEST_LINE);
+        entries.extend(SPECIES.lines().skip(1).filter_map(|line| {
+            let (id, rest) = line.split_once('\t')?;
+            let (formula, _) = rest.split_once('\t')?;
+            let (record, cells) = (OnceLock::new(), OnceLock::new());
+            Some(Entry { id, formula, line, record, cells })
+        }));
+        entries
     })
 }
 
