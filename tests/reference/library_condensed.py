@@ -19,7 +19,7 @@ CONDENSED = [
     # The lime family takes ΔfH° and S° from one table, the CRC's, as its members share reactions.
     fitted("CaO", "s", "lime;quicklime;calcium oxide;burnt lime", "1305-78-8", "Ca-027",
            (200, 500, 2500), crc=True),
-    fitted("Ca(OH)2", "s", "slaked lime;hydrated lime;calcium hydroxide", "1305-62-0", "Ca-020",
+    fitted("Ca(OH)2", "s", "slaked lime;hydrated lime;calcium hydroxide;portlandite", "1305-62-0", "Ca-020",
            (200, 500, 1000), crc=True, floor=0.5),
     Species("CaCO3", "s", "calcite;limestone;calcium carbonate", "471-34-1", ("calcite",),
             form="calcite", floor=0.7),
@@ -189,7 +189,7 @@ CONDENSED = [
             form="ethylbenzene", floor=1.0),
     Species("C6H12", "l", "cyclohexane", "110-82-7", ("vapour", "C6H12.g.cyclohexane"),
             form="cyclohexane", floor=0.5),
-    Species("C2H4Cl2", "l", "1,2-dichloroethane;ethylene dichloride", "107-06-2",
+    Species("C2H4Cl2", "l", "1,2-dichloroethane;ethylene dichloride;EDC", "107-06-2",
             ("vapour", "C2H4Cl2.g.1,2-dichloroethane"), form="1,2-dichloroethane", floor=1.0,
             apart="the liquid is tied to ATcT's vapour, 3.7 kJ/mol below the CRC table"),
     Species("C6H5NH2", "l", "aniline", "62-53-3", ("vapour", "C6H5NH2.g"), floor=1.0),

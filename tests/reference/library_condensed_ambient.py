@@ -145,6 +145,9 @@ AMBIENT = [
             "5968-11-6", ("recalled", -1431.26, 168.11, ((288.15, 310, (145.6,)),), "nbs"), floor=CLASSES["salt"]),
     Species("NH2COONH4", "s", "ammonium carbamate",
             "1111-78-0", ("recalled", -645.05, 133.5, ((288.15, 310, (130.0,)),), "nbs"), floor=CLASSES["salt"]),
+    Species("FeTiO3", "s", "ilmenite;iron titanate",
+            "12168-52-4", ("recalled", -1232.0, 108.9, ((298.15, 1640, (116.61, 0.01824, -2.004e6)),), "robie", "kelley"),
+            floor=CLASSES["mineral"]),
     # Melts of metals that the JANAF tables do not have.
     Species("Sn", "l", "liquid tin;molten tin", "7440-31-5", ("melted", "Sn.s.white", 7.03, 28.5, 2500),
             floor=CLASSES["salt"]),
