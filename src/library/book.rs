@@ -13,7 +13,7 @@ use crate::reaction::parse_formula;
 /// ```
 /// use shiftgauge::library::Book;
 /// let nothing_of_my_own = Book::default();
-/// assert_eq!(nothing_of_my_own.find("SO2", None, None).len(), 2); // gas and dissolved
+/// assert_eq!(nothing_of_my_own.find("SO2", None, None).len(), 3); // gas, liquid and dissolved
 /// ```
 #[derive(Debug, Clone, Default)]
 pub struct Book {

@@ -195,4 +195,7 @@ TIED = [
     tied("HgCl4^2-", "tetrachloromercurate ion"),
     tied("PbCl^+", "lead chloride ion"),
     tied("CdCl^+", "cadmium chloride ion"),
+    tied("H3AsO4", "arsenic acid"),
+    tied("HAsO4^2-", "hydrogen arsenate ion"),
+    tied("H3AsO3", "arsenious acid;arsenous acid"),
 ]
