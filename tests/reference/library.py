@@ -26,6 +26,8 @@ REACTIONS = ROOT / "tests" / "published" / "janaf_reactions.tsv"
 GIBBS_FUNCTION_LIMIT = 0.25
 # log10 K of a measured equilibrium may leave that of the species' own records by this without a reason.
 MEASURED_LIMIT = 0.35
+# Of a ΔfG° in kJ/mol that is remembered beside ΔfH° and S°.
+RECALLED_LIMIT = 0.4
 HEADS = {
     "species": "id formula phase form names cas hill enthalpy_kj_per_mol entropy_j_per_mol_k "
     "u_gibbs_kj_per_mol u_class sources",
@@ -163,6 +165,10 @@ def problems_of(report):
             line += f"  {name} {dh:+.2f} {ds:+.2f}"
             if not species.apart and (abs(dh) > SECOND_LIMITS[0] or abs(ds) > SECOND_LIMITS[1]):
                 found.append(f"{species.id} differs from {name} by {dh:.3f} kJ/mol, {ds:.3f} J/mol/K")
+        if species.recalled_gibbs is not None:
+            gibbs = solution.formation_gibbs(species, made)
+            if abs(gibbs - species.recalled_gibbs) > RECALLED_LIMIT:
+                found.append(f"{species.id}: ΔfH° and S° give ΔfG° {gibbs:.2f}, not {species.recalled_gibbs}")
         for low, high, cp, h, s, swing in made["worst"]:
             line += f"\n    {low:g} to {high:g} K: Cp {cp:.2%}, H {h:.4f} kJ/mol, S {s:.4f} J/(mol K), between rows {swing:.2%}"
             if cp > 0.003 or h > 0.012 or s > 0.012 or swing > 0.02:

@@ -42,6 +42,9 @@ SOURCES = {
     "Recalled from memory; at 298.15 K within 1.2 % of Cp of the other source.",
     "carbonates": "Cp as the sum of those of calcite and magnesite by Kelley, 1960. Recalled from memory; at "
     "298.15 K within 0.1 % of the measured one.",
+    "vibrations": "Cp of the rigid molecule with harmonic vibrations, in powers of T within 0.2 %; fundamental "
+    "frequencies of Nakamoto, Infrared and Raman Spectra of Inorganic and Coordination Compounds, Wiley, 1986, and "
+    "of Shimanouchi, NSRDS-NBS 39, 1972, recalled from memory; within 2 % of the CRC table's Cp at 298.15 K.",
     "iapws_kw": "IAPWS R11-07, Release on the Ionization Constant of H2O, 2007 (Bandura and Lvov, Journal of "
     "Physical and Chemical Reference Data 35 (2006) 15): written here as A + B T + C/T + D log10 T + E/T² "
     "within 0.001 over 0 to 100 °C. Recalled from memory, and borne out by its pKw at 0, 25 and 100 °C.",

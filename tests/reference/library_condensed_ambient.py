@@ -15,8 +15,6 @@ AMBIENT = [
     Species("Ag2O", "s", "silver oxide", "20667-12-3", ("constant", 288.15, 400), floor=CLASSES["mineral"]),
     Species("Ag2S", "s", "silver sulfide;silver sulphide;acanthite",
             "21548-73-2", ("constant", 288.15, 400), floor=CLASSES["mineral"]),
-    Species("Cu2S", "s", "chalcocite;copper(I) sulfide;copper(I) sulphide",
-            "22205-45-4", ("constant", 288.15, 400), floor=CLASSES["mineral"]),
     Species("CuS", "s", "covellite;copper(II) sulfide;copper(II) sulphide",
             "1317-40-4", ("constant", 288.15, 400), floor=CLASSES["mineral"]),
     Species("CdO", "s", "cadmium oxide", "1306-19-0", ("constant", 288.15, 400), floor=CLASSES["salt"]),

@@ -7,6 +7,7 @@ import library_sources as published
 from library_condensed import CONDENSED
 from library_condensed_ambient import AMBIENT
 from library_condensed_elements import ELEMENTS
+from library_condensed_hydrates import HYDRATES
 from library_condensed_minerals import MINERALS
 from library_condensed_oxides import OXIDES
 from library_condensed_salts import SALTS
@@ -20,17 +21,22 @@ from library_gases_metals import METALS
 from library_gases_nonmetals import NONMETALS
 from library_liquids import LIQUIDS
 from library_organic_hydrocarbons import HYDROCARBONS
+from library_organic_hydrocarbons_more import HYDROCARBONS_MORE
 from library_organic_others import OTHERS
+from library_organic_others_more import OTHERS_MORE
 from library_organic_oxygenates import OXYGENATES
+from library_organic_oxygenates_more import OXYGENATES_MORE
 from library_pieces import (Piece, constant_piece, fit, fit_heat_capacity, join, limits_of,
                             written)
 from library_solution import atoms_and_charge, build_dissolved, formation_entropy, formed
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
+from library_vibrations import VIBRATING, vibrating_heat_capacity
 
-INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED
-ORGANIC_GASES = ORGANIC + HYDROCARBONS + OXYGENATES + OTHERS
-PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS + AMBIENT + LIQUIDS
+INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED + VIBRATING
+ORGANIC_GASES = (ORGANIC + HYDROCARBONS + HYDROCARBONS_MORE + OXYGENATES + OXYGENATES_MORE + OTHERS
+                 + OTHERS_MORE)
+PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS + AMBIENT + HYDRATES + LIQUIDS
 AQUEOUS = DISSOLVED + IONS + MOLECULES + BASES + TIED
 SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + AQUEOUS
 
@@ -83,6 +89,14 @@ def build(species):
         high = min(published.trc(cas)[1], 1500)
         pieces = trc_pieces(cas, T0, high)
         sources += [*from_tables, "trc"]
+    elif how[0] == "vibrations":
+        h, s = published.crc(cas, phase)
+        coefficients, apart = fit_heat_capacity(lambda t: vibrating_heat_capacity(cas, t), T0, 1500)
+        assert apart < 2e-3, f"the fit of {species.id} leaves its vibrations by {apart:.2%}"
+        known = published.crc_heat_capacity(cas, phase)
+        assert known is None or abs(vibrating_heat_capacity(cas, T0) / known - 1) < 0.02, species.id
+        pieces = [Piece(T0, 1500, coefficients, "vibrations")]
+        sources += ["crc", "vibrations"]
     elif how[0] == "perry":
         h, s = published.crc(cas, phase)
         (const, linear, inverse, square), _, high = published.perry(cas)
@@ -108,6 +122,7 @@ def build(species):
     elif how[0] == "recalled_cp":
         h, s = published.crc(cas, phase)
         pieces = recalled_pieces(how[1], how[2])
+        transitions = how[3] if len(how) > 3 else ()
         sources += ["crc", how[2]]
     elif how[0] == "formed":
         h, s = formed(how[1:4], built)

@@ -16,6 +16,7 @@ class Species:
     floor: float = 0.0  # kJ/mol; the class of u(ΔfG°) where no better is known
     apart: str = ""  # why a second source may differ by more than the limit
     outliers: tuple = ()  # second sources that stand alone and do not count in u
+    recalled_gibbs: float | None = None  # ΔfG° remembered with ΔfH° and S°, which it must fit
     blunt: tuple = ()  # where a lambda peak of Cp is passed over; H and S still hold
     crc: bool = False  # ΔfH° and S° from the CRC table, with JANAF's Cp
     low: float = 0.0  # a lower limit below the table's first row, for a short, smooth reach
