@@ -31,7 +31,10 @@ pub fn likely(mut records: Vec<Known>, at: Temperature) -> Vec<Known> {
         });
     }
     if records.iter().any(|record| record.phase == Phase::Solid) {
-        records.retain(|record| record.u_kind != UncertaintyKind::Measured);
+        let is_pair = |record: &Known| {
+            record.phase == Phase::Aqueous && record.u_kind == UncertaintyKind::Measured
+        };
+        records.retain(|record| !is_pair(record));
     }
     let condensed = |record: &&Known| matches!(record.phase, Phase::Liquid | Phase::Solid);
     let lowest = records.iter().filter(condensed).map(|record| record.gibbs_over_rt(at));

@@ -8,9 +8,10 @@ import { ENGINE_BYTES } from './engine.js';
  * A little above what the engine takes now; it may only be lowered, or raised with a reason. Raised from
  * 235,000 when tolerances, feeds, liquids, solutions, nudges, sweeps and targets came in (about 75 kB of
  * code and sentences) and the library grew from 58 to 254 species (19 kB); from 335,000 when it grew to
- * more than 1,400 species with measured equilibria (146 kB), and with books, sheets and the search (26 kB, of it 1 kB for near misses).
+ * some 1,700 species with measured equilibria (166 kB), and with books, sheets and the search (26 kB, of it
+ * 1 kB for near misses).
  */
-const CEILING_BYTES = 518_000;
+const CEILING_BYTES = 535_000;
 /** What the whole library may take of it. */
 const TABLES_BYTES = 200_000;
 

@@ -69,7 +69,7 @@ def u_of(ident):
 
 def uncertainty(species, made):
     """u of ΔfG°298 in kJ/mol and how it was got."""
-    if species.phase == "aq":
+    if species.phase == "aq" or species.how[0] == "measured":
         return solution.uncertainty(species, made, u_of)
     if species.element:
         return 0.0, "element"

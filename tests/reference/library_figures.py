@@ -12,6 +12,7 @@ from library_condensed_minerals import MINERALS
 from library_condensed_oxides import OXIDES
 from library_condensed_salts import SALTS
 from library_dissolved import DISSOLVED
+from library_dissolved_complexes import COMPLEXES, SALTS_BY_SOLUBILITY
 from library_dissolved_more import BASES, IONS, MOLECULES, TIED
 from library_gases import GASES
 from library_gases_carbon import ORGANIC
@@ -28,7 +29,7 @@ from library_organic_oxygenates import OXYGENATES
 from library_organic_oxygenates_more import OXYGENATES_MORE
 from library_pieces import (Piece, constant_piece, fit, fit_heat_capacity, join, limits_of,
                             written)
-from library_solution import atoms_and_charge, build_dissolved, formation_entropy, formed
+from library_solution import build_dissolved, formation_entropy, formed, kopp
 from library_sources import R_EXACT, T0
 from library_species import ATCT_LIMIT, KEY_VALUES
 from library_vibrations import VIBRATING, vibrating_heat_capacity
@@ -37,7 +38,7 @@ INORGANIC_GASES = GASES + NONMETALS + HALIDES + METALS + TABULATED + VIBRATING
 ORGANIC_GASES = (ORGANIC + HYDROCARBONS + HYDROCARBONS_MORE + OXYGENATES + OXYGENATES_MORE + OTHERS
                  + OTHERS_MORE)
 PURE = CONDENSED + ELEMENTS + OXIDES + SALTS + MINERALS + AMBIENT + HYDRATES + LIQUIDS
-AQUEOUS = DISSOLVED + IONS + MOLECULES + BASES + TIED
+AQUEOUS = DISSOLVED + IONS + MOLECULES + BASES + TIED + COMPLEXES + SALTS_BY_SOLUBILITY
 SPECIES = INORGANIC_GASES + ORGANIC_GASES + PURE + AQUEOUS
 
 
@@ -62,7 +63,7 @@ def recalled_pieces(pieces, source):
 def build(species):
     """The figures of one species: ΔfH°298, S°298, pieces, source ids, worst errors of a fit."""
     how, cas, phase = species.how, species.cas, species.phase
-    if phase == "aq":
+    if phase == "aq" or how[0] == "measured":
         return build_dissolved(species, built)
     sources, worst, transitions, tied, molten = [], [], (), False, None
     if how[0] == "tm4513":
@@ -213,17 +214,6 @@ def organic_figures(cas, entropy_too=True):
     if figures[0] is None and better:
         figures[0], used[0] = better[0], "atct"
     return figures[0], figures[-1], list(dict.fromkeys(used))
-
-
-# J/(mol K) for each atom, by Kopp's rule.
-KOPP = {"C": 7.5, "H": 9.6, "B": 11.3, "Si": 15.9, "O": 16.7, "F": 20.9, "P": 22.6, "S": 22.6}
-KOPP_OTHERS = 25.9
-
-
-def kopp(formula):
-    """Cp of a solid near room temperature from its elements."""
-    atoms, _ = atoms_and_charge(formula)
-    return round(sum(count * KOPP.get(symbol, KOPP_OTHERS) for symbol, count in atoms.items()), 1)
 
 
 def melt_figures(code, low):

@@ -60,7 +60,19 @@ def formation_gibbs(species, made):
     return made["h"] - T0 * formation_entropy(species.formula, made["s"])
 
 
+# J/(mol K) for each atom, by Kopp's rule.
+KOPP = {"C": 7.5, "H": 9.6, "B": 11.3, "Si": 15.9, "O": 16.7, "F": 20.9, "P": 22.6, "S": 22.6}
+KOPP_OTHERS = 25.9
+
+
+def kopp(formula):
+    """Cp of a solid near room temperature from its elements."""
+    atoms, _ = atoms_and_charge(formula)
+    return round(sum(count * KOPP.get(symbol, KOPP_OTHERS) for symbol, count in atoms.items()), 1)
+
+
 def build_dissolved(species, built):
+    """The figures of a dissolved species, or of a solid that is known by its solubility alone."""
     how, cp, source = species.how, None, None
     published_row = published.aqueous_ion(species.cas)
     if published_row and published_row[3] is not None:
@@ -85,9 +97,14 @@ def build_dissolved(species, built):
         share = -1 / parts.pop(species.id)
         parts = {ident: nu * share for ident, nu in parts.items()}
         h, s = formed((parts, -share * row.log10_k(T0), -share * row.enthalpy(T0)), built)
-        cp = sum(nu * heat_capacity(built(ident)) for ident, nu in parts.items())
+        if species.phase == "s":
+            cp, source = published.crc_heat_capacity(species.cas, "s"), "crc"
+            if cp is None:
+                cp, source = kopp(species.formula), "kopp"
+        else:
+            cp = sum(nu * heat_capacity(built(ident)) for ident, nu in parts.items())
         low, high = row.low, row.high
-        sources = [row.source]
+        sources = [row.source, *([source] if source else [])]
     else:
         if how[0] == "henry":
             constant, slope = published.henry(species.cas)
