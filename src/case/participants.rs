@@ -139,7 +139,10 @@ impl Around<'_> {
         }
         match self.phases_known(term)[..] {
             // A species that nobody knows. Where K comes from the library, its absence there is told.
-            [] if self.from_library => Ok((Phase::Gas, true)),
+            [] if self.from_library => {
+                let phase = if is_dissolved(term) { Phase::Aqueous } else { Phase::Gas };
+                Ok((phase, true))
+            }
             [] => Err(Problem::new(CaseCode::PhaseNeeded)
                 .with("species", term.species.formula.text())
                 .with("example", term.species.in_phase(Phase::Gas).text())),
